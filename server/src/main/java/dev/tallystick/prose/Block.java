@@ -1,0 +1,44 @@
+package dev.tallystick.prose;
+
+import dev.tallystick.text.Span;
+import java.util.List;
+
+/**
+ * A unit of layout that no sentence crosses.
+ *
+ * @param kind what it is
+ * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0
+ *     otherwise
+ * @param extent the whole block in the file, its marks included
+ * @param pieces its prose in order: stretches of the file that do not touch, none empty; none at
+ *     all if the block is verbatim
+ */
+public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
+  /** What a block is. */
+  public enum Kind {
+    /** Running text. */
+    PARAGRAPH,
+    /** A title of a section. */
+    HEADING,
+    /** A paragraph in a list. */
+    ITEM,
+    /** A cell of a table. */
+    CELL,
+    /** A paragraph in a quotation. */
+    QUOTATION,
+    /** Code and the like, copied as it stands: a landmark without prose. */
+    VERBATIM
+  }
+
+  /** Keeps the pieces unchangeable. */
+  public Block {
+    pieces = List.copyOf(pieces);
+  }
+
+  /** The prose as one string: the pieces of {@code file} put together. */
+  public String prose(CharSequence file) {
+    StringBuilder prose = new StringBuilder();
+    pieces.forEach(piece -> prose.append(file, piece.start(), piece.end()));
+    return prose.toString();
+  }
+}

@@ -1,0 +1,162 @@
+package dev.tallystick.prose;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
+import java.util.List;
+import java.util.Random;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
+
+/** What holds for every text, however broken. */
+class ExtractionLawTest {
+  private static final int TEXTS = 2_000;
+  private static final List<String> FRAGMENTS =
+      List.of(
+          "*",
+          "**",
+          "_",
+          "`",
+          "``",
+          "~~~\n",
+          "```\n",
+          "[",
+          "]",
+          "![",
+          "](",
+          "](x \"t",
+          ")",
+          "<",
+          ">",
+          "<b\n",
+          "<div>\n",
+          "<!--",
+          "-->",
+          "<?",
+          "&amp;",
+          "&#0;",
+          "&",
+          "\\",
+          "\\|",
+          "\\\n",
+          "|",
+          "|-|-|\n",
+          "| a | b |\n|---|---|\n",
+          "a|b\n-|-\n",
+          ">\t",
+          "> ",
+          ">",
+          "- ",
+          "-\t",
+          "1. ",
+          "2) ",
+          "# ",
+          "#",
+          "===\n",
+          "---\n",
+          "+++\n",
+          "***\n",
+          "[^1]: ",
+          "[^1]",
+          "[a]: b\n",
+          "[ ] ",
+          "- [x] ",
+          "\n",
+          "\n\n",
+          "\r\n",
+          "\r",
+          "  \n",
+          "\t",
+          "    ",
+          " ",
+          "\u00A0",
+          "\u3000",
+          "\0",
+          "\uFEFF",
+          "\u2028",
+          "\u0085",
+          "😀",
+          "\uD83D",
+          "\uDE00",
+          "漢字。",
+          "Word",
+          "a line of words that is rather long",
+          "END. ",
+          "...",
+          "key: value\n",
+          "• ");
+
+  @ParameterizedTest
+  @EnumSource
+  void anyTextComesApartInOrder(Format format) {
+    Random random = new Random(20261);
+    for (int i = 0; i < TEXTS; i++) {
+      String source = randomText(random);
+      List<Block> blocks = format.blocks(new Text(source));
+      assertLaw(source, blocks);
+      assertEquals(blocks, format.blocks(new Text(source)));
+    }
+  }
+
+  @Test
+  void wordsOutsideOfMarksAreNeverLost() {
+    Random random = new Random(20262);
+    List<String> safe =
+        List.of("*", "**", "_", "\n", "\n\n", "- ", "> ", ">\t", "| ", "\\|", " ", "[", "]");
+    for (int i = 0; i < TEXTS; i++) {
+      // A row may be as long as the head: what goes beyond is dropped by definition.
+      StringBuilder source = new StringBuilder("| w ".repeat(31) + "\n" + "|---".repeat(31) + "\n");
+      for (int k = 0; k < 30; k++) {
+        source.append(safe.get(random.nextInt(safe.size()))).append("w");
+      }
+      assertEquals(letters(source.toString()), letters(prose(source.toString())), source::toString);
+    }
+  }
+
+  private static String letters(String text) {
+    return text.replaceAll("[^w]", "");
+  }
+
+  private static String prose(String source) {
+    StringBuilder prose = new StringBuilder();
+    Format.MARKDOWN.blocks(new Text(source)).forEach(b -> prose.append(b.prose(source)));
+    return prose.toString();
+  }
+
+  private static String randomText(Random random) {
+    StringBuilder text = new StringBuilder();
+    int count = 1 + random.nextInt(40);
+    for (int i = 0; i < count; i++) {
+      text.append(FRAGMENTS.get(random.nextInt(FRAGMENTS.size())));
+    }
+    return text.toString();
+  }
+
+  private static void assertLaw(String source, List<Block> blocks) {
+    Text text = new Text(source);
+    int end = source.startsWith("\uFEFF") ? 1 : 0;
+    for (Block block : blocks) {
+      assertTrue(block.extent().start() >= end, source);
+      assertTrue(block.extent().end() <= source.length(), source);
+      assertEquals(block.kind() == Block.Kind.VERBATIM, block.pieces().isEmpty(), source);
+      assertPieces(text, block);
+      end = block.extent().end();
+    }
+  }
+
+  private static void assertPieces(Text text, Block block) {
+    int end = -1;
+    for (Span piece : block.pieces()) {
+      assertFalse(piece.isEmpty(), text::string);
+      assertTrue(piece.start() > end, text::string);
+      assertEquals(piece.start(), text.outsidePair(piece.start()), text::string);
+      assertEquals(piece.end(), text.outsidePair(piece.end()), text::string);
+      assertEquals(block.extent(), block.extent().cover(piece), text::string);
+      end = piece.end();
+    }
+  }
+}

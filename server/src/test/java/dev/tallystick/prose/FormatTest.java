@@ -1,0 +1,34 @@
+package dev.tallystick.prose;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+
+import java.util.Optional;
+import org.junit.jupiter.api.Test;
+
+class FormatTest {
+  @Test
+  void theExtensionTellsTheFormat() {
+    assertEquals(Optional.of(Format.PLAIN), Format.ofName("en/ferry.TXT"));
+    assertEquals(Optional.of(Format.MARKDOWN), Format.ofName("de.ferry.md"));
+    assertEquals(Optional.of(Format.MARKDOWN), Format.ofName("A.MARKDOWN"));
+    assertEquals(Optional.empty(), Format.ofName("docs.md/ferry"));
+    assertEquals(Optional.empty(), Format.ofName("md"));
+    assertEquals(Optional.empty(), Format.ofName("ferry.html"));
+  }
+
+  @Test
+  void everyExtensionIsRecognized() {
+    for (Format format : Format.values()) {
+      for (String extension : format.extensions()) {
+        assertEquals(Optional.of(format), Format.ofName("ferry." + extension));
+      }
+    }
+  }
+
+  @Test
+  void theLanguageIdOfAnEditorTellsTheFormat() {
+    assertEquals(Optional.of(Format.PLAIN), Format.ofLanguageId("plaintext"));
+    assertEquals(Optional.of(Format.MARKDOWN), Format.ofLanguageId("markdown"));
+    assertEquals(Optional.empty(), Format.ofLanguageId("java"));
+  }
+}

@@ -1,0 +1,68 @@
+package dev.tallystick.prose;
+
+import static org.junit.jupiter.api.Assertions.assertNotNull;
+import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
+
+import dev.tallystick.text.Text;
+import java.time.Duration;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** A hundred thousand repetitions end; the limit only guards against hanging. */
+class LinearTimeTest {
+  private static final int TIMES = 100_000;
+  private static final Duration LIMIT = Duration.ofSeconds(20);
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "[",
+        "![",
+        "[a](",
+        "[^",
+        "[^a]: b\n",
+        "*a_ ",
+        "***a",
+        "`",
+        "> ",
+        "- ",
+        "- a\n",
+        "> > a\n\n",
+        "<",
+        "<!--",
+        "<!-- a -->\n",
+        "\\",
+        "\\|",
+        "|a",
+        "| a\n",
+        "a\\\n",
+        "a  \n",
+        "&",
+        "[[]]()"
+      })
+  void markdownEnds(String fragment) {
+    assertEnds(Format.MARKDOWN, fragment);
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {"a", "a\n", "- ", "- a\n", "1. a\n", " ", "\n", "...", "漢", "A B\n===\n", "\t"})
+  void plainTextEnds(String fragment) {
+    assertEnds(Format.PLAIN, fragment);
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"- ", "| a ", "\\|"})
+  void rowsOfATableEnd(String fragment) {
+    assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
+  }
+
+  private static void assertEnds(Format format, String fragment) {
+    assertEnds(format, fragment, TIMES);
+  }
+
+  private static void assertEnds(Format format, String fragment, int times) {
+    Text text = new Text(fragment.repeat(times));
+    assertNotNull(assertTimeoutPreemptively(LIMIT, () -> format.blocks(text)));
+  }
+}
