@@ -1,0 +1,20 @@
+package dev.tallystick.segment;
+
+import dev.tallystick.prose.Block;
+import dev.tallystick.text.Span;
+
+/**
+ * One sentence, or one verbatim block.
+ *
+ * @param span where it stands in the file, without the white space around it; marks inside (a star,
+ *     a link's address) lie in the span but not in the prose
+ * @param prose what is to be translated, each line break a blank; empty for a verbatim block
+ * @param block the block it stands in
+ * @param opens whether it is the first of its block
+ */
+public record Segment(Span span, String prose, Block block, boolean opens) {
+  /** Whether it is a verbatim block and no sentence. */
+  public boolean verbatim() {
+    return block.kind() == Block.Kind.VERBATIM;
+  }
+}
