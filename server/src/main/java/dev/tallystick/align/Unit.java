@@ -1,0 +1,32 @@
+package dev.tallystick.align;
+
+/**
+ * What the aligner knows of one sentence, or of one verbatim block.
+ *
+ * @param length characters (code points) of the sentence
+ * @param letters how many of them are letters or digits
+ * @param opens whether it is the first of its block
+ * @param kind a small number, equal for blocks that look alike (a heading of level 2, a cell); from
+ *     0 to {@value #KINDS} - 1
+ * @param close how it ends: a number from 0 to {@value #CLOSES} - 1
+ * @param words the keys of its words in order; equal words have equal keys
+ * @param verbatim whether it is no sentence but a block copied as it stands, such as code
+ */
+public record Unit(
+    int length, int letters, boolean opens, int kind, int close, Word[] words, boolean verbatim) {
+
+  /** How many kinds of block there are. */
+  public static final int KINDS = 12;
+
+  /** How many ways there are to close a sentence. */
+  public static final int CLOSES = 5;
+
+  /**
+   * One word.
+   *
+   * @param key equal for equal words, and for them only (up to a collision in 64 bits)
+   * @param trust how likely the word is, from 0 to 1, to stand unchanged in a translation, given
+   *     that it stands somewhere in the other text
+   */
+  public record Word(long key, double trust) {}
+}
