@@ -1,0 +1,23 @@
+package dev.tallystick.check;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+
+/** All checks. A pure function of the subject. */
+public final class Checks {
+  private Checks() {}
+
+  /** The findings of a pair: those on the source first, each side in the order of its text. */
+  public static List<Finding> findings(Subject subject) {
+    Pending pending = Pending.of(subject);
+    List<Finding> findings = new ArrayList<>();
+    findings.addAll(Omissions.find(subject, pending));
+    findings.addAll(Additions.find(subject));
+    findings.addAll(Untranslated.find(subject, pending));
+    findings.addAll(Lengths.find(subject));
+    findings.addAll(Orders.find(subject));
+    Collections.sort(findings);
+    return List.copyOf(findings);
+  }
+}

@@ -1,0 +1,36 @@
+package dev.tallystick.check;
+
+import dev.tallystick.text.Span;
+
+/**
+ * Something to tell the translator. An editor may show it on both sides; it is one finding.
+ *
+ * @param code its kind
+ * @param side the side that {@code span} lies on: the source for an omission, else the target
+ * @param span the sentence or run of sentences, in UTF-16 offsets
+ * @param counterpart the place on the other side; empty where nothing stands there
+ * @param confidence posterior probability, from 0 to 1
+ * @param message what is wrong, for the translator
+ * @param counterMessage the same said at the counterpart; empty if nothing is to be shown there
+ */
+public record Finding(
+    Code code,
+    OnSide side,
+    Span span,
+    Span counterpart,
+    double confidence,
+    String message,
+    String counterMessage)
+    implements Comparable<Finding> {
+  /** How loudly it is said. */
+  public Severity severity() {
+    return code.severity();
+  }
+
+  @Override
+  public int compareTo(Finding other) {
+    int bySide = side.compareTo(other.side);
+    int bySpan = bySide != 0 ? bySide : span.compareTo(other.span);
+    return bySpan != 0 ? bySpan : code.compareTo(other.code);
+  }
+}

@@ -1,0 +1,37 @@
+package dev.tallystick.check;
+
+import dev.tallystick.align.Move;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+
+/** Sentences that stand at another place than in the source; a run of them is one finding. */
+final class Orders {
+  private Orders() {}
+
+  static List<Finding> find(Subject subject) {
+    Map<Integer, Integer> sourceOf = new HashMap<>();
+    for (Move move : subject.alignment().moves()) {
+      sourceOf.put(move.target(), move.source());
+    }
+    double[] extra = subject.alignment().targetNull();
+    Wording wording = new Wording(subject.targetLanguage());
+    List<Finding> findings = new ArrayList<>();
+    for (Run run : Run.of(subject.target(), sourceOf::containsKey)) {
+      int first = sourceOf.get(run.from());
+      int last = sourceOf.get(run.to() - 1);
+      Run source = new Run(Math.min(first, last), Math.max(first, last) + 1);
+      findings.add(
+          new Finding(
+              Code.ORDER,
+              OnSide.TARGET,
+              run.span(subject.target()),
+              source.span(subject.source()),
+              Confidence.of(extra, run),
+              wording.order(run.sentences(subject.target())),
+              ""));
+    }
+    return findings;
+  }
+}

@@ -1,0 +1,85 @@
+package dev.tallystick.check;
+
+import dev.tallystick.align.Match;
+import dev.tallystick.prose.Block;
+import dev.tallystick.segment.Segment;
+import java.util.Arrays;
+import java.util.List;
+
+/**
+ * Which source sentences nobody has got to yet. In a draft these are the ones behind the last
+ * translated sentence, and runs that fill a section or are long, be they missing or untouched
+ * copies: translators do not work from top to bottom. In a finished translation nothing is pending.
+ */
+public final class Pending {
+  /** A longer missing run is no slip. */
+  private static final int LONGEST_SLIP = 8;
+
+  private final boolean[] source;
+
+  private Pending(boolean[] source) {
+    this.source = source;
+  }
+
+  /** The pending sentences of a pair. */
+  static Pending of(Subject subject) {
+    boolean[] pending = new boolean[subject.source().size()];
+    if (subject.draft()) {
+      boolean[] open = open(subject);
+      for (Run run : Run.of(subject.source(), i -> open[i])) {
+        if (waits(subject.source(), run)) {
+          Arrays.fill(pending, run.from(), run.to(), true);
+        }
+      }
+    }
+    return new Pending(pending);
+  }
+
+  /** Whether a source sentence waits for its translation. */
+  boolean source(int index) {
+    return source[index];
+  }
+
+  /** Source sentences that are missing or copied. */
+  private static boolean[] open(Subject subject) {
+    boolean[] open = new boolean[subject.source().size()];
+    Arrays.fill(open, true);
+    int[] copyOf = Untranslated.copies(subject);
+    for (Match match : subject.alignment().matches()) {
+      if (match.twoSided()) {
+        Arrays.fill(open, match.sourceFrom(), match.sourceTo(), false);
+        for (int t = match.targetFrom(); t < match.targetTo(); t++) {
+          if (copyOf[t] >= 0) {
+            open[copyOf[t]] = true;
+          }
+        }
+      }
+    }
+    return open;
+  }
+
+  private static boolean waits(List<Segment> source, Run run) {
+    return run.sentences(source) > LONGEST_SLIP
+        || isLast(source, run)
+        || startsSection(source, run) && endsSection(source, run);
+  }
+
+  private static boolean isLast(List<Segment> source, Run run) {
+    return source.subList(run.to(), source.size()).stream().allMatch(Segment::verbatim);
+  }
+
+  /** Whether a heading opens the run or stands right before it. */
+  private static boolean startsSection(List<Segment> source, Run run) {
+    return run.from() == 0 || isHeading(source, run.from()) || isHeading(source, run.from() - 1);
+  }
+
+  private static boolean endsSection(List<Segment> source, Run run) {
+    return isHeading(source, run.to())
+        && source.subList(run.from(), run.to()).stream()
+            .anyMatch(segment -> segment.block().kind() != Block.Kind.HEADING);
+  }
+
+  private static boolean isHeading(List<Segment> source, int index) {
+    return source.get(index).block().kind() == Block.Kind.HEADING;
+  }
+}
