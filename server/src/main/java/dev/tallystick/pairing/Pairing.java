@@ -1,0 +1,90 @@
+package dev.tallystick.pairing;
+
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.Comparator;
+import java.util.List;
+import java.util.TreeSet;
+
+/**
+ * Finds the files that are translations of one another by the language tags in their paths.
+ *
+ * <p>A tag is the last part of a file's name before the extension ({@code guide.de.md}, {@code
+ * guide_pt_BR.txt}) or the name of a folder at any depth ({@code docs/de/guide.md}). It counts only
+ * if CLDR knows the language and another version of the file exists: the same path without the tag,
+ * or with the tag of another language.
+ *
+ * <p>A file that could belong to several groups joins one only, and the choice does not depend on
+ * the order of the paths: the group with more languages; then the one with English or a language of
+ * the settings; then the one with more files; then the one whose tag stands farther to the left;
+ * then the one whose stem sorts first. So a file is the target of one pair at most, and never the
+ * source of one and the target of another.
+ *
+ * <p>Where a group has several files in the source's language, each translation goes with the one
+ * that carries its tag at the same place, else with the first by path. A translation without a tag
+ * beside a tagged source is paired only if the settings name its language or it is the only one.
+ */
+public final class Pairing {
+  private final Rules rules;
+  private final List<Pair> pairs = new ArrayList<>();
+  private final List<Alone> alone = new ArrayList<>();
+  private final List<Ambiguity> ambiguities = new ArrayList<>();
+
+  private Pairing(Rules rules) {
+    this.rules = rules;
+  }
+
+  /**
+   * Sorts the files into pairs, lone files and open questions.
+   *
+   * @param paths relative paths with {@code /}, in any order; no file is opened
+   * @param rules what the settings say about languages
+   */
+  public static Pairs pairs(Collection<String> paths, Rules rules) {
+    Pairing pairing = new Pairing(rules);
+    pairing.addAll(new TreeSet<>(paths));
+    return pairing.sorted();
+  }
+
+  private void addAll(Collection<String> paths) {
+    Groups groups = new Groups(paths, rules);
+    Sides sides = new Sides(groups.formed(), rules);
+    for (Group group : groups.formed()) {
+      sides
+          .source(group)
+          .ifPresentOrElse(
+              source -> addGroup(group, source), () -> addAmbiguity(group, sides.choices(group)));
+    }
+    for (String path : paths) {
+      if (!groups.isTaken(path)) {
+        alone.add(new Alone(path, whyAlone(path, groups)));
+      }
+    }
+  }
+
+  private Pairs sorted() {
+    pairs.sort(Comparator.comparing(Pair::source).thenComparing(Pair::target));
+    alone.sort(Comparator.comparing(Alone::file));
+    ambiguities.sort(Comparator.comparing(ambiguity -> ambiguity.files().get(0)));
+    return new Pairs(pairs, alone, ambiguities);
+  }
+
+  private void addAmbiguity(Group group, Collection<Language> choices) {
+    List<String> files = group.members().stream().map(Tagged::path).toList();
+    ambiguities.add(new Ambiguity(files, List.copyOf(choices)));
+  }
+
+  private void addGroup(Group group, Language source) {
+    GroupPairs found = new GroupPairs(group, source, rules);
+    pairs.addAll(found.pairs());
+    alone.addAll(found.alone());
+  }
+
+  private static String whyAlone(String path, Groups groups) {
+    if (groups.lostSiblings(path)) {
+      return Reasons.siblingsTaken();
+    }
+    List<Tagged> readings = groups.readings(path);
+    return readings.isEmpty() ? Reasons.noTag(path) : Reasons.noSibling(readings.get(0));
+  }
+}
