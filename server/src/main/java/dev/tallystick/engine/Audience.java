@@ -1,0 +1,13 @@
+package dev.tallystick.engine;
+
+/** Whom the loop tells what it knows. Called by the loop's thread, and must return at once. */
+public interface Audience {
+  /** The findings of a file are now these. */
+  void publish(Publication publication);
+
+  /** Something the user should know; shown once, in full sentences. */
+  void say(String message);
+
+  /** Something for whoever looks for a fault. It never contains text of a file. */
+  void log(String line);
+}

@@ -1,0 +1,126 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.prose.Format;
+import java.io.IOException;
+import java.nio.file.FileVisitResult;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.SimpleFileVisitor;
+import java.nio.file.attribute.BasicFileAttributes;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
+import java.util.Set;
+
+/** The files of this machine, as far as the engine reads them. It never writes any. */
+public interface Disk {
+  /** This machine's own. */
+  Disk REAL = new RealDisk();
+
+  /**
+   * The bytes of a file.
+   *
+   * @throws Unreadable with a message for the translator if there is no such file, or no reading it
+   */
+  byte[] read(Path file) throws Unreadable;
+
+  /**
+   * The files in a folder, however deep, whose names have the extension of a format; hidden files
+   * and folders are passed over, and links that lead out of the folder. Sorted.
+   *
+   * @throws Unreadable if the folder cannot be listed
+   */
+  List<Path> files(Path folder) throws Unreadable;
+
+  /**
+   * The same, of the upper part of a folder only.
+   *
+   * @throws Unreadable if the folder cannot be listed
+   */
+  default List<Path> files(Folder folder) throws Unreadable {
+    return files(folder.path()).stream().filter(folder::holds).toList();
+  }
+
+  /** The disk of this machine. */
+  final class RealDisk implements Disk {
+    private RealDisk() {}
+
+    @Override
+    public byte[] read(Path file) throws Unreadable {
+      if (!Files.exists(file)) {
+        throw new Unreadable(file + ": there is no such file. Check the name and the folder.");
+      }
+      if (!Files.isRegularFile(file)) {
+        throw new Unreadable(file + ": this is a folder, not a file. Name a file in it.");
+      }
+      try {
+        return Files.readAllBytes(file);
+      } catch (IOException | OutOfMemoryError e) {
+        throw new Unreadable(
+            file + ": cannot be read (" + e.getMessage() + "). Check who may read it.");
+      }
+    }
+
+    @Override
+    public List<Path> files(Path folder) throws Unreadable {
+      return files(new Folder(folder, Folder.DEEP));
+    }
+
+    @Override
+    public List<Path> files(Folder folder) throws Unreadable {
+      List<Path> found = new ArrayList<>();
+      Path path = folder.path();
+      try {
+        Collector collector = new Collector(path, path.toRealPath(), found);
+        Files.walkFileTree(path, Set.of(), folder.depth(), collector);
+      } catch (IOException e) {
+        throw new Unreadable(path + ": cannot be listed (" + e.getMessage() + ").");
+      }
+      Collections.sort(found);
+      return found;
+    }
+  }
+
+  /** Collects files of known formats. */
+  final class Collector extends SimpleFileVisitor<Path> {
+    private final Path folder;
+    private final Path root;
+    private final List<Path> found;
+
+    private Collector(Path folder, Path root, List<Path> found) {
+      this.folder = folder;
+      this.root = root;
+      this.found = found;
+    }
+
+    @Override
+    public FileVisitResult preVisitDirectory(Path visited, BasicFileAttributes attributes) {
+      boolean hidden = !visited.equals(folder) && isHidden(visited);
+      return hidden ? FileVisitResult.SKIP_SUBTREE : FileVisitResult.CONTINUE;
+    }
+
+    @Override
+    public FileVisitResult visitFile(Path file, BasicFileAttributes attributes) throws IOException {
+      boolean ours = !isHidden(file) && Format.ofName(file.getFileName().toString()).isPresent();
+      if (ours && (attributes.isSymbolicLink() ? staysInside(file) : attributes.isRegularFile())) {
+        found.add(file);
+      }
+      return FileVisitResult.CONTINUE;
+    }
+
+    @Override
+    public FileVisitResult visitFileFailed(Path file, IOException e) {
+      return FileVisitResult.CONTINUE;
+    }
+
+    private boolean staysInside(Path link) throws IOException {
+      return Files.isRegularFile(link) && link.toRealPath().startsWith(root);
+    }
+
+    private static boolean isHidden(Path path) {
+      Path name = path.getFileName();
+      return name != null
+          && (name.toString().startsWith(".") || name.toString().equals("node_modules"));
+    }
+  }
+}

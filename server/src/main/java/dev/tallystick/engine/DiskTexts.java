@@ -1,0 +1,108 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.run.Alarm;
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.Collection;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+import java.util.function.Consumer;
+
+/**
+ * The texts of files that the editor does not show, as last read. A file that is suddenly empty,
+ * less than half as long, or not to be read is taken to be half written by another program: its
+ * last text counts until the new state has been stable for one rest.
+ *
+ * <p>Files are read on the loop's thread: one file takes less time than it would take to keep
+ * straight what happens while a worker reads it.
+ */
+final class DiskTexts {
+  private final Map<Path, Optional<Text>> known = new TreeMap<>();
+  private final Map<Path, Half> halves = new TreeMap<>();
+  private final Disk disk;
+  private final Alarm alarm;
+  private final Consumer<String> log;
+
+  /** A state that may be half of something. */
+  private record Half(Optional<Text> text, long since) {}
+
+  DiskTexts(Disk disk, Alarm alarm, Consumer<String> log) {
+    this.disk = disk;
+    this.alarm = alarm;
+    this.log = log;
+  }
+
+  /** The text of a file; empty if it cannot be read. */
+  Optional<Text> text(Path file) {
+    Optional<Text> text = known.get(file);
+    if (text == null) {
+      text = read(file);
+      known.put(file, text);
+    }
+    return text;
+  }
+
+  /** Nobody needs these files any more. */
+  void forget(Collection<Path> files) {
+    known.keySet().removeAll(files);
+    halves.keySet().removeAll(files);
+  }
+
+  /** All files whose text is known. */
+  List<Path> files() {
+    return List.copyOf(known.keySet());
+  }
+
+  /** A file has been written, perhaps. */
+  void changed(Path file) {
+    if (!known.containsKey(file)) {
+      return;
+    }
+    Optional<Text> now = read(file);
+    if (!looksHalf(known.get(file), now)) {
+      halves.remove(file);
+      take(file, now);
+    } else if (!halves.containsKey(file) || !halves.get(file).text().equals(now)) {
+      halves.put(file, new Half(now, alarm.millis()));
+    }
+  }
+
+  /** Time has passed: takes what has been stable for a rest, in milliseconds. */
+  void settle(long rest) {
+    for (Map.Entry<Path, Half> entry : List.copyOf(halves.entrySet())) {
+      Path file = entry.getKey();
+      changed(file);
+      Half half = halves.get(file);
+      if (half != null && alarm.millis() - half.since() >= rest) {
+        halves.remove(file);
+        take(file, half.text());
+      }
+    }
+  }
+
+  /** Whether a file may be half written. */
+  boolean unsettled() {
+    return !halves.isEmpty();
+  }
+
+  private void take(Path file, Optional<Text> text) {
+    if (!known.get(file).equals(text)) {
+      known.put(file, text);
+    }
+  }
+
+  private static boolean looksHalf(Optional<Text> before, Optional<Text> now) {
+    return before.isPresent() && now.map(Text::length).orElse(0) * 2 < before.get().length();
+  }
+
+  private Optional<Text> read(Path file) {
+    try {
+      return Optional.of(Intake.load(disk, file).text());
+    } catch (Unreadable e) {
+      log.accept(e.getMessage());
+      return Optional.empty();
+    }
+  }
+}

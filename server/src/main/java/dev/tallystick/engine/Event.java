@@ -1,0 +1,71 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+
+/** Everything that can happen to the loop. The set is closed: nothing else changes its state. */
+public sealed interface Event {
+  /**
+   * The editor shows a file; from now on its text counts, not the disk's.
+   *
+   * @param file the file, which need not exist yet
+   * @param uri how the editor names it, kept as it is
+   * @param version the editor's number for the text
+   * @param text the text in the editor
+   */
+  record Opened(Path file, String uri, int version, Text text) implements Event {}
+
+  /**
+   * A text was edited in the editor.
+   *
+   * @param file the file
+   * @param uri how the editor names it
+   * @param version the editor's number for the text after all changes
+   * @param changes one after the other, each seeing the text that the one before left
+   */
+  record Edited(Path file, String uri, int version, List<Change> changes) implements Event {}
+
+  /** The editor saved a file. */
+  record Saved(Path file) implements Event {}
+
+  /** The editor no longer shows a file; the disk counts again. */
+  record Closed(Path file) implements Event {}
+
+  /**
+   * Another program, or the editor, wrote to the disk.
+   *
+   * @param files those that changed; none if any may have
+   * @param listing whether files may have appeared or vanished
+   */
+  record FilesChanged(List<Path> files, boolean listing) implements Event {}
+
+  /** The workspace has other folders now. */
+  record FoldersChanged(List<Path> added, List<Path> removed) implements Event {}
+
+  /** The user's settings are these now. The first ones start the work: until then all waits. */
+  record SettingsChanged(Settings settings) implements Event {}
+
+  /**
+   * A worker is done with a pair.
+   *
+   * @param task what it was given
+   * @param result what came out; empty if the task was cancelled or failed
+   * @param fault the class and place of a fault of our own; never text of a file
+   */
+  record Examined(Task task, Optional<PairResult> result, Optional<String> fault)
+      implements Event {}
+
+  /** A worker has listed a folder; empty if that cannot be done. */
+  record Listed(Path folder, List<Path> files) implements Event {}
+
+  /** A moment has come that someone waits for. Who, the state tells. */
+  record TimerDue() implements Event {}
+
+  /** The editor asks about a place. */
+  record Asked(Question question) implements Event {}
+
+  /** Nobody waits for an answer any more. */
+  record Withdrawn(Question question) implements Event {}
+}

@@ -1,0 +1,57 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.check.OnSide;
+import dev.tallystick.pairing.Language;
+import dev.tallystick.pairing.Pair;
+import java.nio.file.Path;
+import java.util.Comparator;
+
+/**
+ * Two files of this machine that belong together.
+ *
+ * @param source the source, absolute
+ * @param target its translation, absolute
+ * @param sourceLanguage language of the source
+ * @param targetLanguage language of the translation
+ */
+public record FilePair(Path source, Path target, Language sourceLanguage, Language targetLanguage)
+    implements Comparable<FilePair> {
+  private static final Comparator<FilePair> ORDER =
+      Comparator.comparing(FilePair::source)
+          .thenComparing(FilePair::targetLanguage)
+          .thenComparing(FilePair::target)
+          .thenComparing(FilePair::sourceLanguage);
+
+  static FilePair of(Path folder, Pair pair) {
+    return new FilePair(
+        folder.resolve(pair.source()),
+        folder.resolve(pair.target()),
+        pair.sourceLanguage(),
+        pair.targetLanguage());
+  }
+
+  /** The file on a side. */
+  public Path file(OnSide side) {
+    return side == OnSide.SOURCE ? source : target;
+  }
+
+  /** The language of a side. */
+  public Language language(OnSide side) {
+    return side == OnSide.SOURCE ? sourceLanguage : targetLanguage;
+  }
+
+  /** Whether a file is one of the two. */
+  public boolean has(Path file) {
+    return source.equals(file) || target.equals(file);
+  }
+
+  /** Which of the two a file is. */
+  OnSide side(Path file) {
+    return source.equals(file) ? OnSide.SOURCE : OnSide.TARGET;
+  }
+
+  @Override
+  public int compareTo(FilePair other) {
+    return ORDER.compare(this, other);
+  }
+}

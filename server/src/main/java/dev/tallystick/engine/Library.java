@@ -1,0 +1,139 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.Collection;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+
+/**
+ * The files that matter: what stands in them, and which belong together. Keeps the folders that
+ * count listed, and those that the editor does not watch watched.
+ */
+final class Library {
+  private final Workspace workspace = new Workspace();
+  private final Shelf shelf;
+  private final Workers workers;
+  private final Watch watch;
+  private final boolean editorWatches;
+
+  Library(Shelf shelf, Workers workers, Watch watch, boolean editorWatches) {
+    this.shelf = shelf;
+    this.workers = workers;
+    this.watch = watch;
+    this.editorWatches = editorWatches;
+  }
+
+  /** The editor shows a file. One that was not listed may have come with others. */
+  void open(Path file, Document document) {
+    shelf.open(file, document);
+    workspace
+        .root(file)
+        .filter(root -> !root.files().contains(file) && root.request(true))
+        .ifPresent(this::list);
+    foldersMoved();
+  }
+
+  /** The editor no longer shows a file. */
+  void close(Path file) {
+    shelf.close(file);
+    foldersMoved();
+  }
+
+  /** The workspace has other folders. */
+  void change(Event.FoldersChanged changed) {
+    workspace.change(changed.added(), changed.removed());
+    foldersMoved();
+  }
+
+  /** What the user has set counts from now on. */
+  void rules(Settings settings) {
+    workspace.rules(settings.rules());
+  }
+
+  /** A worker has listed a folder. */
+  void listed(Event.Listed listed) {
+    workspace.listed(listed.folder(), listed.files()).ifPresent(this::list);
+  }
+
+  /** Files were written: reads those that matter, and lists the folders that may have others. */
+  void reread(Event.FilesChanged changed) {
+    boolean any = changed.files().isEmpty();
+    List<Path> files = any ? shelf.disk().files() : changed.files();
+    files.forEach(shelf.disk()::changed);
+    for (Root root : changed.listing() ? workspace.roots() : List.<Root>of()) {
+      boolean concerned = any || files.stream().anyMatch(root.folder()::holds);
+      if (concerned && root.request(false)) {
+        list(root);
+      }
+    }
+  }
+
+  /** Time has passed. */
+  void settle(long restMillis) {
+    shelf.disk().settle(restMillis);
+  }
+
+  /** Whether some file may be half written. */
+  boolean unsettled() {
+    return shelf.disk().unsettled();
+  }
+
+  /** Folders count that did not, perhaps, or no longer do. */
+  private void foldersMoved() {
+    workspace.open(shelf.open());
+    for (Root root : workspace.roots()) {
+      if (root.awaited() && root.request(true)) {
+        list(root);
+      }
+    }
+    List<Root> unseen = editorWatches ? workspace.ownRoots() : workspace.roots();
+    watch.over(unseen.stream().map(Root::folder).toList());
+  }
+
+  private void list(Root root) {
+    workers.list(root.folder());
+  }
+
+  /** Whether it is known which files could belong to a file. */
+  boolean listed(Path file) {
+    return workspace.root(file).filter(Root::awaited).isEmpty();
+  }
+
+  /** The pairs with an open side, sorted. */
+  List<FilePair> pairs() {
+    return workspace.pairs();
+  }
+
+  /** What the user has to be asked about the open files, and has not been. */
+  List<Ambiguity> questions() {
+    return workspace.questions();
+  }
+
+  /** The files that the editor shows, sorted. */
+  Set<Path> open() {
+    return shelf.open();
+  }
+
+  /** What is known of a file that the editor shows. */
+  Optional<Document> document(Path file) {
+    return shelf.document(file);
+  }
+
+  /** The text of a file; empty if it cannot be read or is lost. */
+  Optional<Text> text(Path file) {
+    return shelf.text(file);
+  }
+
+  /** The sheet of the current text; the same one as long as the text stays the same. */
+  Optional<Sheet> sheet(Path file, String language) {
+    return shelf.sheet(file, language);
+  }
+
+  /** Forgets what is known of all files but these. */
+  void retain(Collection<Path> files) {
+    shelf.retain(files);
+  }
+}

@@ -1,0 +1,282 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.check.OnSide;
+import dev.tallystick.run.Fault;
+import dev.tallystick.run.Threads;
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalInt;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.TreeSet;
+import java.util.concurrent.BlockingQueue;
+import java.util.concurrent.LinkedBlockingQueue;
+import java.util.stream.Stream;
+
+/**
+ * Keeps what is shown in step with what is written.
+ *
+ * <p><b>One queue, one thread.</b> Whatever happens is an {@link Event}: the reader of the
+ * protocol, the workers, the alarm and the watch of the disk put events into one queue and do
+ * nothing else. One thread takes them out, one after the other, and it alone changes the state
+ * below. So nothing is locked, and the order of the queue is the order of the world: a question
+ * that comes behind an edit sees the text after that edit, and none that comes later.
+ *
+ * <p><b>A turn</b> handles one event in two steps. First the event changes what is known: a text, a
+ * folder, a setting, a result. Then {@link #settle()} brings everything else in line, whatever the
+ * event was: which pairs are wanted, which of them need a worker, what is to be shown, who can be
+ * answered. That step is written as if nothing were known of the event, so there is one place only
+ * where a consequence can be forgotten. It is cheap where nothing has changed.
+ *
+ * <p><b>Workers see snapshots.</b> A {@link Task} holds one state of both texts. When a text moves
+ * on, its {@link Sheet} is outdated and the worker leaves at its next check; a result that comes
+ * nevertheless is told by its task and dropped. A pair is settled when its result is for the
+ * current texts. Only then is anything published for its files, and only then is a question about
+ * them answered; until then the question waits here, in no thread. If its text is edited meanwhile
+ * it never will be answered, and is told so.
+ *
+ * <p><b>Faults stay where they are.</b> A pair that our own code fails on shows nothing and is
+ * tried again with the next text. An edit that a text cannot have makes the document lost, and the
+ * user is told once. Files are read on this thread; folders, which take longer, are listed by
+ * workers.
+ */
+public final class Loop implements AutoCloseable {
+  private final BlockingQueue<Event> queue = new LinkedBlockingQueue<>();
+  private final Machine machine;
+  private final Audience audience;
+  private final Workers workers;
+  private final Watch watch;
+  private final Thread thread;
+
+  private final Library library;
+  private final Caret caret;
+  private final Map<FilePair, PairState> pairs = new TreeMap<>();
+  private final Questions questions = new Questions();
+  private final Bulletin bulletin;
+  private boolean started;
+  private long turn;
+
+  /** Sets up the loop; nothing runs before {@link #start()}. */
+  public Loop(Machine machine, Audience audience) {
+    this.machine = machine;
+    this.audience = audience;
+    this.workers = new Workers(machine, this::post);
+    this.watch = machine.watch().apply(this::post);
+    DiskTexts disk = new DiskTexts(machine.disk(), machine.alarm(), audience::log);
+    this.library = new Library(new Shelf(disk), workers, watch, machine.editorWatches());
+    this.caret = new Caret(machine.alarm());
+    this.bulletin = new Bulletin(audience);
+    this.thread = Threads.daemons("tallystick-loop").newThread(this::run);
+  }
+
+  /** Starts the loop's thread. */
+  public void start() {
+    thread.start();
+  }
+
+  /** Something has happened. Returns at once; any thread may call it. */
+  public void post(Event event) {
+    machine.activity().begin();
+    queue.add(event);
+  }
+
+  @Override
+  public void close() {
+    thread.interrupt();
+    workers.stop();
+    watch.close();
+  }
+
+  private void run() {
+    try {
+      while (true) {
+        turn(queue.take());
+      }
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt(); // closed
+    }
+  }
+
+  private void turn(Event event) {
+    turn++;
+    try {
+      handle(event);
+      settle();
+    } catch (RuntimeException | StackOverflowError e) {
+      audience.log("A fault of Tallystick itself: " + Fault.where(e));
+    } finally {
+      machine.activity().end();
+    }
+  }
+
+  private void handle(Event event) {
+    if (event instanceof Event.Edited edited) {
+      edit(edited);
+    } else if (event instanceof Event.Asked asked) {
+      questions.add(asked.question(), library.document(asked.question().file()));
+    } else if (event instanceof Event.Withdrawn withdrawn) {
+      questions.remove(withdrawn.question());
+    } else if (event instanceof Event.Examined examined) {
+      finish(examined);
+    } else if (event instanceof Event.TimerDue) {
+      caret.settle();
+      library.settle(caret.restMillis());
+      ringIfHalfWritten();
+    } else if (event instanceof Event.Saved) {
+      caret.lift();
+    } else if (event instanceof Event.Opened opened) {
+      bulletin.name(opened.file(), opened.uri());
+      library.open(opened.file(), Document.opened(opened.version(), opened.text()));
+    } else if (event instanceof Event.Closed closed) {
+      library.close(closed.file());
+      caret.closed(closed.file());
+    } else {
+      handleAround(event);
+    }
+  }
+
+  /** The rarer events: those around the texts. */
+  private void handleAround(Event event) {
+    if (event instanceof Event.FilesChanged changed) {
+      library.reread(changed);
+      ringIfHalfWritten();
+    } else if (event instanceof Event.Listed listed) {
+      library.listed(listed);
+    } else if (event instanceof Event.FoldersChanged changed) {
+      library.change(changed);
+    } else if (event instanceof Event.SettingsChanged changed) {
+      started = true;
+      library.rules(changed.settings());
+      caret.rest(changed.settings().restMillis());
+    }
+  }
+
+  private void edit(Event.Edited edited) {
+    Path file = edited.file();
+    if (library.document(file).isEmpty()) {
+      bulletin.name(file, edited.uri());
+      library.open(file, Document.unknown());
+    }
+    Document document = library.document(file).orElseThrow();
+    OptionalInt end = document.edit(edited.version(), edited.changes());
+    questions.edited(file, pairs.keySet());
+    if (document.announcesLoss()) {
+      audience.say(Announcements.lost(file));
+    }
+    end.ifPresent(offset -> write(file, offset));
+  }
+
+  /** The translator has written something that ends at an offset. */
+  private void write(Path file, int offset) {
+    caret.edited(file, offset);
+    ring();
+    for (PairState pair : pairs.values()) {
+      if (pair.files().target().equals(file)) {
+        pair.edited(turn);
+      }
+    }
+  }
+
+  private void ringIfHalfWritten() {
+    if (library.unsettled()) {
+      ring();
+    }
+  }
+
+  private void ring() {
+    long due = machine.alarm().millis() + caret.restMillis();
+    machine.alarm().at(due, () -> post(new Event.TimerDue()));
+  }
+
+  private void finish(Event.Examined examined) {
+    Task task = examined.task();
+    PairState state = pairs.get(task.files());
+    if (state != null) {
+      state.finish(task, examined.result());
+    }
+    examined.fault().ifPresent(fault -> audience.log(Announcements.fault(task.files(), fault)));
+  }
+
+  /** Brings everything in line with what is known now. */
+  private void settle() {
+    if (!started) {
+      return;
+    }
+    keepWantedPairs();
+    for (PairState pair : pairs.values()) {
+      pair.take(sheet(pair, OnSide.SOURCE), sheet(pair, OnSide.TARGET)).ifPresent(workers::examine);
+      pair.show(caret.last());
+    }
+    questions.answer(library.open(), this::ready, this::answer);
+    publish();
+    library.questions().forEach(question -> audience.say(Announcements.choice(question)));
+  }
+
+  private void keepWantedPairs() {
+    List<FilePair> wanted = library.pairs();
+    if (wanted.equals(List.copyOf(pairs.keySet()))) {
+      return;
+    }
+    Set<FilePair> gone = new TreeSet<>(pairs.keySet());
+    wanted.forEach(gone::remove);
+    gone.forEach(pair -> pairs.remove(pair).drop());
+    wanted.forEach(pair -> pairs.computeIfAbsent(pair, PairState::new));
+    library.retain(pairedFiles());
+  }
+
+  private Optional<Sheet> sheet(PairState pair, OnSide side) {
+    return library.sheet(pair.files().file(side), pair.files().language(side).tag());
+  }
+
+  private Set<Path> pairedFiles() {
+    Set<Path> files = new TreeSet<>();
+    for (FilePair pair : pairs.keySet()) {
+      files.add(pair.source());
+      files.add(pair.target());
+    }
+    return files;
+  }
+
+  /** Whether all is known that there is to know of the current text of a file. */
+  private boolean ready(Path file) {
+    return library.listed(file) && pairsOf(file).allMatch(PairState::settled);
+  }
+
+  private Stream<PairState> pairsOf(Path file) {
+    return pairs.values().stream().filter(pair -> pair.files().has(file));
+  }
+
+  private Answer answer(Path file, int offset) {
+    return Answer.of(pairsOf(file).toList(), file, offset, bulletin);
+  }
+
+  private void publish() {
+    Set<Path> files = pairedFiles();
+    files.addAll(bulletin.files());
+    files.addAll(library.open());
+    for (Path file : files) {
+      if (ready(file)) {
+        publish(file);
+      }
+    }
+  }
+
+  private void publish(Path file) {
+    List<Notice> notices =
+        pairsOf(file)
+            .flatMap(pair -> pair.notices(pair.files().side(file), bulletin).stream())
+            .sorted()
+            .distinct()
+            .toList();
+    Optional<Document> document = library.document(file);
+    if (document.isPresent()) {
+      bulletin.publish(file, document.get(), notices);
+    } else {
+      Optional<Text> text = notices.isEmpty() ? Optional.empty() : library.text(file);
+      bulletin.publish(file, text.orElse(new Text("")), notices);
+    }
+  }
+}

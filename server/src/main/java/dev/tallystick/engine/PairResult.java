@@ -1,0 +1,46 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.align.Aligner;
+import dev.tallystick.align.Alignment;
+import dev.tallystick.check.Checks;
+import dev.tallystick.check.Finding;
+import dev.tallystick.check.OnSide;
+import dev.tallystick.check.Progress;
+import dev.tallystick.check.Subject;
+import dev.tallystick.run.Cancellation;
+import java.util.List;
+
+/**
+ * All that is known of a pair of texts.
+ *
+ * @param source the source, read
+ * @param target the translation, read
+ * @param alignment which sentences stand for which
+ * @param findings what is worth telling, the source's first
+ * @param progress how far the translation has come
+ */
+public record PairResult(
+    Reading source,
+    Reading target,
+    Alignment alignment,
+    List<Finding> findings,
+    Progress progress) {
+  /**
+   * Aligns and checks: a pure function of its arguments.
+   *
+   * @param draft whether the translation is still being written
+   */
+  public static PairResult of(
+      Reading source, Reading target, Aligner aligner, boolean draft, Cancellation cancellation) {
+    Alignment alignment = aligner.align(source.units(), target.units(), cancellation);
+    Subject subject =
+        new Subject(source.segments(), target.segments(), target.language(), alignment, draft);
+    return new PairResult(
+        source, target, alignment, Checks.findings(subject), Progress.of(subject));
+  }
+
+  /** One of the two texts, read. */
+  public Reading reading(OnSide side) {
+    return side == OnSide.SOURCE ? source : target;
+  }
+}

@@ -1,0 +1,53 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.prose.Format;
+import dev.tallystick.text.Text;
+
+/**
+ * One state of one file: what workers see of it. However many pairs the file is in, it is read once
+ * only, by the worker that needs it first; so an edit on one side costs the reading of that side.
+ */
+final class Sheet {
+  private final Text text;
+  private final Format format;
+  private final String language;
+  private Reading reading;
+  private volatile boolean outdated;
+
+  /** A text in a language, a BCP 47 tag. */
+  Sheet(Text text, Format format, String language) {
+    this.text = text;
+    this.format = format;
+    this.language = language;
+  }
+
+  Text text() {
+    return text;
+  }
+
+  /** Whether this is still the sheet of a text that has come anew. */
+  boolean shows(Text current, String inLanguage) {
+    return language.equals(inLanguage) && text.equals(current);
+  }
+
+  /** The text has moved on: whoever still works on this sheet may stop. */
+  void outdate() {
+    outdated = true;
+  }
+
+  boolean outdated() {
+    return outdated;
+  }
+
+  /**
+   * The sentences. A second worker that asks meanwhile waits for the first.
+   *
+   * @throws dev.tallystick.run.Cancellation.Cancelled if the text has moved on
+   */
+  synchronized Reading reading() {
+    if (reading == null) {
+      reading = Reading.of(text, format, language, this::outdated);
+    }
+    return reading;
+  }
+}

@@ -1,0 +1,84 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.Collection;
+import java.util.HashSet;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.TreeMap;
+
+/**
+ * The current text of every file that matters: the editor's if it shows the file, else the disk's.
+ */
+final class Shelf {
+  private final Map<Path, Document> open = new TreeMap<>();
+  private final Map<Path, Sheet> sheets = new TreeMap<>();
+  private final DiskTexts disk;
+
+  Shelf(DiskTexts disk) {
+    this.disk = disk;
+  }
+
+  void open(Path file, Document document) {
+    open.put(file, document);
+    disk.forget(Set.of(file));
+  }
+
+  void close(Path file) {
+    open.remove(file);
+  }
+
+  /** The files that the editor shows, sorted. */
+  Set<Path> open() {
+    return open.keySet();
+  }
+
+  Optional<Document> document(Path file) {
+    return Optional.ofNullable(open.get(file));
+  }
+
+  /** The text of a file; empty if it cannot be read or is lost. */
+  Optional<Text> text(Path file) {
+    Document document = open.get(file);
+    if (document == null) {
+      return disk.text(file);
+    }
+    return document.lost() ? Optional.empty() : Optional.of(document.text());
+  }
+
+  /** The sheet of the current text; the same one as long as the text stays the same. */
+  Optional<Sheet> sheet(Path file, String language) {
+    Sheet sheet = sheets.get(file);
+    Optional<Text> text = text(file);
+    if (sheet != null && text.isPresent() && sheet.shows(text.get(), language)) {
+      return Optional.of(sheet);
+    }
+    outdate(sheet);
+    sheets.remove(file);
+    text.ifPresent(now -> sheets.put(file, new Sheet(now, Intake.format(file), language)));
+    return Optional.ofNullable(sheets.get(file));
+  }
+
+  /** Forgets what is known of all other files. */
+  void retain(Collection<Path> files) {
+    Set<Path> others = new HashSet<>(sheets.keySet());
+    others.addAll(disk.files());
+    others.removeAll(files);
+    for (Path file : others) {
+      outdate(sheets.remove(file));
+    }
+    disk.forget(others);
+  }
+
+  DiskTexts disk() {
+    return disk;
+  }
+
+  private static void outdate(Sheet sheet) {
+    if (sheet != null) {
+      sheet.outdate();
+    }
+  }
+}

@@ -1,0 +1,84 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.align.Unit;
+import dev.tallystick.prose.Block;
+import dev.tallystick.segment.Closing;
+import dev.tallystick.segment.Segment;
+import dev.tallystick.segment.Words;
+import dev.tallystick.text.Text;
+import java.util.List;
+
+/** What the aligner, which sees no text, is told of each segment. */
+final class Units {
+  /** Trust in a word with a digit, in any other, and in a very short one. */
+  private static final double NUMBER = 0.9;
+
+  private static final double WORD = 0.5;
+  private static final double SHORT = 0.1;
+
+  private Units() {}
+
+  static Unit unit(Text text, Segment segment) {
+    if (segment.verbatim()) {
+      String content = segment.span().of(text.string()).strip().replaceAll("\\R", "\n");
+      Unit.Word[] words = {new Unit.Word(key(content), NUMBER)};
+      return new Unit(content.length(), 0, true, 0, 0, words, true);
+    }
+    String prose = segment.prose();
+    return new Unit(
+        prose.codePointCount(0, prose.length()),
+        letters(prose),
+        segment.opens(),
+        kind(segment.block()),
+        Closing.of(prose).ordinal(),
+        words(prose),
+        false);
+  }
+
+  private static Unit.Word[] words(String prose) {
+    List<String> words = Words.of(prose);
+    Unit.Word[] keyed = new Unit.Word[words.size()];
+    for (int i = 0; i < keyed.length; i++) {
+      keyed[i] = new Unit.Word(key(words.get(i)), trust(words.get(i)));
+    }
+    return keyed;
+  }
+
+  private static int letters(String prose) {
+    int letters = 0;
+    for (int i = 0; i < prose.length(); ) {
+      int c = prose.codePointAt(i);
+      letters += Character.isLetterOrDigit(c) ? 1 : 0;
+      i += Character.charCount(c);
+    }
+    return letters;
+  }
+
+  private static double trust(String word) {
+    for (int i = 0; i < word.length(); i++) {
+      if (word.charAt(i) >= '0' && word.charAt(i) <= '9') {
+        return NUMBER;
+      }
+    }
+    return word.length() > 2 ? WORD : SHORT;
+  }
+
+  /** FNV-1a in 64 bits: the same on every machine. */
+  private static long key(String word) {
+    long hash = 0xcbf29ce484222325L;
+    for (int i = 0; i < word.length(); i++) {
+      hash = (hash ^ word.charAt(i)) * 0x100000001b3L;
+    }
+    return hash;
+  }
+
+  private static int kind(Block block) {
+    return switch (block.kind()) {
+      case PARAGRAPH, VERBATIM -> 0;
+      case HEADING -> Math.min(Math.max(block.level(), 1), 6);
+      case ITEM -> block.level() > 1 ? 8 : 7;
+      case CELL -> 9;
+      case QUOTATION -> 10;
+    };
+  }
+}

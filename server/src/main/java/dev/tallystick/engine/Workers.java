@@ -1,0 +1,71 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.run.Activity;
+import dev.tallystick.run.Cancellation;
+import dev.tallystick.run.Fault;
+import dev.tallystick.run.Threads;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.function.Consumer;
+import java.util.function.Supplier;
+
+/** A few threads that examine pairs and list folders. What they find comes back as an event. */
+final class Workers {
+  private final ExecutorService pool;
+  private final Machine machine;
+  private final Consumer<Event> post;
+
+  Workers(Machine machine, Consumer<Event> post) {
+    this.machine = machine;
+    this.post = post;
+    this.pool =
+        Executors.newFixedThreadPool(machine.workers(), Threads.daemons("tallystick-worker"));
+  }
+
+  void examine(Task task) {
+    run(() -> examined(task));
+  }
+
+  void list(Folder folder) {
+    run(() -> new Event.Listed(folder.path(), files(folder)));
+  }
+
+  void stop() {
+    pool.shutdownNow();
+  }
+
+  private void run(Supplier<Event> work) {
+    Activity activity = machine.activity();
+    activity.begin();
+    pool.execute(
+        () -> {
+          post.accept(work.get());
+          activity.end();
+        });
+  }
+
+  /** The only place where a cancelled computation ends, and where a fault of our own does. */
+  private Event examined(Task task) {
+    try {
+      task.check();
+      PairResult result =
+          machine.examiner().examine(task.source().reading(), task.target().reading(), task);
+      return new Event.Examined(task, Optional.of(result), Optional.empty());
+    } catch (Cancellation.Cancelled e) {
+      return new Event.Examined(task, Optional.empty(), Optional.empty());
+    } catch (RuntimeException | StackOverflowError | OutOfMemoryError e) {
+      return new Event.Examined(task, Optional.empty(), Optional.of(Fault.where(e)));
+    }
+  }
+
+  private List<Path> files(Folder folder) {
+    try {
+      return machine.disk().files(folder);
+    } catch (Unreadable | RuntimeException e) {
+      return List.of();
+    }
+  }
+}

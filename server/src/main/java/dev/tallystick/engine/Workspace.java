@@ -1,0 +1,145 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.pairing.Pairs;
+import dev.tallystick.pairing.Rules;
+import dev.tallystick.prose.Format;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.HashSet;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.TreeMap;
+import java.util.TreeSet;
+
+/**
+ * Which files belong together. The folders that the editor names count with all that is in them; a
+ * file outside of them makes its own folder count, but only the upper levels, for it may be
+ * someone's home. A file belongs to one folder only: the innermost that the editor named, else the
+ * outermost of the others.
+ */
+final class Workspace {
+  /** Levels that count in the folder of a file outside of the editor's folders. */
+  private static final int SHALLOW = 2;
+
+  private final Map<Path, Root> named = new TreeMap<>();
+  private final Map<Path, Root> own = new TreeMap<>();
+  private Rules rules = Rules.NONE;
+
+  private final Set<Path> open = new TreeSet<>();
+  private Optional<List<FilePair>> pairs = Optional.empty();
+
+  void rules(Rules now) {
+    rules = now;
+    roots().forEach(Root::forget);
+    pairs = Optional.empty();
+  }
+
+  /** The editor names other folders. */
+  void change(List<Path> added, List<Path> removed) {
+    removed.forEach(named::remove);
+    added.forEach(path -> named.computeIfAbsent(path, p -> new Root(new Folder(p, Folder.DEEP))));
+    open(Set.copyOf(open));
+  }
+
+  /** Other files are open than before: their folders count, and those of no open file do not. */
+  void open(Collection<Path> files) {
+    open.clear();
+    open.addAll(files);
+    for (Path file : open) {
+      if (root(file).isEmpty() && file.getParent() != null) {
+        own.put(file.getParent(), new Root(new Folder(file.getParent(), SHALLOW)));
+      }
+    }
+    Set<Path> used = new HashSet<>();
+    open.forEach(file -> root(file).ifPresent(root -> used.add(root.folder().path())));
+    own.keySet().retainAll(used);
+    roots().forEach(Root::forget);
+    pairs = Optional.empty();
+  }
+
+  /**
+   * Takes a list of the files in a folder.
+   *
+   * @return the folder, if it is to be listed once more
+   */
+  Optional<Root> listed(Path folder, List<Path> files) {
+    pairs = Optional.empty();
+    return Optional.ofNullable(named.getOrDefault(folder, own.get(folder)))
+        .filter(root -> root.listed(files));
+  }
+
+  /** All folders that count. */
+  List<Root> roots() {
+    List<Root> roots = new ArrayList<>(named.values());
+    roots.addAll(own.values());
+    return roots;
+  }
+
+  /** Those of them that the editor does not know of. */
+  List<Root> ownRoots() {
+    return List.copyOf(own.values());
+  }
+
+  /** The folder that a file belongs to. */
+  Optional<Root> root(Path file) {
+    Optional<Root> found = Optional.empty();
+    for (Root root : named.values()) { // sorted: an inner one comes later
+      found = root.folder().holds(file) ? Optional.of(root) : found;
+    }
+    return found.isPresent()
+        ? found
+        : own.values().stream().filter(root -> root.folder().holds(file)).findFirst();
+  }
+
+  /** The pairs with an open side, sorted. */
+  List<FilePair> pairs() {
+    if (pairs.isEmpty()) {
+      List<FilePair> wanted = new ArrayList<>();
+      rootsOfOpen().forEach(root -> wanted.addAll(root.absolute(found(root), this::wanted)));
+      wanted.sort(null);
+      pairs = Optional.of(List.copyOf(wanted));
+    }
+    return pairs.get();
+  }
+
+  private boolean wanted(FilePair pair) {
+    return open.contains(pair.source()) || open.contains(pair.target());
+  }
+
+  /** What the user has to be asked about the open files, and has not been. */
+  List<Ambiguity> questions() {
+    List<Ambiguity> questions = new ArrayList<>();
+    for (Root root : rootsOfOpen()) {
+      if (!root.awaited()) {
+        root.question(found(root), open).ifPresent(questions::add);
+      }
+    }
+    return questions;
+  }
+
+  private Set<Root> rootsOfOpen() {
+    Set<Root> roots = new LinkedHashSet<>();
+    open.forEach(file -> root(file).ifPresent(roots::add));
+    return roots;
+  }
+
+  private Pairs found(Root root) {
+    return root.pairs(() -> files(root), rules);
+  }
+
+  /** The files that belong to a folder: those on the disk, and those only in the editor so far. */
+  private List<Path> files(Root root) {
+    List<Path> files = new ArrayList<>(root.files());
+    for (Path file : open) {
+      if (Format.ofName(file.getFileName().toString()).isPresent()) {
+        files.add(file);
+      }
+    }
+    return files.stream().filter(file -> root(file).filter(root::equals).isPresent()).toList();
+  }
+}
