@@ -1,0 +1,41 @@
+package dev.tallystick.lsp;
+
+import org.eclipse.lsp4j.SaveOptions;
+import org.eclipse.lsp4j.ServerCapabilities;
+import org.eclipse.lsp4j.TextDocumentSyncKind;
+import org.eclipse.lsp4j.TextDocumentSyncOptions;
+import org.eclipse.lsp4j.WorkspaceFoldersOptions;
+import org.eclipse.lsp4j.WorkspaceServerCapabilities;
+
+/** What this server can do. */
+final class Capabilities {
+  private Capabilities() {}
+
+  static ServerCapabilities of(Client client) {
+    ServerCapabilities can = new ServerCapabilities();
+    if (client.namesEncoding()) {
+      can.setPositionEncoding(client.encoding().kind());
+    }
+    can.setTextDocumentSync(sync());
+    can.setDefinitionProvider(true);
+    can.setHoverProvider(true);
+    can.setDocumentHighlightProvider(true);
+    can.setWorkspace(new WorkspaceServerCapabilities(folders()));
+    return can;
+  }
+
+  private static TextDocumentSyncOptions sync() {
+    TextDocumentSyncOptions sync = new TextDocumentSyncOptions();
+    sync.setOpenClose(true);
+    sync.setChange(TextDocumentSyncKind.Incremental);
+    sync.setSave(new SaveOptions(false));
+    return sync;
+  }
+
+  private static WorkspaceFoldersOptions folders() {
+    WorkspaceFoldersOptions folders = new WorkspaceFoldersOptions();
+    folders.setSupported(true);
+    folders.setChangeNotifications(true);
+    return folders;
+  }
+}

@@ -1,0 +1,172 @@
+package dev.tallystick.lsp;
+
+import dev.tallystick.engine.Answer;
+import dev.tallystick.engine.Change;
+import dev.tallystick.engine.Event;
+import dev.tallystick.engine.Loop;
+import dev.tallystick.engine.Question;
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
+import java.util.function.Function;
+import org.eclipse.lsp4j.DefinitionParams;
+import org.eclipse.lsp4j.DidChangeTextDocumentParams;
+import org.eclipse.lsp4j.DidCloseTextDocumentParams;
+import org.eclipse.lsp4j.DidOpenTextDocumentParams;
+import org.eclipse.lsp4j.DidSaveTextDocumentParams;
+import org.eclipse.lsp4j.DocumentHighlight;
+import org.eclipse.lsp4j.DocumentHighlightParams;
+import org.eclipse.lsp4j.Hover;
+import org.eclipse.lsp4j.HoverParams;
+import org.eclipse.lsp4j.Location;
+import org.eclipse.lsp4j.LocationLink;
+import org.eclipse.lsp4j.Range;
+import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
+import org.eclipse.lsp4j.TextDocumentItem;
+import org.eclipse.lsp4j.TextDocumentPositionParams;
+import org.eclipse.lsp4j.VersionedTextDocumentIdentifier;
+import org.eclipse.lsp4j.jsonrpc.messages.Either;
+import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
+import org.eclipse.lsp4j.services.TextDocumentService;
+
+/**
+ * What a client tells and asks about texts. Those without a file are in no pair: nothing is said.
+ */
+final class Documents implements TextDocumentService {
+  private Loop loop;
+  private Conversion conversion;
+  private boolean over;
+
+  /** The session has begun. */
+  void begin(Loop with, Conversion by) {
+    loop = with;
+    conversion = by;
+  }
+
+  /** Nothing is answered any more. */
+  void end() {
+    over = true;
+  }
+
+  @Override
+  public void didOpen(DidOpenTextDocumentParams params) {
+    TextDocumentItem item = params.getTextDocument();
+    tell(
+        item.getUri(),
+        file -> new Event.Opened(file, item.getUri(), item.getVersion(), new Text(item.getText())));
+  }
+
+  @Override
+  public void didChange(DidChangeTextDocumentParams params) {
+    VersionedTextDocumentIdentifier document = params.getTextDocument();
+    int version = document.getVersion() == null ? 0 : document.getVersion();
+    List<Change> changes = params.getContentChanges().stream().map(this::change).toList();
+    tell(document.getUri(), file -> new Event.Edited(file, document.getUri(), version, changes));
+  }
+
+  @Override
+  public void didSave(DidSaveTextDocumentParams params) {
+    tell(params.getTextDocument().getUri(), Event.Saved::new);
+  }
+
+  @Override
+  public void didClose(DidCloseTextDocumentParams params) {
+    tell(params.getTextDocument().getUri(), Event.Closed::new);
+  }
+
+  private void tell(String uri, Function<Path, Event> event) {
+    if (loop != null) {
+      Uris.file(uri).map(event).ifPresent(loop::post);
+    }
+  }
+
+  private Change change(TextDocumentContentChangeEvent event) {
+    Range range = event.getRange();
+    return range == null
+        ? new Change.Whole(new Text(event.getText()))
+        : new Change.Part(text -> span(text, range), event.getText());
+  }
+
+  /** Where a range lies; nowhere if it starts behind its end or behind the text. */
+  private Optional<Span> span(Text text, Range range) {
+    int start = conversion.client().encoding().offset(text, range.getStart());
+    int end = conversion.client().encoding().offset(text, range.getEnd());
+    int line = range.getStart().getLine();
+    boolean fits = line >= 0 && line <= text.lines() && start <= end;
+    return fits ? Optional.of(new Span(start, end)) : Optional.empty();
+  }
+
+  @Override
+  public CompletableFuture<Either<List<? extends Location>, List<? extends LocationLink>>>
+      definition(DefinitionParams params) {
+    return ask(params, answer -> conversion.definition(answer));
+  }
+
+  @Override
+  public CompletableFuture<Hover> hover(HoverParams params) {
+    return ask(params, answer -> conversion.hover(answer));
+  }
+
+  @Override
+  public CompletableFuture<List<? extends DocumentHighlight>> documentHighlight(
+      DocumentHighlightParams params) {
+    return ask(params, answer -> conversion.highlights(answer));
+  }
+
+  /**
+   * Asks the loop. The future is handed out as it is, so that the client's cancelling reaches it.
+   */
+  private <T> CompletableFuture<T> ask(
+      TextDocumentPositionParams params, Function<Answer, T> convert) {
+    if (loop == null) {
+      throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
+    }
+    if (over) {
+      throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
+    }
+    if (params.getTextDocument() == null || params.getPosition() == null) {
+      throw Server.refused(ResponseErrorCode.InvalidParams, "A document and a position, please.");
+    }
+    CompletableFuture<T> asked = new CompletableFuture<>();
+    Optional<Path> file = Uris.file(params.getTextDocument().getUri());
+    if (file.isEmpty()) {
+      asked.complete(convert.apply(Answer.NONE));
+      return asked;
+    }
+    Question question =
+        new Question(
+            file.get(),
+            text -> conversion.client().encoding().offset(text, params.getPosition()),
+            new Reply<>(asked, convert));
+    asked.whenComplete(
+        (answer, fault) -> {
+          if (asked.isCancelled()) {
+            loop.post(new Event.Withdrawn(question));
+          }
+        });
+    loop.post(new Event.Asked(question));
+    return asked;
+  }
+
+  /** Completes what the client waits for. */
+  private record Reply<T>(CompletableFuture<T> asked, Function<Answer, T> convert)
+      implements Question.Reply {
+    @Override
+    public void answer(Answer answer) {
+      try {
+        asked.complete(convert.apply(answer));
+      } catch (RuntimeException e) {
+        asked.completeExceptionally(e); // a fault of our own is told by the session
+      }
+    }
+
+    @Override
+    public void outdated() {
+      asked.completeExceptionally(
+          Server.refused(ResponseErrorCode.ContentModified, "The text has changed since."));
+    }
+  }
+}

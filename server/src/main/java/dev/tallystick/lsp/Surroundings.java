@@ -1,0 +1,130 @@
+package dev.tallystick.lsp;
+
+import com.google.gson.JsonObject;
+import dev.tallystick.engine.Event;
+import dev.tallystick.engine.Loop;
+import dev.tallystick.prose.Format;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import org.eclipse.lsp4j.ConfigurationItem;
+import org.eclipse.lsp4j.ConfigurationParams;
+import org.eclipse.lsp4j.DidChangeConfigurationParams;
+import org.eclipse.lsp4j.DidChangeWatchedFilesParams;
+import org.eclipse.lsp4j.DidChangeWatchedFilesRegistrationOptions;
+import org.eclipse.lsp4j.DidChangeWorkspaceFoldersParams;
+import org.eclipse.lsp4j.FileChangeType;
+import org.eclipse.lsp4j.FileEvent;
+import org.eclipse.lsp4j.FileSystemWatcher;
+import org.eclipse.lsp4j.MessageParams;
+import org.eclipse.lsp4j.MessageType;
+import org.eclipse.lsp4j.Registration;
+import org.eclipse.lsp4j.RegistrationParams;
+import org.eclipse.lsp4j.jsonrpc.messages.Either;
+import org.eclipse.lsp4j.services.LanguageClient;
+import org.eclipse.lsp4j.services.WorkspaceService;
+
+/** What a client tells about folders, files and settings. */
+final class Surroundings implements WorkspaceService {
+  private static final String SECTION = "tallystick";
+
+  private Loop loop;
+  private Client client;
+  private LanguageClient remote;
+  private List<String> told = List.of();
+
+  /** The session has begun, but nothing may be sent yet. */
+  void begin(Loop with, Client of, LanguageClient at) {
+    loop = with;
+    client = of;
+    remote = at;
+  }
+
+  /** The client is ready: registers what is to be registered, and gets the settings. */
+  void ready() {
+    List<Registration> registrations = new ArrayList<>();
+    if (client.watches()) {
+      registrations.add(
+          new Registration("tallystick-files", "workspace/didChangeWatchedFiles", watchers()));
+    }
+    if (client.registersSettings()) {
+      JsonObject section = new JsonObject();
+      section.addProperty("section", SECTION);
+      registrations.add(
+          new Registration("tallystick-settings", "workspace/didChangeConfiguration", section));
+    }
+    if (!registrations.isEmpty()) {
+      remote.registerCapability(new RegistrationParams(registrations));
+    }
+    pullSettings(null);
+  }
+
+  private static DidChangeWatchedFilesRegistrationOptions watchers() {
+    String extensions =
+        Stream.of(Format.values())
+            .flatMap(format -> format.extensions().stream())
+            .collect(Collectors.joining(","));
+    FileSystemWatcher watcher = new FileSystemWatcher(Either.forLeft("**/*.{" + extensions + "}"));
+    return new DidChangeWatchedFilesRegistrationOptions(List.of(watcher));
+  }
+
+  @Override
+  public void didChangeConfiguration(DidChangeConfigurationParams params) {
+    if (loop != null) {
+      pullSettings(params.getSettings());
+    }
+  }
+
+  /** Asks for the settings, or takes those that came, from a client that cannot be asked. */
+  private void pullSettings(Object pushed) {
+    if (!client.tellsSettings()) {
+      takeSettings(section(pushed));
+      return;
+    }
+    ConfigurationItem item = new ConfigurationItem();
+    item.setSection(SECTION);
+    remote
+        .configuration(new ConfigurationParams(List.of(item)))
+        .handle((values, fault) -> values == null || values.isEmpty() ? null : values.get(0))
+        .thenAccept(this::takeSettings);
+  }
+
+  /** The section within all that was pushed, or the whole if the client sent the section only. */
+  private static Object section(Object pushed) {
+    boolean within = pushed instanceof JsonObject all && all.has(SECTION);
+    return within ? ((JsonObject) pushed).get(SECTION) : pushed;
+  }
+
+  private void takeSettings(Object section) {
+    SettingsReader.Read read = SettingsReader.read(section);
+    if (!read.problems().equals(told)) {
+      told = read.problems();
+      told.forEach(problem -> remote.showMessage(new MessageParams(MessageType.Warning, problem)));
+    }
+    loop.post(new Event.SettingsChanged(read.settings()));
+  }
+
+  @Override
+  public void didChangeWatchedFiles(DidChangeWatchedFilesParams params) {
+    List<Path> files = new ArrayList<>();
+    boolean listing = false;
+    for (FileEvent event : params.getChanges()) {
+      Uris.file(event.getUri()).ifPresent(files::add);
+      listing |= event.getType() != FileChangeType.Changed;
+    }
+    if (loop != null && !files.isEmpty()) {
+      loop.post(new Event.FilesChanged(files, listing));
+    }
+  }
+
+  @Override
+  public void didChangeWorkspaceFolders(DidChangeWorkspaceFoldersParams params) {
+    if (loop != null) {
+      List<Path> added = Client.paths(params.getEvent().getAdded());
+      List<Path> removed = Client.paths(params.getEvent().getRemoved());
+      loop.post(new Event.FoldersChanged(added, removed));
+    }
+  }
+}

@@ -1,0 +1,132 @@
+package dev.tallystick.lsp;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import org.eclipse.lsp4j.DidChangeConfigurationParams;
+import org.eclipse.lsp4j.InitializeParams;
+import org.eclipse.lsp4j.WorkspaceFolder;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** What the user sets, and what the user is asked. */
+class SettingsSessionTest {
+  @TempDir Path folder;
+
+  private static void pulls(InitializeParams params) {
+    params.getCapabilities().getWorkspace().setConfiguration(true);
+  }
+
+  private static void push(Talk talk, Object settings) {
+    talk.server
+        .getWorkspaceService()
+        .didChangeConfiguration(new DidChangeConfigurationParams(settings));
+    talk.settle();
+  }
+
+  @Test
+  void settingsArePulledFromAClientThatCanBeAsked() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    try (Talk talk = Talk.in(folder, SettingsSessionTest::pulls)) {
+      talk.settle();
+      talk.settings = Map.of("restMillis", 200, "colour", "green");
+      push(talk, Map.of());
+      Buffer german = talk.open(work.de(), Ferry.DE);
+      german.replace(Ferry.FOG_DE + "\n", "");
+      assertEquals(List.of(), talk.codes(work.en()));
+
+      talk.pass(200);
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+      assertTrue(talk.said.isEmpty());
+    }
+  }
+
+  @Test
+  void settingsAreTakenFromAClientThatPushesThem() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    try (Talk talk = Talk.in(folder)) {
+      push(talk, Map.of("tallystick", Map.of("restMillis", 0)));
+      Buffer german = talk.open(work.de(), Ferry.DE);
+      german.replace(Ferry.FOG_DE + "\n", "");
+      talk.pass(0);
+
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+    }
+  }
+
+  @Test
+  void theSourceLanguageTurnsAPairAround() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.in(folder)) {
+      talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+
+      push(talk, Map.of("sourceLanguage", "de"));
+      assertEquals(List.of("addition"), talk.codes(work.en()));
+      assertEquals(List.of(), talk.codes(work.de()));
+    }
+  }
+
+  @Test
+  void aWrongSettingIsToldOnceAndCountsAsNotSet() {
+    try (Talk talk = Talk.in(folder)) {
+      push(talk, Map.of("restMillis", "soon"));
+      push(talk, Map.of("restMillis", "soon"));
+      assertEquals(1, talk.said.size());
+      assertTrue(talk.said.get(0).contains("restMillis"));
+
+      push(talk, Map.of("sourceLanguage", "xx-nowhere"));
+      assertEquals(2, talk.said.size());
+      assertTrue(talk.said.get(1).contains("sourceLanguage"));
+    }
+  }
+
+  @Test
+  void whereTheSourceCannotBeToldTheUserIsAskedOnce() {
+    Work work = new Work(folder);
+    Path german = work.write("ferry.de.md", Ferry.DE);
+    Path french = work.write("ferry.fr.md", Ferry.FR_WITHOUT_FOG);
+    work.write("lamp.de.md", Ferry.DE);
+    Path lamp = work.write("lamp.fr.md", Ferry.FR);
+    try (Talk talk = Talk.in(folder)) {
+      talk.settle();
+      assertEquals(List.of(), talk.said);
+      talk.open(german, Ferry.DE);
+      talk.open(lamp, Ferry.FR);
+      talk.settle();
+      assertEquals(1, talk.said.size());
+      assertTrue(talk.said.get(0).contains("sourceLanguage to one of: de, fr."), talk.said.get(0));
+
+      push(talk, Map.of("sourceLanguage", "de"));
+      assertEquals(List.of("omission"), talk.codes(german));
+      assertEquals(List.of("omission"), talk.codes(french));
+      assertEquals(1, talk.said.size());
+    }
+  }
+
+  @Test
+  void settingsThatAnswerTheQuestionComeBeforeIt() {
+    Work work = new Work(folder);
+    Path german = work.write("ferry.de.md", Ferry.DE);
+    work.write("ferry.fr.md", Ferry.FR);
+    try (Talk talk = Talk.silent()) {
+      talk.settings = Map.of("sourceLanguage", "de");
+      InitializeParams params = Talk.params();
+      pulls(params);
+      params.setWorkspaceFolders(List.of(new WorkspaceFolder(folder.toUri().toString(), "work")));
+      talk.begin(params);
+      Buffer buffer = talk.open(german, Ferry.DE);
+
+      assertEquals(
+          Ferry.line(Ferry.FR, "Le treuil"),
+          buffer.hover("410 Gliedern").getContents().getRight().getValue());
+      assertTrue(talk.said.isEmpty());
+    }
+  }
+}
