@@ -1,0 +1,111 @@
+package dev.tallystick.cli;
+
+import dev.tallystick.align.Aligner;
+import dev.tallystick.engine.Disk;
+import dev.tallystick.engine.Intake;
+import dev.tallystick.engine.PairResult;
+import dev.tallystick.engine.Reading;
+import dev.tallystick.engine.Unreadable;
+import dev.tallystick.pairing.Language;
+import dev.tallystick.pairing.Pair;
+import dev.tallystick.pairing.Pairing;
+import dev.tallystick.pairing.Pairs;
+import dev.tallystick.pairing.Rules;
+import dev.tallystick.run.Cancellation;
+import dev.tallystick.text.Decoded;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * The files that a command was given, and what belongs together among them. What cannot be read is
+ * told at once on the error console; the rest goes on.
+ */
+final class Job {
+  private final Console console;
+  private final Pairs pairs;
+  private String lastSource = "";
+  private Reading lastReading;
+  private boolean complete = true;
+
+  private Job(Console console, Pairs pairs) {
+    this.console = console;
+    this.pairs = pairs;
+  }
+
+  /**
+   * A folder or several, or one source and one translation.
+   *
+   * @throws Refused if the paths are none of these
+   */
+  static Job of(Console console, List<Path> paths, Rules rules) {
+    for (Path path : paths) {
+      if (!Files.exists(path)) {
+        throw new Refused(path + ": there is no such file or folder. Check the name.");
+      }
+    }
+    List<Path> files = paths.stream().filter(Files::isRegularFile).toList();
+    if (files.isEmpty()) {
+      return new Job(console, Pairing.pairs(list(paths), rules));
+    }
+    if (files.size() == 2 && paths.size() == 2) {
+      Pair pair = TwoFiles.pair(paths.get(0), paths.get(1), rules);
+      return new Job(console, new Pairs(List.of(pair), List.of(), List.of()));
+    }
+    throw new Refused("Name one folder, or one source file and one translation.");
+  }
+
+  private static List<String> list(List<Path> folders) {
+    List<String> files = new ArrayList<>();
+    for (Path folder : folders) {
+      try {
+        for (Path file : Disk.REAL.files(folder)) {
+          files.add(file.normalize().toString().replace('\\', '/'));
+        }
+      } catch (Unreadable e) {
+        throw new Refused(e.getMessage());
+      }
+    }
+    return files;
+  }
+
+  Pairs pairs() {
+    return pairs;
+  }
+
+  /** Whether all files could be read so far. */
+  boolean complete() {
+    return complete;
+  }
+
+  /** The results of a pair; null if one of its files cannot be read. */
+  PairResult result(Pair pair, Aligner aligner, boolean draft) {
+    try {
+      Reading source = source(pair);
+      Reading target = read(pair.target(), pair.targetLanguage());
+      return PairResult.of(source, target, aligner, draft, Cancellation.NONE);
+    } catch (Unreadable e) {
+      complete = false;
+      console.err().println(e.getMessage());
+      return null;
+    }
+  }
+
+  /** Translations of one source follow each other, so the last reading is kept. */
+  private Reading source(Pair pair) throws Unreadable {
+    String key = pair.source() + " " + pair.sourceLanguage().tag();
+    if (!key.equals(lastSource)) {
+      lastReading = read(pair.source(), pair.sourceLanguage());
+      lastSource = key;
+    }
+    return lastReading;
+  }
+
+  private Reading read(String file, Language language) throws Unreadable {
+    Path path = Path.of(file);
+    Decoded decoded = Intake.load(Disk.REAL, path);
+    complete &= !Malformed.tell(console, file, decoded);
+    return Reading.of(decoded.text(), Intake.format(path), language.tag(), Cancellation.NONE);
+  }
+}

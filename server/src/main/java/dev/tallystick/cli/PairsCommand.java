@@ -1,0 +1,119 @@
+package dev.tallystick.cli;
+
+import dev.tallystick.align.Aligner;
+import dev.tallystick.check.Code;
+import dev.tallystick.check.Finding;
+import dev.tallystick.engine.PairResult;
+import dev.tallystick.pairing.Alone;
+import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.pairing.Pair;
+import java.io.IOException;
+import java.nio.file.Path;
+import java.util.EnumMap;
+import java.util.List;
+import java.util.Map;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** Says which files belong together. */
+@Command(
+    name = "pairs",
+    mixinStandardHelpOptions = true,
+    description =
+        "Prints which files belong together and why, which stand alone and why, and the progress"
+            + " of each pair.")
+final class PairsCommand implements Callable<Integer> {
+  private final Console console;
+
+  @Mixin private LanguageOptions languages;
+
+  @Option(
+      names = "--format",
+      paramLabel = "FORMAT",
+      defaultValue = "text",
+      description = "text (the default) or jsonl.")
+  private OutputFormat format;
+
+  @Parameters(arity = "1", paramLabel = "PATH", description = "A folder.")
+  private Path path;
+
+  PairsCommand(Console console) {
+    this.console = console;
+  }
+
+  @Override
+  public Integer call() throws IOException {
+    Job job = Job.of(console, List.of(path), languages.rules());
+    for (Pair pair : job.pairs().pairs()) {
+      PairResult result = job.result(pair, Aligner.ADAPTIVE, true);
+      if (result != null) {
+        print(pair, result);
+      }
+    }
+    if (format == OutputFormat.TEXT) {
+      for (Alone alone : job.pairs().alone()) {
+        console.out().println(alone.file() + ": alone. " + alone.reason());
+      }
+    }
+    for (Ambiguity ambiguity : job.pairs().ambiguities()) {
+      console.err().println(Choice.message(ambiguity));
+    }
+    boolean usable = job.complete() && job.pairs().ambiguities().isEmpty();
+    return usable ? Tallystick.FINE : Tallystick.UNUSABLE;
+  }
+
+  private void print(Pair pair, PairResult result) throws IOException {
+    int done = result.progress().done();
+    int pending = result.progress().pending();
+    if (format == OutputFormat.TEXT) {
+      int share = done + pending == 0 ? 100 : Math.round(100f * done / (done + pending));
+      console
+          .out()
+          .println(
+              pair.source()
+                  + " -> "
+                  + pair.target()
+                  + ": "
+                  + pair.sourceLanguage().tag()
+                  + " to "
+                  + pair.targetLanguage().tag()
+                  + ", paired by "
+                  + pair.why().word()
+                  + ", "
+                  + done
+                  + " words done, "
+                  + pending
+                  + " pending ("
+                  + share
+                  + " %), "
+                  + result.findings().size()
+                  + " findings");
+      return;
+    }
+    JsonLine line =
+        new JsonLine()
+            .put("source", pair.source())
+            .put("target", pair.target())
+            .put("sourceLanguage", pair.sourceLanguage().tag())
+            .put("targetLanguage", pair.targetLanguage().tag())
+            .put("why", pair.why().word())
+            .put("done", done)
+            .put("pending", pending)
+            .open("findings");
+    for (Map.Entry<Code, Integer> count : counts(result).entrySet()) {
+      line.put(count.getKey().word(), count.getValue());
+    }
+    line.close().printTo(console.out());
+  }
+
+  private static Map<Code, Integer> counts(PairResult result) {
+    Map<Code, Integer> counts = new EnumMap<>(Code.class);
+    for (Finding finding : result.findings()) {
+      counts.merge(finding.code(), 1, Integer::sum);
+    }
+    return counts;
+  }
+}

@@ -1,0 +1,2 @@
+/** The command line: commands, output for people and for programs, exit codes. */
+package dev.tallystick.cli;
