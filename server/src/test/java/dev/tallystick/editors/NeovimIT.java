@@ -1,0 +1,95 @@
+package dev.tallystick.editors;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import dev.tallystick.tidy.Repository;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
+import java.util.concurrent.TimeUnit;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/**
+ * A real Neovim with the packaged server on a copy of the demo job. The script in the test
+ * resources does the work of a translator and writes down what it sees.
+ */
+class NeovimIT {
+  private static final int SECONDS = 240;
+
+  @TempDir Path folder;
+
+  @Test
+  void aTranslatorSeesWhatIsMissingAndJumpsBothWays() throws Exception {
+    Path demo = copyOf(Repository.root().resolve("demo"), folder.resolve("demo"));
+    Map<String, String> before = contents(demo);
+    Path transcript = folder.resolve("transcript.txt");
+    Path log = folder.resolve("neovim.log");
+
+    int exit = neovim(demo, transcript, log);
+
+    assertEquals(0, exit, () -> told(transcript) + told(log));
+    assertTrue(told(transcript).endsWith("all seen\n"), () -> told(transcript) + told(log));
+    assertEquals(before, contents(demo), "a file was changed");
+  }
+
+  private int neovim(Path demo, Path transcript, Path log) throws Exception {
+    Path script = Path.of(getClass().getResource("/editors/neovim.lua").toURI());
+    ProcessBuilder builder =
+        new ProcessBuilder(
+            "nvim", "--headless", "-u", "NONE", "-i", "NONE", "-n", "-c", "luafile " + script);
+    Map<String, String> environment = builder.environment();
+    environment.put("JAVA", Path.of(System.getProperty("java.home"), "bin", "java").toString());
+    environment.put("JAR", Repository.root().resolve("server/target/tallystick.jar").toString());
+    environment.put("DEMO", demo.toRealPath().toString());
+    environment.put("TRANSCRIPT", transcript.toString());
+    for (String kind : List.of("CONFIG", "DATA", "STATE", "CACHE")) {
+      Path own = Files.createDirectories(folder.resolve("xdg").resolve(kind));
+      environment.put("XDG_" + kind + "_HOME", own.toString());
+    }
+    Process process = builder.redirectErrorStream(true).redirectOutput(log.toFile()).start();
+    process.getOutputStream().close();
+    boolean ended = process.waitFor(SECONDS, TimeUnit.SECONDS);
+    if (!ended) {
+      process.descendants().forEach(ProcessHandle::destroyForcibly);
+      process.destroyForcibly().waitFor();
+    }
+    assertTrue(ended, () -> "Neovim did not end\n" + told(transcript) + told(log));
+    return process.exitValue();
+  }
+
+  private static String told(Path file) {
+    return Files.exists(file) ? Repository.read(file) : "(no " + file.getFileName() + ")\n";
+  }
+
+  private static Path copyOf(Path from, Path to) throws IOException {
+    try (Stream<Path> paths = Files.walk(from)) {
+      for (Path path : paths.toList()) {
+        Path copy = to.resolve(from.relativize(path).toString());
+        if (Files.isDirectory(path)) {
+          Files.createDirectories(copy);
+        } else {
+          Files.copy(path, copy);
+        }
+      }
+    }
+    return to;
+  }
+
+  private static Map<String, String> contents(Path demo) throws IOException {
+    Map<String, String> contents = new TreeMap<>();
+    try (Stream<Path> paths = Files.walk(demo)) {
+      for (Path path : paths.filter(Files::isRegularFile).toList()) {
+        String bytes = new String(Files.readAllBytes(path), StandardCharsets.UTF_8);
+        contents.put(demo.relativize(path).toString(), bytes);
+      }
+    }
+    return contents;
+  }
+}

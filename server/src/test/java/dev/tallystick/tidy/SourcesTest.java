@@ -1,0 +1,80 @@
+package dev.tallystick.tidy;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.function.Predicate;
+import java.util.regex.Pattern;
+import org.junit.jupiter.api.Test;
+
+/** House rules that a machine can keep. */
+class SourcesTest {
+  private static final int LONGEST_FILE = 500;
+
+  /** Words in pieces, so that this file does not hold what it forbids. */
+  private static final Pattern SKIPPED =
+      Pattern.compile(
+          "@Dis"
+              + "abled|@Enab"
+              + "led|Assump"
+              + "tions|\\bassum"
+              + "e(That|True|False)\\(|abor"
+              + "t\\(");
+
+  /** Waiting for time instead of for something to happen. */
+  private static final Pattern SLEEP =
+      Pattern.compile("\\.sle" + "ep\\(|vim\\.wa" + "it\\(\\s*\\d+\\s*\\)|Locks" + "upport\\.park");
+
+  private static final Pattern MACHINE =
+      Pattern.compile(
+          "(?<![\\w.~-])/(wo"
+              + "rk|t"
+              + "mp|ro"
+              + "ot|ho"
+              + "me|Us"
+              + "ers)/|[A-Z]:\\\\Us"
+              + "ers");
+
+  @Test
+  void everyMainPackageSaysWhatItIsFor() {
+    for (Path file : Repository.files(Repository.main(), ".java")) {
+      Path info = file.resolveSibling("package-info.java");
+      assertTrue(Files.exists(info), () -> Repository.shown(info) + " is missing");
+      assertTrue(Repository.read(info).startsWith("/**"), () -> Repository.shown(info));
+    }
+  }
+
+  @Test
+  void noTestIsSkippedAndNoneSleeps() {
+    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua");
+    assertTrue(tests.size() > 10, tests::toString);
+    assertNone(tests, code -> SKIPPED.matcher(code).find() || SLEEP.matcher(code).find());
+  }
+
+  @Test
+  void noSourceIsTooLong() {
+    List<Path> sources = Repository.files(Repository.root(), ".java", ".lua", ".js", ".ts");
+    assertNone(sources, code -> code.lines().count() > LONGEST_FILE);
+  }
+
+  @Test
+  void nothingTellsOfTheMachineItWasWrittenOn() {
+    Path root = Repository.root();
+    assertNone(
+        Repository.files(
+            root, ".java", ".lua", ".js", ".ts", ".md", ".xml", ".json", ".jsonl", ".txt", "run"),
+        text -> MACHINE.matcher(text).find());
+  }
+
+  private static void assertNone(List<Path> files, Predicate<String> forbidden) {
+    List<String> found =
+        files.stream()
+            .filter(file -> forbidden.test(Repository.read(file)))
+            .map(Repository::shown)
+            .toList();
+    assertEquals(List.of(), found);
+  }
+}
