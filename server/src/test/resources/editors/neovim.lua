@@ -1,6 +1,6 @@
 -- Neovim as a client of the language server, driven as a translator would. Each step waits for what
 -- must come; the first that does not come ends the run. The caller gives, by the environment:
--- JAVA and JAR (how to start the server), DEMO (a copy of the demo job), TRANSCRIPT (where to tell).
+-- JAVA and JAR (how to start the server), DEMO (a copy of the demo job), TOLD (where to tell).
 
 local JAVA, JAR, DEMO = vim.env.JAVA, vim.env.JAR, vim.env.DEMO
 local PATIENCE = 30000 -- milliseconds; a machine at work may be slow, but the answer must come
@@ -11,11 +11,11 @@ local DELETED = 'Es setzt sich auf den Außenscheiben ab, kriecht durch jede Rit
 local ITS_SOURCE = 'It settles on the outer panes, creeps through every gap and dulls the glass long '
   .. 'before anyone on the shore would notice.'
 
-local transcript = assert(io.open(vim.env.TRANSCRIPT, 'w'))
+local told = assert(io.open(vim.env.TOLD, 'w'))
 
 local function tell(line)
-  transcript:write(line, '\n')
-  transcript:flush()
+  told:write(line, '\n')
+  told:flush()
 end
 
 --- Waits for a condition; fails with what was seen instead.
@@ -186,5 +186,5 @@ local fine, fault = xpcall(session, function(message)
   return type(message) == 'string' and message or vim.inspect(message)
 end)
 tell(fine and 'all seen' or tostring(fault))
-transcript:close()
+told:close()
 vim.cmd(fine and 'qall!' or 'cquit 1')

@@ -29,14 +29,14 @@ public enum Aligner {
       Fit fit = Fit.start(ratio(sides), sides.target());
       Scorer coarse = Evidence.coarse(texts, fit);
       Band band =
-          Anchors.band(texts.shared().anchors(), sides.target().size(), sides.source().size())
+          Anchors.band(texts.shared().anchors(), sides)
               .orElseGet(() -> firstLook(coarse, sides, cancellation));
       for (int round = 0; round < ROUNDS; round++) {
         Scorer scorer = round == 0 ? Evidence.coarse(texts, fit) : Evidence.full(texts, fit);
         Lattice lattice = Lattice.banded(scorer, sides, band, cancellation);
         Posteriors posteriors = new Posteriors(lattice, cancellation);
         fit = Refit.from(posteriors, lattice, fit);
-        band = posteriors.likely(LIKELY, MARGIN);
+        band = Band.around(lattice.chain(), sides);
       }
       Evidence evidence = Evidence.full(texts, fit);
       Weighed weighed = Weighed.of(evidence, band, sides, cancellation);
@@ -56,11 +56,6 @@ public enum Aligner {
 
   /** So large a share of the target left out, or of the source, and the first look goes on. */
   private static final double SUSPICIOUS = 0.02;
-
-  /** Later rounds look only where a chain passes with this probability, and so far around. */
-  private static final double LIKELY = 1e-5;
-
-  private static final int MARGIN = 3;
 
   /** Aligns two texts. Either may be empty. */
   public Alignment align(List<Unit> source, List<Unit> target, Cancellation cancellation) {
@@ -90,7 +85,7 @@ public enum Aligner {
         break;
       }
     }
-    return Band.around(chain, sides.target().size(), sides.source().size());
+    return Band.around(chain, sides);
   }
 
   /** The larger a text, the less can be spent on looking far. */

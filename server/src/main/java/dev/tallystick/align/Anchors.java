@@ -35,7 +35,9 @@ final class Anchors {
   private Anchors() {}
 
   /** The band along the anchors, or empty if they are too few. */
-  static Optional<Band> band(List<Anchor> candidates, int targets, int sources) {
+  static Optional<Band> band(List<Anchor> candidates, Sides sides) {
+    int targets = sides.target().size();
+    int sources = sides.source().size();
     List<Anchor> anchors = agreeing(inOrder(candidates));
     Band band = along(anchors, targets, sources);
     long cells = 0;

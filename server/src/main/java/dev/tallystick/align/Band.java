@@ -11,7 +11,7 @@ import java.util.List;
  */
 record Band(int[] first, int[] last) {
   /** How far around a chain to look where it is plain sailing: columns, and rows too. */
-  private static final int NEAR = 4;
+  private static final int NEAR = 3;
 
   /** The same around places where something is left out or much is tied together. */
   private static final int FAR = 12;
@@ -20,7 +20,9 @@ record Band(int[] first, int[] last) {
   private static final int PLAIN = 3;
 
   /** The band around a chain of matches: a pure function of the chain. */
-  static Band around(List<Match> chain, int targets, int sources) {
+  static Band around(List<Match> chain, Sides sides) {
+    int targets = sides.target().size();
+    int sources = sides.source().size();
     int[] low = new int[targets + 1];
     int[] high = new int[targets + 1];
     int[] trouble = new int[targets + 2];
@@ -47,20 +49,5 @@ record Band(int[] first, int[] last) {
       last[row] = Math.min(sources, high[Math.min(targets, row + radius)] + radius);
     }
     return new Band(first, last);
-  }
-
-  /** The band with so many columns more at either side, also seen from so many rows away. */
-  Band widened(int margin, int sources) {
-    int rows = first.length;
-    int[] from = new int[rows];
-    int[] to = new int[rows];
-    for (int row = 0; row < rows; row++) {
-      from[row] = sources;
-      for (int near = Math.max(0, row - margin); near < Math.min(rows, row + margin + 1); near++) {
-        from[row] = Math.min(from[row], Math.max(0, first[near] - margin));
-        to[row] = Math.max(to[row], Math.min(sources, last[near] + margin));
-      }
-    }
-    return new Band(from, to);
   }
 }

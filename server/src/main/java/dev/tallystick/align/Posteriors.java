@@ -80,26 +80,6 @@ final class Posteriors {
     return share(best, forward.sum[from] * onward[toRow].sum[to]);
   }
 
-  /** The band of all cells that a chain goes through with some probability, and a little more. */
-  Band likely(double least, int margin) {
-    double floor = Math.log(least);
-    int[] first = new int[onward.length];
-    int[] last = new int[onward.length];
-    for (int row = 0; row < onward.length; row++) {
-      Row forward = lattice.row(row);
-      first[row] = forward.last;
-      last[row] = forward.first;
-      for (int at = 0; at < forward.best.length; at++) {
-        double below = forward.best[at] + onward[row].best[at] - totalBest;
-        if (below > floor) {
-          first[row] = Math.min(first[row], forward.first + at);
-          last[row] = Math.max(last[row], forward.first + at);
-        }
-      }
-    }
-    return new Band(first, last).widened(margin, sources);
-  }
-
   /** For each source unit the posterior that it is left out. */
   double[] sourceNull() {
     double[] nulls = new double[sources];

@@ -29,8 +29,8 @@ final class SharedWords {
 
   private final Side given;
 
-  /** The words of the given side, ascending; a word's number is its index here. */
-  private final long[] vocabulary;
+  /** The words of the given side. */
+  private final Vocabulary vocabulary;
 
   /**
    * Words before each given unit; the same less the trust in those shared; before each made unit.
@@ -62,14 +62,14 @@ final class SharedWords {
   /** Evidence for the words of {@code madeSide}, given those of {@code givenSide}. */
   SharedWords(Side givenSide, Side madeSide) {
     this.given = givenSide;
-    this.vocabulary = vocabulary(givenSide);
+    this.vocabulary = Vocabulary.of(givenSide);
     this.madeBefore = new int[madeSide.size() + 1];
     this.made = new int[madeSide.size()][];
-    this.counts = new int[vocabulary.length];
-    this.rarity = new double[vocabulary.length];
+    this.counts = new int[vocabulary.size()];
+    this.rarity = new double[vocabulary.size()];
     countMade(madeSide);
-    this.places = new int[vocabulary.length][];
-    this.trusts = new double[vocabulary.length][];
+    this.places = new int[vocabulary.size()][];
+    this.trusts = new double[vocabulary.size()][];
     this.givenBefore = new int[givenSide.size() + 1];
     this.generalBefore = new double[givenSide.size() + 1];
     placeGiven();
@@ -91,28 +91,6 @@ final class SharedWords {
     return anchors;
   }
 
-  private static long[] vocabulary(Side side) {
-    int words = 0;
-    for (Unit unit : side.units) {
-      words += unit.words().length;
-    }
-    long[] keys = new long[words];
-    int at = 0;
-    for (Unit unit : side.units) {
-      for (Unit.Word word : unit.words()) {
-        keys[at++] = word.key();
-      }
-    }
-    Arrays.sort(keys);
-    int distinct = 0;
-    for (int i = 0; i < keys.length; i++) {
-      if (i == 0 || keys[i] != keys[i - 1]) {
-        keys[distinct++] = keys[i];
-      }
-    }
-    return Arrays.copyOf(keys, distinct);
-  }
-
   private void countMade(Side madeSide) {
     for (int j = 0; j < made.length; j++) {
       Unit.Word[] words = madeSide.units[j].words();
@@ -120,7 +98,7 @@ final class SharedWords {
       int[] shared = new int[words.length];
       int n = 0;
       for (Unit.Word word : words) {
-        int number = Arrays.binarySearch(vocabulary, word.key());
+        int number = vocabulary.number(word);
         if (number >= 0) {
           shared[n++] = number;
           counts[number]++;
@@ -128,7 +106,7 @@ final class SharedWords {
       }
       made[j] = Arrays.copyOf(shared, n);
     }
-    double words = madeBefore[made.length] + 0.5 * vocabulary.length;
+    double words = madeBefore[made.length] + 0.5 * vocabulary.size();
     for (int number = 0; number < counts.length; number++) {
       rarity[number] = counts[number] == 0 ? 0 : words / (counts[number] + 0.5);
     }
@@ -150,12 +128,12 @@ final class SharedWords {
   }
 
   private void placeGiven() {
-    int[] filled = new int[vocabulary.length];
+    int[] filled = new int[vocabulary.size()];
     for (int i = 0; i < given.size(); i++) {
       Unit.Word[] words = given.units[i].words();
       double general = words.length;
       for (Unit.Word word : words) {
-        int number = Arrays.binarySearch(vocabulary, word.key());
+        int number = vocabulary.number(word);
         if (rarity[number] > 0) {
           general -= word.trust();
         }

@@ -55,27 +55,22 @@ class EvidencePartsTest {
     for (int i = 50; i < 100; i++) {
       chain.add(new Match(i + 1, i + 2, i, i + 1, 1));
     }
-    Band band = Band.around(chain, 100, 101);
-    assertEquals(20 - 8, band.first()[20]);
-    assertEquals(20 + 8, band.last()[20]);
-    assertEquals(80 + 1 - 8, band.first()[80]);
-    assertEquals(80 + 1 + 8, band.last()[80]);
+    Sides sides = Sample.sides(Sample.units(new int[101]), Sample.units(new int[100]));
+    Band band = Band.around(chain, sides);
+    assertEquals(20 - 6, band.first()[20]);
+    assertEquals(20 + 6, band.last()[20]);
+    assertEquals(80 + 1 - 6, band.first()[80]);
+    assertEquals(80 + 1 + 6, band.last()[80]);
     assertEquals(50 - 24, band.first()[50]);
     assertEquals(50 + 1 + 24, band.last()[50]);
   }
 
   @Test
   void aBandStaysInTheText() {
-    Band band = Band.around(List.of(new Match(0, 2, 0, 3, 1)), 3, 2).widened(4, 2);
+    Sides sides = Sample.sides(Sample.units(50, 60), Sample.units(40, 30, 40));
+    Band band = Band.around(List.of(new Match(0, 2, 0, 3, 1)), sides);
     assertArrayEquals(new int[] {0, 0, 0, 0}, band.first());
     assertArrayEquals(new int[] {2, 2, 2, 2}, band.last());
-  }
-
-  @Test
-  void widerIsAlsoSeenFromTheRowsBeside() {
-    Band band = new Band(new int[] {0, 10, 20}, new int[] {3, 13, 23}).widened(1, 50);
-    assertArrayEquals(new int[] {0, 0, 9}, band.first());
-    assertArrayEquals(new int[] {14, 24, 24}, band.last());
   }
 
   @Test

@@ -29,17 +29,17 @@ class NeovimIT {
   void aTranslatorSeesWhatIsMissingAndJumpsBothWays() throws Exception {
     Path demo = copyOf(Repository.root().resolve("demo"), folder.resolve("demo"));
     Map<String, String> before = contents(demo);
-    Path transcript = folder.resolve("transcript.txt");
+    Path told = folder.resolve("told.txt");
     Path log = folder.resolve("neovim.log");
 
-    int exit = neovim(demo, transcript, log);
+    int exit = neovim(demo, told, log);
 
-    assertEquals(0, exit, () -> told(transcript) + told(log));
-    assertTrue(told(transcript).endsWith("all seen\n"), () -> told(transcript) + told(log));
+    assertEquals(0, exit, () -> told(told) + told(log));
+    assertTrue(told(told).endsWith("all seen\n"), () -> told(told) + told(log));
     assertEquals(before, contents(demo), "a file was changed");
   }
 
-  private int neovim(Path demo, Path transcript, Path log) throws Exception {
+  private int neovim(Path demo, Path told, Path log) throws Exception {
     Path script = Path.of(getClass().getResource("/editors/neovim.lua").toURI());
     ProcessBuilder builder =
         new ProcessBuilder(
@@ -48,7 +48,7 @@ class NeovimIT {
     environment.put("JAVA", Path.of(System.getProperty("java.home"), "bin", "java").toString());
     environment.put("JAR", Repository.root().resolve("server/target/tallystick.jar").toString());
     environment.put("DEMO", demo.toRealPath().toString());
-    environment.put("TRANSCRIPT", transcript.toString());
+    environment.put("TOLD", told.toString());
     for (String kind : List.of("CONFIG", "DATA", "STATE", "CACHE")) {
       Path own = Files.createDirectories(folder.resolve("xdg").resolve(kind));
       environment.put("XDG_" + kind + "_HOME", own.toString());
@@ -60,7 +60,7 @@ class NeovimIT {
       process.descendants().forEach(ProcessHandle::destroyForcibly);
       process.destroyForcibly().waitFor();
     }
-    assertTrue(ended, () -> "Neovim did not end\n" + told(transcript) + told(log));
+    assertTrue(ended, () -> "Neovim did not end\n" + told(told) + told(log));
     return process.exitValue();
   }
 
