@@ -68,13 +68,21 @@ public final class Pending {
     return source.subList(run.to(), source.size()).stream().allMatch(Segment::verbatim);
   }
 
-  /** Whether a heading opens the run or stands right before it. */
+  /** Whether a heading, or the start of the text, opens the run or stands right before it. */
   private static boolean startsSection(List<Segment> source, Run run) {
-    return run.from() == 0 || isHeading(source, run.from()) || isHeading(source, run.from() - 1);
+    int before = run.from() - 1;
+    while (before >= 0 && source.get(before).verbatim()) {
+      before--;
+    }
+    return before < 0 || isHeading(source, run.from()) || isHeading(source, before);
   }
 
   private static boolean endsSection(List<Segment> source, Run run) {
-    return isHeading(source, run.to())
+    int behind = run.to();
+    while (source.get(behind).verbatim()) {
+      behind++; // a sentence comes, for the run is not the last
+    }
+    return isHeading(source, behind)
         && source.subList(run.from(), run.to()).stream()
             .anyMatch(segment -> segment.block().kind() != Block.Kind.HEADING);
   }

@@ -3,6 +3,7 @@ package dev.tallystick.check;
 import dev.tallystick.align.Match;
 import dev.tallystick.segment.Words;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -16,24 +17,18 @@ final class Untranslated {
 
   static List<Finding> find(Subject subject, Pending pending) {
     int[] copyOf = copies(subject);
-    double[] sure = new double[copyOf.length];
-    for (Match match : subject.alignment().matches()) {
-      if (match.twoSided()) {
-        sure[match.targetFrom()] = match.confidence();
-      }
-    }
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
-    for (Run run : Run.of(subject.target(), i -> copyOf[i] >= 0 && !pending.source(copyOf[i]))) {
-      for (int i = run.from(); i < run.to(); i++) {
-        if (copyOf[i] >= 0) {
+    for (Match match : subject.alignment().matches()) {
+      for (int t = match.targetFrom(); t < match.targetTo(); t++) {
+        if (copyOf[t] >= 0 && !pending.source(copyOf[t])) {
           findings.add(
               new Finding(
                   Code.UNTRANSLATED,
                   OnSide.TARGET,
-                  subject.target().get(i).span(),
-                  subject.source().get(copyOf[i]).span(),
-                  sure[i],
+                  subject.target().get(t).span(),
+                  subject.source().get(copyOf[t]).span(),
+                  match.confidence(),
                   wording.untranslated(),
                   ""));
         }
@@ -45,7 +40,7 @@ final class Untranslated {
   /** For each target sentence the source sentence that it copies, or -1. */
   static int[] copies(Subject subject) {
     int[] copyOf = new int[subject.target().size()];
-    java.util.Arrays.fill(copyOf, -1);
+    Arrays.fill(copyOf, -1);
     for (Match match : subject.alignment().matches()) {
       if (match.sources() == match.targets()) {
         for (int k = 0; k < match.targets(); k++) {

@@ -179,4 +179,22 @@ class DraftPairsTest {
     assertEquals(0, whole.pending());
     assertTrue(whole.done() > draft.progress().done());
   }
+
+  @Test
+  void aSectionThatEndsInAVerbatimBlockIsPendingToo() {
+    String withCode =
+        DONE
+            + """
+            ¶## On the night shift
+            | - ~
+            ¶ The night shift leaves by the boiler room, where a lamp is always lit.
+            | - ~
+            Count heads at the pump, and write the number on the slate with chalk.
+            | - ~
+            ¶```night 17 heads```
+            | -
+            """
+            + REST;
+    PAIR.draft(withCode);
+  }
 }
