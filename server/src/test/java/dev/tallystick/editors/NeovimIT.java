@@ -32,21 +32,51 @@ class NeovimIT {
     Path told = folder.resolve("told.txt");
     Path log = folder.resolve("neovim.log");
 
-    int exit = neovim(demo, told, log);
+    int exit = neovim("neovim.lua", demo, told, log);
 
     assertEquals(0, exit, () -> told(told) + told(log));
     assertTrue(told(told).endsWith("all seen\n"), () -> told(told) + told(log));
     assertEquals(before, contents(demo), "a file was changed");
   }
 
-  private int neovim(Path demo, Path told, Path log) throws Exception {
-    Path script = Path.of(getClass().getResource("/editors/neovim.lua").toURI());
+  /** Both files open, one server, each finding once. */
+  @Test
+  void theSetUpInTheReadmeWorks() throws Exception {
+    Path demo = copyOf(Repository.root().resolve("demo"), folder.resolve("demo"));
+    Path told = folder.resolve("told.txt");
+    Path log = folder.resolve("neovim.log");
+    String readme = Repository.read(Repository.root().resolve("README.md"));
+    int from = readme.indexOf("```lua") + "```lua".length();
+    String snippet =
+        readme
+            .substring(from, readme.indexOf("```", from))
+            .replace("/path/to/tallystick.jar", jar())
+            .replace("\"java\"", "\"" + java() + "\"");
+    Files.writeString(folder.resolve("init.lua"), snippet);
+
+    int exit = neovim("readme.lua", demo, told, log);
+
+    assertEquals("1 clients, 3 and 1 findings", told(told), () -> told(log));
+    assertEquals(0, exit);
+  }
+
+  private static String java() {
+    return Path.of(System.getProperty("java.home"), "bin", "java").toString();
+  }
+
+  private static String jar() {
+    return Repository.root().resolve("server/target/tallystick.jar").toString();
+  }
+
+  private int neovim(String name, Path demo, Path told, Path log) throws Exception {
+    Path script = Path.of(getClass().getResource("/editors/" + name).toURI());
     ProcessBuilder builder =
         new ProcessBuilder(
             "nvim", "--headless", "-u", "NONE", "-i", "NONE", "-n", "-c", "luafile " + script);
     Map<String, String> environment = builder.environment();
-    environment.put("JAVA", Path.of(System.getProperty("java.home"), "bin", "java").toString());
-    environment.put("JAR", Repository.root().resolve("server/target/tallystick.jar").toString());
+    environment.put("JAVA", java());
+    environment.put("JAR", jar());
+    environment.put("SNIPPET", folder.resolve("init.lua").toString());
     environment.put("DEMO", demo.toRealPath().toString());
     environment.put("TOLD", told.toString());
     for (String kind : List.of("CONFIG", "DATA", "STATE", "CACHE")) {
