@@ -3,10 +3,9 @@ package dev.tallystick.cli;
 import dev.tallystick.check.Code;
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.OnSide;
+import dev.tallystick.check.Severity;
 import dev.tallystick.engine.PairResult;
-import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Pair;
-import dev.tallystick.text.Text;
 import java.io.IOException;
 import java.util.EnumMap;
 import java.util.Map;
@@ -28,10 +27,6 @@ abstract class FindingPrinter {
 
   private static String file(Pair pair, OnSide side) {
     return side == OnSide.SOURCE ? pair.source() : pair.target();
-  }
-
-  private static Text text(PairResult result, OnSide side) {
-    return side == OnSide.SOURCE ? result.source().text() : result.target().text();
   }
 
   /** A heading for each pair with findings, and a line for each finding. */
@@ -58,8 +53,8 @@ abstract class FindingPrinter {
       console.out().println(console.paint(pair.source() + " -> " + pair.target(), "1"));
       for (Finding finding : result.findings()) {
         counts.merge(finding.code(), 1, Integer::sum);
-        Location at = Location.of(text(result, finding.side()), finding.span().start());
-        boolean loud = finding.severity().word().equals("warning");
+        Location at = Location.of(result.reading(finding.side()).text(), finding.span().start());
+        boolean loud = finding.severity() == Severity.WARNING;
         console
             .out()
             .println(
@@ -108,7 +103,7 @@ abstract class FindingPrinter {
     @Override
     void print(Pair pair, PairResult result) throws IOException {
       for (Finding finding : result.findings()) {
-        Location at = Location.of(text(result, finding.side()), finding.span().start());
+        Location at = Location.of(result.reading(finding.side()).text(), finding.span().start());
         new JsonLine()
             .put("code", finding.code().word())
             .put("severity", finding.severity().word())
@@ -118,7 +113,7 @@ abstract class FindingPrinter {
             .put("end", finding.span().end())
             .put("line", at.line())
             .put("column", at.column())
-            .put("language", language(pair))
+            .put("language", pair.targetLanguage().tag())
             .open("counterpart")
             .put("file", file(pair, finding.side().other()))
             .put("start", finding.counterpart().start())
@@ -128,11 +123,6 @@ abstract class FindingPrinter {
             .put("message", finding.message())
             .printTo(console.out());
       }
-    }
-
-    private static String language(Pair pair) {
-      Language language = pair.targetLanguage();
-      return language.tag();
     }
 
     @Override

@@ -16,7 +16,10 @@ import dev.tallystick.text.Decoded;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 
 /**
  * The files that a command was given, and what belongs together among them. What cannot be read is
@@ -25,13 +28,15 @@ import java.util.List;
 final class Job {
   private final Console console;
   private final Pairs pairs;
+  private final Map<String, Path> files;
   private String lastSource = "";
   private Reading lastReading;
   private boolean complete = true;
 
-  private Job(Console console, Pairs pairs) {
+  private Job(Console console, Pairs pairs, Map<String, Path> files) {
     this.console = console;
     this.pairs = pairs;
+    this.files = files;
   }
 
   /**
@@ -45,29 +50,47 @@ final class Job {
         throw new Refused(path + ": there is no such file or folder. Check the name.");
       }
     }
-    List<Path> files = paths.stream().filter(Files::isRegularFile).toList();
-    if (files.isEmpty()) {
-      return new Job(console, Pairing.pairs(list(paths), rules));
+    if (paths.stream().allMatch(Files::isDirectory)) {
+      return ofFolders(console, paths, rules);
     }
-    if (files.size() == 2 && paths.size() == 2) {
-      Pair pair = TwoFiles.pair(paths.get(0), paths.get(1), rules);
-      return new Job(console, new Pairs(List.of(pair), List.of(), List.of()));
+    if (paths.size() == 2 && paths.stream().noneMatch(Files::isDirectory)) {
+      String source = paths.get(0).toString();
+      String target = paths.get(1).toString();
+      List<Pair> pair = List.of(Pairing.named(source, target, rules));
+      Map<String, Path> files = new HashMap<>();
+      files.put(source, paths.get(0));
+      files.put(target, paths.get(1));
+      return new Job(console, new Pairs(pair, List.of(), List.of()), files);
     }
     throw new Refused("Name one folder, or one source file and one translation.");
   }
 
-  private static List<String> list(List<Path> folders) {
-    List<String> files = new ArrayList<>();
+  /**
+   * What is in folders.
+   *
+   * @throws Refused if one cannot be listed
+   */
+  static Job ofFolders(Console console, List<Path> folders, Rules rules) {
+    // Where the machine's encoding lacks a character of a name, no path can be made of it again.
+    Map<String, Path> files = new LinkedHashMap<>();
+    List<String> unread = new ArrayList<>();
     for (Path folder : folders) {
       try {
-        for (Path file : Disk.REAL.files(folder)) {
-          files.add(file.normalize().toString().replace('\\', '/'));
+        for (Path file : Disk.REAL.files(folder, unread::add)) {
+          files.put(slashes(file.normalize()), file);
         }
       } catch (Unreadable e) {
         throw new Refused(e.getMessage());
       }
     }
-    return files;
+    unread.forEach(console.err()::println);
+    Job job = new Job(console, Pairing.pairs(files.keySet(), rules), files);
+    job.complete = unread.isEmpty();
+    return job;
+  }
+
+  private static String slashes(Path path) {
+    return path.toString().replace(path.getFileSystem().getSeparator(), "/");
   }
 
   Pairs pairs() {
@@ -103,7 +126,7 @@ final class Job {
   }
 
   private Reading read(String file, Language language) throws Unreadable {
-    Path path = Path.of(file);
+    Path path = files.get(file);
     Decoded decoded = Intake.load(Disk.REAL, path);
     complete &= !Malformed.tell(console, file, decoded);
     return Reading.of(decoded.text(), Intake.format(path), language.tag(), Cancellation.NONE);

@@ -8,6 +8,7 @@ import dev.tallystick.pairing.Alone;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.pairing.Pair;
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.EnumMap;
 import java.util.List;
@@ -46,7 +47,10 @@ final class PairsCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
-    Job job = Job.of(console, List.of(path), languages.rules());
+    if (!Files.isDirectory(path)) {
+      throw new Refused(path + ": this is no folder. Name the folder whose files to look at.");
+    }
+    Job job = Job.ofFolders(console, List.of(path), languages.rules());
     for (Pair pair : job.pairs().pairs()) {
       PairResult result = job.result(pair, Aligner.ADAPTIVE, true);
       if (result != null) {
@@ -69,7 +73,7 @@ final class PairsCommand implements Callable<Integer> {
     int done = result.progress().done();
     int pending = result.progress().pending();
     if (format == OutputFormat.TEXT) {
-      int share = done + pending == 0 ? 100 : Math.round(100f * done / (done + pending));
+      int share = done + pending == 0 ? 100 : (int) (100L * done / (done + pending));
       console
           .out()
           .println(

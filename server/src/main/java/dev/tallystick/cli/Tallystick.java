@@ -1,5 +1,6 @@
 package dev.tallystick.cli;
 
+import dev.tallystick.run.Fault;
 import dev.tallystick.segment.Segmenter;
 import java.util.concurrent.CompletableFuture;
 import picocli.CommandLine;
@@ -56,6 +57,10 @@ public final class Tallystick implements Runnable {
     line.setExecutionExceptionHandler((e, command, parsed) -> fault(console, e));
     int code = execute(line, console, args);
     console.flush();
+    if (console.out().checkError()) {
+      console.err().println("The results could not be written. Is the disk full?");
+      return FAULT;
+    }
     return code;
   }
 
@@ -73,9 +78,7 @@ public final class Tallystick implements Runnable {
       console.err().println(refused.getMessage());
       return UNUSABLE;
     }
-    StackTraceElement[] trace = e.getStackTrace();
-    String where = trace.length > 0 ? " at " + trace[0] : "";
-    console.err().println("This is a fault of Tallystick itself: " + e + where + ".");
+    console.err().println("This is a fault of Tallystick itself: " + Fault.where(e) + ".");
     console.err().println("Your files are as they were. Please report it with the line above.");
     return FAULT;
   }

@@ -8,11 +8,9 @@ import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Pair;
 import dev.tallystick.pairing.Pairing;
 import dev.tallystick.pairing.Rules;
-import dev.tallystick.pairing.Why;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.text.Decoded;
 import java.nio.file.Path;
-import java.util.List;
 import java.util.concurrent.CompletableFuture;
 
 /**
@@ -30,7 +28,7 @@ record TwoFiles(Pair pair, Reading source, Reading target, boolean complete) {
    * @throws Refused if one cannot be read
    */
   static TwoFiles read(Console console, Path source, Path target, Rules rules) {
-    Pair pair = pair(source, target, rules);
+    Pair pair = Pairing.named(source.toString(), target.toString(), rules);
     Decoded sourceText = load(source);
     Decoded targetText = load(target);
     boolean malformed = Malformed.tell(console, source, sourceText);
@@ -39,24 +37,6 @@ record TwoFiles(Pair pair, Reading source, Reading target, boolean complete) {
         CompletableFuture.supplyAsync(() -> reading(source, sourceText, pair.sourceLanguage()));
     Reading translation = reading(target, targetText, pair.targetLanguage());
     return new TwoFiles(pair, reading.join(), translation, !malformed);
-  }
-
-  /** The pair that two named files are: their languages by the options, else by their names. */
-  static Pair pair(Path source, Path target, Rules rules) {
-    Pair byOptions =
-        new Pair(
-            slashes(source),
-            slashes(target),
-            rules.sourceLanguage().orElse(Language.UNKNOWN),
-            rules.targetLanguage().orElse(Language.UNKNOWN),
-            Why.ARGUMENT);
-    if (rules.sourceLanguage().isPresent() && rules.targetLanguage().isPresent()) {
-      return byOptions;
-    }
-    return Pairing.pairs(List.of(slashes(source), slashes(target)), rules).pairs().stream()
-        .filter(pair -> pair.source().equals(slashes(source)))
-        .findFirst()
-        .orElse(byOptions);
   }
 
   private static Decoded load(Path file) {
@@ -69,9 +49,5 @@ record TwoFiles(Pair pair, Reading source, Reading target, boolean complete) {
 
   private static Reading reading(Path file, Decoded decoded, Language language) {
     return Reading.of(decoded.text(), Intake.format(file), language.tag(), Cancellation.NONE);
-  }
-
-  private static String slashes(Path path) {
-    return path.toString().replace('\\', '/');
   }
 }

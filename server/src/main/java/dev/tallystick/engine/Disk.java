@@ -11,6 +11,7 @@ import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Set;
+import java.util.function.Consumer;
 
 /** The files of this machine, as far as the engine reads them. It never writes any. */
 public interface Disk {
@@ -41,6 +42,15 @@ public interface Disk {
     return files(folder.path()).stream().filter(folder::holds).toList();
   }
 
+  /**
+   * The same, with a message for each folder or file on the way that cannot be looked into.
+   *
+   * @throws Unreadable if the folder itself cannot be listed
+   */
+  default List<Path> files(Path folder, Consumer<String> unread) throws Unreadable {
+    return files(folder);
+  }
+
   /** The disk of this machine. */
   final class RealDisk implements Disk {
     private RealDisk() {}
@@ -50,8 +60,11 @@ public interface Disk {
       if (!Files.exists(file)) {
         throw new Unreadable(file + ": there is no such file. Check the name and the folder.");
       }
-      if (!Files.isRegularFile(file)) {
+      if (Files.isDirectory(file)) {
         throw new Unreadable(file + ": this is a folder, not a file. Name a file in it.");
+      }
+      if (!Files.isRegularFile(file)) {
+        throw new Unreadable(file + ": this is no file with a text in it. Name one that is.");
       }
       try {
         return Files.readAllBytes(file);
@@ -68,10 +81,19 @@ public interface Disk {
 
     @Override
     public List<Path> files(Folder folder) throws Unreadable {
+      return files(folder, message -> {});
+    }
+
+    @Override
+    public List<Path> files(Path folder, Consumer<String> unread) throws Unreadable {
+      return files(new Folder(folder, Folder.DEEP), unread);
+    }
+
+    private static List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
       List<Path> found = new ArrayList<>();
       Path path = folder.path();
       try {
-        Collector collector = new Collector(path, path.toRealPath(), found);
+        Collector collector = new Collector(path, path.toRealPath(), found, unread);
         Files.walkFileTree(path, Set.of(), folder.depth(), collector);
       } catch (IOException e) {
         throw new Unreadable(path + ": cannot be listed (" + e.getMessage() + ").");
@@ -86,11 +108,13 @@ public interface Disk {
     private final Path folder;
     private final Path root;
     private final List<Path> found;
+    private final Consumer<String> unread;
 
-    private Collector(Path folder, Path root, List<Path> found) {
+    private Collector(Path folder, Path root, List<Path> found, Consumer<String> unread) {
       this.folder = folder;
       this.root = root;
       this.found = found;
+      this.unread = unread;
     }
 
     @Override
@@ -109,7 +133,11 @@ public interface Disk {
     }
 
     @Override
-    public FileVisitResult visitFileFailed(Path file, IOException e) {
+    public FileVisitResult visitFileFailed(Path file, IOException e) throws IOException {
+      if (file.equals(folder)) {
+        throw e;
+      }
+      unread.accept(file + ": cannot be looked into, and was left out. Check who may read it.");
       return FileVisitResult.CONTINUE;
     }
 

@@ -87,4 +87,17 @@ public final class Pairing {
     List<Tagged> readings = groups.readings(path);
     return readings.isEmpty() ? Reasons.noTag(path) : Reasons.noSibling(readings.get(0));
   }
+
+  /**
+   * A source and a translation that somebody has named as such, whatever they are called. Their
+   * languages are those of the rules, else those that their paths name.
+   */
+  public static Pair named(String source, String target, Rules rules) {
+    return new Pair(
+        source,
+        target,
+        rules.sourceLanguage().orElseGet(() -> Tags.only(source)),
+        rules.targetLanguage().orElseGet(() -> Tags.only(target)),
+        Why.ARGUMENT);
+  }
 }

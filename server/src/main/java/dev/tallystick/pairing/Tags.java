@@ -60,6 +60,18 @@ final class Tags {
     return readings;
   }
 
+  /** The language that a path names by itself, in its name before its folders, innermost first. */
+  static Language only(String path) {
+    Tags tags = new Tags(Rules.NONE);
+    List<Cut> cuts = new ArrayList<>();
+    tags.addNameCuts(path, cuts);
+    if (cuts.isEmpty()) {
+      tags.addFolderCuts(path, cuts);
+      Collections.reverse(cuts);
+    }
+    return cuts.isEmpty() ? Language.UNKNOWN : cuts.get(0).language;
+  }
+
   private void addNameCuts(String path, List<Cut> cuts) {
     int name = path.lastIndexOf('/') + 1;
     int dot = path.lastIndexOf('.');

@@ -138,4 +138,14 @@ class CheckJsonTest {
         before.chars().filter(c -> c == '\n').count() + 1, Fields.number(finding, "line", 1));
     assertEquals(before.length() - before.lastIndexOf('\n'), Fields.number(finding, "column", 1));
   }
+
+  /** Who names two files has said which is the source; each tells its own language. */
+  @Test
+  void aNamedPairMayRunFromAnyLanguageIntoAny() {
+    Path german = CableCar.write(folder.resolve("cable.de.md"), CableCar.withoutBrakes());
+    Path english = CableCar.write(folder.resolve("cable.en.md"), CableCar.ENGLISH);
+    String line = Outcome.of("check", "--format", "jsonl", german, english).out();
+    assertTrue(line.contains("\"code\":\"addition\""), line);
+    assertTrue(line.contains("\"language\":\"en\""), line);
+  }
 }

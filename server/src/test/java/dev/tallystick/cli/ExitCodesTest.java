@@ -3,6 +3,7 @@ package dev.tallystick.cli;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
 import java.io.Writer;
@@ -115,5 +116,28 @@ class ExitCodesTest {
       }
       throw (RuntimeException) fault;
     }
+  }
+
+  /** A full disk must not look like a clean result. */
+  @Test
+  void resultsThatCannotBeWrittenAreThree() {
+    CableCar.pair(folder, CableCar.GERMAN);
+    Writer full =
+        new Writer() {
+          @Override
+          public void write(char[] text, int from, int length) throws IOException {
+            throw new IOException("no space left");
+          }
+
+          @Override
+          public void flush() {}
+
+          @Override
+          public void close() {}
+        };
+    StringWriter err = new StringWriter();
+    Console console = new Console(new PrintWriter(full), new PrintWriter(err), false);
+    assertEquals(3, Tallystick.run(console, "check", folder.toString()));
+    assertTrue(err.toString().contains("could not be written"), err::toString);
   }
 }
