@@ -12,8 +12,7 @@ import java.util.List;
  * Model 1 with identity as its only entry.
  *
  * <p>Nearly all words of a link stand on one side only, and those all have the same R. So for each
- * made unit the places of its shared words near the band are looked up once ({@link Near}), and
- * what they say is kept, since links of several shapes ask the same.
+ * made unit the places of its shared words near the band are looked up once ({@link Near}).
  */
 final class SharedWords {
   private static final double FLOOR = 0.1;
@@ -226,9 +225,6 @@ final class SharedWords {
     private double[] trust = new double[4];
     private int count;
 
-    /** For each given unit and number of units what was worked out before, else not a number. */
-    private double[] kept;
-
     Near(int[] words, int from, int to) {
       this.from = from;
       this.to = to;
@@ -253,21 +249,6 @@ final class SharedWords {
 
     /** What the shared words say beyond what they would say if they were not shared. */
     double beyondPlain(int givenFrom, int givenTo) {
-      if (count == 0) {
-        return 0;
-      }
-      if (kept == null) {
-        kept = new double[(to - from) * Shape.MOST];
-        Arrays.fill(kept, Double.NaN);
-      }
-      int at = (givenFrom - from) * Shape.MOST + givenTo - givenFrom - 1;
-      if (Double.isNaN(kept[at])) {
-        kept[at] = workOut(givenFrom, givenTo);
-      }
-      return kept[at];
-    }
-
-    private double workOut(int givenFrom, int givenTo) {
       double plainWord = plain[givenFrom * Shape.MOST + givenTo - givenFrom - 1];
       double sum = 0;
       double own = 0;

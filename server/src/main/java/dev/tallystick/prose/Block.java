@@ -37,8 +37,13 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
 
   /** The prose as one string: the pieces of {@code file} put together. */
   public String prose(CharSequence file) {
+    if (pieces.size() == 1) {
+      return pieces.get(0).of(file);
+    }
     StringBuilder prose = new StringBuilder();
-    pieces.forEach(piece -> prose.append(file, piece.start(), piece.end()));
+    for (Span piece : pieces) {
+      prose.append(file, piece.start(), piece.end());
+    }
     return prose.toString();
   }
 }

@@ -87,20 +87,31 @@ public final class Text {
   }
 
   private static int[] lineStarts(String string) {
+    boolean onlyLf = string.indexOf('\r') < 0;
     int[] starts = new int[16];
     int count = 1;
-    int length = string.length();
-    for (int i = 0; i < length; i++) {
-      char c = string.charAt(i);
-      boolean ends = c == '\n' || c == '\r' && (i + 1 == length || string.charAt(i + 1) != '\n');
-      if (ends) {
-        if (count == starts.length) {
-          starts = Arrays.copyOf(starts, count * 2);
-        }
-        starts[count++] = i + 1;
+    int next = 0;
+    while ((next = onlyLf ? string.indexOf('\n', next) + 1 : behindLineEnd(string, next)) > 0) {
+      if (count == starts.length) {
+        starts = Arrays.copyOf(starts, count * 2);
       }
+      starts[count++] = next;
     }
     return Arrays.copyOf(starts, count);
+  }
+
+  /** The offset behind the next line end of any kind, or 0. */
+  private static int behindLineEnd(String string, int from) {
+    for (int i = from; i < string.length(); i++) {
+      char c = string.charAt(i);
+      if (c == '\n') {
+        return i + 1;
+      }
+      if (c == '\r') {
+        return i + 1 < string.length() && string.charAt(i + 1) == '\n' ? i + 2 : i + 1;
+      }
+    }
+    return 0;
   }
 
   @Override
