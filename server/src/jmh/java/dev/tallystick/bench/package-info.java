@@ -1,0 +1,2 @@
+/** Benchmarks. None is a test: speed is compared within one run, by eye. */
+package dev.tallystick.bench;
