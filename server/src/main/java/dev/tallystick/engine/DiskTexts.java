@@ -21,6 +21,7 @@ import java.util.function.Consumer;
 final class DiskTexts {
   private final Map<Path, Optional<Text>> known = new TreeMap<>();
   private final Map<Path, Half> halves = new TreeMap<>();
+  private final Map<Path, String> told = new TreeMap<>();
   private final Disk disk;
   private final Alarm alarm;
   private final Consumer<String> log;
@@ -48,6 +49,7 @@ final class DiskTexts {
   void forget(Collection<Path> files) {
     known.keySet().removeAll(files);
     halves.keySet().removeAll(files);
+    told.keySet().removeAll(files);
   }
 
   /** All files whose text is known. */
@@ -99,10 +101,23 @@ final class DiskTexts {
 
   private Optional<Text> read(Path file) {
     try {
-      return Optional.of(Intake.load(disk, file).text());
+      Text text = Intake.load(disk, file).text();
+      told.remove(file);
+      return Optional.of(text);
     } catch (Unreadable e) {
-      log.accept(e.getMessage());
-      return Optional.empty();
+      return unreadable(file, e.getMessage());
+    } catch (OutOfMemoryError e) {
+      return unreadable(
+          file,
+          file + ": too long for the memory of this program. Split the file, or close others.");
     }
+  }
+
+  /** Nobody wants to be told the same at every look. */
+  private Optional<Text> unreadable(Path file, String why) {
+    if (!why.equals(told.put(file, why))) {
+      log.accept(why);
+    }
+    return Optional.empty();
   }
 }

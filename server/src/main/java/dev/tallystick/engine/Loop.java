@@ -105,7 +105,7 @@ public final class Loop implements AutoCloseable {
     try {
       handle(event);
       settle();
-    } catch (RuntimeException | StackOverflowError e) {
+    } catch (RuntimeException | Error e) { // without this thread the server would be deaf
       audience.log("A fault of Tallystick itself: " + Fault.where(e));
     } finally {
       machine.activity().end();
