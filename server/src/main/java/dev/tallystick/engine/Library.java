@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Collection;
@@ -125,6 +126,11 @@ final class Library {
   /** The text of a file; empty if it cannot be read or is lost. */
   Optional<Text> text(Path file) {
     return shelf.text(file);
+  }
+
+  /** What is wrong with the bytes of a file that the editor does not show. */
+  List<Problem> problems(Path file) {
+    return shelf.problems(file);
   }
 
   /** The sheet of the current text; the same one as long as the text stays the same. */

@@ -264,10 +264,18 @@ public final class Loop implements AutoCloseable {
     }
   }
 
+  private Stream<Notice> findings(PairState pair, Path file) {
+    return pair.notices(pair.files().side(file), bulletin).stream();
+  }
+
+  private Stream<Notice> faults(Path file) {
+    return library.problems(file).stream().map(Notice::of);
+  }
+
   private void publish(Path file) {
     List<Notice> notices =
         pairsOf(file)
-            .flatMap(pair -> pair.notices(pair.files().side(file), bulletin).stream())
+            .flatMap(pair -> Stream.concat(findings(pair, file), faults(file)))
             .sorted()
             .distinct()
             .toList();
