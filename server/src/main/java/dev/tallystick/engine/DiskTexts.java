@@ -9,6 +9,7 @@ import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.TreeMap;
 import java.util.function.Consumer;
 
@@ -95,9 +96,9 @@ final class DiskTexts {
     }
   }
 
-  /** Whether a file may be half written. */
-  boolean unsettled() {
-    return !halves.isEmpty();
+  /** When a file that may be half written will have been stable for a rest, by the alarm. */
+  OptionalLong due(long rest) {
+    return halves.values().stream().mapToLong(half -> half.since() + rest).min();
   }
 
   private void take(Path file, Optional<Decoded> text) {

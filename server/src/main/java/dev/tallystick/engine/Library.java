@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.Set;
 
 /**
@@ -77,9 +78,9 @@ final class Library {
     shelf.disk().settle(restMillis);
   }
 
-  /** Whether some file may be half written. */
-  boolean unsettled() {
-    return shelf.disk().unsettled();
+  /** When a file that may be half written will have been stable for a rest; empty without any. */
+  OptionalLong due(long restMillis) {
+    return shelf.disk().due(restMillis);
   }
 
   /** Folders count that did not, perhaps, or no longer do. */
