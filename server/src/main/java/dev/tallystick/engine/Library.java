@@ -33,7 +33,8 @@ final class Library {
     shelf.open(file, document);
     workspace
         .root(file)
-        .filter(root -> !root.files().contains(file) && root.request(true))
+        .filter(root -> root.folder().lists(file) && !root.files().contains(file))
+        .filter(root -> root.request(true))
         .ifPresent(this::list);
     foldersMoved();
   }

@@ -213,6 +213,21 @@ class DiskSessionTest {
   }
 
   @Test
+  void openingAFileThatNoListHoldsMakesNobodyWait() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.in(folder)) {
+      Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      talk.settle();
+      talk.machine.holdListing();
+      talk.open(work.file("ferry.py"), "print()");
+      talk.open(work.file(".notes/ferry.md"), "Nothing.");
+      talk.open(work.file("de/.ferry.md"), "Nothing.");
+
+      assertEquals(JumpSessionTest.WINCH_EN, JumpSessionTest.text(german.hover("410 Gliedern")));
+    }
+  }
+
+  @Test
   void aTranslationThatIsNotOnDiskYetIsPaired() {
     Work work = new Work(folder);
     Path english = work.write("ferry.en.md", Ferry.EN);
