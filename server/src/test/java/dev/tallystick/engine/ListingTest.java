@@ -13,8 +13,6 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
-import org.junit.jupiter.api.condition.DisabledOnOs;
-import org.junit.jupiter.api.condition.OS;
 import org.junit.jupiter.api.io.TempDir;
 
 /** The way from a file to its name and back. */
@@ -53,13 +51,12 @@ class ListingTest {
   }
 
   @Test
-  @DisabledOnOs(OS.WINDOWS) // names are no bytes there, and a backslash is no letter
   void aBackslashIsALetterWhereItSeparatesNothing() {
-    assertEquals("a\\b.md", Listing.name(Path.of("a\\b.md")));
+    Path path = Path.of("a\\b.md");
+    assertEquals(path.getNameCount() == 1 ? "a\\b.md" : "a/b.md", Listing.name(path));
   }
 
   @Test
-  @DisabledOnOs(OS.WINDOWS)
   void aNameThatIsNoTextIsStillThatFile() {
     Path source = Path.of(URI.create("file:///job/F%FFhre.en.md"));
     Path target = Path.of(URI.create("file:///job/F%FFhre.de.md"));
@@ -76,7 +73,6 @@ class ListingTest {
   }
 
   @Test
-  @DisabledOnOs(OS.WINDOWS)
   void aNameThatTheLocaleCannotExpressIsPairedAllTheSame() throws Exception {
     Files.writeString(folder.resolve("Fähre.en.md"), "A ferry.");
     Files.writeString(folder.resolve("Fähre.de.md"), "Eine Fähre.");
