@@ -1,6 +1,6 @@
 package dev.tallystick.check;
 
-import java.lang.Character.UnicodeScript;
+import dev.tallystick.text.Scripts;
 
 /**
  * How much text there is, as translators count it: words between blanks, and each letter for itself
@@ -35,12 +35,6 @@ public final class WordCount {
   }
 
   private static boolean isUnspaced(int c) {
-    if (c < 0xE00 || !Character.isLetter(c)) {
-      return false;
-    }
-    return switch (UnicodeScript.of(c)) {
-      case HAN, HIRAGANA, KATAKANA, THAI, LAO, KHMER, MYANMAR -> true;
-      default -> false;
-    };
+    return Scripts.isUnspaced(c) && Character.isLetter(c);
   }
 }

@@ -3,6 +3,7 @@ package dev.tallystick.engine;
 import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
 import java.util.Optional;
+import java.util.OptionalLong;
 
 /**
  * Where the translator writes. The protocol tells no caret, so it is where the last edit ended,
@@ -42,6 +43,12 @@ final class Caret {
   /** Time has passed. */
   void settle() {
     last = last.filter(edited -> alarm.millis() - edited.at() < restMillis);
+  }
+
+  /** When it will have rested, by the alarm; empty at rest. */
+  OptionalLong due() {
+    return last.map(edited -> OptionalLong.of(edited.at() + restMillis))
+        .orElse(OptionalLong.empty());
   }
 
   void rest(long millis) {

@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.align.Match;
+import dev.tallystick.align.Move;
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.OnSide;
 import dev.tallystick.segment.Segment;
@@ -57,6 +58,21 @@ public record Counterpart(
   /** The matches of a pair, seen from one side. */
   private record Lookup(FilePair files, PairResult result, OnSide side) {
     Counterpart of(int index) {
+      Optional<Move> move =
+          result.alignment().moves().stream().filter(one -> index(one, side) == index).findFirst();
+      return move.isPresent() ? moved(move.get()) : inPlace(index);
+    }
+
+    /**
+     * Of one that stands at another place than in the source, the chain of matches knows nothing.
+     */
+    private Counterpart moved(Move move) {
+      Segment here = segment(move, side);
+      Segment there = segment(move, side.other());
+      return counterpart(here.span(), List.of(here), List.of(there), there.span());
+    }
+
+    private Counterpart inPlace(int index) {
       List<Match> matches = result.alignment().matches();
       int at = 0;
       while (at < matches.size() && !holds(matches.get(at), index)) {
@@ -117,6 +133,14 @@ public record Counterpart(
       return of == OnSide.SOURCE
           ? all.subList(match.sourceFrom(), match.sourceTo())
           : all.subList(match.targetFrom(), match.targetTo());
+    }
+
+    private Segment segment(Move move, OnSide of) {
+      return result.reading(of).segments().get(index(move, of));
+    }
+
+    private static int index(Move move, OnSide of) {
+      return of == OnSide.SOURCE ? move.source() : move.target();
     }
 
     private List<Segment> mine() {

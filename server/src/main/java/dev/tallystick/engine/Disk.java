@@ -119,13 +119,14 @@ public interface Disk {
 
     @Override
     public FileVisitResult preVisitDirectory(Path visited, BasicFileAttributes attributes) {
-      boolean hidden = !visited.equals(folder) && isHidden(visited);
+      boolean hidden = !visited.equals(folder) && Folder.hides(visited);
       return hidden ? FileVisitResult.SKIP_SUBTREE : FileVisitResult.CONTINUE;
     }
 
     @Override
     public FileVisitResult visitFile(Path file, BasicFileAttributes attributes) throws IOException {
-      boolean ours = !isHidden(file) && Format.ofName(file.getFileName().toString()).isPresent();
+      boolean ours =
+          !Folder.hides(file) && Format.ofName(file.getFileName().toString()).isPresent();
       if (ours && (attributes.isSymbolicLink() ? staysInside(file) : attributes.isRegularFile())) {
         found.add(file);
       }
@@ -143,12 +144,6 @@ public interface Disk {
 
     private boolean staysInside(Path link) throws IOException {
       return Files.isRegularFile(link) && link.toRealPath().startsWith(root);
-    }
-
-    private static boolean isHidden(Path path) {
-      Path name = path.getFileName();
-      return name != null
-          && (name.toString().startsWith(".") || name.toString().equals("node_modules"));
     }
   }
 }

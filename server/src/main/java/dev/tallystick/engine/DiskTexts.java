@@ -1,12 +1,15 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.run.Alarm;
+import dev.tallystick.text.Decoded;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.TreeMap;
 import java.util.function.Consumer;
 
@@ -19,14 +22,15 @@ import java.util.function.Consumer;
  * straight what happens while a worker reads it.
  */
 final class DiskTexts {
-  private final Map<Path, Optional<Text>> known = new TreeMap<>();
+  private final Map<Path, Optional<Decoded>> known = new TreeMap<>();
   private final Map<Path, Half> halves = new TreeMap<>();
+  private final Map<Path, String> told = new TreeMap<>();
   private final Disk disk;
   private final Alarm alarm;
   private final Consumer<String> log;
 
   /** A state that may be half of something. */
-  private record Half(Optional<Text> text, long since) {}
+  private record Half(Optional<Decoded> text, long since) {}
 
   DiskTexts(Disk disk, Alarm alarm, Consumer<String> log) {
     this.disk = disk;
@@ -36,18 +40,28 @@ final class DiskTexts {
 
   /** The text of a file; empty if it cannot be read. */
   Optional<Text> text(Path file) {
-    Optional<Text> text = known.get(file);
-    if (text == null) {
-      text = read(file);
-      known.put(file, text);
+    return decoded(file).map(Decoded::text);
+  }
+
+  /** The places of a file whose bytes are no text. */
+  List<Problem> problems(Path file) {
+    return decoded(file).map(Decoded::problems).orElse(List.of());
+  }
+
+  private Optional<Decoded> decoded(Path file) {
+    Optional<Decoded> decoded = known.get(file);
+    if (decoded == null) {
+      decoded = read(file);
+      known.put(file, decoded);
     }
-    return text;
+    return decoded;
   }
 
   /** Nobody needs these files any more. */
   void forget(Collection<Path> files) {
     known.keySet().removeAll(files);
     halves.keySet().removeAll(files);
+    told.keySet().removeAll(files);
   }
 
   /** All files whose text is known. */
@@ -60,7 +74,7 @@ final class DiskTexts {
     if (!known.containsKey(file)) {
       return;
     }
-    Optional<Text> now = read(file);
+    Optional<Decoded> now = read(file);
     if (!looksHalf(known.get(file), now)) {
       halves.remove(file);
       take(file, now);
@@ -82,27 +96,44 @@ final class DiskTexts {
     }
   }
 
-  /** Whether a file may be half written. */
-  boolean unsettled() {
-    return !halves.isEmpty();
+  /** When a file that may be half written will have been stable for a rest, by the alarm. */
+  OptionalLong due(long rest) {
+    return halves.values().stream().mapToLong(half -> half.since() + rest).min();
   }
 
-  private void take(Path file, Optional<Text> text) {
+  private void take(Path file, Optional<Decoded> text) {
     if (!known.get(file).equals(text)) {
       known.put(file, text);
     }
   }
 
-  private static boolean looksHalf(Optional<Text> before, Optional<Text> now) {
-    return before.isPresent() && now.map(Text::length).orElse(0) * 2 < before.get().length();
+  private static boolean looksHalf(Optional<Decoded> before, Optional<Decoded> now) {
+    return before.isPresent() && now.map(DiskTexts::length).orElse(0) * 2 < length(before.get());
   }
 
-  private Optional<Text> read(Path file) {
+  private static int length(Decoded decoded) {
+    return decoded.text().length();
+  }
+
+  private Optional<Decoded> read(Path file) {
     try {
-      return Optional.of(Intake.load(disk, file).text());
+      Decoded decoded = Intake.load(disk, file);
+      told.remove(file);
+      return Optional.of(decoded);
     } catch (Unreadable e) {
-      log.accept(e.getMessage());
-      return Optional.empty();
+      return unreadable(file, e.getMessage());
+    } catch (OutOfMemoryError e) {
+      return unreadable(
+          file,
+          file + ": too long for the memory of this program. Split the file, or close others.");
     }
+  }
+
+  /** Nobody wants to be told the same at every look. */
+  private Optional<Decoded> unreadable(Path file, String why) {
+    if (!why.equals(told.put(file, why))) {
+      log.accept(why);
+    }
+    return Optional.empty();
   }
 }

@@ -49,12 +49,21 @@ final class Document {
         text = whole.text();
         lost = false;
       } else if (change instanceof Change.Part part && !lost) {
-        Optional<Span> span = part.place().apply(text);
+        Optional<Span> span = place(part);
         lost = span.isEmpty();
         end = span.isEmpty() ? end : OptionalInt.of(replace(span.get(), part.replacement()));
       }
     }
     return lost ? OptionalInt.empty() : end;
+  }
+
+  /** An edit that fails for what the editor sent is one that the text cannot have. */
+  private Optional<Span> place(Change.Part part) {
+    try {
+      return part.place().apply(text);
+    } catch (RuntimeException e) {
+      return Optional.empty();
+    }
   }
 
   private int replace(Span span, String replacement) {

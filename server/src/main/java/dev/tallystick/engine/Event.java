@@ -44,7 +44,13 @@ public sealed interface Event {
   /** The workspace has other folders now. */
   record FoldersChanged(List<Path> added, List<Path> removed) implements Event {}
 
-  /** The user's settings are these now. The first ones start the work: until then all waits. */
+  /**
+   * The editor is ready: the work starts, by default settings. What settings may answer, the user
+   * is not asked before the first of them.
+   */
+  record Begun() implements Event {}
+
+  /** The user's settings are these now; the work starts with them at the latest. */
   record SettingsChanged(Settings settings) implements Event {}
 
   /**

@@ -22,10 +22,10 @@ public record FilePair(Path source, Path target, Language sourceLanguage, Langua
           .thenComparing(FilePair::target)
           .thenComparing(FilePair::sourceLanguage);
 
-  static FilePair of(Path folder, Pair pair) {
+  static FilePair of(Listing listing, Pair pair) {
     return new FilePair(
-        folder.resolve(pair.source()),
-        folder.resolve(pair.target()),
+        listing.file(pair.source()),
+        listing.file(pair.target()),
         pair.sourceLanguage(),
         pair.targetLanguage());
   }

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.prose.Format;
 import java.nio.file.Path;
 
 /**
@@ -15,5 +16,24 @@ public record Folder(Path path, int depth) {
   /** Whether a file lies in it, and not too deep. */
   boolean holds(Path file) {
     return file.startsWith(path) && file.getNameCount() - path.getNameCount() <= depth;
+  }
+
+  /** Whether a list of its files has a file, if there is such a file. */
+  boolean lists(Path file) {
+    if (!holds(file) || Format.ofName(String.valueOf(file.getFileName())).isEmpty()) {
+      return false;
+    }
+    for (Path name : path.relativize(file)) {
+      if (hides(name)) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  /** Whether files of this name, or in a folder of this name, are passed over. */
+  static boolean hides(Path path) {
+    String name = String.valueOf(path.getFileName());
+    return name.startsWith(".") || name.equals("node_modules");
   }
 }

@@ -149,8 +149,7 @@ final class FolderWatch implements Watch {
 
     private boolean isHidden(Path folder) {
       boolean named = folders.stream().anyMatch(watched -> watched.path().equals(folder));
-      String name = String.valueOf(folder.getFileName());
-      return !named && (name.startsWith(".") || name.equals("node_modules"));
+      return !named && Folder.hides(folder);
     }
   }
 

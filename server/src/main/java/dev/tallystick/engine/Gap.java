@@ -1,24 +1,13 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.text.Scripts;
 import dev.tallystick.text.Span;
 import java.lang.Character.UnicodeScript;
-import java.util.EnumSet;
 import java.util.Optional;
-import java.util.Set;
 
 /** Where to show that nothing stands at a place: editors draw no empty stretch. */
 final class Gap {
-  /** Scripts without blanks: a run of letters there is no word but half a sentence. */
-  private static final Set<UnicodeScript> UNSPACED =
-      EnumSet.of(
-          UnicodeScript.HAN,
-          UnicodeScript.HIRAGANA,
-          UnicodeScript.KATAKANA,
-          UnicodeScript.THAI,
-          UnicodeScript.LAO,
-          UnicodeScript.KHMER,
-          UnicodeScript.MYANMAR);
-
+  /** Where no blanks are written a run of letters is no word but half a sentence. */
   private static final int LONGEST = 20;
 
   private Gap() {}
@@ -61,8 +50,8 @@ final class Gap {
 
   /** Whether a letter belongs to the word of another: in unspaced scripts, of one script only. */
   private static boolean joins(int letter, int word) {
-    UnicodeScript script = UnicodeScript.of(word);
-    return inWord(letter) && (!UNSPACED.contains(script) || UnicodeScript.of(letter) == script);
+    return inWord(letter)
+        && (!Scripts.isUnspaced(word) || UnicodeScript.of(letter) == UnicodeScript.of(word));
   }
 
   private static boolean inWord(int c) {

@@ -1,11 +1,13 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.Set;
 
 /**
@@ -31,7 +33,8 @@ final class Library {
     shelf.open(file, document);
     workspace
         .root(file)
-        .filter(root -> !root.files().contains(file) && root.request(true))
+        .filter(root -> root.folder().lists(file) && !root.files().contains(file))
+        .filter(root -> root.request(true))
         .ifPresent(this::list);
     foldersMoved();
   }
@@ -76,9 +79,9 @@ final class Library {
     shelf.disk().settle(restMillis);
   }
 
-  /** Whether some file may be half written. */
-  boolean unsettled() {
-    return shelf.disk().unsettled();
+  /** When a file that may be half written will have been stable for a rest; empty without any. */
+  OptionalLong due(long restMillis) {
+    return shelf.disk().due(restMillis);
   }
 
   /** Folders count that did not, perhaps, or no longer do. */
@@ -125,6 +128,11 @@ final class Library {
   /** The text of a file; empty if it cannot be read or is lost. */
   Optional<Text> text(Path file) {
     return shelf.text(file);
+  }
+
+  /** What is wrong with the bytes of a file that the editor does not show. */
+  List<Problem> problems(Path file) {
+    return shelf.problems(file);
   }
 
   /** The sheet of the current text; the same one as long as the text stays the same. */

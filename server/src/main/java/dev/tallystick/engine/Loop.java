@@ -53,10 +53,12 @@ public final class Loop implements AutoCloseable {
 
   private final Library library;
   private final Caret caret;
+  private final Bell bell;
   private final Map<FilePair, PairState> pairs = new TreeMap<>();
   private final Questions questions = new Questions();
   private final Bulletin bulletin;
   private boolean started;
+  private boolean set;
   private long turn;
 
   /** Sets up the loop; nothing runs before {@link #start()}. */
@@ -68,6 +70,7 @@ public final class Loop implements AutoCloseable {
     DiskTexts disk = new DiskTexts(machine.disk(), machine.alarm(), audience::log);
     this.library = new Library(new Shelf(disk), workers, watch, machine.editorWatches());
     this.caret = new Caret(machine.alarm());
+    this.bell = new Bell(machine.alarm(), () -> post(new Event.TimerDue()));
     this.bulletin = new Bulletin(audience);
     this.thread = Threads.daemons("tallystick-loop").newThread(this::run);
   }
@@ -105,7 +108,7 @@ public final class Loop implements AutoCloseable {
     try {
       handle(event);
       settle();
-    } catch (RuntimeException | StackOverflowError e) {
+    } catch (RuntimeException | Error e) { // without this thread the server would be deaf
       audience.log("A fault of Tallystick itself: " + Fault.where(e));
     } finally {
       machine.activity().end();
@@ -122,9 +125,9 @@ public final class Loop implements AutoCloseable {
     } else if (event instanceof Event.Examined examined) {
       finish(examined);
     } else if (event instanceof Event.TimerDue) {
+      bell.rung();
       caret.settle();
       library.settle(caret.restMillis());
-      ringIfHalfWritten();
     } else if (event instanceof Event.Saved) {
       caret.lift();
     } else if (event instanceof Event.Opened opened) {
@@ -142,13 +145,15 @@ public final class Loop implements AutoCloseable {
   private void handleAround(Event event) {
     if (event instanceof Event.FilesChanged changed) {
       library.reread(changed);
-      ringIfHalfWritten();
     } else if (event instanceof Event.Listed listed) {
       library.listed(listed);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
+    } else if (event instanceof Event.Begun) {
+      started = true;
     } else if (event instanceof Event.SettingsChanged changed) {
       started = true;
+      set = true;
       library.rules(changed.settings());
       caret.rest(changed.settings().restMillis());
     }
@@ -172,23 +177,11 @@ public final class Loop implements AutoCloseable {
   /** The translator has written something that ends at an offset. */
   private void write(Path file, int offset) {
     caret.edited(file, offset);
-    ring();
     for (PairState pair : pairs.values()) {
       if (pair.files().target().equals(file)) {
         pair.edited(turn);
       }
     }
-  }
-
-  private void ringIfHalfWritten() {
-    if (library.unsettled()) {
-      ring();
-    }
-  }
-
-  private void ring() {
-    long due = machine.alarm().millis() + caret.restMillis();
-    machine.alarm().at(due, () -> post(new Event.TimerDue()));
   }
 
   private void finish(Event.Examined examined) {
@@ -205,6 +198,8 @@ public final class Loop implements AutoCloseable {
     if (!started) {
       return;
     }
+    caret.due().ifPresent(bell::at);
+    library.due(caret.restMillis()).ifPresent(bell::at);
     keepWantedPairs();
     for (PairState pair : pairs.values()) {
       pair.take(sheet(pair, OnSide.SOURCE), sheet(pair, OnSide.TARGET)).ifPresent(workers::examine);
@@ -212,7 +207,9 @@ public final class Loop implements AutoCloseable {
     }
     questions.answer(library.open(), this::ready, this::answer);
     publish();
-    library.questions().forEach(question -> audience.say(Announcements.choice(question)));
+    if (set) {
+      library.questions().forEach(question -> audience.say(Announcements.choice(question)));
+    }
   }
 
   private void keepWantedPairs() {
@@ -264,10 +261,18 @@ public final class Loop implements AutoCloseable {
     }
   }
 
+  private Stream<Notice> findings(PairState pair, Path file) {
+    return pair.notices(pair.files().side(file), bulletin).stream();
+  }
+
+  private Stream<Notice> faults(Path file) {
+    return library.problems(file).stream().map(Notice::of);
+  }
+
   private void publish(Path file) {
     List<Notice> notices =
         pairsOf(file)
-            .flatMap(pair -> pair.notices(pair.files().side(file), bulletin).stream())
+            .flatMap(pair -> Stream.concat(findings(pair, file), faults(file)))
             .sorted()
             .distinct()
             .toList();

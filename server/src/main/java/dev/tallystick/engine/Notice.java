@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.check.Code;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.Comparator;
@@ -8,20 +9,25 @@ import java.util.Map;
 import java.util.Optional;
 
 /**
- * A finding as one of the two files shows it.
+ * A finding as one of the two files shows it, or a fault of the file itself.
  *
- * @param code its kind
+ * @param code the kind of the finding; none of a fault of the file
  * @param span where to show it, never empty, in UTF-16 offsets
  * @param message what to say there
  * @param related the place in the other file, if there is one to point at
  */
-public record Notice(Code code, Span span, String message, Optional<Related> related)
+public record Notice(Optional<Code> code, Span span, String message, Optional<Related> related)
     implements Comparable<Notice> {
   private static final Comparator<Notice> ORDER =
       Comparator.comparing(Notice::span)
-          .thenComparing(Notice::code)
+          .thenComparing(notice -> notice.code().map(Code::ordinal).orElse(-1))
           .thenComparing(Notice::message)
           .thenComparing(notice -> notice.related().map(Related::uri).orElse(""));
+
+  /** A fault of the file itself. */
+  static Notice of(Problem problem) {
+    return new Notice(Optional.empty(), problem.span(), problem.message(), Optional.empty());
+  }
 
   /**
    * A place in the other file. Two are equal if they have the same line and columns in any

@@ -47,12 +47,13 @@ final class Notices {
     OnSide other = finding.side().other();
     Optional<Notice.Related> related =
         place(finding).map(place -> related(other, place, counterWords(finding)));
-    return new Notice(finding.code(), finding.span(), finding.message(), related);
+    return new Notice(Optional.of(finding.code()), finding.span(), finding.message(), related);
   }
 
   private Notice atCounterpart(Finding finding, Span place) {
     Notice.Related source = related(finding.side(), finding.span(), "The source sentence");
-    return new Notice(finding.code(), place, finding.counterMessage(), Optional.of(source));
+    return new Notice(
+        Optional.of(finding.code()), place, finding.counterMessage(), Optional.of(source));
   }
 
   private static String counterWords(Finding finding) {

@@ -34,11 +34,6 @@ final class PairState {
     return !running;
   }
 
-  /** What was found in the current texts. */
-  Optional<PairResult> result() {
-    return result;
-  }
-
   /**
    * Takes the current texts; whatever was found in others, or is being looked for, is dropped.
    *

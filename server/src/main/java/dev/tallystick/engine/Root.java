@@ -9,7 +9,6 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
-import java.util.TreeSet;
 import java.util.function.Predicate;
 import java.util.function.Supplier;
 
@@ -17,6 +16,7 @@ import java.util.function.Supplier;
 final class Root {
   private final Folder folder;
   private List<Path> files = List.of();
+  private Listing listed = Listing.of(List.of(), file -> file);
   private Optional<Pairs> pairs = Optional.empty();
   private boolean listing;
   private boolean again;
@@ -76,19 +76,15 @@ final class Root {
   /** What belongs together among some files of this folder. */
   Pairs pairs(Supplier<List<Path>> among, Rules rules) {
     if (pairs.isEmpty()) {
-      TreeSet<String> paths = new TreeSet<>();
-      among.get().forEach(file -> paths.add(relative(file)));
-      pairs = Optional.of(Pairing.pairs(paths, rules));
+      listed = Listing.of(among.get(), folder.path()::relativize);
+      pairs = Optional.of(Pairing.pairs(listed.names(), rules));
     }
     return pairs.get();
   }
 
   /** The pairs that are wanted, with their files as absolute paths. */
   List<FilePair> absolute(Pairs found, Predicate<FilePair> wanted) {
-    return found.pairs().stream()
-        .map(pair -> FilePair.of(folder.path(), pair))
-        .filter(wanted)
-        .toList();
+    return found.pairs().stream().map(pair -> FilePair.of(listed, pair)).filter(wanted).toList();
   }
 
   /** The first open question about one of these files, unless something was asked before. */
@@ -96,7 +92,7 @@ final class Root {
     List<String> paths = new ArrayList<>();
     open.stream()
         .filter(file -> file.startsWith(folder.path()))
-        .forEach(f -> paths.add(relative(f)));
+        .forEach(file -> paths.add(Listing.name(folder.path().relativize(file))));
     Optional<Ambiguity> question =
         found.ambiguities().stream()
             .filter(ambiguity -> ambiguity.files().stream().anyMatch(paths::contains))
@@ -104,13 +100,5 @@ final class Root {
             .findFirst();
     asked |= question.isPresent();
     return question;
-  }
-
-  private String relative(Path file) {
-    StringBuilder path = new StringBuilder();
-    for (Path name : folder.path().relativize(file)) {
-      path.append(path.isEmpty() ? "" : "/").append(name);
-    }
-    return path.toString();
   }
 }

@@ -1,9 +1,11 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Collection;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -46,6 +48,13 @@ final class Shelf {
       return disk.text(file);
     }
     return document.lost() ? Optional.empty() : Optional.of(document.text());
+  }
+
+  /**
+   * What is wrong with the bytes of a file; nothing of one that the editor shows, as it has none.
+   */
+  List<Problem> problems(Path file) {
+    return open.containsKey(file) ? List.of() : disk.problems(file);
   }
 
   /** The sheet of the current text; the same one as long as the text stays the same. */

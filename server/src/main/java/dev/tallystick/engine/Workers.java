@@ -42,12 +42,18 @@ final class Workers {
     activity.begin();
     pool.execute(
         () -> {
-          post.accept(work.get());
-          activity.end();
+          try {
+            post.accept(work.get());
+          } finally {
+            activity.end();
+          }
         });
   }
 
-  /** The only place where a cancelled computation ends, and where a fault of our own does. */
+  /**
+   * The only place where a cancelled computation ends, and where a fault of our own does. Whatever
+   * happens there is an event: a pair that none came for would never be settled.
+   */
   private Event examined(Task task) {
     try {
       task.check();
@@ -56,7 +62,7 @@ final class Workers {
       return new Event.Examined(task, Optional.of(result), Optional.empty());
     } catch (Cancellation.Cancelled e) {
       return new Event.Examined(task, Optional.empty(), Optional.empty());
-    } catch (RuntimeException | StackOverflowError | OutOfMemoryError e) {
+    } catch (RuntimeException | Error e) {
       return new Event.Examined(task, Optional.empty(), Optional.of(Fault.where(e)));
     }
   }
@@ -64,7 +70,7 @@ final class Workers {
   private List<Path> files(Folder folder) {
     try {
       return machine.disk().files(folder);
-    } catch (Unreadable | RuntimeException e) {
+    } catch (Unreadable | RuntimeException | Error e) {
       return List.of();
     }
   }

@@ -36,6 +36,9 @@ import org.eclipse.lsp4j.services.TextDocumentService;
  * What a client tells and asks about texts. Those without a file are in no pair: nothing is said.
  */
 final class Documents implements TextDocumentService {
+  /** An edit that does not say what came: from now on the text is not known. */
+  private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
+
   private Loop loop;
   private Conversion conversion;
   private boolean over;
@@ -63,7 +66,7 @@ final class Documents implements TextDocumentService {
   public void didChange(DidChangeTextDocumentParams params) {
     VersionedTextDocumentIdentifier document = params.getTextDocument();
     int version = document.getVersion() == null ? 0 : document.getVersion();
-    List<Change> changes = params.getContentChanges().stream().map(this::change).toList();
+    List<Change> changes = changes(params.getContentChanges());
     tell(document.getUri(), file -> new Event.Edited(file, document.getUri(), version, changes));
   }
 
@@ -83,7 +86,14 @@ final class Documents implements TextDocumentService {
     }
   }
 
+  private List<Change> changes(List<TextDocumentContentChangeEvent> events) {
+    return events == null ? List.of(UNKNOWN) : events.stream().map(this::change).toList();
+  }
+
   private Change change(TextDocumentContentChangeEvent event) {
+    if (event == null || event.getText() == null) {
+      return UNKNOWN;
+    }
     Range range = event.getRange();
     return range == null
         ? new Change.Whole(new Text(event.getText()))

@@ -52,7 +52,7 @@ final class Server implements LanguageServer {
     Conversion conversion = new Conversion(client);
     loop = new Loop(machine.watchedByEditor(client.watches()), new Editor(remote, conversion));
     documents.begin(loop, conversion);
-    surroundings.begin(loop, client, remote);
+    surroundings.begin(loop, client, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
     loop.start();
     InitializeResult result = new InitializeResult(Capabilities.of(client));

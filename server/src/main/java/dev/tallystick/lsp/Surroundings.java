@@ -3,7 +3,9 @@ package dev.tallystick.lsp;
 import com.google.gson.JsonObject;
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Loop;
+import dev.tallystick.engine.Settings;
 import dev.tallystick.prose.Format;
+import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -33,13 +35,16 @@ final class Surroundings implements WorkspaceService {
   private Loop loop;
   private Client client;
   private LanguageClient remote;
+  private Alarm alarm;
   private List<String> told = List.of();
+  private boolean taken;
 
   /** The session has begun, but nothing may be sent yet. */
-  void begin(Loop with, Client of, LanguageClient at) {
+  void begin(Loop with, Client of, LanguageClient at, Alarm by) {
     loop = with;
     client = of;
     remote = at;
+    alarm = by;
   }
 
   /** The client is ready: registers what is to be registered, and gets the settings. */
@@ -58,7 +63,16 @@ final class Surroundings implements WorkspaceService {
     if (!registrations.isEmpty()) {
       remote.registerCapability(new RegistrationParams(registrations));
     }
+    loop.post(new Event.Begun());
     pullSettings(null);
+    alarm.at(alarm.millis() + Settings.DEFAULT.restMillis(), this::stopWaiting);
+  }
+
+  /** A client that has not answered by now may never do so: nothing is set, until it does. */
+  private synchronized void stopWaiting() {
+    if (!taken) {
+      takeSettings(null);
+    }
   }
 
   private static DidChangeWatchedFilesRegistrationOptions watchers() {
@@ -97,7 +111,9 @@ final class Surroundings implements WorkspaceService {
     return within ? ((JsonObject) pushed).get(SECTION) : pushed;
   }
 
-  private void takeSettings(Object section) {
+  /** Called by the thread that reads messages, or by the alarm. */
+  private synchronized void takeSettings(Object section) {
+    taken = true;
     SettingsReader.Read read = SettingsReader.read(section);
     if (!read.problems().equals(told)) {
       told = read.problems();

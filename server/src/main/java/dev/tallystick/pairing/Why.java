@@ -8,8 +8,6 @@ public enum Why {
   NAME,
   /** A folder named by a tag: {@code de/guide.md}. */
   FOLDER,
-  /** The project's settings name the two. */
-  SETTING,
   /** The user named the two on the command line or by a command. */
   ARGUMENT;
 

@@ -1,5 +1,7 @@
 package dev.tallystick.prose;
 
+import dev.tallystick.text.Scripts;
+
 /** What a character is to a reader of lines. */
 final class Characters {
   private static final int TAB_STOP = 8;
@@ -51,13 +53,7 @@ final class Characters {
 
   /** Whether a line may break before and behind this character without a space: Han and kana. */
   static boolean isSpaceless(int c) {
-    if (c < 0x1100) {
-      return false;
-    }
-    return switch (Character.UnicodeScript.of(c)) {
-      case HAN, HIRAGANA, KATAKANA, BOPOMOFO -> true;
-      default -> c >= 0x3000 && c <= 0x303F || c >= 0xFF01 && c <= 0xFF60;
-    };
+    return Scripts.breaksAnywhere(c) || c >= 0x3000 && c <= 0x303F || c >= 0xFF01 && c <= 0xFF60;
   }
 
   /** The column behind a character that starts at {@code column}. */

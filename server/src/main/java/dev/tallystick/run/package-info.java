@@ -1,2 +1,2 @@
-/** What every stage is handed: cancellation, the clock, and a trace of what ran. */
+/** What every stage is handed: cancellation, the clock, and threads. */
 package dev.tallystick.run;

@@ -1,5 +1,6 @@
 package dev.tallystick.segment;
 
+import dev.tallystick.text.Scripts;
 import java.lang.Character.UnicodeScript;
 
 /**
@@ -35,16 +36,7 @@ final class Fragments {
   private static boolean startsDense(String text) {
     return text.codePoints()
         .filter(Character::isLetter)
-        .mapToObj(UnicodeScript::of)
-        .findFirst()
-        .filter(Fragments::dense)
-        .isPresent();
-  }
-
-  private static boolean dense(UnicodeScript script) {
-    return switch (script) {
-      case HAN, HIRAGANA, KATAKANA, HANGUL, THAI, LAO, KHMER, MYANMAR -> true;
-      default -> false;
-    };
+        .limit(1)
+        .anyMatch(c -> Scripts.isUnspaced(c) || UnicodeScript.of(c) == UnicodeScript.HANGUL);
   }
 }

@@ -1,6 +1,6 @@
 package dev.tallystick.segment;
 
-import java.lang.Character.UnicodeScript;
+import dev.tallystick.text.Scripts;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -50,12 +50,8 @@ public final class Words {
     if (c < 0x80) {
       return c >= 'a' && c <= 'z' || c >= 'A' && c <= 'Z' || c >= '0' && c <= '9';
     }
-    if (!Character.isLetterOrDigit(c) && Character.getType(c) != Character.NON_SPACING_MARK) {
-      return false;
-    }
-    return switch (UnicodeScript.of(c)) {
-      case HAN, HIRAGANA, KATAKANA, THAI, LAO, KHMER, MYANMAR -> false;
-      default -> true;
-    };
+    boolean inWord =
+        Character.isLetterOrDigit(c) || Character.getType(c) == Character.NON_SPACING_MARK;
+    return inWord && !Scripts.isUnspaced(c);
   }
 }

@@ -38,19 +38,6 @@ public final class Text {
     return new Place(line, offset - lineStarts[line]);
   }
 
-  /**
-   * The offset of a place. A column beyond its line means the line's end, a line beyond the text
-   * the text's end, and a column inside a surrogate pair the start of that pair.
-   */
-  public int offset(Place place) {
-    if (place.line() >= lineStarts.length) {
-      return string.length();
-    }
-    int line = Math.max(place.line(), 0);
-    int offset = Math.min(lineStarts[line] + Math.max(place.column(), 0), lineEnd(line));
-    return outsidePair(offset);
-  }
-
   /** Offset of the first unit of a line. */
   public int lineStart(int line) {
     return lineStarts[line];

@@ -44,12 +44,12 @@ class PairStateTest {
     assertTrue(old.cancelled());
     pair.finish(old, tooLate);
     assertFalse(pair.settled());
-    assertEquals(Optional.empty(), pair.result());
+    assertEquals(Optional.empty(), pair.counterpart(FILES.target(), 0));
 
     Optional<PairResult> result = result(now);
     pair.finish(now, result);
     assertTrue(pair.settled());
-    assertSame(result.get(), pair.result().get());
+    assertSame(now.target().text(), pair.counterpart(FILES.target(), 0).orElseThrow().here());
   }
 
   @Test

@@ -111,7 +111,7 @@ final class Buffer {
   }
 
   private static int offset(Text text, Position position) {
-    return text.offset(new Place(position.getLine(), position.getCharacter()));
+    return Encoding.UTF_16.offset(text, position);
   }
 
   private Position at(String words) {

@@ -2,12 +2,18 @@ package dev.tallystick.lsp;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertNull;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Folder;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import org.eclipse.lsp4j.Diagnostic;
+import org.eclipse.lsp4j.DiagnosticSeverity;
 import org.eclipse.lsp4j.FileChangeType;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -118,6 +124,33 @@ class DiskSessionTest {
   }
 
   @Test
+  void bytesThatAreNoTextAreShownWhereTheyStandWhileTheFileIsPaired() throws IOException {
+    Work work = new Work(folder);
+    String half = Ferry.EN.replace("from dawn", "from d\u00e4wn");
+    work.write("en/ferry.md", "");
+    Files.write(work.en(), half.getBytes(StandardCharsets.ISO_8859_1));
+    try (Talk talk = Talk.in(folder)) {
+      Buffer german = talk.open(work.de(), Ferry.DE);
+      talk.settle();
+
+      Diagnostic shown = FindingsSessionTest.only(talk.shown(work.en()));
+      assertEquals("\u00e4", Buffer.words(half, shown.getRange()));
+      assertEquals(DiagnosticSeverity.Warning, shown.getSeverity());
+      assertEquals("tallystick", shown.getSource());
+      assertNull(shown.getCode());
+      assertTrue(shown.getMessage().getLeft().contains("no text in the file's encoding: E4"));
+
+      Buffer english = talk.open(work.en(), Ferry.EN);
+      talk.settle();
+      assertEquals(List.of(), talk.shown(work.en()));
+      english.close();
+      assertEquals(1, talk.shown(work.en()).size());
+      german.close();
+      assertEquals(List.of(), talk.shown(work.en()));
+    }
+  }
+
+  @Test
   void closingTheLastOpenSideEmptiesBoth() {
     Work work = Work.withoutFog(folder);
     try (Talk talk = Talk.in(folder)) {
@@ -176,6 +209,21 @@ class DiskSessionTest {
       talk.settle();
 
       assertEquals(List.of("omission"), talk.codes(work.en()));
+    }
+  }
+
+  @Test
+  void openingAFileThatNoListHoldsMakesNobodyWait() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.in(folder)) {
+      Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      talk.settle();
+      talk.machine.holdListing();
+      talk.open(work.file("ferry.py"), "print()");
+      talk.open(work.file(".notes/ferry.md"), "Nothing.");
+      talk.open(work.file("de/.ferry.md"), "Nothing.");
+
+      assertEquals(JumpSessionTest.WINCH_EN, JumpSessionTest.text(german.hover("410 Gliedern")));
     }
   }
 

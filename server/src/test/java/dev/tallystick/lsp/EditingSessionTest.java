@@ -3,6 +3,7 @@ package dev.tallystick.lsp;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import com.google.gson.JsonParser;
 import java.nio.file.Path;
 import java.util.List;
 import org.eclipse.lsp4j.Diagnostic;
@@ -13,6 +14,8 @@ import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** What happens while the translator types. */
 class EditingSessionTest {
@@ -178,6 +181,33 @@ class EditingSessionTest {
       german.whole(Ferry.DE_WITHOUT_FOG);
       assertEquals(List.of("omission"), talk.codes(work.en()));
       assertEquals(4, last(talk, german.uri).getVersion());
+    }
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "[{}]",
+        "[null]",
+        "[{'range': {'start': {'line': 1, 'character': 0}}, 'text': 'x'}]",
+        "[{'range': {'start': {'line': 1, 'character': 0}, 'end': {'line': 1, 'character': 0}}}]"
+      })
+  void anEditThatDoesNotSayWhatCameIsToldToo(String changes) {
+    work.write("de/ferry.md", Ferry.DE_WITHOUT_FOG);
+    try (Talk talk = Talk.in(folder)) {
+      Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+      String document = "{'uri': '" + german.uri + "', 'version': 2}";
+      talk.tellRaw(
+          "textDocument/didChange",
+          JsonParser.parseString(
+              "{'textDocument': " + document + ", 'contentChanges': " + changes + "}"));
+      talk.settle();
+
+      assertEquals(List.of(), talk.codes(work.en()));
+      assertEquals(1, talk.said.size());
+      assertTrue(talk.said.get(0).contains("close and reopen the file"));
     }
   }
 

@@ -11,6 +11,7 @@ import java.util.Random;
 import org.eclipse.lsp4j.Position;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
 
 /** Positions in a client's encoding and offsets here. */
@@ -46,6 +47,26 @@ class EncodingTest {
         }
       }
     }
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "0, 2, 2",
+    "0, 3, 3",
+    "0, 4, 3",
+    "0, 99, 3",
+    "1, 0, 5",
+    "1, 1, 5",
+    "1, 2, 7",
+    "1, 99, 7",
+    "2, 0, 7",
+    "99, 0, 7",
+    "-1, 0, 0",
+    "0, -4, 0"
+  })
+  void positionsOffTheTextMeanTheNearestInIt(int line, int column, int offset) {
+    Text text = new Text("one\r\n\uD83D\uDE00");
+    assertEquals(offset, Encoding.UTF_16.offset(text, new Position(line, column)));
   }
 
   @ParameterizedTest

@@ -123,6 +123,27 @@ class JumpSessionTest {
   }
 
   @Test
+  void aMovedSentenceLeadsToItsCounterpartBothWays() {
+    String english = Ferry.line(Ferry.EN, "Report every jam");
+    String german = Ferry.line(Ferry.DE, "Melden Sie");
+    String text = Ferry.DE.replace(german + "\n", "").replace("An Bord", german + "\nAn Bord");
+    try (Talk talk = Talk.in(folder)) {
+      Buffer translation = talk.open(work.de(), text);
+      Buffer source = talk.open(work.en(), Ferry.EN);
+      talk.settle();
+      assertEquals(List.of("order"), talk.codes(work.de()));
+
+      LocationLink there = translation.jump("Odile Marchbanks");
+      assertEquals(english, source.words(there.getTargetRange()));
+      assertEquals(german, translation.words(there.getOriginSelectionRange()));
+      assertEquals(english, text(translation.hover("Odile Marchbanks")));
+      LocationLink back = source.jump("Odile Marchbanks");
+      assertEquals(german, translation.words(back.getTargetRange()));
+      assertEquals(german, text(source.hover("Odile Marchbanks")));
+    }
+  }
+
+  @Test
   void aHoverShowsTheCounterpartAsPlainText() {
     try (Talk talk = Talk.in(folder)) {
       Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);

@@ -6,6 +6,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 import org.eclipse.lsp4j.DidChangeConfigurationParams;
 import org.eclipse.lsp4j.InitializeParams;
 import org.eclipse.lsp4j.WorkspaceFolder;
@@ -122,11 +124,102 @@ class SettingsSessionTest {
       params.setWorkspaceFolders(List.of(new WorkspaceFolder(folder.toUri().toString(), "work")));
       talk.begin(params);
       Buffer buffer = talk.open(german, Ferry.DE);
+      talk.settle();
 
       assertEquals(
           Ferry.line(Ferry.FR, "Le treuil"),
           buffer.hover("410 Gliedern").getContents().getRight().getValue());
       assertTrue(talk.said.isEmpty());
     }
+  }
+
+  @Test
+  void aClientThatNeverTellsItsSettingsIsServedByTheDefaults() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.silent()) {
+      beginWithoutAnswer(talk);
+      talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      talk.settle();
+
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+    }
+  }
+
+  @Test
+  void withoutAnAnswerTheUserIsAskedAfterOneRest() {
+    Path german = twoTranslations();
+    try (Talk talk = Talk.silent()) {
+      beginWithoutAnswer(talk);
+      talk.open(german, Ferry.DE);
+      talk.pass(1499);
+      assertEquals(List.of(), talk.said);
+
+      talk.pass(1);
+      assertEquals(1, talk.said.size());
+    }
+  }
+
+  @Test
+  void settingsThatComeLateCountAsSoonAsTheyCome() {
+    Path german = twoTranslations();
+    try (Talk talk = Talk.silent()) {
+      CompletableFuture<List<Object>> answer = beginWithoutAnswer(talk);
+      talk.open(german, Ferry.DE);
+      talk.pass(1400);
+      answer.complete(List.of(Map.of("sourceLanguage", "de")));
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(german));
+
+      talk.pass(5000);
+      assertEquals(List.of("omission"), talk.codes(german));
+      assertEquals(List.of(), talk.said);
+    }
+  }
+
+  @Test
+  void aRestThatIsMadeLongerEndsAllTheSame() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    try (Talk talk = Talk.in(folder)) {
+      Buffer german = talk.open(work.de(), Ferry.DE);
+      german.replace(Ferry.FOG_DE + "\n", "");
+      push(talk, Map.of("restMillis", 4000));
+      talk.pass(1500);
+      talk.pass(2499);
+      assertEquals(List.of(), talk.codes(work.en()));
+
+      talk.pass(1);
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+    }
+  }
+
+  @Test
+  void aRestThatIsMadeShorterEndsSooner() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    try (Talk talk = Talk.in(folder)) {
+      Buffer german = talk.open(work.de(), Ferry.DE);
+      german.replace(Ferry.FOG_DE + "\n", "");
+      push(talk, Map.of("restMillis", 100));
+      talk.pass(100);
+
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+    }
+  }
+
+  private Path twoTranslations() {
+    Work work = new Work(folder);
+    work.write("ferry.fr.md", Ferry.FR_WITHOUT_FOG);
+    return work.write("ferry.de.md", Ferry.DE);
+  }
+
+  private CompletableFuture<List<Object>> beginWithoutAnswer(Talk talk) {
+    CompletableFuture<List<Object>> answer = new CompletableFuture<>();
+    talk.answer = Optional.of(answer);
+    InitializeParams params = Talk.params();
+    pulls(params);
+    params.setWorkspaceFolders(List.of(new WorkspaceFolder(folder.toUri().toString(), "work")));
+    talk.begin(params);
+    return answer;
   }
 }

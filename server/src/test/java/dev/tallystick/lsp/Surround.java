@@ -27,6 +27,9 @@ final class Surround {
   /** What workers do; a test may put something else here. */
   volatile Examiner examiner = Examiner.DRAFT;
 
+  /** What files are read from; a test may put something else here. */
+  volatile Disk disk = Disk.REAL;
+
   /** The folders that the server wants to watch itself. */
   volatile List<Folder> watched = List.of();
 
@@ -65,13 +68,13 @@ final class Surround {
   private final class HeldDisk implements Disk {
     @Override
     public byte[] read(Path file) throws Unreadable {
-      return REAL.read(file);
+      return disk.read(file);
     }
 
     @Override
     public List<Path> files(Path folder) throws Unreadable {
       await(listing);
-      return REAL.files(folder);
+      return disk.files(folder);
     }
   }
 

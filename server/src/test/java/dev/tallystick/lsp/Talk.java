@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CopyOnWriteArrayList;
 import java.util.concurrent.ExecutorService;
@@ -56,6 +57,9 @@ final class Talk implements LanguageClient, AutoCloseable {
 
   /** What is set under {@code tallystick}. */
   volatile Object settings;
+
+  /** The answer to the question what is set; empty for one that comes at once. */
+  volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
 
   InitializeResult initialized;
   private final RemoteEndpoint endpoint;
@@ -238,7 +242,7 @@ final class Talk implements LanguageClient, AutoCloseable {
   public CompletableFuture<List<Object>> configuration(ConfigurationParams params) {
     List<Object> values = new ArrayList<>();
     params.getItems().forEach(item -> values.add(settings));
-    return CompletableFuture.completedFuture(values);
+    return answer.orElseGet(() -> CompletableFuture.completedFuture(values));
   }
 
   @Override

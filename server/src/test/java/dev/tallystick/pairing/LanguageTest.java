@@ -98,8 +98,7 @@ class LanguageTest {
   }
 
   @Test
-  void wordsOfWhyAreLowerCaseInAnyLocale() {
-    assertEquals("setting", Why.SETTING.word());
+  void wordsOfWhyAreLowerCase() {
     assertEquals("name", Why.NAME.word());
     assertEquals("folder", Why.FOLDER.word());
     assertEquals("argument", Why.ARGUMENT.word());

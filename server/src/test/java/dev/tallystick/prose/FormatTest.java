@@ -24,11 +24,4 @@ class FormatTest {
       }
     }
   }
-
-  @Test
-  void theLanguageIdOfAnEditorTellsTheFormat() {
-    assertEquals(Optional.of(Format.PLAIN), Format.ofLanguageId("plaintext"));
-    assertEquals(Optional.of(Format.MARKDOWN), Format.ofLanguageId("markdown"));
-    assertEquals(Optional.empty(), Format.ofLanguageId("java"));
-  }
 }

@@ -7,7 +7,6 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 class TextTest {
@@ -46,39 +45,6 @@ class TextTest {
     assertEquals(2, new Text("a\r\nb").lines());
   }
 
-  @ParameterizedTest
-  @CsvSource({
-    "0, 2, 2",
-    "0, 3, 3",
-    "0, 4, 3",
-    "0, 99, 3",
-    "1, 0, 5",
-    "1, 1, 5",
-    "1, 2, 7",
-    "1, 99, 7",
-    "2, 0, 7",
-    "99, 0, 7",
-    "-1, 0, 0",
-    "0, -4, 0"
-  })
-  void placesOffTheTextMeanTheNearestPlaceInIt(int line, int column, int offset) {
-    assertEquals(offset, new Text("one\r\n\uD83D\uDE00").offset(new Place(line, column)));
-  }
-
-  @Test
-  void aPlaceComesBackFromItsOffset() {
-    RandomTexts texts = new RandomTexts(1);
-    for (int i = 0; i < TEXTS; i++) {
-      Text text = new Text(texts.next());
-      for (int offset = 0; offset <= text.length(); offset++) {
-        Place place = text.place(offset);
-        boolean inLineEnd = offset > text.lineEnd(place.line());
-        int expected = inLineEnd ? text.lineEnd(place.line()) : text.outsidePair(offset);
-        assertEquals(expected, text.offset(place), text::string);
-      }
-    }
-  }
-
   @Test
   void placesGrowWithOffsets() {
     RandomTexts texts = new RandomTexts(2);
@@ -107,22 +73,6 @@ class TextTest {
         assertTrue(last ? end.isEmpty() : end.matches("\r\n|\n|\r"), text::string);
         assertFalse(content.contains("\n") || content.contains("\r"), text::string);
       }
-    }
-  }
-
-  @Test
-  void noOffsetOfAPlaceLiesInsideAPair() {
-    RandomTexts texts = new RandomTexts(4);
-    for (int i = 0; i < TEXTS; i++) {
-      Text text = new Text(texts.next());
-      int offset = text.offset(new Place(texts.below(text.lines() + 1), texts.below(20)));
-      assertEquals(offset, text.outsidePair(offset));
-      boolean inside =
-          offset > 0
-              && offset < text.length()
-              && Character.isSurrogatePair(
-                  text.string().charAt(offset - 1), text.string().charAt(offset));
-      assertFalse(inside, text::string);
     }
   }
 
