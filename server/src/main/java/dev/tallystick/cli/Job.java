@@ -3,6 +3,7 @@ package dev.tallystick.cli;
 import dev.tallystick.align.Aligner;
 import dev.tallystick.engine.Disk;
 import dev.tallystick.engine.Intake;
+import dev.tallystick.engine.Listing;
 import dev.tallystick.engine.PairResult;
 import dev.tallystick.engine.Reading;
 import dev.tallystick.engine.Unreadable;
@@ -16,10 +17,8 @@ import dev.tallystick.text.Decoded;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.HashMap;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
+import java.util.function.UnaryOperator;
 
 /**
  * The files that a command was given, and what belongs together among them. What cannot be read is
@@ -28,12 +27,12 @@ import java.util.Map;
 final class Job {
   private final Console console;
   private final Pairs pairs;
-  private final Map<String, Path> files;
+  private final Listing files;
   private String lastSource = "";
   private Reading lastReading;
   private boolean complete = true;
 
-  private Job(Console console, Pairs pairs, Map<String, Path> files) {
+  private Job(Console console, Pairs pairs, Listing files) {
     this.console = console;
     this.pairs = pairs;
     this.files = files;
@@ -54,13 +53,11 @@ final class Job {
       return ofFolders(console, paths, rules);
     }
     if (paths.size() == 2 && paths.stream().noneMatch(Files::isDirectory)) {
-      String source = paths.get(0).toString();
-      String target = paths.get(1).toString();
+      String source = Listing.name(paths.get(0));
+      String target = Listing.name(paths.get(1));
       List<Pair> pair = List.of(Pairing.named(source, target, rules));
-      Map<String, Path> files = new HashMap<>();
-      files.put(source, paths.get(0));
-      files.put(target, paths.get(1));
-      return new Job(console, new Pairs(pair, List.of(), List.of()), files);
+      Pairs pairs = new Pairs(pair, List.of(), List.of());
+      return new Job(console, pairs, Listing.of(paths, UnaryOperator.identity()));
     }
     throw new Refused("Name one folder, or one source file and one translation.");
   }
@@ -71,26 +68,20 @@ final class Job {
    * @throws Refused if one cannot be listed
    */
   static Job ofFolders(Console console, List<Path> folders, Rules rules) {
-    // Where the machine's encoding lacks a character of a name, no path can be made of it again.
-    Map<String, Path> files = new LinkedHashMap<>();
+    List<Path> found = new ArrayList<>();
     List<String> unread = new ArrayList<>();
     for (Path folder : folders) {
       try {
-        for (Path file : Disk.REAL.files(folder, unread::add)) {
-          files.put(slashes(file.normalize()), file);
-        }
+        found.addAll(Disk.REAL.files(folder, unread::add));
       } catch (Unreadable e) {
         throw new Refused(e.getMessage());
       }
     }
     unread.forEach(console.err()::println);
-    Job job = new Job(console, Pairing.pairs(files.keySet(), rules), files);
+    Listing files = Listing.of(found, Path::normalize);
+    Job job = new Job(console, Pairing.pairs(files.names(), rules), files);
     job.complete = unread.isEmpty();
     return job;
-  }
-
-  private static String slashes(Path path) {
-    return path.toString().replace(path.getFileSystem().getSeparator(), "/");
   }
 
   Pairs pairs() {
@@ -126,7 +117,7 @@ final class Job {
   }
 
   private Reading read(String file, Language language) throws Unreadable {
-    Path path = files.get(file);
+    Path path = files.file(file);
     Decoded decoded = Intake.load(Disk.REAL, path);
     complete &= !Malformed.tell(console, file, decoded);
     return Reading.of(decoded.text(), Intake.format(path), language.tag(), Cancellation.NONE);
