@@ -12,6 +12,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.EnumMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
@@ -70,33 +71,34 @@ final class PairsCommand implements Callable<Integer> {
   }
 
   private void print(Pair pair, PairResult result) throws IOException {
+    if (format == OutputFormat.JSONL) {
+      printForPrograms(pair, result);
+    } else {
+      printForPeople(pair, result);
+    }
+  }
+
+  private void printForPeople(Pair pair, PairResult result) {
     int done = result.progress().done();
     int pending = result.progress().pending();
-    if (format == OutputFormat.TEXT) {
-      int share = done + pending == 0 ? 100 : (int) (100L * done / (done + pending));
-      console
-          .out()
-          .println(
-              pair.source()
-                  + " -> "
-                  + pair.target()
-                  + ": "
-                  + pair.sourceLanguage().tag()
-                  + " to "
-                  + pair.targetLanguage().tag()
-                  + ", paired by "
-                  + pair.why().word()
-                  + ", "
-                  + done
-                  + " words done, "
-                  + pending
-                  + " pending ("
-                  + share
-                  + " %), "
-                  + result.findings().size()
-                  + " findings");
-      return;
-    }
+    long share = done + pending == 0 ? 100 : 100L * done / (done + pending);
+    String files = pair.source() + " -> " + pair.target();
+    String languages = pair.sourceLanguage().tag() + " to " + pair.targetLanguage().tag();
+    String progress =
+        String.format(Locale.ROOT, "%d words done, %d pending (%d %%)", done, pending, share);
+    int findings = result.findings().size();
+    console
+        .out()
+        .println(
+            String.join(
+                ", ",
+                files + ": " + languages,
+                "paired by " + pair.why().word(),
+                progress,
+                findings + (findings == 1 ? " finding" : " findings")));
+  }
+
+  private void printForPrograms(Pair pair, PairResult result) throws IOException {
     JsonLine line =
         new JsonLine()
             .put("source", pair.source())
@@ -104,8 +106,8 @@ final class PairsCommand implements Callable<Integer> {
             .put("sourceLanguage", pair.sourceLanguage().tag())
             .put("targetLanguage", pair.targetLanguage().tag())
             .put("why", pair.why().word())
-            .put("done", done)
-            .put("pending", pending)
+            .put("done", result.progress().done())
+            .put("pending", result.progress().pending())
             .open("findings");
     for (Map.Entry<Code, Integer> count : counts(result).entrySet()) {
       line.put(count.getKey().word(), count.getValue());
