@@ -18,6 +18,7 @@ final class Capabilities {
     }
     can.setTextDocumentSync(sync());
     can.setDefinitionProvider(true);
+    can.setReferencesProvider(true);
     can.setHoverProvider(true);
     can.setDocumentHighlightProvider(true);
     can.setWorkspace(new WorkspaceServerCapabilities(folders()));
