@@ -1,8 +1,10 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 
 /** What is known of a file and of what it is paired with: the ground for every answer. */
 public final class Known {
@@ -36,6 +38,17 @@ public final class Known {
   /** Where the sentence at a place, a UTF-16 offset, stands in all languages. */
   public References references(int offset) {
     return References.of(at(offset), pairs, uris);
+  }
+
+  /**
+   * What lies around each of some places, UTF-16 offsets: sentence, block, section and file, each
+   * inside the next; empty if nothing is known of the text.
+   */
+  public Optional<List<List<Span>>> surrounding(List<Integer> offsets) {
+    return own().stream()
+        .findFirst()
+        .map(pair -> new Surrounding(pair.reading(file)))
+        .map(surrounding -> offsets.stream().map(surrounding::at).toList());
   }
 
   /** The pairs that the file itself is in. */

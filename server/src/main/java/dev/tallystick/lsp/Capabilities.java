@@ -20,6 +20,7 @@ final class Capabilities {
     can.setDefinitionProvider(true);
     can.setReferencesProvider(true);
     can.setHoverProvider(true);
+    can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
     can.setWorkspace(new WorkspaceServerCapabilities(folders()));
     return can;

@@ -28,6 +28,8 @@ import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
 import org.eclipse.lsp4j.Range;
 import org.eclipse.lsp4j.ReferenceParams;
+import org.eclipse.lsp4j.SelectionRange;
+import org.eclipse.lsp4j.SelectionRangeParams;
 import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
 import org.eclipse.lsp4j.TextDocumentItem;
 import org.eclipse.lsp4j.TextDocumentPositionParams;
@@ -139,6 +141,16 @@ final class Documents implements TextDocumentService {
         (known, offset) ->
             conversion.references(
                 params.getTextDocument().getUri(), known.text(), known.references(offset), itself));
+  }
+
+  @Override
+  public CompletableFuture<List<SelectionRange>> selectionRange(SelectionRangeParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getPositions()),
+        Question.Reach.PAIRS,
+        known ->
+            new Selections(conversion.client().encoding()).around(known, params.getPositions()));
   }
 
   private <T> CompletableFuture<T> ask(
