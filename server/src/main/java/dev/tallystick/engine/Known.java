@@ -51,6 +51,11 @@ public final class Known {
         .map(surrounding -> offsets.stream().map(surrounding::at).toList());
   }
 
+  /** The headings that are in no section of another; none if nothing is known of the text. */
+  public List<Heading> outline() {
+    return Outline.of(own(), file);
+  }
+
   /** The pairs that the file itself is in. */
   private List<Settled> own() {
     return pairs.stream().filter(pair -> pair.files().has(file)).toList();

@@ -19,6 +19,7 @@ final class Capabilities {
     can.setTextDocumentSync(sync());
     can.setDefinitionProvider(true);
     can.setReferencesProvider(true);
+    can.setDocumentSymbolProvider(true);
     can.setHoverProvider(true);
     can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
