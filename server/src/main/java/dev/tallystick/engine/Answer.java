@@ -12,9 +12,6 @@ import java.util.Optional;
  * @param preferred the one in the pair edited last, else the first
  */
 public record Answer(List<At> all, Optional<At> preferred) {
-  /** A file that is in no pair. */
-  public static final Answer NONE = new Answer(List.of(), Optional.empty());
-
   /**
    * The counterpart in one pair.
    *
@@ -29,15 +26,15 @@ public record Answer(List<At> all, Optional<At> preferred) {
   }
 
   /** Looks a place of a file up in the pairs that it is in. */
-  static Answer of(List<PairState> pairs, Path file, int offset, Uris uris) {
+  static Answer of(List<Settled> pairs, Path file, int offset, Uris uris) {
     List<At> all = new ArrayList<>();
     Optional<At> preferred = Optional.empty();
     long latest = -1;
-    for (PairState pair : pairs) {
-      Optional<At> at = pair.counterpart(file, offset).map(found -> at(found, uris));
-      at.ifPresent(all::add);
-      if (at.isPresent() && pair.editedAt() > latest) {
-        preferred = at;
+    for (Settled pair : pairs) {
+      At at = at(pair.counterpart(file, offset), uris);
+      all.add(at);
+      if (pair.editedAt() > latest) {
+        preferred = Optional.of(at);
         latest = pair.editedAt();
       }
     }

@@ -246,8 +246,18 @@ public final class Loop implements AutoCloseable {
     return pairs.values().stream().filter(pair -> pair.files().has(file));
   }
 
-  private Answer answer(Path file, int offset) {
-    return Answer.of(pairsOf(file).toList(), file, offset, bulletin);
+  /** Whether a question can be answered. */
+  private boolean ready(Question question) {
+    return library.listed(question.file()) && pairsOf(question).allMatch(PairState::settled);
+  }
+
+  private Stream<PairState> pairsOf(Question question) {
+    return question.pairs(pairs.keySet()).stream().map(pairs::get);
+  }
+
+  private Known answer(Question question, Text text) {
+    List<Settled> known = pairsOf(question).flatMap(pair -> pair.known().stream()).toList();
+    return new Known(question.file(), text, known, bulletin);
   }
 
   private void publish() {

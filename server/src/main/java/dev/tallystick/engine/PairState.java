@@ -2,7 +2,6 @@ package dev.tallystick.engine;
 
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.OnSide;
-import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 
@@ -76,10 +75,6 @@ final class PairState {
     editedAt = turn;
   }
 
-  long editedAt() {
-    return editedAt;
-  }
-
   /** Decides what is to be shown: all findings but those about what is being written. */
   void show(Optional<Caret.Edited> caret) {
     if (running) {
@@ -110,8 +105,8 @@ final class PairState {
         .orElse(List.of());
   }
 
-  /** What stands for the sentence at a place of a file. */
-  Optional<Counterpart> counterpart(Path file, int offset) {
-    return result.map(now -> Counterpart.at(files, now, files.side(file), offset));
+  /** All that is known of the current texts; empty while there is no result for them. */
+  Optional<Settled> known() {
+    return result.map(now -> new Settled(files, now, editedAt));
   }
 }

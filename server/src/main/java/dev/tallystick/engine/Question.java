@@ -1,36 +1,43 @@
 package dev.tallystick.engine;
 
-import dev.tallystick.text.Text;
 import java.nio.file.Path;
-import java.util.function.ToIntFunction;
+import java.util.Collection;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Collectors;
 
 /**
- * What stands for the sentence at a place? Compared by identity: the same place may be asked about
- * twice.
+ * What is known of a file? Compared by identity: the same may be asked twice.
+ *
+ * <p>The text current when its turn comes is the one it is about. It waits until the pairs that it
+ * rests on are settled, and is outdated by an edit of any of their texts.
  */
 public final class Question {
   private final Path file;
-  private final ToIntFunction<Text> place;
+  private final Reach reach;
   private final Reply reply;
+
+  /** How far a question reaches. */
+  public enum Reach {
+    /** To the pairs that the file is in. */
+    PAIRS,
+    /** Also to the other translations of its source. */
+    FAMILY
+  }
 
   /** Takes the answer, on the loop's thread. One of the two is called, once. */
   public interface Reply {
     /** The answer. */
-    void answer(Answer answer);
+    void answer(Known known);
 
     /** The text moved on before the answer was there. */
     void outdated();
   }
 
-  /**
-   * Asks about a file.
-   *
-   * @param place finds the UTF-16 offset in the text current when the question's turn comes
-   * @param reply takes the answer
-   */
-  public Question(Path file, ToIntFunction<Text> place, Reply reply) {
+  /** Asks about a file. */
+  public Question(Path file, Reach reach, Reply reply) {
     this.file = file;
-    this.place = place;
+    this.reach = reach;
     this.reply = reply;
   }
 
@@ -38,8 +45,14 @@ public final class Question {
     return file;
   }
 
-  int offset(Text text) {
-    return place.applyAsInt(text);
+  /** Of all pairs those that the answer rests on, in their order. */
+  List<FilePair> pairs(Collection<FilePair> all) {
+    List<FilePair> own = all.stream().filter(pair -> pair.has(file)).toList();
+    if (reach == Reach.PAIRS) {
+      return own;
+    }
+    Set<Path> sources = own.stream().map(FilePair::source).collect(Collectors.toSet());
+    return all.stream().filter(pair -> pair.has(file) || sources.contains(pair.source())).toList();
   }
 
   Reply reply() {

@@ -13,19 +13,18 @@ import java.util.function.Predicate;
 final class Questions {
   private final List<Waiting> waiting = new ArrayList<>();
 
-  /** A question, and the offset that it is about in the text it was asked of. */
-  private record Waiting(Question question, int offset) {}
+  /** A question, and the text that it was asked of. */
+  private record Waiting(Question question, Text text) {}
 
   /** Finds answers. */
   @FunctionalInterface
   interface Oracle {
-    Answer answer(Path file, int offset);
+    Known answer(Question question, Text text);
   }
 
-  /** Someone asks; the place is looked up in the text as it is now. */
+  /** Someone asks, of the text as it is now. */
   void add(Question question, Optional<Document> document) {
-    Text text = document.map(Document::text).orElse(new Text(""));
-    waiting.add(new Waiting(question, question.offset(text)));
+    waiting.add(new Waiting(question, document.map(Document::text).orElse(new Text(""))));
   }
 
   /** Nobody waits for this one any more. */
@@ -37,7 +36,7 @@ final class Questions {
   void edited(Path file, Collection<FilePair> pairs) {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
       Question question = all.next().question();
-      boolean concerned = pairs.stream().anyMatch(p -> p.has(file) && p.has(question.file()));
+      boolean concerned = question.pairs(pairs).stream().anyMatch(pair -> pair.has(file));
       if (concerned || question.file().equals(file)) {
         all.remove();
         question.reply().outdated();
@@ -46,16 +45,16 @@ final class Questions {
   }
 
   /** Answers those that can be answered now; of a file that is not open there is nothing to say. */
-  void answer(Collection<Path> open, Predicate<Path> ready, Oracle oracle) {
+  void answer(Collection<Path> open, Predicate<Question> ready, Oracle oracle) {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
       Waiting one = all.next();
-      Path file = one.question().file();
-      if (!open.contains(file)) {
+      Question question = one.question();
+      if (!open.contains(question.file())) {
         all.remove();
-        one.question().reply().answer(Answer.NONE);
-      } else if (ready.test(file)) {
+        question.reply().answer(Known.NOTHING);
+      } else if (ready.test(question)) {
         all.remove();
-        one.question().reply().answer(oracle.answer(file, one.offset()));
+        question.reply().answer(oracle.answer(question, one.text()));
       }
     }
   }

@@ -28,8 +28,10 @@ final class Sentences {
     return near >= 0 ? near : lastBefore(offset);
   }
 
-  /** The shortest one around the offset, else the last one that ends there; or -1. */
-  private int touched(int offset) {
+  /**
+   * The shortest one around the offset, else the last one that ends there; or -1: none is touched.
+   */
+  int touched(int offset) {
     int found = -1;
     int ending = -1;
     for (int i = 0; i < segments.size(); i++) {

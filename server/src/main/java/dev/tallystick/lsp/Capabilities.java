@@ -18,7 +18,10 @@ final class Capabilities {
     }
     can.setTextDocumentSync(sync());
     can.setDefinitionProvider(true);
+    can.setReferencesProvider(true);
+    can.setDocumentSymbolProvider(true);
     can.setHoverProvider(true);
+    can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
     can.setWorkspace(new WorkspaceServerCapabilities(folders()));
     return can;

@@ -8,6 +8,7 @@ import org.eclipse.lsp4j.ClientCapabilities;
 import org.eclipse.lsp4j.DefinitionCapabilities;
 import org.eclipse.lsp4j.DidChangeConfigurationCapabilities;
 import org.eclipse.lsp4j.DidChangeWatchedFilesCapabilities;
+import org.eclipse.lsp4j.DocumentSymbolCapabilities;
 import org.eclipse.lsp4j.GeneralClientCapabilities;
 import org.eclipse.lsp4j.InitializeParams;
 import org.eclipse.lsp4j.PublishDiagnosticsCapabilities;
@@ -22,6 +23,7 @@ import org.eclipse.lsp4j.WorkspaceFolder;
  * @param namesEncoding whether it wants to be told which
  * @param related whether it shows related places of a finding
  * @param links whether it takes a jump with the ranges on both sides
+ * @param outlines whether it takes the headings of a text as a tree
  * @param watches whether it can be asked to watch files
  * @param tellsSettings whether it can be asked for settings
  * @param registersSettings whether it can be asked to tell when they change
@@ -32,6 +34,7 @@ record Client(
     boolean namesEncoding,
     boolean related,
     boolean links,
+    boolean outlines,
     boolean watches,
     boolean tellsSettings,
     boolean registersSettings,
@@ -53,6 +56,9 @@ record Client(
         yes(
             text.map(TextDocumentClientCapabilities::getDefinition)
                 .map(DefinitionCapabilities::getLinkSupport)),
+        yes(
+            text.map(TextDocumentClientCapabilities::getDocumentSymbol)
+                .map(DocumentSymbolCapabilities::getHierarchicalDocumentSymbolSupport)),
         yes(
             workspace
                 .map(WorkspaceClientCapabilities::getDidChangeWatchedFiles)

@@ -7,6 +7,9 @@ import dev.tallystick.engine.Answer;
 import dev.tallystick.engine.Counterpart;
 import dev.tallystick.engine.Notice;
 import dev.tallystick.engine.Publication;
+import dev.tallystick.engine.References;
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -76,11 +79,30 @@ record Conversion(Client client) {
   }
 
   private Location location(Answer.At at) {
-    return new Location(at.uri(), target(at));
+    return location(at.uri(), at.counterpart().there(), at.counterpart().jump());
   }
 
   private Range target(Answer.At at) {
     return client.encoding().range(at.counterpart().there(), at.counterpart().jump());
+  }
+
+  /**
+   * Where a sentence stands in all languages.
+   *
+   * @param uri its own file, as the client names it
+   * @param itself whether its own place is wanted too
+   */
+  List<Location> references(String uri, Text text, References references, boolean itself) {
+    List<Location> locations = new ArrayList<>();
+    if (itself) {
+      references.itself().ifPresent(span -> locations.add(location(uri, text, span)));
+    }
+    references.others().forEach(at -> locations.add(location(at.uri(), at.text(), at.span())));
+    return locations;
+  }
+
+  private Location location(String uri, Text text, Span span) {
+    return new Location(uri, client.encoding().range(text, span));
   }
 
   /** The match that the sentence belongs to, in its own file. */

@@ -3,6 +3,7 @@ package dev.tallystick.lsp;
 import dev.tallystick.engine.Answer;
 import dev.tallystick.engine.Change;
 import dev.tallystick.engine.Event;
+import dev.tallystick.engine.Known;
 import dev.tallystick.engine.Loop;
 import dev.tallystick.engine.Question;
 import dev.tallystick.text.Span;
@@ -11,6 +12,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
+import java.util.function.BiFunction;
 import java.util.function.Function;
 import org.eclipse.lsp4j.DefinitionParams;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
@@ -19,17 +21,24 @@ import org.eclipse.lsp4j.DidOpenTextDocumentParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
 import org.eclipse.lsp4j.DocumentHighlight;
 import org.eclipse.lsp4j.DocumentHighlightParams;
+import org.eclipse.lsp4j.DocumentSymbol;
+import org.eclipse.lsp4j.DocumentSymbolParams;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.HoverParams;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
+import org.eclipse.lsp4j.Position;
 import org.eclipse.lsp4j.Range;
+import org.eclipse.lsp4j.ReferenceParams;
+import org.eclipse.lsp4j.SelectionRange;
+import org.eclipse.lsp4j.SelectionRangeParams;
+import org.eclipse.lsp4j.SymbolInformation;
 import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
+import org.eclipse.lsp4j.TextDocumentIdentifier;
 import org.eclipse.lsp4j.TextDocumentItem;
 import org.eclipse.lsp4j.TextDocumentPositionParams;
 import org.eclipse.lsp4j.VersionedTextDocumentIdentifier;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
-import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
 import org.eclipse.lsp4j.services.TextDocumentService;
 
 /**
@@ -39,19 +48,20 @@ final class Documents implements TextDocumentService {
   /** An edit that does not say what came: from now on the text is not known. */
   private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
 
+  private final Requests requests = new Requests();
   private Loop loop;
   private Conversion conversion;
-  private boolean over;
 
   /** The session has begun. */
   void begin(Loop with, Conversion by) {
     loop = with;
     conversion = by;
+    requests.begin(with);
   }
 
   /** Nothing is answered any more. */
   void end() {
-    over = true;
+    requests.end();
   }
 
   @Override
@@ -126,57 +136,56 @@ final class Documents implements TextDocumentService {
     return ask(params, answer -> conversion.highlights(answer));
   }
 
-  /**
-   * Asks the loop. The future is handed out as it is, so that the client's cancelling reaches it.
-   */
-  private <T> CompletableFuture<T> ask(
-      TextDocumentPositionParams params, Function<Answer, T> convert) {
-    if (loop == null) {
-      throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
-    }
-    if (over) {
-      throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
-    }
-    if (params.getTextDocument() == null || params.getPosition() == null) {
-      throw Server.refused(ResponseErrorCode.InvalidParams, "A document and a position, please.");
-    }
-    CompletableFuture<T> asked = new CompletableFuture<>();
-    Optional<Path> file = Uris.file(params.getTextDocument().getUri());
-    if (file.isEmpty()) {
-      asked.complete(convert.apply(Answer.NONE));
-      return asked;
-    }
-    Question question =
-        new Question(
-            file.get(),
-            text -> conversion.client().encoding().offset(text, params.getPosition()),
-            new Reply<>(asked, convert));
-    asked.whenComplete(
-        (answer, fault) -> {
-          if (asked.isCancelled()) {
-            loop.post(new Event.Withdrawn(question));
-          }
-        });
-    loop.post(new Event.Asked(question));
-    return asked;
+  @Override
+  public CompletableFuture<List<? extends Location>> references(ReferenceParams params) {
+    boolean itself = params.getContext() != null && params.getContext().isIncludeDeclaration();
+    return ask(
+        params,
+        Question.Reach.FAMILY,
+        (known, offset) ->
+            conversion.references(
+                params.getTextDocument().getUri(), known.text(), known.references(offset), itself));
   }
 
-  /** Completes what the client waits for. */
-  private record Reply<T>(CompletableFuture<T> asked, Function<Answer, T> convert)
-      implements Question.Reply {
-    @Override
-    public void answer(Answer answer) {
-      try {
-        asked.complete(convert.apply(answer));
-      } catch (RuntimeException e) {
-        asked.completeExceptionally(e); // a fault of our own is told by the session
-      }
-    }
+  @Override
+  public CompletableFuture<List<SelectionRange>> selectionRange(SelectionRangeParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getPositions()),
+        Question.Reach.PAIRS,
+        known ->
+            new Selections(conversion.client().encoding()).around(known, params.getPositions()));
+  }
 
-    @Override
-    public void outdated() {
-      asked.completeExceptionally(
-          Server.refused(ResponseErrorCode.ContentModified, "The text has changed since."));
-    }
+  @Override
+  public CompletableFuture<List<Either<SymbolInformation, DocumentSymbol>>> documentSymbol(
+      DocumentSymbolParams params) {
+    TextDocumentIdentifier document = params.getTextDocument();
+    return requests.ask(
+        document,
+        Optional.of(params),
+        Question.Reach.PAIRS,
+        known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  private <T> CompletableFuture<T> ask(
+      TextDocumentPositionParams params, Function<Answer, T> convert) {
+    return ask(params, Question.Reach.PAIRS, (known, offset) -> convert.apply(known.at(offset)));
+  }
+
+  private <T> CompletableFuture<T> ask(
+      TextDocumentPositionParams params,
+      Question.Reach reach,
+      BiFunction<Known, Integer, T> convert) {
+    Position position = params.getPosition();
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(position),
+        reach,
+        known -> convert.apply(known, offset(known, position)));
+  }
+
+  private int offset(Known known, Position position) {
+    return conversion.client().encoding().offset(known.text(), position);
   }
 }

@@ -44,12 +44,12 @@ class PairStateTest {
     assertTrue(old.cancelled());
     pair.finish(old, tooLate);
     assertFalse(pair.settled());
-    assertEquals(Optional.empty(), pair.counterpart(FILES.target(), 0));
+    assertEquals(Optional.empty(), pair.known());
 
     Optional<PairResult> result = result(now);
     pair.finish(now, result);
     assertTrue(pair.settled());
-    assertSame(now.target().text(), pair.counterpart(FILES.target(), 0).orElseThrow().here());
+    assertSame(now.target().text(), pair.known().orElseThrow().reading(FILES.target()).text());
   }
 
   @Test

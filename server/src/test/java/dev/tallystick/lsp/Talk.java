@@ -18,6 +18,7 @@ import org.eclipse.lsp4j.Diagnostic;
 import org.eclipse.lsp4j.DidChangeWatchedFilesCapabilities;
 import org.eclipse.lsp4j.DidChangeWatchedFilesParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
+import org.eclipse.lsp4j.DocumentSymbolCapabilities;
 import org.eclipse.lsp4j.FileChangeType;
 import org.eclipse.lsp4j.FileEvent;
 import org.eclipse.lsp4j.HoverParams;
@@ -119,6 +120,9 @@ final class Talk implements LanguageClient, AutoCloseable {
     TextDocumentClientCapabilities text = new TextDocumentClientCapabilities();
     text.setPublishDiagnostics(diagnostics);
     text.setDefinition(definition);
+    DocumentSymbolCapabilities symbols = new DocumentSymbolCapabilities();
+    symbols.setHierarchicalDocumentSymbolSupport(true);
+    text.setDocumentSymbol(symbols);
     WorkspaceClientCapabilities workspace = new WorkspaceClientCapabilities();
     workspace.setDidChangeWatchedFiles(new DidChangeWatchedFilesCapabilities(true));
     InitializeParams params = new InitializeParams();

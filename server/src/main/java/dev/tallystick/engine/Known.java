@@ -1,0 +1,63 @@
+package dev.tallystick.engine;
+
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+
+/** What is known of a file and of what it is paired with: the ground for every answer. */
+public final class Known {
+  /** Of a file that is in no pair. */
+  public static final Known NOTHING =
+      new Known(Path.of(""), new Text(""), List.of(), Path::toString);
+
+  private final Path file;
+  private final Text text;
+  private final List<Settled> pairs;
+  private final Uris uris;
+
+  /** Takes the pairs that a question rests on, sorted. */
+  Known(Path file, Text text, List<Settled> pairs, Uris uris) {
+    this.file = file;
+    this.text = text;
+    this.pairs = List.copyOf(pairs);
+    this.uris = uris;
+  }
+
+  /** The text that the question was asked of. */
+  public Text text() {
+    return text;
+  }
+
+  /** What stands for the sentence at a place, a UTF-16 offset. */
+  public Answer at(int offset) {
+    return Answer.of(own(), file, offset, uris);
+  }
+
+  /** Where the sentence at a place, a UTF-16 offset, stands in all languages. */
+  public References references(int offset) {
+    return References.of(at(offset), pairs, uris);
+  }
+
+  /**
+   * What lies around each of some places, UTF-16 offsets: sentence, block, section and file, each
+   * inside the next; empty if nothing is known of the text.
+   */
+  public Optional<List<List<Span>>> surrounding(List<Integer> offsets) {
+    return own().stream()
+        .findFirst()
+        .map(pair -> new Surrounding(pair.reading(file)))
+        .map(surrounding -> offsets.stream().map(surrounding::at).toList());
+  }
+
+  /** The headings that are in no section of another; none if nothing is known of the text. */
+  public List<Heading> outline() {
+    return Outline.of(own(), file);
+  }
+
+  /** The pairs that the file itself is in. */
+  private List<Settled> own() {
+    return pairs.stream().filter(pair -> pair.files().has(file)).toList();
+  }
+}

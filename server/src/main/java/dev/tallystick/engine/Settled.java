@@ -1,0 +1,22 @@
+package dev.tallystick.engine;
+
+import java.nio.file.Path;
+
+/**
+ * A pair of which all is known that there is to know of its current texts.
+ *
+ * @param files the pair
+ * @param result what was found in its texts
+ * @param editedAt the turn of the last edit of the translation; 0 if there was none
+ */
+record Settled(FilePair files, PairResult result, long editedAt) {
+  /** What stands for the sentence at a place of a file, a UTF-16 offset. */
+  Counterpart counterpart(Path file, int offset) {
+    return Counterpart.at(files, result, files.side(file), offset);
+  }
+
+  /** One of the two texts, read. */
+  Reading reading(Path file) {
+    return result.reading(files.side(file));
+  }
+}
