@@ -1,9 +1,7 @@
 package dev.tallystick.align;
 
 import dev.tallystick.run.Cancellation;
-import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.Collections;
 import java.util.List;
 
 /**
@@ -201,19 +199,20 @@ final class Lattice {
     }
   }
 
-  private int omission() {
+  /** The numbers of the null moves, behind those of the shapes. */
+  int omission() {
     return shapes;
   }
 
-  private int omittedBlock() {
+  int omittedBlock() {
     return shapes + 1;
   }
 
-  private int addition() {
+  int addition() {
     return shapes + 2;
   }
 
-  private int addedBlock() {
+  int addedBlock() {
     return shapes + 3;
   }
 
@@ -235,70 +234,6 @@ final class Lattice {
    * before a null move. Its confidences are 1: this table knows nothing of the other chains.
    */
   List<Match> chain() {
-    List<Match> chain = new ArrayList<>();
-    int row = target.size();
-    int column = bestEnd();
-    leaveOut(chain, row, column, source.size());
-    while (row > 0 || column > 0) {
-      int move = rows[row].move[column - rows[row].first];
-      int toRow = row - rowsBack(move, row);
-      int toColumn = column - columnsBack(move, column);
-      if (move < shapes) {
-        chain.add(new Match(toColumn, column, toRow, row, 1));
-      } else {
-        leaveOut(chain, row, toColumn, column);
-        leaveUnexplained(chain, toRow, row, column);
-      }
-      row = toRow;
-      column = toColumn;
-    }
-    Collections.reverse(chain);
-    return chain;
-  }
-
-  private int rowsBack(int move, int row) {
-    if (move < shapes) {
-      return down[move];
-    }
-    if (move == addedBlock()) {
-      return row - target.blockEndingAt[row];
-    }
-    return move == addition() ? 1 : 0;
-  }
-
-  private int columnsBack(int move, int column) {
-    if (move < shapes) {
-      return right[move];
-    }
-    if (move == omittedBlock()) {
-      return column - source.blockEndingAt[column];
-    }
-    return move == omission() ? 1 : 0;
-  }
-
-  private static void leaveOut(List<Match> chain, int row, int from, int to) {
-    for (int unit = to; unit > from; unit--) {
-      chain.add(new Match(unit - 1, unit, row, row, 1));
-    }
-  }
-
-  private static void leaveUnexplained(List<Match> chain, int from, int to, int column) {
-    for (int unit = to; unit > from; unit--) {
-      chain.add(new Match(column, column, unit - 1, unit, 1));
-    }
-  }
-
-  private int bestEnd() {
-    Row end = rows[target.size()];
-    int best = end.last;
-    double worth = Row.NOWHERE;
-    for (int column = end.last; column >= end.first; column--) {
-      double ended = end.best[column - end.first] + ending(column);
-      if (ended > worth) {
-        worth = ended;
-        best = column;
-      }
-    }
-    return best;
+    return new BestChain(this).matches();
   }
 }
