@@ -37,4 +37,8 @@ final class Announcements {
         + ": "
         + fault;
   }
+
+  static String fault(Folder folder, String fault) {
+    return "A fault of Tallystick itself while listing " + folder.path() + ": " + fault;
+  }
 }

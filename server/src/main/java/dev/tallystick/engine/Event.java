@@ -63,8 +63,12 @@ public sealed interface Event {
   record Examined(Task task, Optional<PairResult> result, Optional<String> fault)
       implements Event {}
 
-  /** A worker has listed a folder; empty if that cannot be done. */
-  record Listed(Path folder, List<Path> files) implements Event {}
+  /**
+   * A worker has listed a folder.
+   *
+   * @param trouble why that cannot be done, for the log; then there are no files
+   */
+  record Listed(Path folder, List<Path> files, Optional<String> trouble) implements Event {}
 
   /** A moment has come that someone waits for. Who, the state tells. */
   record TimerDue() implements Event {}

@@ -147,6 +147,7 @@ public final class Loop implements AutoCloseable {
       library.reread(changed);
     } else if (event instanceof Event.Listed listed) {
       library.listed(listed);
+      listed.trouble().ifPresent(audience::log);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
     } else if (event instanceof Event.Begun) {

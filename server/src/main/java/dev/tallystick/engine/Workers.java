@@ -30,7 +30,7 @@ final class Workers {
   }
 
   void list(Folder folder) {
-    run(() -> new Event.Listed(folder.path(), files(folder)));
+    run(() -> listed(folder));
   }
 
   void stop() {
@@ -67,11 +67,15 @@ final class Workers {
     }
   }
 
-  private List<Path> files(Folder folder) {
+  private Event listed(Folder folder) {
     try {
-      return machine.disk().files(folder);
-    } catch (Unreadable | RuntimeException | Error e) {
-      return List.of();
+      List<Path> files = machine.disk().files(folder);
+      return new Event.Listed(folder.path(), files, Optional.empty());
+    } catch (Unreadable e) {
+      return new Event.Listed(folder.path(), List.of(), Optional.of(e.getMessage()));
+    } catch (RuntimeException | Error e) {
+      String fault = Announcements.fault(folder, Fault.where(e));
+      return new Event.Listed(folder.path(), List.of(), Optional.of(fault));
     }
   }
 }

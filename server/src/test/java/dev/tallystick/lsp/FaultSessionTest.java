@@ -97,4 +97,29 @@ class FaultSessionTest {
       assertEquals(List.of("omission"), talk.codes(work.en()));
     }
   }
+
+  @Test
+  void aFolderThatCannotBeListedIsToldInTheLog() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.in(folder)) {
+      talk.open(work.en(), Ferry.EN);
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(work.de()));
+      talk.machine.disk =
+          new Disk() {
+            @Override
+            public byte[] read(Path file) throws Unreadable {
+              return REAL.read(file);
+            }
+
+            @Override
+            public List<Path> files(Path listed) throws Unreadable {
+              throw new Unreadable(listed + ": cannot be listed.");
+            }
+          };
+      talk.wrote(FileChangeType.Created, work.write("fr/ferry.md", Ferry.FR));
+      assertEquals(1, talk.logged.size(), talk.logged::toString);
+      assertTrue(talk.logged.get(0).endsWith(": cannot be listed."), talk.logged::toString);
+    }
+  }
 }
