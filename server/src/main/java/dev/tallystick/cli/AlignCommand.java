@@ -13,7 +13,6 @@ import java.util.concurrent.Callable;
 import java.util.stream.Collectors;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 /** Prints which sentences stand for which. */
@@ -27,12 +26,7 @@ final class AlignCommand implements Callable<Integer> {
   @Mixin private LanguageOptions languages;
   @Mixin private ModelOption model;
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (the default) or jsonl.")
-  private OutputFormat format;
+  @Mixin private FormatOption format;
 
   @Parameters(index = "0", paramLabel = "SOURCE", description = "The source file.")
   private Path source;
@@ -63,7 +57,7 @@ final class AlignCommand implements Callable<Integer> {
 
   private void print(List<Segment> sources, List<Segment> targets, double confidence)
       throws IOException {
-    if (format == OutputFormat.JSONL) {
+    if (format.forPrograms()) {
       new JsonLine()
           .span("source", span(sources))
           .span("target", span(targets))

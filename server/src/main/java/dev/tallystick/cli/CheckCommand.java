@@ -31,12 +31,7 @@ final class CheckCommand implements Callable<Integer> {
   @Mixin private LanguageOptions languages;
   @Mixin private ModelOption model;
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (the default) or jsonl.")
-  private OutputFormat format;
+  @Mixin private FormatOption format;
 
   @Option(
       names = "--draft",
@@ -65,7 +60,7 @@ final class CheckCommand implements Callable<Integer> {
   @Override
   public Integer call() throws IOException {
     Job job = Job.of(console, paths, languages.rules());
-    FindingPrinter printer = FindingPrinter.of(format, console);
+    FindingPrinter printer = FindingPrinter.of(format.format(), console);
     Ticker ticker = new Ticker(console, job.pairs().pairs().size());
     boolean failed = false;
     int checked = 0;

@@ -17,7 +17,6 @@ import java.util.Map;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 /** Says which files belong together. */
@@ -32,12 +31,7 @@ final class PairsCommand implements Callable<Integer> {
 
   @Mixin private LanguageOptions languages;
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (the default) or jsonl.")
-  private OutputFormat format;
+  @Mixin private FormatOption format;
 
   @Parameters(arity = "1", paramLabel = "PATH", description = "A folder.")
   private Path path;
@@ -58,7 +52,7 @@ final class PairsCommand implements Callable<Integer> {
         print(pair, result);
       }
     }
-    if (format == OutputFormat.TEXT) {
+    if (!format.forPrograms()) {
       for (Alone alone : job.pairs().alone()) {
         console.out().println(alone.file() + ": alone. " + alone.reason());
       }
@@ -71,7 +65,7 @@ final class PairsCommand implements Callable<Integer> {
   }
 
   private void print(Pair pair, PairResult result) throws IOException {
-    if (format == OutputFormat.JSONL) {
+    if (format.forPrograms()) {
       printForPrograms(pair, result);
     } else {
       printForPeople(pair, result);

@@ -12,6 +12,7 @@ import java.nio.file.Path;
 import java.util.Locale;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -37,12 +38,7 @@ final class SegmentsCommand implements Callable<Integer> {
     language = LanguageOptions.language(command, tag);
   }
 
-  @Option(
-      names = "--format",
-      paramLabel = "FORMAT",
-      defaultValue = "text",
-      description = "text (the default) or jsonl.")
-  private OutputFormat format;
+  @Mixin private FormatOption format;
 
   @Parameters(index = "0", paramLabel = "FILE", description = "The file.")
   private Path file;
@@ -60,7 +56,7 @@ final class SegmentsCommand implements Callable<Integer> {
         continue;
       }
       String block = segment.block().kind().name().toLowerCase(Locale.ROOT);
-      if (format == OutputFormat.JSONL) {
+      if (format.forPrograms()) {
         new JsonLine()
             .put("start", segment.span().start())
             .put("end", segment.span().end())

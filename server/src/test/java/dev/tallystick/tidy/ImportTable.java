@@ -46,11 +46,9 @@ record ImportTable(Map<String, Row> rows) {
     int start = developers.indexOf(HEADINGS, section);
     assertTrue(start >= 0, "The section has no table " + HEADINGS);
     Map<String, Row> rows = new LinkedHashMap<>();
-    developers
-        .substring(start)
-        .lines()
-        .takeWhile(line -> line.startsWith("|"))
-        .skip(2)
+    List<String> table =
+        developers.substring(start).lines().takeWhile(line -> line.startsWith("|")).toList();
+    table.subList(2, table.size()).stream()
         .map(line -> List.of(line.substring(1).split("\\|")))
         .forEach(cells -> add(rows, cells));
     return new ImportTable(rows);
