@@ -1,17 +1,13 @@
 package dev.tallystick.engine;
 
-import dev.tallystick.check.OnSide;
 import dev.tallystick.run.Fault;
 import dev.tallystick.run.Threads;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Set;
-import java.util.TreeMap;
-import java.util.TreeSet;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
 import java.util.stream.Stream;
@@ -54,7 +50,7 @@ public final class Loop implements AutoCloseable {
   private final Library library;
   private final Caret caret;
   private final Bell bell;
-  private final Map<FilePair, PairState> pairs = new TreeMap<>();
+  private final PairStates pairs = new PairStates();
   private final Questions questions = new Questions();
   private final Bulletin bulletin;
   private boolean started;
@@ -168,7 +164,7 @@ public final class Loop implements AutoCloseable {
     }
     Document document = library.document(file).orElseThrow();
     OptionalInt end = document.edit(edited.version(), edited.changes());
-    questions.edited(file, pairs.keySet());
+    questions.edited(file, pairs.pairs());
     if (document.announcesLoss()) {
       audience.say(Announcements.lost(file));
     }
@@ -178,20 +174,13 @@ public final class Loop implements AutoCloseable {
   /** The translator has written something that ends at an offset. */
   private void write(Path file, int offset) {
     caret.edited(file, offset);
-    for (PairState pair : pairs.values()) {
-      if (pair.files().target().equals(file)) {
-        pair.edited(turn);
-      }
-    }
+    pairs.edited(file, turn);
   }
 
   private void finish(Event.Examined examined) {
-    Task task = examined.task();
-    PairState state = pairs.get(task.files());
-    if (state != null) {
-      state.finish(task, examined.result());
-    }
-    examined.fault().ifPresent(fault -> audience.log(Announcements.fault(task.files(), fault)));
+    pairs.finish(examined);
+    FilePair files = examined.task().files();
+    examined.fault().ifPresent(fault -> audience.log(Announcements.fault(files, fault)));
   }
 
   /** Brings everything in line with what is known now. */
@@ -201,68 +190,35 @@ public final class Loop implements AutoCloseable {
     }
     caret.due().ifPresent(bell::at);
     library.due(caret.restMillis()).ifPresent(bell::at);
-    keepWantedPairs();
-    for (PairState pair : pairs.values()) {
-      pair.take(sheet(pair, OnSide.SOURCE), sheet(pair, OnSide.TARGET)).ifPresent(workers::examine);
-      pair.show(caret.last());
+    if (pairs.keep(library.pairs())) {
+      library.retain(pairs.files());
     }
-    questions.answer(library.open(), this::ready, this::answer);
+    pairs.take(library, workers::examine);
+    pairs.show(caret.last());
     publish();
+    questions.answer(library.open(), this::ready, this::answer);
     if (set) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));
     }
   }
 
-  private void keepWantedPairs() {
-    List<FilePair> wanted = library.pairs();
-    if (wanted.equals(List.copyOf(pairs.keySet()))) {
-      return;
-    }
-    Set<FilePair> gone = new TreeSet<>(pairs.keySet());
-    wanted.forEach(gone::remove);
-    gone.forEach(pair -> pairs.remove(pair).drop());
-    wanted.forEach(pair -> pairs.computeIfAbsent(pair, PairState::new));
-    library.retain(pairedFiles());
-  }
-
-  private Optional<Sheet> sheet(PairState pair, OnSide side) {
-    return library.sheet(pair.files().file(side), pair.files().language(side).tag());
-  }
-
-  private Set<Path> pairedFiles() {
-    Set<Path> files = new TreeSet<>();
-    for (FilePair pair : pairs.keySet()) {
-      files.add(pair.source());
-      files.add(pair.target());
-    }
-    return files;
-  }
-
   /** Whether all is known that there is to know of the current text of a file. */
   private boolean ready(Path file) {
-    return library.listed(file) && pairsOf(file).allMatch(PairState::settled);
-  }
-
-  private Stream<PairState> pairsOf(Path file) {
-    return pairs.values().stream().filter(pair -> pair.files().has(file));
+    return library.listed(file) && pairs.of(file).allMatch(PairState::settled);
   }
 
   /** Whether a question can be answered. */
   private boolean ready(Question question) {
-    return library.listed(question.file()) && pairsOf(question).allMatch(PairState::settled);
-  }
-
-  private Stream<PairState> pairsOf(Question question) {
-    return question.pairs(pairs.keySet()).stream().map(pairs::get);
+    return library.listed(question.file()) && pairs.of(question).allMatch(PairState::settled);
   }
 
   private Known answer(Question question, Text text) {
-    List<Settled> known = pairsOf(question).flatMap(pair -> pair.known().stream()).toList();
+    List<Settled> known = pairs.of(question).flatMap(pair -> pair.known().stream()).toList();
     return new Known(question.file(), text, known, bulletin);
   }
 
   private void publish() {
-    Set<Path> files = pairedFiles();
+    Set<Path> files = pairs.files();
     files.addAll(bulletin.files());
     files.addAll(library.open());
     for (Path file : files) {
@@ -282,7 +238,8 @@ public final class Loop implements AutoCloseable {
 
   private void publish(Path file) {
     List<Notice> notices =
-        pairsOf(file)
+        pairs
+            .of(file)
             .flatMap(pair -> Stream.concat(findings(pair, file), faults(file)))
             .sorted()
             .distinct()
