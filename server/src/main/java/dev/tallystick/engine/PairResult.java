@@ -4,6 +4,7 @@ import dev.tallystick.align.Aligner;
 import dev.tallystick.align.Alignment;
 import dev.tallystick.check.Checks;
 import dev.tallystick.check.Finding;
+import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
 import dev.tallystick.check.Progress;
 import dev.tallystick.check.Subject;
@@ -37,6 +38,11 @@ public record PairResult(
         new Subject(source.segments(), target.segments(), target.language(), alignment, draft);
     return new PairResult(
         source, target, alignment, Checks.findings(subject), Progress.of(subject));
+  }
+
+  /** The same with the findings that a project wants to hear of, as loudly as it wants. */
+  public PairResult at(Levels levels) {
+    return new PairResult(source, target, alignment, levels.apply(findings), progress);
   }
 
   /** One of the two texts, read. */
