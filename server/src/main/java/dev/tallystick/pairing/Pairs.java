@@ -4,7 +4,8 @@ import java.util.List;
 
 /**
  * What belongs together among some files. Every file is in exactly one of the three lists; there it
- * is the target of one pair at most, and none is the source of one pair and the target of another.
+ * is the target of one pair at most, and has the same language in all its pairs. Only where the
+ * project states it, a file is the source of one pair and the target of another.
  *
  * @param pairs sorted by source, then target
  * @param alone files without a counterpart, sorted by path
