@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.project.Names;
 import dev.tallystick.prose.Format;
 import java.nio.file.Path;
 
@@ -33,7 +34,6 @@ public record Folder(Path path, int depth) {
 
   /** Whether files of this name, or in a folder of this name, are passed over. */
   static boolean hides(Path path) {
-    String name = String.valueOf(path.getFileName());
-    return name.startsWith(".") || name.equals("node_modules");
+    return Names.hides(String.valueOf(path.getFileName()));
   }
 }
