@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.project.Names;
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import java.nio.file.Path;
 
@@ -21,7 +22,8 @@ public record Folder(Path path, int depth) {
 
   /** Whether a list of its files has a file, if there is such a file. */
   boolean lists(Path file) {
-    if (!holds(file) || Format.ofName(String.valueOf(file.getFileName())).isEmpty()) {
+    boolean prose = Format.ofName(String.valueOf(file.getFileName())).isPresent();
+    if (!holds(file) || !prose && !file.equals(path.resolve(ProjectFile.NAME))) {
       return false;
     }
     for (Path name : path.relativize(file)) {

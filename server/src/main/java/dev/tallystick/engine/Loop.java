@@ -142,8 +142,7 @@ public final class Loop implements AutoCloseable {
     if (event instanceof Event.FilesChanged changed) {
       library.reread(changed);
     } else if (event instanceof Event.Listed listed) {
-      library.listed(listed);
-      listed.trouble().ifPresent(audience::log);
+      library.listed(listed).forEach(audience::log);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
     } else if (event instanceof Event.Begun) {
@@ -221,6 +220,7 @@ public final class Loop implements AutoCloseable {
     Set<Path> files = pairs.files();
     files.addAll(bulletin.files());
     files.addAll(library.open());
+    files.addAll(library.flawed());
     for (Path file : files) {
       if (ready(file)) {
         publish(file);
@@ -237,10 +237,10 @@ public final class Loop implements AutoCloseable {
   }
 
   private void publish(Path file) {
+    Stream<Notice> paired =
+        pairs.of(file).flatMap(pair -> Stream.concat(findings(pair, file), faults(file)));
     List<Notice> notices =
-        pairs
-            .of(file)
-            .flatMap(pair -> Stream.concat(findings(pair, file), faults(file)))
+        Stream.concat(paired, library.flaws(file).stream().map(Notice::of))
             .sorted()
             .distinct()
             .toList();

@@ -33,9 +33,10 @@ final class PairStates {
     return true;
   }
 
-  /** Gives each pair its current texts, and those that are new to a worker. */
+  /** Gives each pair its levels and its current texts, and those that are new to a worker. */
   void take(Library library, Consumer<Task> work) {
     for (PairState pair : states.values()) {
+      pair.at(library.levels(pair.files()));
       pair.take(sheet(library, pair, OnSide.SOURCE), sheet(library, pair, OnSide.TARGET))
           .ifPresent(work);
     }

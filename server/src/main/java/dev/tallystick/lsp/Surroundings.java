@@ -4,6 +4,7 @@ import com.google.gson.JsonObject;
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Loop;
 import dev.tallystick.engine.Settings;
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
@@ -80,8 +81,12 @@ final class Surroundings implements WorkspaceService {
         Stream.of(Format.values())
             .flatMap(format -> format.extensions().stream())
             .collect(Collectors.joining(","));
-    FileSystemWatcher watcher = new FileSystemWatcher(Either.forLeft("**/*.{" + extensions + "}"));
-    return new DidChangeWatchedFilesRegistrationOptions(List.of(watcher));
+    return new DidChangeWatchedFilesRegistrationOptions(
+        List.of(watcher("*.{" + extensions + "}"), watcher(ProjectFile.NAME)));
+  }
+
+  private static FileSystemWatcher watcher(String name) {
+    return new FileSystemWatcher(Either.forLeft("**/" + name));
   }
 
   @Override

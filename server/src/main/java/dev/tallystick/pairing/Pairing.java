@@ -2,7 +2,6 @@ package dev.tallystick.pairing;
 
 import java.util.ArrayList;
 import java.util.Collection;
-import java.util.Comparator;
 import java.util.List;
 import java.util.NavigableSet;
 import java.util.Optional;
@@ -46,7 +45,7 @@ public final class Pairing {
   public static Pairs pairs(Collection<String> paths, Rules rules) {
     Pairing pairing = new Pairing(rules);
     pairing.addAll(new TreeSet<>(paths));
-    return pairing.sorted();
+    return new Pairs(pairing.pairs, pairing.alone, pairing.ambiguities);
   }
 
   private void addAll(NavigableSet<String> paths) {
@@ -74,13 +73,6 @@ public final class Pairing {
     Optional<Glob> glob = rules.ignoring(path);
     glob.ifPresent(by -> alone.add(new Alone(path, Reasons.ignored(by))));
     return glob.isPresent();
-  }
-
-  private Pairs sorted() {
-    pairs.sort(Comparator.comparing(Pair::source).thenComparing(Pair::target));
-    alone.sort(Comparator.comparing(Alone::file));
-    ambiguities.sort(Comparator.comparing(ambiguity -> ambiguity.files().get(0)));
-    return new Pairs(pairs, alone, ambiguities);
   }
 
   private void addAmbiguity(Group group, Collection<Language> choices) {

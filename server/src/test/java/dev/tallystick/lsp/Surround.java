@@ -76,6 +76,12 @@ final class Surround {
       await(listing);
       return disk.files(folder);
     }
+
+    @Override
+    public List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
+      await(listing);
+      return disk.files(folder, unread);
+    }
   }
 
   /** The watch tells something. */
