@@ -60,7 +60,7 @@ public final class Names {
     while (variable.find()) {
       if (!variable.group().equals("{path}") && !variable.group().equals("{tag}")) {
         return Optional.of(
-            "\"" + variable.group() + "\" means nothing here. Allowed are: {path}, {tag}.");
+            Values.quote(variable.group()) + " means nothing here. Allowed are: {path}, {tag}.");
       }
     }
     return written.indexOf('*') < 0 && written.indexOf('?') < 0

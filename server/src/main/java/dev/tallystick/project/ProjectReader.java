@@ -81,9 +81,8 @@ final class ProjectReader {
     if (LEVELS.contains(level)) {
       levels.put(code, Severity.of(level));
     } else {
-      String allowed = String.join(", ", LEVELS);
-      values.problem(
-          word.get().span(), "\"" + level + "\" is no level. Allowed are: " + allowed + ".");
+      String allowed = " is no level. Allowed are: " + String.join(", ", LEVELS) + ".";
+      values.problem(word.get().span(), Values.quote(level) + allowed);
     }
   }
 

@@ -14,6 +14,8 @@ import java.util.stream.Collectors;
 
 /** Values of the kind that is wanted; what is of another kind is told and passed over. */
 final class Values {
+  private static final int LONGEST_QUOTE = 40;
+
   private final Tokens json;
   private final List<Problem> problems;
 
@@ -48,7 +50,7 @@ final class Values {
     Set<String> seen = new HashSet<>();
     while (json.more()) {
       Tokens.Word key = json.name();
-      String quoted = "\"" + key.value() + "\"";
+      String quoted = quote(key.value());
       if (!known.containsKey(key.value())) {
         problem(key.span(), quoted + " means nothing here. Allowed are: " + list(known) + ".");
         json.skip();
@@ -98,12 +100,18 @@ final class Values {
     if (word.isPresent() && language.isEmpty()) {
       problem(
           word.get().span(),
-          "\""
-              + word.get().value()
-              + "\" is no language tag that is known."
+          quote(word.get().value())
+              + " is no language tag that is known."
               + " Use one such as en, de, pt-BR or zh-Hant.");
     }
     return language;
+  }
+
+  /** A text as messages show it: the start of a long one will do. */
+  static String quote(String text) {
+    boolean longer = text.codePointCount(0, text.length()) > LONGEST_QUOTE;
+    int end = longer ? text.offsetByCodePoints(0, LONGEST_QUOTE) : text.length();
+    return "\"" + text.substring(0, end) + (longer ? "..." : "") + "\"";
   }
 
   /** Passes over a value. */

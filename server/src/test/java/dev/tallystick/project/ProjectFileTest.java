@@ -78,6 +78,16 @@ class ProjectFileTest {
   }
 
   @Test
+  void ofALongKeyMessagesShowTheStart() {
+    check(
+        """
+        { "a key that somebody has written in a whole sentence": 1 }
+          ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ "a key that somebody has written in a who..." means nothing here. Allowed are: sourceLanguage, pairs, checks, ignore.
+        =>
+        """);
+  }
+
+  @Test
   void wrongTypes() {
     check(
         """

@@ -94,6 +94,18 @@ class SchemaTest {
     }
   }
 
+  @Test
+  void everyKeyAndEveryLevelIsInTheReadme() {
+    String readme = Repository.read(Repository.root().resolve("README.md"));
+    List<String> words = new ArrayList<>(ProjectReader.LEVELS);
+    words.addAll(new ProjectReader(nowhere()).keys().keySet());
+    words.addAll(new PairReader(nowhere()).keys().keySet());
+    words.remove("$schema"); // for editors only
+    words.removeIf(
+        word -> readme.contains("`" + word + "`") || readme.contains("\"" + word + "\""));
+    assertEquals(List.of(), words);
+  }
+
   /** Each example of the README can be taken as it is. */
   @Test
   void examplesOfTheReadmeAreRight() {
