@@ -5,6 +5,14 @@ public interface Audience {
   /** The findings of a file are now these. */
   void publish(Publication publication);
 
+  /**
+   * Many pairs are being examined.
+   *
+   * @param done so many are examined; all of them at the end
+   * @param total of so many
+   */
+  void pass(int done, int total);
+
   /** Something the user should know; shown once, in full sentences. */
   void say(String message);
 

@@ -56,6 +56,11 @@ public final class Known {
     return Outline.of(own(), file);
   }
 
+  /** What was found in all of the pairs. */
+  public Summary summary() {
+    return Summary.of(pairs);
+  }
+
   /** The pairs that the file itself is in. */
   private List<Settled> own() {
     return pairs.stream().filter(pair -> pair.files().has(file)).toList();

@@ -37,7 +37,7 @@ final class Questions {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
       Question question = all.next().question();
       boolean concerned = question.pairs(pairs).stream().anyMatch(pair -> pair.has(file));
-      if (concerned || question.file().equals(file)) {
+      if (question.aboutText() && (concerned || question.file().equals(file))) {
         all.remove();
         question.reply().outdated();
       }
@@ -49,7 +49,7 @@ final class Questions {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
       Waiting one = all.next();
       Question question = one.question();
-      if (!open.contains(question.file())) {
+      if (question.aboutText() && !open.contains(question.file())) {
         all.remove();
         question.reply().answer(Known.NOTHING);
       } else if (ready.test(question)) {

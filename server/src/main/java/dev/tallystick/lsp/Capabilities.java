@@ -1,5 +1,13 @@
 package dev.tallystick.lsp;
 
+import dev.tallystick.prose.Format;
+import java.util.List;
+import org.eclipse.lsp4j.ExecuteCommandOptions;
+import org.eclipse.lsp4j.FileOperationFilter;
+import org.eclipse.lsp4j.FileOperationOptions;
+import org.eclipse.lsp4j.FileOperationPattern;
+import org.eclipse.lsp4j.FileOperationPatternKind;
+import org.eclipse.lsp4j.FileOperationsServerCapabilities;
 import org.eclipse.lsp4j.SaveOptions;
 import org.eclipse.lsp4j.ServerCapabilities;
 import org.eclipse.lsp4j.TextDocumentSyncKind;
@@ -23,7 +31,10 @@ final class Capabilities {
     can.setHoverProvider(true);
     can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
-    can.setWorkspace(new WorkspaceServerCapabilities(folders()));
+    can.setExecuteCommandProvider(new ExecuteCommandOptions(Commands.NAMES));
+    WorkspaceServerCapabilities workspace = new WorkspaceServerCapabilities(folders());
+    workspace.setFileOperations(fileOperations());
+    can.setWorkspace(workspace);
     return can;
   }
 
@@ -33,6 +44,20 @@ final class Capabilities {
     sync.setChange(TextDocumentSyncKind.Incremental);
     sync.setSave(new SaveOptions(false));
     return sync;
+  }
+
+  /** Which renamed files and folders the editor is to tell of. */
+  private static FileOperationsServerCapabilities fileOperations() {
+    FileOperationPattern files = new FileOperationPattern("**/*.{" + Format.everyExtension() + "}");
+    files.setMatches(FileOperationPatternKind.File);
+    FileOperationPattern folders = new FileOperationPattern("**");
+    folders.setMatches(FileOperationPatternKind.Folder);
+    FileOperationsServerCapabilities operations = new FileOperationsServerCapabilities();
+    operations.setDidRename(
+        new FileOperationOptions(
+            List.of(
+                new FileOperationFilter(files, "file"), new FileOperationFilter(folders, "file"))));
+    return operations;
   }
 
   private static WorkspaceFoldersOptions folders() {

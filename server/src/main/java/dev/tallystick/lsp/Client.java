@@ -13,6 +13,7 @@ import org.eclipse.lsp4j.GeneralClientCapabilities;
 import org.eclipse.lsp4j.InitializeParams;
 import org.eclipse.lsp4j.PublishDiagnosticsCapabilities;
 import org.eclipse.lsp4j.TextDocumentClientCapabilities;
+import org.eclipse.lsp4j.WindowClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceFolder;
 
@@ -27,6 +28,7 @@ import org.eclipse.lsp4j.WorkspaceFolder;
  * @param watches whether it can be asked to watch files
  * @param tellsSettings whether it can be asked for settings
  * @param registersSettings whether it can be asked to tell when they change
+ * @param showsProgress whether it shows how far long work has come
  * @param folders the folders of the workspace
  */
 record Client(
@@ -38,6 +40,7 @@ record Client(
     boolean watches,
     boolean tellsSettings,
     boolean registersSettings,
+    boolean showsProgress,
     List<Path> folders) {
   static Client of(InitializeParams params) {
     Optional<ClientCapabilities> can = Optional.ofNullable(params.getCapabilities());
@@ -68,6 +71,9 @@ record Client(
             workspace
                 .map(WorkspaceClientCapabilities::getDidChangeConfiguration)
                 .map(DidChangeConfigurationCapabilities::getDynamicRegistration)),
+        yes(
+            can.map(ClientCapabilities::getWindow)
+                .map(WindowClientCapabilities::getWorkDoneProgress)),
         folders(params));
   }
 

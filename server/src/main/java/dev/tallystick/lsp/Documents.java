@@ -10,6 +10,7 @@ import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.BiFunction;
@@ -48,20 +49,18 @@ final class Documents implements TextDocumentService {
   /** An edit that does not say what came: from now on the text is not known. */
   private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
 
-  private final Requests requests = new Requests();
+  private final Requests requests;
   private Loop loop;
   private Conversion conversion;
+
+  Documents(Requests requests) {
+    this.requests = requests;
+  }
 
   /** The session has begun. */
   void begin(Loop with, Conversion by) {
     loop = with;
     conversion = by;
-    requests.begin(with);
-  }
-
-  /** Nothing is answered any more. */
-  void end() {
-    requests.end();
   }
 
   @Override
@@ -69,7 +68,13 @@ final class Documents implements TextDocumentService {
     TextDocumentItem item = params.getTextDocument();
     tell(
         item.getUri(),
-        file -> new Event.Opened(file, item.getUri(), item.getVersion(), new Text(item.getText())));
+        file ->
+            new Event.Opened(
+                file,
+                item.getUri(),
+                item.getVersion(),
+                Objects.requireNonNullElse(item.getLanguageId(), ""),
+                new Text(item.getText())));
   }
 
   @Override
@@ -92,7 +97,7 @@ final class Documents implements TextDocumentService {
 
   private void tell(String uri, Function<Path, Event> event) {
     if (loop != null) {
-      Uris.file(uri).map(event).ifPresent(loop::post);
+      Uris.text(uri).map(event).ifPresent(loop::post);
     }
   }
 

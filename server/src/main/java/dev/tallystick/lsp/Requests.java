@@ -27,6 +27,20 @@ final class Requests {
   }
 
   /**
+   * Looks whether anything can be asked.
+   *
+   * @throws org.eclipse.lsp4j.jsonrpc.ResponseErrorException if the session has not begun, or ends
+   */
+  void check() {
+    if (loop == null) {
+      throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
+    }
+    if (over) {
+      throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
+    }
+  }
+
+  /**
    * Asks about a document. The future is handed out as it is, so that the client's cancelling
    * reaches it.
    *
@@ -37,26 +51,19 @@ final class Requests {
       Optional<?> named,
       Question.Reach reach,
       Function<Known, T> convert) {
-    if (loop == null) {
-      throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
-    }
-    if (over) {
-      throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
-    }
+    check();
     if (document == null || named.isEmpty()) {
       throw Server.refused(ResponseErrorCode.InvalidParams, "A document and a position, please.");
     }
-    CompletableFuture<T> asked = new CompletableFuture<>();
-    Optional<Path> file = Uris.file(document.getUri());
-    if (file.isEmpty()) {
-      asked.complete(convert.apply(Known.NOTHING));
-      return asked;
-    }
-    post(new Question(file.get(), reach, new Reply<>(asked, convert)), asked);
-    return asked;
+    return Uris.text(document.getUri())
+        .map(file -> ask(file, reach, convert))
+        .orElseGet(() -> CompletableFuture.completedFuture(convert.apply(Known.NOTHING)));
   }
 
-  private void post(Question question, CompletableFuture<?> asked) {
+  /** Asks about a file or a folder. */
+  <T> CompletableFuture<T> ask(Path path, Question.Reach reach, Function<Known, T> convert) {
+    CompletableFuture<T> asked = new CompletableFuture<>();
+    Question question = new Question(path, reach, new Reply<>(asked, convert));
     asked.whenComplete(
         (answer, fault) -> {
           if (asked.isCancelled()) {
@@ -64,6 +71,7 @@ final class Requests {
           }
         });
     loop.post(new Event.Asked(question));
+    return asked;
   }
 
   /** Completes what the client waits for. */

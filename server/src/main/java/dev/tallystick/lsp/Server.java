@@ -10,6 +10,7 @@ import org.eclipse.lsp4j.InitializeResult;
 import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.ServerInfo;
 import org.eclipse.lsp4j.SetTraceParams;
+import org.eclipse.lsp4j.WorkDoneProgressCancelParams;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
@@ -26,11 +27,13 @@ final class Server implements LanguageServer {
   private final Machine machine;
   private final String version;
   private final CompletableFuture<Integer> ended;
-  private final Documents documents = new Documents();
-  private final Surroundings surroundings = new Surroundings();
+  private final Requests requests = new Requests();
+  private final Documents documents = new Documents(requests);
+  private final Surroundings surroundings = new Surroundings(new Commands(requests));
   private LanguageClient remote;
   private Loop loop;
   private Client client;
+  private PassReport report;
   private volatile boolean shutDown;
 
   Server(Machine machine, String version, CompletableFuture<Integer> ended) {
@@ -50,7 +53,11 @@ final class Server implements LanguageServer {
     }
     client = Client.of(params);
     Conversion conversion = new Conversion(client);
-    loop = new Loop(machine.watchedByEditor(client.watches()), new Editor(remote, conversion));
+    report = new PassReport(remote);
+    Editor editor =
+        new Editor(remote, conversion, client.showsProgress() ? report::pass : (done, total) -> {});
+    loop = new Loop(machine.watchedByEditor(client.watches()), editor);
+    requests.begin(loop);
     documents.begin(loop, conversion);
     surroundings.begin(loop, client, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
@@ -70,7 +77,7 @@ final class Server implements LanguageServer {
   @Override
   public CompletableFuture<Object> shutdown() {
     shutDown = true;
-    documents.end();
+    requests.end();
     return CompletableFuture.completedFuture(null);
   }
 
@@ -83,6 +90,13 @@ final class Server implements LanguageServer {
   void close() {
     if (loop != null) {
       loop.close();
+    }
+  }
+
+  @Override
+  public void cancelProgress(WorkDoneProgressCancelParams params) {
+    if (loop != null && report.is(params.getToken())) {
+      loop.post(new Event.FoldersDeclined());
     }
   }
 

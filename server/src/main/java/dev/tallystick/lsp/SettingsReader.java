@@ -16,6 +16,7 @@ import java.util.Optional;
  */
 final class SettingsReader {
   private static final String REST = "restMillis";
+  private static final String SCOPE = "scope";
   private static final String SOURCE_LANGUAGE = "sourceLanguage";
   private static final long LONGEST_REST = 600_000;
 
@@ -39,7 +40,11 @@ final class SettingsReader {
   private Read of(JsonElement section) {
     Settings settings = Settings.DEFAULT;
     if (section instanceof JsonObject object) {
-      settings = new Settings(rest(object.get(REST)), language(object.get(SOURCE_LANGUAGE)));
+      settings =
+          new Settings(
+              rest(object.get(REST)),
+              language(object.get(SOURCE_LANGUAGE)),
+              folders(object.get(SCOPE)));
     } else if (!section.isJsonNull()) {
       problems.add("The settings under tallystick must be an object with keys and values.");
     }
@@ -63,6 +68,19 @@ final class SettingsReader {
             + Settings.DEFAULT.restMillis()
             + ".");
     return Settings.DEFAULT.restMillis();
+  }
+
+  private boolean folders(JsonElement value) {
+    if (value == null || value.isJsonNull()) {
+      return Settings.DEFAULT.folders();
+    }
+    String word = value instanceof JsonPrimitive one && one.isString() ? one.getAsString() : "";
+    if (!word.equals("open") && !word.equals("folder")) {
+      problems.add(
+          "The setting tallystick.scope must be open (the pairs with an open file) or folder (all"
+              + " pairs of the folder). Until then it counts as open.");
+    }
+    return word.equals("folder");
   }
 
   private Optional<Language> language(JsonElement value) {
