@@ -5,6 +5,9 @@ public interface Audience {
   /** The findings of a file are now these. */
   void publish(Publication publication);
 
+  /** All that came of one event is told, and who could be answered is answered. */
+  void turned();
+
   /** Something the user should know; shown once, in full sentences. */
   void say(String message);
 

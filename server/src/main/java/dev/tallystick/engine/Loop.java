@@ -200,6 +200,7 @@ public final class Loop implements AutoCloseable {
     if (set) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));
     }
+    audience.turned();
   }
 
   /** Whether all is known that there is to know of the current text of a file. */

@@ -1,5 +1,6 @@
 package dev.tallystick.lsp;
 
+import org.eclipse.lsp4j.DiagnosticRegistrationOptions;
 import org.eclipse.lsp4j.SaveOptions;
 import org.eclipse.lsp4j.ServerCapabilities;
 import org.eclipse.lsp4j.TextDocumentSyncKind;
@@ -23,6 +24,9 @@ final class Capabilities {
     can.setHoverProvider(true);
     can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
+    if (client.pulls()) {
+      can.setDiagnosticProvider(findings());
+    }
     can.setWorkspace(new WorkspaceServerCapabilities(folders()));
     return can;
   }
@@ -33,6 +37,13 @@ final class Capabilities {
     sync.setChange(TextDocumentSyncKind.Incremental);
     sync.setSave(new SaveOptions(false));
     return sync;
+  }
+
+  /** An edit of one file changes the findings of the other. */
+  private static DiagnosticRegistrationOptions findings() {
+    DiagnosticRegistrationOptions findings = new DiagnosticRegistrationOptions(true, true);
+    findings.setIdentifier("tallystick");
+    return findings;
   }
 
   private static WorkspaceFoldersOptions folders() {

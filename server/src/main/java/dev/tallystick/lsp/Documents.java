@@ -19,6 +19,8 @@ import org.eclipse.lsp4j.DidChangeTextDocumentParams;
 import org.eclipse.lsp4j.DidCloseTextDocumentParams;
 import org.eclipse.lsp4j.DidOpenTextDocumentParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
+import org.eclipse.lsp4j.DocumentDiagnosticParams;
+import org.eclipse.lsp4j.DocumentDiagnosticReport;
 import org.eclipse.lsp4j.DocumentHighlight;
 import org.eclipse.lsp4j.DocumentHighlightParams;
 import org.eclipse.lsp4j.DocumentSymbol;
@@ -48,20 +50,20 @@ final class Documents implements TextDocumentService {
   /** An edit that does not say what came: from now on the text is not known. */
   private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
 
-  private final Requests requests = new Requests();
+  private final Requests requests;
+  private final Board board;
   private Loop loop;
   private Conversion conversion;
+
+  Documents(Requests requests, Board board) {
+    this.requests = requests;
+    this.board = board;
+  }
 
   /** The session has begun. */
   void begin(Loop with, Conversion by) {
     loop = with;
     conversion = by;
-    requests.begin(with);
-  }
-
-  /** Nothing is answered any more. */
-  void end() {
-    requests.end();
   }
 
   @Override
@@ -166,6 +168,19 @@ final class Documents implements TextDocumentService {
         Optional.of(params),
         Question.Reach.PAIRS,
         known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  @Override
+  public CompletableFuture<DocumentDiagnosticReport> diagnostic(DocumentDiagnosticParams params) {
+    TextDocumentIdentifier document = params.getTextDocument();
+    boolean related = conversion != null && conversion.client().pullsRelated();
+    return requests.askFindings(
+        document,
+        known ->
+            board.report(
+                document.getUri(),
+                params.getPreviousResultId(),
+                related ? known.others() : List.of()));
   }
 
   private <T> CompletableFuture<T> ask(

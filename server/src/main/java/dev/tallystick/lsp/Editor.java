@@ -4,13 +4,40 @@ import dev.tallystick.engine.Audience;
 import dev.tallystick.engine.Publication;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
+import org.eclipse.lsp4j.PublishDiagnosticsParams;
 import org.eclipse.lsp4j.services.LanguageClient;
 
 /** The client, as the engine sees it. */
-record Editor(LanguageClient remote, Conversion conversion) implements Audience {
+final class Editor implements Audience {
+  private final LanguageClient remote;
+  private final Conversion conversion;
+  private final Board board;
+  private final Refresh findings;
+
+  Editor(LanguageClient remote, Conversion conversion, Board board) {
+    this.remote = remote;
+    this.conversion = conversion;
+    this.board = board;
+    Client client = conversion.client();
+    this.findings =
+        new Refresh(
+            () -> client.pulls() && client.refreshesFindings() && board.takeNews(),
+            remote::refreshDiagnostics);
+  }
+
+  /** Some clients are sent findings, others ask for them: no client gets both. */
   @Override
   public void publish(Publication publication) {
-    remote.publishDiagnostics(conversion.diagnostics(publication));
+    PublishDiagnosticsParams params = conversion.diagnostics(publication);
+    board.post(params);
+    if (!conversion.client().pulls()) {
+      remote.publishDiagnostics(params);
+    }
+  }
+
+  @Override
+  public void turned() {
+    findings.check();
   }
 
   @Override

@@ -8,11 +8,31 @@ import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.Function;
+import java.util.function.Supplier;
+import org.eclipse.lsp4j.DiagnosticServerCancellationData;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
+import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
+import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
 
 /** Asks the loop what a client wants to know. */
 final class Requests {
+  /** What a client is told whose text was edited before the answer was there. */
+  private static final ResponseError MODIFIED =
+      new ResponseError(ResponseErrorCode.ContentModified, "The text has changed since.", null);
+
+  /**
+   * The same for one that asks for findings. Some take {@code ContentModified} for an empty list
+   * there, and would show for a moment that nothing is wrong.
+   */
+  private static final ResponseError ASK_AGAIN =
+      new ResponseError(
+          ResponseErrorCode.ServerCancelled,
+          "The text has changed since. Ask again.",
+          new DiagnosticServerCancellationData(true));
+
+  private static final Path NO_FILE = Path.of("");
+
   private Loop loop;
   private boolean over;
 
@@ -37,12 +57,42 @@ final class Requests {
       Optional<?> named,
       Question.Reach reach,
       Function<Known, T> convert) {
+    return ask(document, named, reach, convert, MODIFIED);
+  }
+
+  /** Asks for the findings of a document. */
+  <T> CompletableFuture<T> askFindings(
+      TextDocumentIdentifier document, Function<Known, T> convert) {
+    return ask(document, Optional.ofNullable(document), Question.Reach.PAIRS, convert, ASK_AGAIN);
+  }
+
+  /** Asks about no document in particular: answered as soon as all that came before is handled. */
+  <T> CompletableFuture<T> ask(Supplier<T> convert) {
+    refuseOutsideOfTheSession();
+    CompletableFuture<T> asked = new CompletableFuture<>();
+    Function<Known, T> regardless = known -> convert.get();
+    post(
+        new Question(NO_FILE, Question.Reach.PAIRS, new Reply<>(asked, regardless, MODIFIED)),
+        asked);
+    return asked;
+  }
+
+  private void refuseOutsideOfTheSession() {
     if (loop == null) {
       throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
     }
     if (over) {
       throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
     }
+  }
+
+  private <T> CompletableFuture<T> ask(
+      TextDocumentIdentifier document,
+      Optional<?> named,
+      Question.Reach reach,
+      Function<Known, T> convert,
+      ResponseError outdated) {
+    refuseOutsideOfTheSession();
     if (document == null || named.isEmpty()) {
       throw Server.refused(ResponseErrorCode.InvalidParams, "A document and a position, please.");
     }
@@ -52,7 +102,7 @@ final class Requests {
       asked.complete(convert.apply(Known.NOTHING));
       return asked;
     }
-    post(new Question(file.get(), reach, new Reply<>(asked, convert)), asked);
+    post(new Question(file.get(), reach, new Reply<>(asked, convert, outdated)), asked);
     return asked;
   }
 
@@ -67,7 +117,8 @@ final class Requests {
   }
 
   /** Completes what the client waits for. */
-  private record Reply<T>(CompletableFuture<T> asked, Function<Known, T> convert)
+  private record Reply<T>(
+      CompletableFuture<T> asked, Function<Known, T> convert, ResponseError tooLate)
       implements Question.Reply {
     @Override
     public void answer(Known known) {
@@ -80,8 +131,7 @@ final class Requests {
 
     @Override
     public void outdated() {
-      asked.completeExceptionally(
-          Server.refused(ResponseErrorCode.ContentModified, "The text has changed since."));
+      asked.completeExceptionally(new ResponseErrorException(tooLate));
     }
   }
 }

@@ -26,8 +26,10 @@ final class Server implements LanguageServer {
   private final Machine machine;
   private final String version;
   private final CompletableFuture<Integer> ended;
-  private final Documents documents = new Documents();
-  private final Surroundings surroundings = new Surroundings();
+  private final Requests requests = new Requests();
+  private final Board board = new Board();
+  private final Documents documents = new Documents(requests, board);
+  private final Surroundings surroundings = new Surroundings(requests, board);
   private LanguageClient remote;
   private Loop loop;
   private Client client;
@@ -50,7 +52,9 @@ final class Server implements LanguageServer {
     }
     client = Client.of(params);
     Conversion conversion = new Conversion(client);
-    loop = new Loop(machine.watchedByEditor(client.watches()), new Editor(remote, conversion));
+    Editor editor = new Editor(remote, conversion, board);
+    loop = new Loop(machine.watchedByEditor(client.watches()), editor);
+    requests.begin(loop);
     documents.begin(loop, conversion);
     surroundings.begin(loop, client, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
@@ -70,7 +74,7 @@ final class Server implements LanguageServer {
   @Override
   public CompletableFuture<Object> shutdown() {
     shutDown = true;
-    documents.end();
+    requests.end();
     return CompletableFuture.completedFuture(null);
   }
 

@@ -9,6 +9,7 @@ import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.CompletableFuture;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.eclipse.lsp4j.ConfigurationItem;
@@ -24,6 +25,8 @@ import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
 import org.eclipse.lsp4j.Registration;
 import org.eclipse.lsp4j.RegistrationParams;
+import org.eclipse.lsp4j.WorkspaceDiagnosticParams;
+import org.eclipse.lsp4j.WorkspaceDiagnosticReport;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
 import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.WorkspaceService;
@@ -32,12 +35,19 @@ import org.eclipse.lsp4j.services.WorkspaceService;
 final class Surroundings implements WorkspaceService {
   private static final String SECTION = "tallystick";
 
+  private final Requests requests;
+  private final Board board;
   private Loop loop;
   private Client client;
   private LanguageClient remote;
   private Alarm alarm;
   private List<String> told = List.of();
   private boolean taken;
+
+  Surroundings(Requests requests, Board board) {
+    this.requests = requests;
+    this.board = board;
+  }
 
   /** The session has begun, but nothing may be sent yet. */
   void begin(Loop with, Client of, LanguageClient at, Alarm by) {
@@ -120,6 +130,12 @@ final class Surroundings implements WorkspaceService {
       told.forEach(problem -> remote.showMessage(new MessageParams(MessageType.Warning, problem)));
     }
     loop.post(new Event.SettingsChanged(read.settings()));
+  }
+
+  /** Answered at once, with what is known: whoever asks here asks again and again. */
+  @Override
+  public CompletableFuture<WorkspaceDiagnosticReport> diagnostic(WorkspaceDiagnosticParams params) {
+    return requests.ask(() -> board.report(params.getPreviousResultIds()));
   }
 
   @Override
