@@ -5,6 +5,9 @@ public interface Audience {
   /** The findings of a file are now these. */
   void publish(Publication publication);
 
+  /** A pair has come so far: told when it is another figure than before. */
+  void stands(Standing standing);
+
   /** All that came of one event is told, and who could be answered is answered. */
   void turned();
 

@@ -56,6 +56,11 @@ public final class Known {
     return Outline.of(own(), file);
   }
 
+  /** The sentences of the whole file, in each of its pairs. */
+  public List<Count> counts() {
+    return own().stream().map(pair -> pair.tally(file).whole()).toList();
+  }
+
   /** What it is paired with: the other files, as the editor names them. */
   public List<String> others() {
     return own().stream()

@@ -53,6 +53,7 @@ public final class Loop implements AutoCloseable {
   private final PairStates pairs = new PairStates();
   private final Questions questions = new Questions();
   private final Bulletin bulletin;
+  private final Standings standings;
   private boolean started;
   private boolean set;
   private long turn;
@@ -68,6 +69,7 @@ public final class Loop implements AutoCloseable {
     this.caret = new Caret(machine.alarm());
     this.bell = new Bell(machine.alarm(), () -> post(new Event.TimerDue()));
     this.bulletin = new Bulletin(audience);
+    this.standings = new Standings(audience, bulletin);
     this.thread = Threads.daemons("tallystick-loop").newThread(this::run);
   }
 
@@ -196,6 +198,7 @@ public final class Loop implements AutoCloseable {
     pairs.take(library, workers::examine);
     pairs.show(caret.last());
     publish();
+    standings.tell(pairs.all());
     questions.answer(library.open(), this::ready, this::answer);
     if (set) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));

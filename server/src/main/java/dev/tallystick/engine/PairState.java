@@ -98,6 +98,11 @@ final class PairState {
     return now.findings().stream().filter(finding -> !held.holds(finding, shown)).toList();
   }
 
+  /** The findings that are shown. */
+  List<Finding> shown() {
+    return shown.findings();
+  }
+
   /** What a side shows. */
   List<Notice> notices(OnSide side, Uris uris) {
     return result

@@ -68,6 +68,11 @@ final class PairStates {
     return states.keySet();
   }
 
+  /** What is kept of each. */
+  Collection<PairState> all() {
+    return states.values();
+  }
+
   /** The files of all pairs, sorted. */
   Set<Path> files() {
     Set<Path> files = new TreeSet<>();

@@ -1,5 +1,6 @@
 package dev.tallystick.lsp;
 
+import org.eclipse.lsp4j.CodeLensOptions;
 import org.eclipse.lsp4j.DiagnosticRegistrationOptions;
 import org.eclipse.lsp4j.SaveOptions;
 import org.eclipse.lsp4j.ServerCapabilities;
@@ -24,6 +25,8 @@ final class Capabilities {
     can.setHoverProvider(true);
     can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
+    can.setCodeLensProvider(new CodeLensOptions(false));
+    can.setInlayHintProvider(true);
     if (client.pulls()) {
       can.setDiagnosticProvider(findings());
     }

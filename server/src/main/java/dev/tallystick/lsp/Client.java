@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import org.eclipse.lsp4j.ClientCapabilities;
+import org.eclipse.lsp4j.CodeLensWorkspaceCapabilities;
 import org.eclipse.lsp4j.DefinitionCapabilities;
 import org.eclipse.lsp4j.DiagnosticCapabilities;
 import org.eclipse.lsp4j.DiagnosticWorkspaceCapabilities;
@@ -14,6 +15,7 @@ import org.eclipse.lsp4j.DidChangeWatchedFilesCapabilities;
 import org.eclipse.lsp4j.DocumentSymbolCapabilities;
 import org.eclipse.lsp4j.GeneralClientCapabilities;
 import org.eclipse.lsp4j.InitializeParams;
+import org.eclipse.lsp4j.InlayHintWorkspaceCapabilities;
 import org.eclipse.lsp4j.PublishDiagnosticsCapabilities;
 import org.eclipse.lsp4j.TextDocumentClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
@@ -67,6 +69,20 @@ final class Client {
             .map(DiagnosticWorkspaceCapabilities::getRefreshSupport));
   }
 
+  /** Whether it can be told to ask for lenses again. */
+  boolean refreshesLenses() {
+    return yes(
+        workspace(WorkspaceClientCapabilities::getCodeLens)
+            .map(CodeLensWorkspaceCapabilities::getRefreshSupport));
+  }
+
+  /** Whether it can be told to ask for inlay hints again. */
+  boolean refreshesHints() {
+    return yes(
+        workspace(WorkspaceClientCapabilities::getInlayHint)
+            .map(InlayHintWorkspaceCapabilities::getRefreshSupport));
+  }
+
   /** Whether it shows related places of a finding. */
   boolean related() {
     return yes(
@@ -96,6 +112,11 @@ final class Client {
     return yes(
         workspace(WorkspaceClientCapabilities::getDidChangeWatchedFiles)
             .map(DidChangeWatchedFilesCapabilities::getDynamicRegistration));
+  }
+
+  /** What it said about us at the start: settings, as far as it sends them there. */
+  Object options() {
+    return params.getInitializationOptions();
   }
 
   /** Whether it can be asked for settings. */

@@ -14,6 +14,8 @@ import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import org.eclipse.lsp4j.CodeLens;
+import org.eclipse.lsp4j.CodeLensParams;
 import org.eclipse.lsp4j.DefinitionParams;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
 import org.eclipse.lsp4j.DidCloseTextDocumentParams;
@@ -27,6 +29,8 @@ import org.eclipse.lsp4j.DocumentSymbol;
 import org.eclipse.lsp4j.DocumentSymbolParams;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.HoverParams;
+import org.eclipse.lsp4j.InlayHint;
+import org.eclipse.lsp4j.InlayHintParams;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
@@ -54,6 +58,7 @@ final class Documents implements TextDocumentService {
   private final Board board;
   private Loop loop;
   private Conversion conversion;
+  private Views views;
 
   Documents(Requests requests, Board board) {
     this.requests = requests;
@@ -61,9 +66,10 @@ final class Documents implements TextDocumentService {
   }
 
   /** The session has begun. */
-  void begin(Loop with, Conversion by) {
+  void begin(Loop with, Conversion by, Views in) {
     loop = with;
     conversion = by;
+    views = in;
   }
 
   @Override
@@ -168,6 +174,27 @@ final class Documents implements TextDocumentService {
         Optional.of(params),
         Question.Reach.PAIRS,
         known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  @Override
+  public CompletableFuture<List<? extends CodeLens>> codeLens(CodeLensParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.of(params),
+        Question.Reach.PAIRS,
+        known -> views.lenses().wanted() ? Lenses.of(known) : List.of());
+  }
+
+  @Override
+  public CompletableFuture<List<InlayHint>> inlayHint(InlayHintParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getRange()),
+        Question.Reach.PAIRS,
+        known ->
+            views.hints().wanted()
+                ? new Hints(conversion.client().encoding()).within(known, params.getRange())
+                : List.of());
   }
 
   @Override

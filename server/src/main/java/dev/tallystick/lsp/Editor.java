@@ -2,6 +2,7 @@ package dev.tallystick.lsp;
 
 import dev.tallystick.engine.Audience;
 import dev.tallystick.engine.Publication;
+import dev.tallystick.engine.Standing;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
 import org.eclipse.lsp4j.PublishDiagnosticsParams;
@@ -12,12 +13,14 @@ final class Editor implements Audience {
   private final LanguageClient remote;
   private final Conversion conversion;
   private final Board board;
+  private final Views views;
   private final Refresh findings;
 
-  Editor(LanguageClient remote, Conversion conversion, Board board) {
+  Editor(LanguageClient remote, Conversion conversion, Board board, Views views) {
     this.remote = remote;
     this.conversion = conversion;
     this.board = board;
+    this.views = views;
     Client client = conversion.client();
     this.findings =
         new Refresh(
@@ -36,8 +39,14 @@ final class Editor implements Audience {
   }
 
   @Override
+  public void stands(Standing standing) {
+    views.stands(standing);
+  }
+
+  @Override
   public void turned() {
     findings.check();
+    views.check();
   }
 
   @Override

@@ -52,11 +52,12 @@ final class Server implements LanguageServer {
     }
     client = Client.of(params);
     Conversion conversion = new Conversion(client);
-    Editor editor = new Editor(remote, conversion, board);
+    Views views = new Views(client, remote);
+    Editor editor = new Editor(remote, conversion, board, views);
     loop = new Loop(machine.watchedByEditor(client.watches()), editor);
     requests.begin(loop);
-    documents.begin(loop, conversion);
-    surroundings.begin(loop, client, remote, machine.alarm());
+    documents.begin(loop, conversion, views);
+    surroundings.begin(loop, client, views, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
     loop.start();
     InitializeResult result = new InitializeResult(Capabilities.of(client));

@@ -39,6 +39,7 @@ final class Surroundings implements WorkspaceService {
   private final Board board;
   private Loop loop;
   private Client client;
+  private Views views;
   private LanguageClient remote;
   private Alarm alarm;
   private List<String> told = List.of();
@@ -50,9 +51,10 @@ final class Surroundings implements WorkspaceService {
   }
 
   /** The session has begun, but nothing may be sent yet. */
-  void begin(Loop with, Client of, LanguageClient at, Alarm by) {
+  void begin(Loop with, Client of, Views in, LanguageClient at, Alarm by) {
     loop = with;
     client = of;
+    views = in;
     remote = at;
     alarm = by;
   }
@@ -124,12 +126,14 @@ final class Surroundings implements WorkspaceService {
   /** Called by the thread that reads messages, or by the alarm. */
   private synchronized void takeSettings(Object section) {
     taken = true;
-    SettingsReader.Read read = SettingsReader.read(section);
+    SettingsReader.Read read = SettingsReader.read(section(client.options()), section);
     if (!read.problems().equals(told)) {
       told = read.problems();
       told.forEach(problem -> remote.showMessage(new MessageParams(MessageType.Warning, problem)));
     }
     loop.post(new Event.SettingsChanged(read.settings()));
+    views.lenses().want(read.lens());
+    views.hints().want(read.inlay());
   }
 
   /** Answered at once, with what is known: whoever asks here asks again and again. */

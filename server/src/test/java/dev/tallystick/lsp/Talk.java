@@ -263,6 +263,18 @@ final class Talk implements LanguageClient, AutoCloseable {
   }
 
   @Override
+  public CompletableFuture<Void> refreshCodeLenses() {
+    refreshed.add("lenses");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshInlayHints() {
+    refreshed.add("hints");
+    return refreshing;
+  }
+
+  @Override
   public CompletableFuture<MessageActionItem> showMessageRequest(ShowMessageRequestParams params) {
     throw new AssertionError("nobody asks this client");
   }
