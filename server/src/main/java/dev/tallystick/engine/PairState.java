@@ -121,7 +121,7 @@ final class PairState {
   }
 
   /** The findings that are shown: the same object for as long as nothing about them changes. */
-  Object shown() {
+  HeldBack.Shown shown() {
     return shown;
   }
 

@@ -124,6 +124,11 @@ final class PairStates {
     return states.keySet();
   }
 
+  /** What is kept of each. */
+  Collection<PairState> all() {
+    return states.values();
+  }
+
   /** The files of all pairs, sorted. */
   Set<Path> files() {
     return new TreeSet<>(byFile.keySet());
