@@ -146,8 +146,7 @@ public final class Loop implements AutoCloseable {
     if (event instanceof Event.FilesChanged changed) {
       library.reread(changed);
     } else if (event instanceof Event.Listed listed) {
-      library.listed(listed);
-      listed.trouble().ifPresent(audience::log);
+      library.listed(listed).forEach(audience::log);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
     } else if (event instanceof Event.Renamed renamed) {

@@ -4,6 +4,7 @@ import dev.tallystick.align.Aligner;
 import dev.tallystick.align.Alignment;
 import dev.tallystick.check.Checks;
 import dev.tallystick.check.Finding;
+import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
 import dev.tallystick.check.Pending;
 import dev.tallystick.check.Progress;
@@ -41,6 +42,11 @@ public record PairResult(
     Pending pending = Pending.of(subject);
     List<Finding> findings = Checks.findings(subject, pending);
     return new PairResult(source, target, alignment, findings, pending, Progress.of(subject));
+  }
+
+  /** The same with the findings that a project wants to hear of, as loudly as it wants. */
+  public PairResult at(Levels levels) {
+    return new PairResult(source, target, alignment, levels.apply(findings), pending, progress);
   }
 
   /** One of the two texts, read. */

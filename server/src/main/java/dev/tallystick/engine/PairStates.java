@@ -51,6 +51,7 @@ final class PairStates {
   void take(Library library, Workers workers) {
     int free = workers.aside() - (int) states.values().stream().filter(PairState::running).count();
     for (PairState pair : states.values()) {
+      pair.at(library.levels(pair.files()));
       boolean open = library.shows(pair.files());
       if (open || free > 0 || library.knows(pair.files())) {
         Optional<Task> task = take(library, pair, open || free > 0);

@@ -5,6 +5,7 @@ import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Loop;
 import dev.tallystick.engine.Renaming;
 import dev.tallystick.engine.Settings;
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
@@ -96,9 +97,12 @@ final class Surroundings implements WorkspaceService {
   }
 
   private static DidChangeWatchedFilesRegistrationOptions watchers() {
-    FileSystemWatcher watcher =
-        new FileSystemWatcher(Either.forLeft("**/*.{" + Format.everyExtension() + "}"));
-    return new DidChangeWatchedFilesRegistrationOptions(List.of(watcher));
+    return new DidChangeWatchedFilesRegistrationOptions(
+        List.of(watcher("*.{" + Format.everyExtension() + "}"), watcher(ProjectFile.NAME)));
+  }
+
+  private static FileSystemWatcher watcher(String name) {
+    return new FileSystemWatcher(Either.forLeft("**/" + name));
   }
 
   @Override
