@@ -45,7 +45,18 @@ function awaitText(own: Service, context: vscode.ExtensionContext): void {
   context.subscriptions.push(waiting);
 }
 
+/** Whether a folder has the settings of a project. */
 async function isProject(): Promise<boolean> {
-  const found = await vscode.workspace.findFiles(PROJECT_FILE, null, 1);
-  return found.length > 0;
+  const folders = vscode.workspace.workspaceFolders ?? [];
+  const files = folders.map(({ uri }) => vscode.Uri.joinPath(uri, PROJECT_FILE));
+  return (await Promise.all(files.map(exists))).includes(true);
+}
+
+async function exists(file: vscode.Uri): Promise<boolean> {
+  try {
+    await vscode.workspace.fs.stat(file);
+    return true;
+  } catch {
+    return false;
+  }
 }
