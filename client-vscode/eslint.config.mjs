@@ -24,7 +24,7 @@ export default defineConfig(
   },
   {
     // node:test's describe and test give promises that the runner awaits.
-    files: ["test/**/*.ts"],
+    files: ["test/**/*.ts", "workbench/**/*.ts"],
     rules: {
       "max-lines-per-function": "off",
       "@typescript-eslint/no-floating-promises": [

@@ -1,21 +1,23 @@
-// Runs the unit tests, which see everything but what needs an editor.
+// Runs the tests of a folder: test, which needs no editor, or workbench, which drives one.
 import { build } from "esbuild";
 import { spawnSync } from "node:child_process";
 import { readdirSync, rmSync } from "node:fs";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 
+const [folder = "test"] = process.argv.slice(2);
 const root = fileURLToPath(new URL("..", import.meta.url));
-const out = join(root, "target/test");
-const names = readdirSync(join(root, "test")).filter((name) => name.endsWith(".test.ts"));
+const out = join(root, "target", folder);
+const names = readdirSync(join(root, folder)).filter((name) => name.endsWith(".test.ts"));
 
 rmSync(out, { recursive: true, force: true });
 await build({
   absWorkingDir: root,
-  entryPoints: names.map((name) => join("test", name)),
+  entryPoints: names.map((name) => join(folder, name)),
   outdir: out,
   outExtension: { ".js": ".mjs" },
   bundle: true,
+  packages: "external",
   platform: "node",
   format: "esm",
   target: "node20",
