@@ -18,6 +18,16 @@ final class Announcements {
         + " checked in it. Please close and reopen the file.";
   }
 
+  static String unreadable(Path file) {
+    return file.getFileName()
+        + ": there is no such text file, so it cannot be paired. Check the name.";
+  }
+
+  static String alone(Path file) {
+    return file.getFileName()
+        + ": this file is in no pair, so it cannot be marked. Pair it with its source first.";
+  }
+
   static String choice(Ambiguity question) {
     List<String> files = question.files();
     String more = files.size() > MOST_FILES ? " and " + (files.size() - MOST_FILES) + " more" : "";

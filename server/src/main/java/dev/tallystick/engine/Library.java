@@ -5,6 +5,7 @@ import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.HashSet;
 import java.util.List;
@@ -57,6 +58,41 @@ final class Library {
   /** What the user has set counts from now on. */
   void rules(Settings settings) {
     workspace.rules(settings.rules());
+    workspace.scope(settings.folders());
+  }
+
+  /**
+   * The user says that two files belong together.
+   *
+   * @return a file that cannot be read; then they do not
+   */
+  Optional<Path> pair(Event.Paired paired) {
+    for (Path file : List.of(paired.source(), paired.target())) {
+      if (shelf.text(file).isEmpty()) {
+        return Optional.of(file);
+      }
+    }
+    workspace.pair(paired);
+    foldersMoved();
+    return Optional.empty();
+  }
+
+  /** All pairs of a folder, or of all folders, are wanted from now on. */
+  void want(Optional<Path> folder) {
+    workspace.want(folder);
+  }
+
+  /** Only the open pairs are wanted from now on. */
+  void decline() {
+    workspace.decline();
+  }
+
+  /** Files or folders have other names. */
+  void rename(Renaming renaming) {
+    workspace.rename(renaming);
+    List<Path> files = new ArrayList<>(renaming.names().keySet());
+    files.addAll(renaming.names().values());
+    reread(new Event.FilesChanged(files, true));
   }
 
   /**
@@ -114,7 +150,22 @@ final class Library {
     return workspace.root(file).filter(Root::awaited).isEmpty();
   }
 
-  /** The pairs with an open side, sorted. */
+  /** Whether it is known which files there are in all folders that wanted pairs may be in. */
+  boolean complete() {
+    return workspace.complete();
+  }
+
+  /** Whether the editor shows a side of a pair. */
+  boolean shows(FilePair pair) {
+    return shelf.open().contains(pair.source()) || shelf.open().contains(pair.target());
+  }
+
+  /** Whether both texts of a pair are at hand, so that the disk need not be asked. */
+  boolean knows(FilePair pair) {
+    return shelf.knows(pair.source()) && shelf.knows(pair.target());
+  }
+
+  /** The pairs that are wanted, sorted: those with an open side, or all in some folders. */
   List<FilePair> pairs() {
     workspace.readProjects(shelf);
     return workspace.pairs();

@@ -5,12 +5,9 @@ import dev.tallystick.run.Threads;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalInt;
-import java.util.Set;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
-import java.util.stream.Stream;
 
 /**
  * Keeps what is shown in step with what is written.
@@ -53,6 +50,9 @@ public final class Loop implements AutoCloseable {
   private final PairStates pairs = new PairStates();
   private final Questions questions = new Questions();
   private final Bulletin bulletin;
+  private final Display display;
+  private final Pass pass;
+  private final Standings standings;
   private boolean started;
   private boolean set;
   private long turn;
@@ -68,6 +68,9 @@ public final class Loop implements AutoCloseable {
     this.caret = new Caret(machine.alarm());
     this.bell = new Bell(machine.alarm(), () -> post(new Event.TimerDue()));
     this.bulletin = new Bulletin(audience);
+    this.display = new Display(library, pairs, bulletin);
+    this.pass = new Pass(audience);
+    this.standings = new Standings(audience, bulletin);
     this.thread = Threads.daemons("tallystick-loop").newThread(this::run);
   }
 
@@ -128,7 +131,8 @@ public final class Loop implements AutoCloseable {
       caret.lift();
     } else if (event instanceof Event.Opened opened) {
       bulletin.name(opened.file(), opened.uri());
-      library.open(opened.file(), Document.opened(opened.version(), opened.text()));
+      library.open(
+          opened.file(), Document.opened(opened.language(), opened.version(), opened.text()));
     } else if (event instanceof Event.Closed closed) {
       library.close(closed.file());
       caret.closed(closed.file());
@@ -145,6 +149,9 @@ public final class Loop implements AutoCloseable {
       library.listed(listed).forEach(audience::log);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
+    } else if (event instanceof Event.Renamed renamed) {
+      library.rename(renamed.renaming());
+      pairs.rename(renamed.renaming());
     } else if (event instanceof Event.Begun) {
       started = true;
     } else if (event instanceof Event.SettingsChanged changed) {
@@ -152,6 +159,23 @@ public final class Loop implements AutoCloseable {
       set = true;
       library.rules(changed.settings());
       caret.rest(changed.settings().restMillis());
+    } else {
+      handleCommand(event);
+    }
+  }
+
+  /** What the user wants done. */
+  private void handleCommand(Event event) {
+    if (event instanceof Event.Paired paired) {
+      library.pair(paired).map(Announcements::unreadable).ifPresent(audience::say);
+    } else if (event instanceof Event.Marked marked) {
+      if (!pairs.mark(marked.file(), marked.finished())) {
+        audience.say(Announcements.alone(marked.file()));
+      }
+    } else if (event instanceof Event.FolderWanted wanted) {
+      library.want(wanted.folder());
+    } else if (event instanceof Event.FoldersDeclined) {
+      library.decline();
     }
   }
 
@@ -187,69 +211,31 @@ public final class Loop implements AutoCloseable {
     if (!started) {
       return;
     }
-    caret.due().ifPresent(bell::at);
-    library.due(caret.restMillis()).ifPresent(bell::at);
     if (pairs.keep(library.pairs())) {
       library.retain(pairs.files());
     }
-    pairs.take(library, workers::examine);
+    pairs.take(library, workers);
+    pass.left(pairs.unsettled());
     pairs.show(caret.last());
-    publish();
+    display.update();
+    standings.tell(pairs.all());
     questions.answer(library.open(), this::ready, this::answer);
+    caret.due().ifPresent(bell::at);
+    library.due(caret.restMillis()).ifPresent(bell::at);
     if (set) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));
     }
-  }
-
-  /** Whether all is known that there is to know of the current text of a file. */
-  private boolean ready(Path file) {
-    return library.listed(file) && pairs.of(file).allMatch(PairState::settled);
+    audience.turned();
   }
 
   /** Whether a question can be answered. */
   private boolean ready(Question question) {
-    return library.listed(question.file()) && pairs.of(question).allMatch(PairState::settled);
+    boolean listed = question.aboutText() ? library.listed(question.file()) : library.complete();
+    return listed && pairs.of(question).allMatch(PairState::settled);
   }
 
   private Known answer(Question question, Text text) {
     List<Settled> known = pairs.of(question).flatMap(pair -> pair.known().stream()).toList();
     return new Known(question.file(), text, known, bulletin);
-  }
-
-  private void publish() {
-    Set<Path> files = pairs.files();
-    files.addAll(bulletin.files());
-    files.addAll(library.open());
-    files.addAll(library.flawed());
-    for (Path file : files) {
-      if (ready(file)) {
-        publish(file);
-      }
-    }
-  }
-
-  private Stream<Notice> findings(PairState pair, Path file) {
-    return pair.notices(pair.files().side(file), bulletin).stream();
-  }
-
-  private Stream<Notice> faults(Path file) {
-    return library.problems(file).stream().map(Notice::of);
-  }
-
-  private void publish(Path file) {
-    Stream<Notice> paired =
-        pairs.of(file).flatMap(pair -> Stream.concat(findings(pair, file), faults(file)));
-    List<Notice> notices =
-        Stream.concat(paired, library.flaws(file).stream().map(Notice::of))
-            .sorted()
-            .distinct()
-            .toList();
-    Optional<Document> document = library.document(file);
-    if (document.isPresent()) {
-      bulletin.publish(file, document.get(), notices);
-    } else {
-      Optional<Text> text = notices.isEmpty() ? Optional.empty() : library.text(file);
-      bulletin.publish(file, text.orElse(new Text("")), notices);
-    }
   }
 }

@@ -17,6 +17,7 @@ final class PairState {
   private final FilePair files;
   private Task task;
   private boolean running;
+  private boolean waiting;
   private Optional<PairResult> found = Optional.empty();
   private Optional<PairResult> result = Optional.empty();
   private Levels levels = Levels.USUAL;
@@ -33,24 +34,43 @@ final class PairState {
 
   /** Whether nothing more is to come for the current texts. */
   boolean settled() {
-    return !running;
+    return !running && !waiting;
+  }
+
+  /** Whether a worker has it. */
+  boolean running() {
+    return running;
+  }
+
+  /** Its texts may be others by now, but its turn has not come. */
+  void await() {
+    waiting = true;
+  }
+
+  /** Whether all is as it was when the texts were taken. */
+  boolean current(Optional<Sheet> source, Optional<Sheet> target, boolean draft) {
+    if (source.isEmpty() || target.isEmpty()) {
+      return task == null;
+    }
+    return task != null && task.isAbout(source.get(), target.get(), draft);
   }
 
   /**
    * Takes the current texts; whatever was found in others, or is being looked for, is dropped.
    *
+   * @param draft whether the translation is still being written
    * @return work to be done, if the texts are new and both there
    */
-  Optional<Task> take(Optional<Sheet> source, Optional<Sheet> target) {
-    if (source.isEmpty() || target.isEmpty()) {
-      drop();
-      return Optional.empty();
-    }
-    if (task != null && task.source() == source.get() && task.target() == target.get()) {
+  Optional<Task> take(Optional<Sheet> source, Optional<Sheet> target, boolean draft) {
+    waiting = false;
+    if (current(source, target, draft)) {
       return Optional.empty();
     }
     drop();
-    task = new Task(files, source.get(), target.get());
+    if (source.isEmpty() || target.isEmpty()) {
+      return Optional.empty();
+    }
+    task = new Task(files, source.get(), target.get(), draft);
     running = true;
     return Optional.of(task);
   }
@@ -93,7 +113,7 @@ final class PairState {
 
   /** Decides what is to be shown: all findings but those about what is being written. */
   void show(Optional<Caret.Edited> caret) {
-    if (running) {
+    if (!settled()) {
       return;
     }
     if (result.isEmpty()) {
@@ -106,12 +126,19 @@ final class PairState {
             .filter(edited -> files.has(edited.file()))
             .map(edited -> withoutHeld(now, edited))
             .orElse(now.findings());
-    shown = new HeldBack.Shown(findings, now.source().text(), now.target().text());
+    if (!shown.is(findings, now)) {
+      shown = new HeldBack.Shown(findings, now);
+    }
   }
 
   private List<Finding> withoutHeld(PairResult now, Caret.Edited edited) {
     HeldBack held = new HeldBack(now, files.side(edited.file()), edited.offset());
     return now.findings().stream().filter(finding -> !held.holds(finding, shown)).toList();
+  }
+
+  /** The findings that are shown: the same object for as long as nothing about them changes. */
+  HeldBack.Shown shown() {
+    return shown;
   }
 
   /** What a side shows. */

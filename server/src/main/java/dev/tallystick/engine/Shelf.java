@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.prose.Format;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -45,7 +46,7 @@ final class Shelf {
   Optional<Text> text(Path file) {
     Document document = open.get(file);
     if (document == null) {
-      return disk.text(file);
+      return onDisk(file) ? disk.text(file) : Optional.empty();
     }
     return document.lost() ? Optional.empty() : Optional.of(document.text());
   }
@@ -54,7 +55,7 @@ final class Shelf {
    * What is wrong with the bytes of a file; nothing of one that the editor shows, as it has none.
    */
   List<Problem> problems(Path file) {
-    return open.containsKey(file) ? List.of() : disk.problems(file);
+    return open.containsKey(file) || !onDisk(file) ? List.of() : disk.problems(file);
   }
 
   /** Why a file that the editor does not show cannot be read, if it cannot. */
@@ -66,13 +67,31 @@ final class Shelf {
   Optional<Sheet> sheet(Path file, String language) {
     Sheet sheet = sheets.get(file);
     Optional<Text> text = text(file);
-    if (sheet != null && text.isPresent() && sheet.shows(text.get(), language)) {
+    Format format = format(file);
+    if (sheet != null && text.isPresent() && sheet.shows(text.get(), format, language)) {
       return Optional.of(sheet);
     }
     outdate(sheet);
     sheets.remove(file);
-    text.ifPresent(now -> sheets.put(file, new Sheet(now, Intake.format(file), language)));
+    text.ifPresent(now -> sheets.put(file, new Sheet(now, format, language)));
     return Optional.ofNullable(sheets.get(file));
+  }
+
+  /** The format of a file by its name, else by what the editor takes it for. */
+  private Format format(Path file) {
+    return Format.ofName(String.valueOf(file.getFileName()))
+        .or(() -> document(file).flatMap(document -> Format.ofLanguage(document.language())))
+        .orElse(Format.PLAIN);
+  }
+
+  /** Whether the text of a file is at hand, so that the disk need not be asked. */
+  boolean knows(Path file) {
+    return open.containsKey(file) || disk.knows(file);
+  }
+
+  /** A buffer without a file has a relative path. */
+  private static boolean onDisk(Path file) {
+    return file.isAbsolute();
   }
 
   /** Forgets what is known of all other files. */

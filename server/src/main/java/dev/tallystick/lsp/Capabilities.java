@@ -1,5 +1,15 @@
 package dev.tallystick.lsp;
 
+import dev.tallystick.prose.Format;
+import java.util.List;
+import org.eclipse.lsp4j.CodeLensOptions;
+import org.eclipse.lsp4j.DiagnosticRegistrationOptions;
+import org.eclipse.lsp4j.ExecuteCommandOptions;
+import org.eclipse.lsp4j.FileOperationFilter;
+import org.eclipse.lsp4j.FileOperationOptions;
+import org.eclipse.lsp4j.FileOperationPattern;
+import org.eclipse.lsp4j.FileOperationPatternKind;
+import org.eclipse.lsp4j.FileOperationsServerCapabilities;
 import org.eclipse.lsp4j.SaveOptions;
 import org.eclipse.lsp4j.ServerCapabilities;
 import org.eclipse.lsp4j.TextDocumentSyncKind;
@@ -23,7 +33,15 @@ final class Capabilities {
     can.setHoverProvider(true);
     can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
-    can.setWorkspace(new WorkspaceServerCapabilities(folders()));
+    can.setCodeLensProvider(new CodeLensOptions(false));
+    can.setInlayHintProvider(true);
+    if (client.pulls()) {
+      can.setDiagnosticProvider(findings());
+    }
+    can.setExecuteCommandProvider(new ExecuteCommandOptions(Commands.NAMES));
+    WorkspaceServerCapabilities workspace = new WorkspaceServerCapabilities(folders());
+    workspace.setFileOperations(fileOperations());
+    can.setWorkspace(workspace);
     return can;
   }
 
@@ -33,6 +51,27 @@ final class Capabilities {
     sync.setChange(TextDocumentSyncKind.Incremental);
     sync.setSave(new SaveOptions(false));
     return sync;
+  }
+
+  /** Which renamed files and folders the editor is to tell of. */
+  private static FileOperationsServerCapabilities fileOperations() {
+    FileOperationPattern files = new FileOperationPattern("**/*.{" + Format.everyExtension() + "}");
+    files.setMatches(FileOperationPatternKind.File);
+    FileOperationPattern folders = new FileOperationPattern("**");
+    folders.setMatches(FileOperationPatternKind.Folder);
+    FileOperationsServerCapabilities operations = new FileOperationsServerCapabilities();
+    operations.setDidRename(
+        new FileOperationOptions(
+            List.of(
+                new FileOperationFilter(files, "file"), new FileOperationFilter(folders, "file"))));
+    return operations;
+  }
+
+  /** An edit of one file changes the findings of the other. */
+  private static DiagnosticRegistrationOptions findings() {
+    DiagnosticRegistrationOptions findings = new DiagnosticRegistrationOptions(true, true);
+    findings.setIdentifier("tallystick");
+    return findings;
   }
 
   private static WorkspaceFoldersOptions folders() {

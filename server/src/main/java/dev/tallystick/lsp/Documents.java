@@ -10,21 +10,28 @@ import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import org.eclipse.lsp4j.CodeLens;
+import org.eclipse.lsp4j.CodeLensParams;
 import org.eclipse.lsp4j.DefinitionParams;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
 import org.eclipse.lsp4j.DidCloseTextDocumentParams;
 import org.eclipse.lsp4j.DidOpenTextDocumentParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
+import org.eclipse.lsp4j.DocumentDiagnosticParams;
+import org.eclipse.lsp4j.DocumentDiagnosticReport;
 import org.eclipse.lsp4j.DocumentHighlight;
 import org.eclipse.lsp4j.DocumentHighlightParams;
 import org.eclipse.lsp4j.DocumentSymbol;
 import org.eclipse.lsp4j.DocumentSymbolParams;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.HoverParams;
+import org.eclipse.lsp4j.InlayHint;
+import org.eclipse.lsp4j.InlayHintParams;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
@@ -48,20 +55,22 @@ final class Documents implements TextDocumentService {
   /** An edit that does not say what came: from now on the text is not known. */
   private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
 
-  private final Requests requests = new Requests();
+  private final Requests requests;
+  private final Board board;
   private Loop loop;
   private Conversion conversion;
+  private Views views;
 
-  /** The session has begun. */
-  void begin(Loop with, Conversion by) {
-    loop = with;
-    conversion = by;
-    requests.begin(with);
+  Documents(Requests requests, Board board) {
+    this.requests = requests;
+    this.board = board;
   }
 
-  /** Nothing is answered any more. */
-  void end() {
-    requests.end();
+  /** The session has begun. */
+  void begin(Loop with, Conversion by, Views in) {
+    loop = with;
+    conversion = by;
+    views = in;
   }
 
   @Override
@@ -69,7 +78,13 @@ final class Documents implements TextDocumentService {
     TextDocumentItem item = params.getTextDocument();
     tell(
         item.getUri(),
-        file -> new Event.Opened(file, item.getUri(), item.getVersion(), new Text(item.getText())));
+        file ->
+            new Event.Opened(
+                file,
+                item.getUri(),
+                item.getVersion(),
+                Objects.requireNonNullElse(item.getLanguageId(), ""),
+                new Text(item.getText())));
   }
 
   @Override
@@ -92,7 +107,7 @@ final class Documents implements TextDocumentService {
 
   private void tell(String uri, Function<Path, Event> event) {
     if (loop != null) {
-      Uris.file(uri).map(event).ifPresent(loop::post);
+      Uris.text(uri).map(event).ifPresent(loop::post);
     }
   }
 
@@ -166,6 +181,40 @@ final class Documents implements TextDocumentService {
         Optional.of(params),
         Question.Reach.PAIRS,
         known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  @Override
+  public CompletableFuture<List<? extends CodeLens>> codeLens(CodeLensParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.of(params),
+        Question.Reach.PAIRS,
+        known -> views.lenses().wanted() ? Lenses.of(known) : List.of());
+  }
+
+  @Override
+  public CompletableFuture<List<InlayHint>> inlayHint(InlayHintParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getRange()),
+        Question.Reach.PAIRS,
+        known ->
+            views.hints().wanted()
+                ? new Hints(conversion.client().encoding()).within(known, params.getRange())
+                : List.of());
+  }
+
+  @Override
+  public CompletableFuture<DocumentDiagnosticReport> diagnostic(DocumentDiagnosticParams params) {
+    TextDocumentIdentifier document = params.getTextDocument();
+    boolean related = conversion != null && conversion.client().pullsRelated();
+    return requests.askFindings(
+        document,
+        known ->
+            board.report(
+                document.getUri(),
+                params.getPreviousResultId(),
+                related ? known.others() : List.of()));
   }
 
   private <T> CompletableFuture<T> ask(

@@ -10,6 +10,7 @@ import org.eclipse.lsp4j.InitializeResult;
 import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.ServerInfo;
 import org.eclipse.lsp4j.SetTraceParams;
+import org.eclipse.lsp4j.WorkDoneProgressCancelParams;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
@@ -26,11 +27,15 @@ final class Server implements LanguageServer {
   private final Machine machine;
   private final String version;
   private final CompletableFuture<Integer> ended;
-  private final Documents documents = new Documents();
-  private final Surroundings surroundings = new Surroundings();
+  private final Requests requests = new Requests();
+  private final Board board = new Board();
+  private final Documents documents = new Documents(requests, board);
+  private final Surroundings surroundings =
+      new Surroundings(requests, board, new Commands(requests));
   private LanguageClient remote;
   private Loop loop;
   private Client client;
+  private PassReport report;
   private volatile boolean shutDown;
 
   Server(Machine machine, String version, CompletableFuture<Integer> ended) {
@@ -50,9 +55,13 @@ final class Server implements LanguageServer {
     }
     client = Client.of(params);
     Conversion conversion = new Conversion(client);
-    loop = new Loop(machine.watchedByEditor(client.watches()), new Editor(remote, conversion));
-    documents.begin(loop, conversion);
-    surroundings.begin(loop, client, remote, machine.alarm());
+    Views views = new Views(client, remote);
+    report = new PassReport(remote);
+    Editor editor = new Editor(remote, conversion, board, views, report);
+    loop = new Loop(machine.watchedByEditor(client.watches()), editor);
+    requests.begin(loop);
+    documents.begin(loop, conversion, views);
+    surroundings.begin(loop, client, views, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
     loop.start();
     InitializeResult result = new InitializeResult(Capabilities.of(client));
@@ -70,7 +79,7 @@ final class Server implements LanguageServer {
   @Override
   public CompletableFuture<Object> shutdown() {
     shutDown = true;
-    documents.end();
+    requests.end();
     return CompletableFuture.completedFuture(null);
   }
 
@@ -83,6 +92,13 @@ final class Server implements LanguageServer {
   void close() {
     if (loop != null) {
       loop.close();
+    }
+  }
+
+  @Override
+  public void cancelProgress(WorkDoneProgressCancelParams params) {
+    if (loop != null && report.is(params.getToken())) {
+      loop.post(new Event.FoldersDeclined());
     }
   }
 

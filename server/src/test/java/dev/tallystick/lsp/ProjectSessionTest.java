@@ -246,9 +246,9 @@ class ProjectSessionTest {
     try (Talk talk = Talk.in(folder)) {
       AtomicInteger runs = new AtomicInteger();
       talk.machine.examiner =
-          (source, target, cancellation) -> {
+          (source, target, draft, cancellation) -> {
             runs.incrementAndGet();
-            return Examiner.DRAFT.examine(source, target, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
           };
       talk.open(work.de(), german);
       Buffer project = talk.open(work.file(NAME), "{ \"checks\": {} }");

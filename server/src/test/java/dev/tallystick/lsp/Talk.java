@@ -19,6 +19,7 @@ import org.eclipse.lsp4j.DidChangeWatchedFilesCapabilities;
 import org.eclipse.lsp4j.DidChangeWatchedFilesParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
 import org.eclipse.lsp4j.DocumentSymbolCapabilities;
+import org.eclipse.lsp4j.ExecuteCommandParams;
 import org.eclipse.lsp4j.FileChangeType;
 import org.eclipse.lsp4j.FileEvent;
 import org.eclipse.lsp4j.HoverParams;
@@ -28,12 +29,14 @@ import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.MessageActionItem;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.Position;
+import org.eclipse.lsp4j.ProgressParams;
 import org.eclipse.lsp4j.PublishDiagnosticsCapabilities;
 import org.eclipse.lsp4j.PublishDiagnosticsParams;
 import org.eclipse.lsp4j.RegistrationParams;
 import org.eclipse.lsp4j.ShowMessageRequestParams;
 import org.eclipse.lsp4j.TextDocumentClientCapabilities;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
+import org.eclipse.lsp4j.WorkDoneProgressCreateParams;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.eclipse.lsp4j.jsonrpc.Launcher;
@@ -51,6 +54,7 @@ final class Talk implements LanguageClient, AutoCloseable {
   final List<PublishDiagnosticsParams> published = new CopyOnWriteArrayList<>();
   final List<String> said = new CopyOnWriteArrayList<>();
   final List<String> logged = new CopyOnWriteArrayList<>();
+  final List<Object> progress = new CopyOnWriteArrayList<>();
   final List<RegistrationParams> registered = new CopyOnWriteArrayList<>();
   final List<ResponseMessage> responses = new CopyOnWriteArrayList<>();
   final CompletableFuture<Integer> ended;
@@ -61,6 +65,12 @@ final class Talk implements LanguageClient, AutoCloseable {
 
   /** The answer to the question what is set; empty for one that comes at once. */
   volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
+
+  /** What the client was told to ask for again. */
+  final List<String> refreshed = new CopyOnWriteArrayList<>();
+
+  /** The answer to that. */
+  volatile CompletableFuture<Void> refreshing = CompletableFuture.completedFuture(null);
 
   InitializeResult initialized;
   private final RemoteEndpoint endpoint;
@@ -77,6 +87,7 @@ final class Talk implements LanguageClient, AutoCloseable {
             .setInput(toClient.in)
             .setOutput(toServer.out)
             .setExecutorService(threads)
+            .configureGson(RelatedReports::teach)
             .wrapMessages(
                 consumer ->
                     message -> {
@@ -168,13 +179,19 @@ final class Talk implements LanguageClient, AutoCloseable {
     answer(
         server
             .getTextDocumentService()
-            .hover(
-                new HoverParams(
-                    new TextDocumentIdentifier("untitled:nothing"), new Position(0, 0))));
+            .hover(new HoverParams(new TextDocumentIdentifier("nothing"), new Position(0, 0))));
   }
 
   static <T> T answer(CompletableFuture<T> asked) {
     return asked.orTimeout(FAR_TOO_LONG, TimeUnit.SECONDS).join();
+  }
+
+  /** The user gives a command. */
+  Object command(String name, Object... arguments) {
+    return answer(
+        server
+            .getWorkspaceService()
+            .executeCommand(new ExecuteCommandParams(name, List.of(arguments))));
   }
 
   /** Lets time pass. */
@@ -243,10 +260,39 @@ final class Talk implements LanguageClient, AutoCloseable {
   }
 
   @Override
+  public CompletableFuture<Void> createProgress(WorkDoneProgressCreateParams params) {
+    progress.add(params);
+    return CompletableFuture.completedFuture(null);
+  }
+
+  @Override
+  public void notifyProgress(ProgressParams params) {
+    progress.add(params.getValue().getLeft());
+  }
+
+  @Override
   public CompletableFuture<List<Object>> configuration(ConfigurationParams params) {
     List<Object> values = new ArrayList<>();
     params.getItems().forEach(item -> values.add(settings));
     return answer.orElseGet(() -> CompletableFuture.completedFuture(values));
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshDiagnostics() {
+    refreshed.add("findings");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshCodeLenses() {
+    refreshed.add("lenses");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshInlayHints() {
+    refreshed.add("hints");
+    return refreshing;
   }
 
   @Override
