@@ -17,7 +17,7 @@ import java.util.TreeMap;
  */
 final class Shelf {
   private final Map<Path, Document> open = new TreeMap<>();
-  private final Map<Path, Sheet> sheets = new TreeMap<>();
+  private final Map<Path, Map<String, Sheet>> sheets = new TreeMap<>();
   private final DiskTexts disk;
 
   Shelf(DiskTexts disk) {
@@ -63,18 +63,26 @@ final class Shelf {
     return open.containsKey(file) ? Optional.empty() : disk.trouble(file);
   }
 
-  /** The sheet of the current text; the same one as long as the text stays the same. */
+  /**
+   * The sheet of the current text; the same one as long as the text stays the same. A file that is
+   * taken for two languages, in a pair made by hand and in another, has one for each.
+   */
   Optional<Sheet> sheet(Path file, String language) {
-    Sheet sheet = sheets.get(file);
     Optional<Text> text = text(file);
     Format format = format(file);
-    if (sheet != null && text.isPresent() && sheet.shows(text.get(), format, language)) {
-      return Optional.of(sheet);
+    Map<String, Sheet> known = sheets.computeIfAbsent(file, path -> new TreeMap<>());
+    known.values().removeIf(sheet -> outdate(sheet, text, format));
+    text.ifPresent(now -> known.computeIfAbsent(language, tag -> new Sheet(now, format, tag)));
+    return Optional.ofNullable(known.get(language));
+  }
+
+  /** Tells whoever works on a sheet to stop if the text has moved on; whether it has. */
+  private static boolean outdate(Sheet sheet, Optional<Text> text, Format format) {
+    boolean current = text.isPresent() && sheet.shows(text.get(), format);
+    if (!current) {
+      sheet.outdate();
     }
-    outdate(sheet);
-    sheets.remove(file);
-    text.ifPresent(now -> sheets.put(file, new Sheet(now, format, language)));
-    return Optional.ofNullable(sheets.get(file));
+    return !current;
   }
 
   /** The format of a file by its name, else by what the editor takes it for. */
@@ -100,18 +108,13 @@ final class Shelf {
     others.addAll(disk.files());
     others.removeAll(files);
     for (Path file : others) {
-      outdate(sheets.remove(file));
+      sheets.getOrDefault(file, Map.of()).values().forEach(Sheet::outdate);
+      sheets.remove(file);
     }
     disk.forget(others);
   }
 
   DiskTexts disk() {
     return disk;
-  }
-
-  private static void outdate(Sheet sheet) {
-    if (sheet != null) {
-      sheet.outdate();
-    }
   }
 }

@@ -32,6 +32,7 @@ final class Workspace {
   private final MadePairs made = new MadePairs();
   private final Scope scope = new Scope();
   private Rules rules = Rules.NONE;
+  private boolean usual = true;
 
   private final Set<Path> open = new TreeSet<>();
   private Optional<List<FilePair>> pairs = Optional.empty();
@@ -123,17 +124,23 @@ final class Workspace {
 
   /** Reads the {@code tallystick.json} of each folder, where its text is new. */
   void readProjects(Shelf shelf) {
+    usual = true;
     for (Root root : roots()) {
       if (root.project().take(shelf)) {
         root.forget();
         pairs = Optional.empty();
       }
+      usual &= levels(root).equals(Levels.USUAL);
     }
   }
 
   /** How loudly findings in a pair are said. */
   Levels levels(FilePair pair) {
-    return root(pair.source()).map(root -> root.project().project().levels()).orElse(Levels.USUAL);
+    return usual ? Levels.USUAL : root(pair.source()).map(Workspace::levels).orElse(Levels.USUAL);
+  }
+
+  private static Levels levels(Root root) {
+    return root.project().project().levels();
   }
 
   /** All folders that count. */

@@ -6,10 +6,12 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.google.gson.JsonParser;
+import dev.tallystick.engine.Examiner;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.CompletionException;
+import java.util.concurrent.atomic.AtomicInteger;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -65,6 +67,28 @@ class CommandSessionTest {
       talk.settle();
       assertEquals(List.of(), talk.codes(work.en()));
       assertEquals(List.of(), talk.codes(older));
+    }
+  }
+
+  @Test
+  void aSourceThatIsTakenForTwoLanguagesComesToRestAllTheSame() {
+    Work work = Work.withoutFog(folder);
+    Path notes = work.write("notes.md", Ferry.DE);
+    try (Talk talk = Talk.in(folder)) {
+      AtomicInteger runs = new AtomicInteger();
+      talk.machine.examiner =
+          (source, target, draft, cancellation) -> {
+            runs.incrementAndGet();
+            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+          };
+      talk.open(work.en(), Ferry.EN);
+      talk.settle();
+      talk.command(
+          PAIR, Map.of("source", uri(work.en()), "target", uri(notes), "sourceLanguage", "en-GB"));
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(work.de()));
+      assertEquals(List.of(), talk.codes(notes));
+      assertEquals(2, runs.get());
     }
   }
 

@@ -80,6 +80,7 @@ class RenameSessionTest {
       talk.command(
           "tallystick.pair",
           Map.of("source", english.toUri().toString(), "target", german.toUri().toString()));
+      talk.settle(); // the pair is made of files that are still there
       rename(talk, folder.resolve("mine"), folder.resolve("delivered"));
       assertEquals(List.of("omission"), talk.codes(english));
       assertEquals(1, talk.shown(work.file("delivered/translated.md")).size());
