@@ -10,10 +10,10 @@ import org.eclipse.lsp4j.InitializeResult;
 import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.ServerInfo;
 import org.eclipse.lsp4j.SetTraceParams;
+import org.eclipse.lsp4j.TextDocumentPositionParams;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.LanguageServer;
 import org.eclipse.lsp4j.services.TextDocumentService;
 import org.eclipse.lsp4j.services.WorkspaceService;
@@ -22,7 +22,7 @@ import org.eclipse.lsp4j.services.WorkspaceService;
  * The life of a session. Called by the thread that reads messages, which does nothing here but put
  * events into the loop's queue.
  */
-final class Server implements LanguageServer {
+final class Server implements LanguageServer, OwnRequests {
   private final Machine machine;
   private final String version;
   private final CompletableFuture<Integer> ended;
@@ -30,7 +30,7 @@ final class Server implements LanguageServer {
   private final Board board = new Board();
   private final Documents documents = new Documents(requests, board);
   private final Surroundings surroundings = new Surroundings(requests, board);
-  private LanguageClient remote;
+  private Remote remote;
   private Loop loop;
   private Client client;
   private volatile boolean shutDown;
@@ -41,7 +41,7 @@ final class Server implements LanguageServer {
     this.ended = ended;
   }
 
-  void connect(LanguageClient to) {
+  void connect(Remote to) {
     remote = to;
   }
 
@@ -94,6 +94,11 @@ final class Server implements LanguageServer {
   @Override
   public void setTrace(SetTraceParams params) {
     // Nothing is traced.
+  }
+
+  @Override
+  public CompletableFuture<List<Placed>> counterpart(TextDocumentPositionParams params) {
+    return documents.counterpart(params);
   }
 
   @Override
