@@ -26,7 +26,13 @@ class SourcesTest {
 
   /** Waiting for time instead of for something to happen. */
   private static final Pattern SLEEP =
-      Pattern.compile("\\.sle" + "ep\\(|vim\\.wa" + "it\\(\\s*\\d+\\s*\\)|Locks" + "upport\\.park");
+      Pattern.compile(
+          "\\.sle"
+              + "ep\\(|\\((sle"
+              + "ep|s"
+              + "it)-for|vim\\.wa"
+              + "it\\(\\s*\\d+\\s*\\)|Locks"
+              + "upport\\.park");
 
   private static final Pattern MACHINE =
       Pattern.compile(
@@ -49,14 +55,14 @@ class SourcesTest {
 
   @Test
   void noTestIsSkippedAndNoneSleeps() {
-    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua");
+    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua", ".el");
     assertTrue(tests.size() > 10, tests::toString);
     assertNone(tests, code -> SKIPPED.matcher(code).find() || SLEEP.matcher(code).find());
   }
 
   @Test
   void noSourceIsTooLong() {
-    List<Path> sources = Repository.files(Repository.root(), ".java", ".lua", ".js", ".ts");
+    List<Path> sources = Repository.files(Repository.root(), ".java", ".lua", ".el", ".js", ".ts");
     assertNone(sources, code -> code.lines().count() > LONGEST_FILE);
   }
 
@@ -65,7 +71,8 @@ class SourcesTest {
     Path root = Repository.root();
     assertNone(
         Repository.files(
-            root, ".java", ".lua", ".js", ".ts", ".md", ".xml", ".json", ".jsonl", ".txt", "run"),
+            root, ".java", ".lua", ".el", ".js", ".ts", ".md", ".xml", ".json", ".jsonl", ".txt",
+            "run"),
         text -> MACHINE.matcher(text).find());
   }
 
