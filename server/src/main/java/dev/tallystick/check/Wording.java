@@ -6,8 +6,6 @@ import com.ibm.icu.util.ULocale;
 final class Wording {
   private static final int QUOTED = 40;
   private static final int QUOTED_WHOLE = 160;
-  private static final char ISOLATE = '\u2068';
-  private static final char ISOLATE_ENDS = '\u2069';
 
   private final String language;
 
@@ -86,12 +84,16 @@ final class Wording {
   /** The start of a sentence, cut between words if it can be, in quotation marks and isolated. */
   static String quote(String sentence, int most) {
     String text = sentence.strip();
-    String shown = text;
-    if (text.codePointCount(0, text.length()) > most) {
-      int end = text.offsetByCodePoints(0, most);
-      int blank = text.lastIndexOf(' ', end);
-      shown = text.substring(0, blank > end / 2 ? blank : end).strip() + " ...";
+    if (text.codePointCount(0, text.length()) <= most) {
+      return quoted(Isolate.balanced(text));
     }
-    return "\"" + ISOLATE + shown + ISOLATE_ENDS + "\"";
+    int end = text.offsetByCodePoints(0, most);
+    int blank = text.lastIndexOf(' ', end);
+    String start = text.substring(0, blank > end / 2 ? blank : end).strip();
+    return quoted(Isolate.balanced(start) + " ...");
+  }
+
+  private static String quoted(String text) {
+    return '"' + Isolate.of(text) + '"';
   }
 }

@@ -34,7 +34,8 @@ final class Announcements {
     return "Choose the source language: which of "
         + files.stream().limit(MOST_FILES).collect(Collectors.joining(", "))
         + more
-        + " is the source cannot be told. Set tallystick.sourceLanguage to one of: "
+        + " is the source cannot be told."
+        + " Set \"sourceLanguage\" in tallystick.json or tallystick.sourceLanguage to one of: "
         + question.choices().stream().map(Language::tag).collect(Collectors.joining(", "))
         + ".";
   }

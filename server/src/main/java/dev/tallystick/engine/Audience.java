@@ -13,6 +13,12 @@ public interface Audience {
    */
   void pass(int done, int total);
 
+  /** A pair has come so far: told when it is another figure than before. */
+  void stands(Standing standing);
+
+  /** All that came of one event is told, and who could be answered is answered. */
+  void turned();
+
   /** Something the user should know; shown once, in full sentences. */
   void say(String message);
 

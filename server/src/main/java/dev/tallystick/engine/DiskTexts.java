@@ -51,6 +51,11 @@ final class DiskTexts {
     return decoded(file).map(Decoded::problems).orElse(List.of());
   }
 
+  /** Why a file cannot be read, if it could not be when it was looked at last. */
+  Optional<String> trouble(Path file) {
+    return Optional.ofNullable(told.get(file));
+  }
+
   private Optional<Decoded> decoded(Path file) {
     if (!known.containsKey(file)) {
       known.put(file, read(file));

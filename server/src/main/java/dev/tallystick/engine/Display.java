@@ -25,6 +25,7 @@ final class Display {
     Set<Path> files = pairs.files();
     files.addAll(bulletin.files());
     files.addAll(library.open());
+    files.addAll(library.flawed());
     bulletin.retain(files);
     for (Path file : files) {
       if (ready(file)) {
@@ -51,6 +52,7 @@ final class Display {
   /** All that the notices of a file are made of: the same objects mean the same notices. */
   private List<Object> grounds(Path file, Optional<Document> document) {
     List<Object> grounds = new ArrayList<>(pairs.of(file).map(PairState::shown).toList());
+    grounds.addAll(library.flaws(file));
     document.map(Document::text).ifPresent(grounds::add);
     if (document.isEmpty() && !grounds.isEmpty()) {
       grounds.add(library.problems(file));
@@ -59,9 +61,9 @@ final class Display {
   }
 
   private List<Notice> notices(Path file) {
-    return pairs
-        .of(file)
-        .flatMap(pair -> Stream.concat(findings(pair, file), faults(file)))
+    Stream<Notice> paired =
+        pairs.of(file).flatMap(pair -> Stream.concat(findings(pair, file), faults(file)));
+    return Stream.concat(paired, library.flaws(file).stream().map(Notice::of))
         .sorted()
         .distinct()
         .toList();

@@ -95,9 +95,9 @@ public sealed interface Event {
   /**
    * A worker has listed a folder.
    *
-   * @param trouble why that cannot be done, for the log; then there are no files
+   * @param troubles what in it cannot be looked into, and why, for the log
    */
-  record Listed(Path folder, List<Path> files, Optional<String> trouble) implements Event {}
+  record Listed(Path folder, List<Path> files, List<String> troubles) implements Event {}
 
   /** A moment has come that someone waits for. Who, the state tells. */
   record TimerDue() implements Event {}

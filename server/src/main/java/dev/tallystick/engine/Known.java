@@ -61,6 +61,18 @@ public final class Known {
     return Summary.of(pairs);
   }
 
+  /** The sentences of the whole file, in each of its pairs. */
+  public List<Count> counts() {
+    return own().stream().map(pair -> pair.tally(file).whole()).toList();
+  }
+
+  /** What it is paired with: the other files, as the editor names them. */
+  public List<String> others() {
+    return own().stream()
+        .map(pair -> uris.uri(pair.files().file(pair.files().side(file).other())))
+        .toList();
+  }
+
   /** The pairs that the file itself is in. */
   private List<Settled> own() {
     return pairs.stream().filter(pair -> pair.files().has(file)).toList();

@@ -1,15 +1,18 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.check.Levels;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.Set;
+import java.util.stream.Stream;
 
 /**
  * The files that matter: what stands in them, and which belong together. Keeps the folders that
@@ -34,7 +37,7 @@ final class Library {
     shelf.open(file, document);
     workspace
         .root(file)
-        .filter(root -> root.folder().lists(file) && !root.files().contains(file))
+        .filter(root -> root.folder().lists(file) && !root.has(file))
         .filter(root -> root.request(true))
         .ifPresent(this::list);
     foldersMoved();
@@ -92,9 +95,15 @@ final class Library {
     reread(new Event.FilesChanged(files, true));
   }
 
-  /** A worker has listed a folder. */
-  void listed(Event.Listed listed) {
+  /**
+   * A worker has listed a folder.
+   *
+   * @return what could not be looked into, as far as it was not told before
+   */
+  List<String> listed(Event.Listed listed) {
+    List<String> news = workspace.news(listed.folder(), listed.troubles());
     workspace.listed(listed.folder(), listed.files()).ifPresent(this::list);
+    return news;
   }
 
   /** Files were written: reads those that matter, and lists the folders that may have others. */
@@ -158,7 +167,13 @@ final class Library {
 
   /** The pairs that are wanted, sorted: those with an open side, or all in some folders. */
   List<FilePair> pairs() {
+    workspace.readProjects(shelf);
     return workspace.pairs();
+  }
+
+  /** How loudly findings in a pair are said. */
+  Levels levels(FilePair pair) {
+    return workspace.levels(pair);
   }
 
   /** What the user has to be asked about the open files, and has not been. */
@@ -186,13 +201,35 @@ final class Library {
     return shelf.problems(file);
   }
 
+  /** What is wrong in a file that settles what holds in a folder; nothing in any other. */
+  List<Problem> flaws(Path file) {
+    return projects()
+        .filter(project -> project.file().equals(file))
+        .flatMap(project -> project.problems(shelf).stream())
+        .toList();
+  }
+
+  /** The files that something is wrong in that {@link #flaws} tells. */
+  List<Path> flawed() {
+    return projects()
+        .filter(project -> !project.problems(shelf).isEmpty())
+        .map(FolderProject::file)
+        .toList();
+  }
+
+  private Stream<FolderProject> projects() {
+    return workspace.roots().stream().map(Root::project);
+  }
+
   /** The sheet of the current text; the same one as long as the text stays the same. */
   Optional<Sheet> sheet(Path file, String language) {
     return shelf.sheet(file, language);
   }
 
-  /** Forgets what is known of all files but these. */
+  /** Forgets what is known of all files but these, and those that settle what holds. */
   void retain(Collection<Path> files) {
-    shelf.retain(files);
+    Set<Path> kept = new HashSet<>(files);
+    projects().map(FolderProject::file).forEach(kept::add);
+    shelf.retain(kept);
   }
 }

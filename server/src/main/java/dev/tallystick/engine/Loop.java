@@ -52,6 +52,7 @@ public final class Loop implements AutoCloseable {
   private final Bulletin bulletin;
   private final Display display;
   private final Pass pass;
+  private final Standings standings;
   private boolean started;
   private boolean set;
   private long turn;
@@ -69,6 +70,7 @@ public final class Loop implements AutoCloseable {
     this.bulletin = new Bulletin(audience);
     this.display = new Display(library, pairs, bulletin);
     this.pass = new Pass(audience);
+    this.standings = new Standings(audience, bulletin);
     this.thread = Threads.daemons("tallystick-loop").newThread(this::run);
   }
 
@@ -144,8 +146,7 @@ public final class Loop implements AutoCloseable {
     if (event instanceof Event.FilesChanged changed) {
       library.reread(changed);
     } else if (event instanceof Event.Listed listed) {
-      library.listed(listed);
-      listed.trouble().ifPresent(audience::log);
+      library.listed(listed).forEach(audience::log);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
     } else if (event instanceof Event.Renamed renamed) {
@@ -217,12 +218,14 @@ public final class Loop implements AutoCloseable {
     pass.left(pairs.unsettled());
     pairs.show(caret.last());
     display.update();
+    standings.tell(pairs.all());
     questions.answer(library.open(), this::ready, this::answer);
     caret.due().ifPresent(bell::at);
     library.due(caret.restMillis()).ifPresent(bell::at);
     if (set) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));
     }
+    audience.turned();
   }
 
   /** Whether a question can be answered. */

@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.check.Finding;
+import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
 import java.util.List;
 import java.util.Optional;
@@ -17,7 +18,9 @@ final class PairState {
   private Task task;
   private boolean running;
   private boolean waiting;
+  private Optional<PairResult> found = Optional.empty();
   private Optional<PairResult> result = Optional.empty();
+  private Levels levels = Levels.USUAL;
   private HeldBack.Shown shown = HeldBack.Shown.NOTHING;
   private long editedAt;
 
@@ -79,15 +82,28 @@ final class PairState {
     }
     task = null;
     running = false;
-    result = Optional.empty();
+    take(Optional.empty());
   }
 
   /** Takes a worker's result, unless the texts have moved on. */
-  void finish(Task done, Optional<PairResult> found) {
+  void finish(Task done, Optional<PairResult> now) {
     if (task == done) {
       running = false;
-      result = found;
+      take(now);
     }
+  }
+
+  /** The project wants findings told so loudly. */
+  void at(Levels now) {
+    if (!now.equals(levels)) {
+      levels = now;
+      take(found);
+    }
+  }
+
+  private void take(Optional<PairResult> now) {
+    found = now;
+    result = now.map(one -> one.at(levels));
   }
 
   /** The pair's translation was edited; the turn tells which pair was edited last. */
@@ -121,7 +137,7 @@ final class PairState {
   }
 
   /** The findings that are shown: the same object for as long as nothing about them changes. */
-  Object shown() {
+  HeldBack.Shown shown() {
     return shown;
   }
 

@@ -51,6 +51,7 @@ final class PairStates {
   void take(Library library, Workers workers) {
     int free = workers.aside() - (int) states.values().stream().filter(PairState::running).count();
     for (PairState pair : states.values()) {
+      pair.at(library.levels(pair.files()));
       boolean open = library.shows(pair.files());
       if (open || free > 0 || library.knows(pair.files())) {
         Optional<Task> task = take(library, pair, open || free > 0);
@@ -122,6 +123,11 @@ final class PairStates {
   /** The pairs. */
   Collection<FilePair> pairs() {
     return states.keySet();
+  }
+
+  /** What is kept of each. */
+  Collection<PairState> all() {
+    return states.values();
   }
 
   /** The files of all pairs, sorted. */

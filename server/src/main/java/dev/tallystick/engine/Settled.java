@@ -15,6 +15,11 @@ record Settled(FilePair files, PairResult result, long editedAt) {
     return Counterpart.at(files, result, files.side(file), offset);
   }
 
+  /** The sentences of a file, counted. */
+  Tally tally(Path file) {
+    return Tally.of(files, result, files.side(file));
+  }
+
   /** One of the two texts, read. */
   Reading reading(Path file) {
     return result.reading(files.side(file));

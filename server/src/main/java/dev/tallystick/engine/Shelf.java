@@ -58,6 +58,11 @@ final class Shelf {
     return open.containsKey(file) || !onDisk(file) ? List.of() : disk.problems(file);
   }
 
+  /** Why a file that the editor does not show cannot be read, if it cannot. */
+  Optional<String> trouble(Path file) {
+    return open.containsKey(file) ? Optional.empty() : disk.trouble(file);
+  }
+
   /** The sheet of the current text; the same one as long as the text stays the same. */
   Optional<Sheet> sheet(Path file, String language) {
     Sheet sheet = sheets.get(file);

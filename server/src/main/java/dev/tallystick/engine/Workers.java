@@ -5,6 +5,7 @@ import dev.tallystick.run.Cancellation;
 import dev.tallystick.run.Fault;
 import dev.tallystick.run.Threads;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.ExecutorService;
@@ -87,14 +88,15 @@ final class Workers {
   }
 
   private Event listed(Folder folder) {
+    List<String> troubles = new ArrayList<>();
     try {
-      List<Path> files = machine.disk().files(folder);
-      return new Event.Listed(folder.path(), files, Optional.empty());
+      List<Path> files = machine.disk().files(folder, troubles::add);
+      return new Event.Listed(folder.path(), files, troubles);
     } catch (Unreadable e) {
-      return new Event.Listed(folder.path(), List.of(), Optional.of(e.getMessage()));
+      return new Event.Listed(folder.path(), List.of(), List.of(e.getMessage()));
     } catch (RuntimeException | Error e) {
       String fault = Announcements.fault(folder, Fault.where(e));
-      return new Event.Listed(folder.path(), List.of(), Optional.of(fault));
+      return new Event.Listed(folder.path(), List.of(), List.of(fault));
     }
   }
 }

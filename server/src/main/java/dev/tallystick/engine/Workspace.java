@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.check.Levels;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.pairing.Pairs;
 import dev.tallystick.pairing.Rules;
@@ -112,6 +113,27 @@ final class Workspace {
     pairs = Optional.empty();
     return Optional.ofNullable(named.getOrDefault(folder, own.get(folder)))
         .filter(root -> root.listed(files));
+  }
+
+  /** Of what could not be looked into in a folder, what was not told before. */
+  List<String> news(Path folder, List<String> troubles) {
+    Root root = named.getOrDefault(folder, own.get(folder));
+    return root == null ? List.of() : root.news(troubles);
+  }
+
+  /** Reads the {@code tallystick.json} of each folder, where its text is new. */
+  void readProjects(Shelf shelf) {
+    for (Root root : roots()) {
+      if (root.project().take(shelf)) {
+        root.forget();
+        pairs = Optional.empty();
+      }
+    }
+  }
+
+  /** How loudly findings in a pair are said. */
+  Levels levels(FilePair pair) {
+    return root(pair.source()).map(root -> root.project().project().levels()).orElse(Levels.USUAL);
   }
 
   /** All folders that count. */

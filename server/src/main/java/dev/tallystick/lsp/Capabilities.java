@@ -2,6 +2,8 @@ package dev.tallystick.lsp;
 
 import dev.tallystick.prose.Format;
 import java.util.List;
+import org.eclipse.lsp4j.CodeLensOptions;
+import org.eclipse.lsp4j.DiagnosticRegistrationOptions;
 import org.eclipse.lsp4j.ExecuteCommandOptions;
 import org.eclipse.lsp4j.FileOperationFilter;
 import org.eclipse.lsp4j.FileOperationOptions;
@@ -31,6 +33,11 @@ final class Capabilities {
     can.setHoverProvider(true);
     can.setSelectionRangeProvider(true);
     can.setDocumentHighlightProvider(true);
+    can.setCodeLensProvider(new CodeLensOptions(false));
+    can.setInlayHintProvider(true);
+    if (client.pulls()) {
+      can.setDiagnosticProvider(findings());
+    }
     can.setExecuteCommandProvider(new ExecuteCommandOptions(Commands.NAMES));
     WorkspaceServerCapabilities workspace = new WorkspaceServerCapabilities(folders());
     workspace.setFileOperations(fileOperations());
@@ -58,6 +65,13 @@ final class Capabilities {
             List.of(
                 new FileOperationFilter(files, "file"), new FileOperationFilter(folders, "file"))));
     return operations;
+  }
+
+  /** An edit of one file changes the findings of the other. */
+  private static DiagnosticRegistrationOptions findings() {
+    DiagnosticRegistrationOptions findings = new DiagnosticRegistrationOptions(true, true);
+    findings.setIdentifier("tallystick");
+    return findings;
   }
 
   private static WorkspaceFoldersOptions folders() {

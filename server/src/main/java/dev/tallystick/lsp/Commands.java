@@ -6,7 +6,6 @@ import com.google.gson.JsonObject;
 import com.google.gson.JsonPrimitive;
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Loop;
-import dev.tallystick.engine.Question;
 import dev.tallystick.engine.Summary;
 import dev.tallystick.pairing.Language;
 import java.nio.file.Path;
@@ -119,8 +118,7 @@ final class Commands {
   /** From now on all pairs of the folder are watched; the answer comes when all are examined. */
   private CompletableFuture<Object> checkFolder(Optional<Path> folder) {
     loop.post(new Event.FolderWanted(folder));
-    return requests.ask(
-        folder.orElse(Path.of("")), Question.Reach.FOLDER, known -> told(known.summary()));
+    return requests.askFolder(folder, known -> told(known.summary()));
   }
 
   private Object told(Summary summary) {

@@ -15,17 +15,23 @@ import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import org.eclipse.lsp4j.CodeLens;
+import org.eclipse.lsp4j.CodeLensParams;
 import org.eclipse.lsp4j.DefinitionParams;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
 import org.eclipse.lsp4j.DidCloseTextDocumentParams;
 import org.eclipse.lsp4j.DidOpenTextDocumentParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
+import org.eclipse.lsp4j.DocumentDiagnosticParams;
+import org.eclipse.lsp4j.DocumentDiagnosticReport;
 import org.eclipse.lsp4j.DocumentHighlight;
 import org.eclipse.lsp4j.DocumentHighlightParams;
 import org.eclipse.lsp4j.DocumentSymbol;
 import org.eclipse.lsp4j.DocumentSymbolParams;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.HoverParams;
+import org.eclipse.lsp4j.InlayHint;
+import org.eclipse.lsp4j.InlayHintParams;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
@@ -50,17 +56,21 @@ final class Documents implements TextDocumentService {
   private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
 
   private final Requests requests;
+  private final Board board;
   private Loop loop;
   private Conversion conversion;
+  private Views views;
 
-  Documents(Requests requests) {
+  Documents(Requests requests, Board board) {
     this.requests = requests;
+    this.board = board;
   }
 
   /** The session has begun. */
-  void begin(Loop with, Conversion by) {
+  void begin(Loop with, Conversion by, Views in) {
     loop = with;
     conversion = by;
+    views = in;
   }
 
   @Override
@@ -171,6 +181,40 @@ final class Documents implements TextDocumentService {
         Optional.of(params),
         Question.Reach.PAIRS,
         known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  @Override
+  public CompletableFuture<List<? extends CodeLens>> codeLens(CodeLensParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.of(params),
+        Question.Reach.PAIRS,
+        known -> views.lenses().wanted() ? Lenses.of(known) : List.of());
+  }
+
+  @Override
+  public CompletableFuture<List<InlayHint>> inlayHint(InlayHintParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getRange()),
+        Question.Reach.PAIRS,
+        known ->
+            views.hints().wanted()
+                ? new Hints(conversion.client().encoding()).within(known, params.getRange())
+                : List.of());
+  }
+
+  @Override
+  public CompletableFuture<DocumentDiagnosticReport> diagnostic(DocumentDiagnosticParams params) {
+    TextDocumentIdentifier document = params.getTextDocument();
+    boolean related = conversion != null && conversion.client().pullsRelated();
+    return requests.askFindings(
+        document,
+        known ->
+            board.report(
+                document.getUri(),
+                params.getPreviousResultId(),
+                related ? known.others() : List.of()));
   }
 
   private <T> CompletableFuture<T> ask(

@@ -2,25 +2,60 @@ package dev.tallystick.lsp;
 
 import dev.tallystick.engine.Audience;
 import dev.tallystick.engine.Publication;
+import dev.tallystick.engine.Standing;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
+import org.eclipse.lsp4j.PublishDiagnosticsParams;
 import org.eclipse.lsp4j.services.LanguageClient;
 
 /** The client, as the engine sees it. */
-record Editor(LanguageClient remote, Conversion conversion, Report report) implements Audience {
-  /** Shows how far a look at many pairs has come. */
-  interface Report {
-    void pass(int done, int total);
+final class Editor implements Audience {
+  private final LanguageClient remote;
+  private final Conversion conversion;
+  private final Board board;
+  private final Views views;
+  private final PassReport pass;
+  private final Refresh findings;
+
+  Editor(LanguageClient remote, Conversion conversion, Board board, Views views, PassReport pass) {
+    this.remote = remote;
+    this.conversion = conversion;
+    this.board = board;
+    this.views = views;
+    this.pass = pass;
+    Client client = conversion.client();
+    this.findings =
+        new Refresh(
+            () -> client.pulls() && client.refreshesFindings() && board.takeNews(),
+            remote::refreshDiagnostics);
+  }
+
+  /** Some clients are sent findings, others ask for them: no client gets both. */
+  @Override
+  public void publish(Publication publication) {
+    PublishDiagnosticsParams params = conversion.diagnostics(publication);
+    board.post(params);
+    if (!conversion.client().pulls()) {
+      remote.publishDiagnostics(params);
+    }
+  }
+
+  @Override
+  public void stands(Standing standing) {
+    views.stands(standing);
   }
 
   @Override
   public void pass(int done, int total) {
-    report.pass(done, total);
+    if (conversion.client().showsProgress()) {
+      pass.pass(done, total);
+    }
   }
 
   @Override
-  public void publish(Publication publication) {
-    remote.publishDiagnostics(conversion.diagnostics(publication));
+  public void turned() {
+    findings.check();
+    views.check();
   }
 
   @Override

@@ -28,8 +28,10 @@ final class Server implements LanguageServer {
   private final String version;
   private final CompletableFuture<Integer> ended;
   private final Requests requests = new Requests();
-  private final Documents documents = new Documents(requests);
-  private final Surroundings surroundings = new Surroundings(new Commands(requests));
+  private final Board board = new Board();
+  private final Documents documents = new Documents(requests, board);
+  private final Surroundings surroundings =
+      new Surroundings(requests, board, new Commands(requests));
   private LanguageClient remote;
   private Loop loop;
   private Client client;
@@ -53,13 +55,13 @@ final class Server implements LanguageServer {
     }
     client = Client.of(params);
     Conversion conversion = new Conversion(client);
+    Views views = new Views(client, remote);
     report = new PassReport(remote);
-    Editor editor =
-        new Editor(remote, conversion, client.showsProgress() ? report::pass : (done, total) -> {});
+    Editor editor = new Editor(remote, conversion, board, views, report);
     loop = new Loop(machine.watchedByEditor(client.watches()), editor);
     requests.begin(loop);
-    documents.begin(loop, conversion);
-    surroundings.begin(loop, client, remote, machine.alarm());
+    documents.begin(loop, conversion, views);
+    surroundings.begin(loop, client, views, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
     loop.start();
     InitializeResult result = new InitializeResult(Capabilities.of(client));

@@ -5,6 +5,7 @@ import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Loop;
 import dev.tallystick.engine.Renaming;
 import dev.tallystick.engine.Settings;
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
@@ -30,6 +31,8 @@ import org.eclipse.lsp4j.MessageType;
 import org.eclipse.lsp4j.Registration;
 import org.eclipse.lsp4j.RegistrationParams;
 import org.eclipse.lsp4j.RenameFilesParams;
+import org.eclipse.lsp4j.WorkspaceDiagnosticParams;
+import org.eclipse.lsp4j.WorkspaceDiagnosticReport;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
 import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.WorkspaceService;
@@ -39,21 +42,27 @@ final class Surroundings implements WorkspaceService {
   private static final String SECTION = "tallystick";
 
   private final Commands commands;
+  private final Requests requests;
+  private final Board board;
   private Loop loop;
   private Client client;
+  private Views views;
   private LanguageClient remote;
   private Alarm alarm;
   private List<String> told = List.of();
   private boolean taken;
 
-  Surroundings(Commands commands) {
+  Surroundings(Requests requests, Board board, Commands commands) {
+    this.requests = requests;
+    this.board = board;
     this.commands = commands;
   }
 
   /** The session has begun, but nothing may be sent yet. */
-  void begin(Loop with, Client of, LanguageClient at, Alarm by) {
+  void begin(Loop with, Client of, Views in, LanguageClient at, Alarm by) {
     loop = with;
     client = of;
+    views = in;
     remote = at;
     alarm = by;
     commands.begin(with, at);
@@ -88,9 +97,12 @@ final class Surroundings implements WorkspaceService {
   }
 
   private static DidChangeWatchedFilesRegistrationOptions watchers() {
-    FileSystemWatcher watcher =
-        new FileSystemWatcher(Either.forLeft("**/*.{" + Format.everyExtension() + "}"));
-    return new DidChangeWatchedFilesRegistrationOptions(List.of(watcher));
+    return new DidChangeWatchedFilesRegistrationOptions(
+        List.of(watcher("*.{" + Format.everyExtension() + "}"), watcher(ProjectFile.NAME)));
+  }
+
+  private static FileSystemWatcher watcher(String name) {
+    return new FileSystemWatcher(Either.forLeft("**/" + name));
   }
 
   @Override
@@ -123,12 +135,20 @@ final class Surroundings implements WorkspaceService {
   /** Called by the thread that reads messages, or by the alarm. */
   private synchronized void takeSettings(Object section) {
     taken = true;
-    SettingsReader.Read read = SettingsReader.read(section);
+    SettingsReader.Read read = SettingsReader.read(section(client.options()), section);
     if (!read.problems().equals(told)) {
       told = read.problems();
       told.forEach(problem -> remote.showMessage(new MessageParams(MessageType.Warning, problem)));
     }
     loop.post(new Event.SettingsChanged(read.settings()));
+    views.lenses().want(read.lens());
+    views.hints().want(read.inlay());
+  }
+
+  /** Answered at once, with what is known: whoever asks here asks again and again. */
+  @Override
+  public CompletableFuture<WorkspaceDiagnosticReport> diagnostic(WorkspaceDiagnosticParams params) {
+    return requests.ask(() -> board.report(params.getPreviousResultIds()));
   }
 
   @Override

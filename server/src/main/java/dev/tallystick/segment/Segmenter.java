@@ -11,9 +11,13 @@ import java.util.List;
 
 /**
  * Parts blocks into sentences by UAX #29, as ICU tailors it for the language; then mends borders
- * that are none: behind an abbreviation, and around fragments without a word of their own.
+ * that are none: behind an abbreviation or a Burmese comma, and around fragments without a word of
+ * their own.
  */
 public final class Segmenter {
+  /** A full stop to Unicode (Sentence_Terminal), but Burmese, Mon and Shan use it as a comma. */
+  private static final char LITTLE_SECTION = '\u104A';
+
   private final ULocale locale;
   private final Abbreviations abbreviations;
 
@@ -64,7 +68,7 @@ public final class Segmenter {
     sentences.setText(prose);
     int start = 0;
     for (int end = sentences.next(); end != BreakIterator.DONE; end = sentences.next()) {
-      if (end < prose.length() && abbreviations.endAt(prose, end)) {
+      if (end < prose.length() && goesOn(prose, end)) {
         continue;
       }
       Span trimmed = Blank.trim(prose, start, end);
@@ -75,6 +79,12 @@ public final class Segmenter {
     }
     boolean wordless = spans.size() == 1 && Fragments.letters(spans.get(0).of(prose), 1) == 0;
     return wordless ? List.of() : spans;
+  }
+
+  /** Whether the sentence goes on behind a border that UAX #29 sees. */
+  private boolean goesOn(String prose, int end) {
+    int to = Blank.trim(prose, 0, end).end();
+    return to > 0 && prose.charAt(to - 1) == LITTLE_SECTION || abbreviations.endAt(prose, end);
   }
 
   private static void addOrJoin(List<Span> spans, String prose, Span next) {

@@ -105,6 +105,7 @@ class DemoTest {
             "fr/boat-and-stores.md",
             "de/fog-signal.md",
             "fr/fog-signal.md",
+            "he/fog-signal.md",
             JAPANESE,
             "de/lamp.md",
             "fr/lamp.md"),

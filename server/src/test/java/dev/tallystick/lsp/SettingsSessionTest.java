@@ -22,7 +22,7 @@ class SettingsSessionTest {
     params.getCapabilities().getWorkspace().setConfiguration(true);
   }
 
-  private static void push(Talk talk, Object settings) {
+  static void push(Talk talk, Object settings) {
     talk.server
         .getWorkspaceService()
         .didChangeConfiguration(new DidChangeConfigurationParams(settings));
@@ -86,6 +86,51 @@ class SettingsSessionTest {
       push(talk, Map.of("sourceLanguage", "xx-nowhere"));
       assertEquals(2, talk.said.size());
       assertTrue(talk.said.get(1).contains("sourceLanguage"));
+    }
+  }
+
+  @Test
+  void whatIsWrongIsSaidInWordsThatHelp() {
+    try (Talk talk = Talk.in(folder)) {
+      push(talk, Map.of("lens", "yes", "inlay", 1, "restMillis", 200));
+      assertEquals(
+          List.of(
+              "The setting tallystick.lens must be true or false. Until then it counts as false.",
+              "The setting tallystick.inlay must be true or false. Until then it counts as false."),
+          talk.said);
+      push(talk, List.of("lens"));
+      assertEquals(3, talk.said.size());
+      assertTrue(talk.said.get(2).contains("must be an object"), talk.said.get(2));
+    }
+  }
+
+  @Test
+  void settingsThatComeAtTheStartCountUntilOthersCome() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    for (boolean pulled : List.of(false, true)) {
+      try (Talk talk =
+          Talk.in(
+              folder,
+              params -> {
+                params.setInitializationOptions(Map.of("restMillis", 200, "progress", "often"));
+                params.getCapabilities().getWorkspace().setConfiguration(pulled);
+              })) {
+        Buffer german = talk.open(work.de(), Ferry.DE);
+        german.replace(Ferry.FOG_DE + "\n", "");
+        talk.pass(200);
+        assertEquals(List.of("omission"), talk.codes(work.en()));
+        assertEquals(1, talk.said.size());
+        assertTrue(talk.said.get(0).contains("tallystick.progress"), talk.said.get(0));
+
+        talk.settings = Map.of("restMillis", 900);
+        push(talk, pulled ? Map.of() : talk.settings);
+        german.replace(Ferry.line(Ferry.DE, "Die Winde zieht") + "\n", "");
+        talk.pass(200);
+        assertEquals(List.of("omission"), talk.codes(work.en()));
+        talk.pass(700);
+        assertEquals(List.of("omission", "omission"), talk.codes(work.en()));
+      }
     }
   }
 

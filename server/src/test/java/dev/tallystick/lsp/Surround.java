@@ -78,6 +78,12 @@ final class Surround {
       await(listing);
       return disk.files(folder);
     }
+
+    @Override
+    public List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
+      await(listing);
+      return disk.files(folder, unread);
+    }
   }
 
   /** The watch tells something. */

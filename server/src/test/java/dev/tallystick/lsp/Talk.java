@@ -66,6 +66,12 @@ final class Talk implements LanguageClient, AutoCloseable {
   /** The answer to the question what is set; empty for one that comes at once. */
   volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
 
+  /** What the client was told to ask for again. */
+  final List<String> refreshed = new CopyOnWriteArrayList<>();
+
+  /** The answer to that. */
+  volatile CompletableFuture<Void> refreshing = CompletableFuture.completedFuture(null);
+
   InitializeResult initialized;
   private final RemoteEndpoint endpoint;
   private final Pipe toServer = new Pipe();
@@ -81,6 +87,7 @@ final class Talk implements LanguageClient, AutoCloseable {
             .setInput(toClient.in)
             .setOutput(toServer.out)
             .setExecutorService(threads)
+            .configureGson(RelatedReports::teach)
             .wrapMessages(
                 consumer ->
                     message -> {
@@ -268,6 +275,24 @@ final class Talk implements LanguageClient, AutoCloseable {
     List<Object> values = new ArrayList<>();
     params.getItems().forEach(item -> values.add(settings));
     return answer.orElseGet(() -> CompletableFuture.completedFuture(values));
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshDiagnostics() {
+    refreshed.add("findings");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshCodeLenses() {
+    refreshed.add("lenses");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshInlayHints() {
+    refreshed.add("hints");
+    return refreshing;
   }
 
   @Override

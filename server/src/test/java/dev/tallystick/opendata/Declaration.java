@@ -3,6 +3,7 @@ package dev.tallystick.opendata;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dev.tallystick.align.Unit;
 import dev.tallystick.engine.Reading;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
@@ -53,6 +54,14 @@ record Declaration(Reading reading, SortedMap<Integer, Integer> articles) {
     Text plain = new Text(text.toString());
     Reading reading = Reading.of(plain, Format.PLAIN, language, Cancellation.NONE);
     return new Declaration(reading, firstAt(starts, reading.segments()));
+  }
+
+  /** The sentences of one article, as the aligner sees them. */
+  List<Unit> article(int number) {
+    List<Unit> units = reading.units();
+    int from = articles.get(number);
+    int to = articles.tailMap(number + 1).values().stream().findFirst().orElse(units.size());
+    return units.subList(from, to);
   }
 
   /** Offsets to the sentences that begin there. */

@@ -3,107 +3,137 @@ package dev.tallystick.opendata;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
-import dev.tallystick.align.Aligner;
-import dev.tallystick.align.Match;
-import dev.tallystick.run.Cancellation;
-import java.util.ArrayList;
+import com.ibm.icu.lang.UCharacter;
+import com.ibm.icu.lang.UScript;
+import com.ibm.icu.util.ULocale;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestInstance;
 
 /**
- * English against nine languages in six scripts, all by official translators. Where an article
- * begins is known; the aligner is not told, and must begin a match there on both sides.
+ * The Universal Declaration of Human Rights in English against many languages and scripts. Where an
+ * article begins is known; the aligner is not told, and must begin a match there on both sides.
+ *
+ * <p>With 70 sentences there is little to learn from. What goes wrong is the beginning of an
+ * article of one short sentence beside one that the translation splits, and with articles left out
+ * the links beside the gap.
  */
+@TestInstance(TestInstance.Lifecycle.PER_CLASS)
 class DeclarationIT {
-  private static final double LEAST_MEAN = 0.97;
+  private static final Set<Integer> GAPS = Set.of(4, 12, 18, 27);
+
+  private final Declaration english = Declaration.of("eng", "en", Set.of());
 
   /**
-   * A floor below what was measured, 0.92: between scripts hardly more than lengths is to go by.
+   * Measured: 0.994 over all languages; 0.933 in the script that comes off worst, Malayalam. One
+   * article of 30 that begins wrongly costs 0.03. The floors let a script that only one language
+   * here writes lose one more, and one language in two lose one.
    */
-  private static final double LEAST_MEAN_WITH_GAPS = 0.9;
-
-  /** File of the package and language. */
-  private static final List<List<String>> OTHERS =
-      List.of(
-          List.of("deu_1996", "de"),
-          List.of("fra", "fr"),
-          List.of("spa", "es"),
-          List.of("hun", "hu"),
-          List.of("ell_monotonic", "el"),
-          List.of("rus", "ru"),
-          List.of("heb", "he"),
-          List.of("hin", "hi"),
-          List.of("jpn", "ja"));
-
   @Test
   void articlesAreFoundInOtherLanguagesAndScripts() {
-    assertTrue(meanF1(Set.of()) >= LEAST_MEAN);
+    Scores scores = scores(Set.of());
+    scores.print("all articles");
+    scores.assertAtLeast(0.98, 0.9);
   }
 
-  /** A link with the beginning of an article that the translation lacks counts as wrong. */
+  /**
+   * A link with the beginning of an article that the translation lacks counts as wrong. Measured:
+   * 0.869 over all, 0.586 in the script that comes off worst, that of the Maldives: 62 sentences
+   * with hardly a word in common, a third of them split or merged, leave much to chance.
+   */
   @Test
   void articlesThatTheTranslationLacksMisleadFewOthers() {
-    assertTrue(meanF1(Set.of(4, 12, 18, 27)) >= LEAST_MEAN_WITH_GAPS);
+    Scores scores = scores(GAPS);
+    scores.print("4 articles left out");
+    scores.assertAtLeast(0.84, 0.5);
   }
 
   /** The measure itself: right throughout, and wrong throughout. */
   @Test
   void aTextAgreesWithItselfAndNotWithBordersMoved() {
-    Declaration english = Declaration.of("eng", "en", Set.of());
     SortedMap<Integer, Integer> moved = new TreeMap<>(english.articles());
     moved.replaceAll((number, first) -> first + 1);
-    assertEquals(1, f1(english, english));
-    assertEquals(0, f1(english, new Declaration(english.reading(), moved)));
+    assertEquals(1, ArticleBorders.f1(english, english));
+    assertEquals(0, ArticleBorders.f1(english, new Declaration(english.reading(), moved)));
   }
 
-  private static double meanF1(Set<Integer> leftOut) {
-    Declaration english = Declaration.of("eng", "en", Set.of());
-    double sum = 0;
-    List<String> told = new ArrayList<>();
-    for (List<String> other : OTHERS) {
-      double f1 = f1(english, Declaration.of(other.get(0), other.get(1), leftOut));
-      told.add(String.format(Locale.ROOT, "%s %.3f", other.get(1), f1));
-      sum += f1;
+  private Scores scores(Set<Integer> leftOut) {
+    Scores scores = new Scores(new TreeMap<>());
+    for (Translation translation : Translation.ALL) {
+      double f1 = ArticleBorders.f1(english, translation.without(leftOut));
+      scores
+          .byScript()
+          .computeIfAbsent(translation.script(), script -> new TreeMap<>())
+          .put(translation.language(), f1);
     }
-    double mean = sum / OTHERS.size();
-    System.out.printf(
-        Locale.ROOT,
-        "F1 of the borders of articles, %d left out: %s, mean %.3f%n",
-        leftOut.size(),
-        String.join(", ", told),
-        mean);
-    return mean;
+    return scores;
+  }
+
+  @Test
+  void thereAreManyLanguagesInManyScripts() {
+    List<Translation> all = Translation.ALL;
+    assertTrue(all.stream().map(Translation::language).distinct().count() >= 60);
+    assertTrue(all.stream().map(Translation::script).distinct().count() >= 15);
   }
 
   /**
-   * The harmonic mean of precision (of the matches that begin with an article on either side, those
-   * that begin with the same one on both) and recall (of the articles that both have, those where a
-   * match begins so).
+   * That the tags are right: nearly all letters are of a script that CLDR knows the language by.
    */
-  private static double f1(Declaration source, Declaration target) {
-    SortedMap<Integer, Integer> gold = new TreeMap<>();
-    target.articles().forEach((number, at) -> gold.put(source.articles().get(number), at));
-    int right = 0;
-    int found = 0;
-    for (Match match : matches(source, target)) {
-      boolean onEither =
-          source.articles().containsValue(match.sourceFrom())
-              || target.articles().containsValue(match.targetFrom());
-      if (match.twoSided() && onEither) {
-        found++;
-        right += gold.getOrDefault(match.sourceFrom(), -1) == match.targetFrom() ? 1 : 0;
-      }
+  @Test
+  void everyTextIsWrittenInTheScriptOfItsTag() {
+    for (Translation translation : Translation.ALL) {
+      int[] scripts = UScript.getCode(ULocale.forLanguageTag(translation.language()));
+      String text = translation.without(Set.of()).reading().text().string();
+      int[] letters = text.codePoints().filter(UCharacter::isLetter).toArray();
+      long own =
+          Arrays.stream(letters)
+              .filter(c -> Arrays.stream(scripts).anyMatch(s -> s == UScript.getScript(c)))
+              .count();
+      assertTrue(own > 0.95 * letters.length, () -> translation + ": " + own);
     }
-    return 2.0 * right / (found + gold.size());
   }
 
-  private static List<Match> matches(Declaration source, Declaration target) {
-    return Aligner.ADAPTIVE
-        .align(source.reading().units(), target.reading().units(), Cancellation.NONE)
-        .matches();
+  /**
+   * F1 by script and language.
+   *
+   * @param byScript ISO 15924 code to language tag to F1
+   */
+  private record Scores(SortedMap<String, SortedMap<String, Double>> byScript) {
+    void print(String what) {
+      System.out.printf(Locale.ROOT, "F1 of the borders of articles, %s: %.3f%n", what, mean());
+      byScript.forEach(
+          (script, scores) ->
+              System.out.printf(Locale.ROOT, "  %s %.3f %s%n", script, mean(scores), told(scores)));
+    }
+
+    private static String told(SortedMap<String, Double> scores) {
+      StringBuilder told = new StringBuilder();
+      scores.forEach((tag, f1) -> told.append(String.format(Locale.ROOT, " %s %.2f", tag, f1)));
+      return told.toString();
+    }
+
+    void assertAtLeast(double all, double eachScript) {
+      assertTrue(mean() >= all, () -> "all: " + mean());
+      byScript.forEach(
+          (script, scores) ->
+              assertTrue(mean(scores) >= eachScript, () -> script + ": " + told(scores)));
+    }
+
+    private double mean() {
+      return byScript.values().stream()
+          .flatMap(scores -> scores.values().stream())
+          .mapToDouble(Double::doubleValue)
+          .average()
+          .orElseThrow();
+    }
+
+    private static double mean(SortedMap<String, Double> scores) {
+      return scores.values().stream().mapToDouble(Double::doubleValue).average().orElseThrow();
+    }
   }
 }

@@ -8,11 +8,11 @@ import java.util.List;
 import java.util.Random;
 
 /**
- * The lengths of the sentences of a text and of a made-up translation.
+ * The lengths of the sentences of a text and of a translation.
  *
  * @param source lengths in characters
  * @param target lengths in characters
- * @param changes how many merges, splits and drops made the one the other
+ * @param changes how many merges, splits and drops made the one the other; empty if unknown
  */
 record Lengths(int[] source, int[] target, int[] changes) {
   /** Merges, splits, drops. */
@@ -23,7 +23,13 @@ record Lengths(int[] source, int[] target, int[] changes) {
   private static final int DROP = 2;
   private static final int NONE_OF = 8;
 
-  /** A pair with 16 to 34 source sentences; the longest sentence comes to fewer than 234. */
+  Lengths(int[] source, int[] target) {
+    this(source, target, new int[0]);
+  }
+
+  /**
+   * A made-up pair with 16 to 34 source sentences; the longest sentence comes to fewer than 234.
+   */
   static Lengths drawn(long seed) {
     Random random = new Random(seed);
     int[] source = new int[16 + random.nextInt(19)];
