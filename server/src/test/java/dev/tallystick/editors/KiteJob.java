@@ -64,8 +64,7 @@ record KiteJob(Path folder, Map<String, Map<String, String>> sentences) {
   }
 
   private static Map<String, String> languages(List<String> lines) {
-    return lines.stream()
-        .skip(1)
+    return lines.subList(1, lines.size()).stream()
         .filter(line -> !line.startsWith("#"))
         .collect(Collectors.toMap(line -> line.substring(0, 2), line -> line.substring(3)));
   }
