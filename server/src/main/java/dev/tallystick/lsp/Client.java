@@ -1,5 +1,7 @@
 package dev.tallystick.lsp;
 
+import com.google.gson.JsonObject;
+import com.google.gson.JsonPrimitive;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -119,6 +121,14 @@ final class Client {
     return yes(
         workspace(WorkspaceClientCapabilities::getDidChangeWatchedFiles)
             .map(DidChangeWatchedFilesCapabilities::getDynamicRegistration));
+  }
+
+  /** Whether it wants to be told how far each pair has come. */
+  boolean wantsProgress() {
+    return options() instanceof JsonObject options
+        && options.get("progress") instanceof JsonPrimitive said
+        && said.isBoolean()
+        && said.getAsBoolean();
   }
 
   /** What it said about us at the start: settings, as far as it sends them there. */

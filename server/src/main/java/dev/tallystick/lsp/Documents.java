@@ -151,6 +151,16 @@ final class Documents implements TextDocumentService {
     return ask(params, answer -> conversion.highlights(answer));
   }
 
+  /** What stands for a sentence, in each pair. */
+  CompletableFuture<List<Placed>> counterpart(TextDocumentPositionParams params) {
+    return ask(
+        params,
+        answer ->
+            answer.all().stream()
+                .map(at -> Placed.of(at, conversion.client().encoding()))
+                .toList());
+  }
+
   @Override
   public CompletableFuture<List<? extends Location>> references(ReferenceParams params) {
     boolean itself = params.getContext() != null && params.getContext().isIncludeDeclaration();

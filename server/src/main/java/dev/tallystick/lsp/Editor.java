@@ -6,18 +6,17 @@ import dev.tallystick.engine.Standing;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
 import org.eclipse.lsp4j.PublishDiagnosticsParams;
-import org.eclipse.lsp4j.services.LanguageClient;
 
 /** The client, as the engine sees it. */
 final class Editor implements Audience {
-  private final LanguageClient remote;
+  private final Remote remote;
   private final Conversion conversion;
   private final Board board;
   private final Views views;
   private final PassReport pass;
   private final Refresh findings;
 
-  Editor(LanguageClient remote, Conversion conversion, Board board, Views views, PassReport pass) {
+  Editor(Remote remote, Conversion conversion, Board board, Views views, PassReport pass) {
     this.remote = remote;
     this.conversion = conversion;
     this.board = board;
@@ -43,6 +42,9 @@ final class Editor implements Audience {
   @Override
   public void stands(Standing standing) {
     views.stands(standing);
+    if (conversion.client().wantsProgress()) {
+      remote.stands(PairProgress.of(standing));
+    }
   }
 
   @Override

@@ -10,11 +10,11 @@ import org.eclipse.lsp4j.InitializeResult;
 import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.ServerInfo;
 import org.eclipse.lsp4j.SetTraceParams;
+import org.eclipse.lsp4j.TextDocumentPositionParams;
 import org.eclipse.lsp4j.WorkDoneProgressCancelParams;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.LanguageServer;
 import org.eclipse.lsp4j.services.TextDocumentService;
 import org.eclipse.lsp4j.services.WorkspaceService;
@@ -23,7 +23,7 @@ import org.eclipse.lsp4j.services.WorkspaceService;
  * The life of a session. Called by the thread that reads messages, which does nothing here but put
  * events into the loop's queue.
  */
-final class Server implements LanguageServer {
+final class Server implements LanguageServer, OwnRequests {
   private final Machine machine;
   private final String version;
   private final CompletableFuture<Integer> ended;
@@ -32,7 +32,7 @@ final class Server implements LanguageServer {
   private final Documents documents = new Documents(requests, board);
   private final Surroundings surroundings =
       new Surroundings(requests, board, new Commands(requests));
-  private LanguageClient remote;
+  private Remote remote;
   private Loop loop;
   private Client client;
   private PassReport report;
@@ -44,7 +44,7 @@ final class Server implements LanguageServer {
     this.ended = ended;
   }
 
-  void connect(LanguageClient to) {
+  void connect(Remote to) {
     remote = to;
   }
 
@@ -105,6 +105,11 @@ final class Server implements LanguageServer {
   @Override
   public void setTrace(SetTraceParams params) {
     // Nothing is traced.
+  }
+
+  @Override
+  public CompletableFuture<List<Placed>> counterpart(TextDocumentPositionParams params) {
+    return documents.counterpart(params);
   }
 
   @Override

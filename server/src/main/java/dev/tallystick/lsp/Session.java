@@ -21,7 +21,6 @@ import org.eclipse.lsp4j.jsonrpc.json.StreamMessageConsumer;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
 import org.eclipse.lsp4j.launch.LSPLauncher;
-import org.eclipse.lsp4j.services.LanguageClient;
 
 /** A client's connection, from the first message to the last. */
 public final class Session {
@@ -51,10 +50,10 @@ public final class Session {
       InputStream in, OutputStream out, Machine machine, String version) {
     ExecutorService readers = Executors.newCachedThreadPool(Threads.daemons("tallystick-reader"));
     Server server = new Server(machine, version, ended);
-    Launcher<LanguageClient> launcher =
-        new LSPLauncher.Builder<LanguageClient>()
+    Launcher<Remote> launcher =
+        new LSPLauncher.Builder<Remote>()
             .setLocalService(server)
-            .setRemoteInterface(LanguageClient.class)
+            .setRemoteInterface(Remote.class)
             .setInput(in)
             .setOutput(out)
             .setExecutorService(readers)

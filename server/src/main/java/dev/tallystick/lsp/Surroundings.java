@@ -34,7 +34,6 @@ import org.eclipse.lsp4j.RenameFilesParams;
 import org.eclipse.lsp4j.WorkspaceDiagnosticParams;
 import org.eclipse.lsp4j.WorkspaceDiagnosticReport;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.WorkspaceService;
 
 /** What a client tells about folders, files and settings. */
@@ -47,7 +46,7 @@ final class Surroundings implements WorkspaceService {
   private Loop loop;
   private Client client;
   private Views views;
-  private LanguageClient remote;
+  private Remote remote;
   private Alarm alarm;
   private List<String> told = List.of();
   private boolean taken;
@@ -59,7 +58,7 @@ final class Surroundings implements WorkspaceService {
   }
 
   /** The session has begun, but nothing may be sent yet. */
-  void begin(Loop with, Client of, Views in, LanguageClient at, Alarm by) {
+  void begin(Loop with, Client of, Views in, Remote at, Alarm by) {
     loop = with;
     client = of;
     views = in;

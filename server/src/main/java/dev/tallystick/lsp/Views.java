@@ -6,7 +6,6 @@ import dev.tallystick.engine.Standing;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
-import org.eclipse.lsp4j.services.LanguageClient;
 
 /** The ways to show in a text how far it has come. */
 final class Views {
@@ -14,7 +13,7 @@ final class Views {
   private final View hints;
   private final Map<FilePair, List<Count>> counts = new TreeMap<>();
 
-  Views(Client client, LanguageClient remote) {
+  Views(Client client, Remote remote) {
     this.lenses = new View(client.refreshesLenses(), remote::refreshCodeLenses);
     this.hints = new View(client.refreshesHints(), remote::refreshInlayHints);
   }

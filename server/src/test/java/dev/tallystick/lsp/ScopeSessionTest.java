@@ -114,16 +114,16 @@ class ScopeSessionTest {
     try (Talk talk = Talk.in(folder, ScopeSessionTest::showsProgress)) {
       talk.command("tallystick.checkFolder");
       talk.settle();
-      assertInstanceOf(WorkDoneProgressCreateParams.class, talk.progress.get(0));
-      assertInstanceOf(WorkDoneProgressBegin.class, talk.progress.get(1));
+      assertInstanceOf(WorkDoneProgressCreateParams.class, talk.passes.get(0));
+      assertInstanceOf(WorkDoneProgressBegin.class, talk.passes.get(1));
       List<String> messages =
-          talk.progress.stream()
+          talk.passes.stream()
               .filter(WorkDoneProgressReport.class::isInstance)
               .map(report -> ((WorkDoneProgressReport) report).getMessage())
               .toList();
       assertFalse(messages.isEmpty());
       assertEquals("12 of 12 pairs", messages.get(messages.size() - 1));
-      assertInstanceOf(WorkDoneProgressEnd.class, talk.progress.get(talk.progress.size() - 1));
+      assertInstanceOf(WorkDoneProgressEnd.class, talk.passes.get(talk.passes.size() - 1));
     }
   }
 
@@ -135,7 +135,7 @@ class ScopeSessionTest {
       talk.open(work.en(), Ferry.EN);
       talk.command("tallystick.checkFolder");
       talk.settle();
-      assertEquals(List.of(), talk.progress);
+      assertEquals(List.of(), talk.passes);
     }
   }
 
@@ -145,7 +145,7 @@ class ScopeSessionTest {
     try (Talk talk = Talk.in(folder)) {
       talk.command("tallystick.checkFolder");
       talk.settle();
-      assertEquals(List.of(), talk.progress);
+      assertEquals(List.of(), talk.passes);
     }
   }
 
@@ -163,14 +163,14 @@ class ScopeSessionTest {
               .getWorkspaceService()
               .executeCommand(new ExecuteCommandParams("tallystick.checkFolder", List.of()));
       assertNull(Talk.answer(other.ask("Nothing"))); // its turn comes after
-      var create = (WorkDoneProgressCreateParams) talk.progress.get(0);
+      var create = (WorkDoneProgressCreateParams) talk.passes.get(0);
       talk.server.cancelProgress(new WorkDoneProgressCancelParams(create.getToken()));
       talk.machine.release();
       talk.settle();
 
       assertEquals(found(1, 1), Talk.answer(answer));
       assertEquals(1, withFindings(talk, work, "en"), "the open pair is still watched");
-      assertInstanceOf(WorkDoneProgressEnd.class, talk.progress.get(talk.progress.size() - 1));
+      assertInstanceOf(WorkDoneProgressEnd.class, talk.passes.get(talk.passes.size() - 1));
     }
   }
 

@@ -43,28 +43,30 @@ import org.eclipse.lsp4j.jsonrpc.Launcher;
 import org.eclipse.lsp4j.jsonrpc.RemoteEndpoint;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseMessage;
 import org.eclipse.lsp4j.launch.LSPLauncher;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.LanguageServer;
 
 /** A scripted client on the other end of a real connection. It keeps all that it is told. */
-final class Talk implements LanguageClient, AutoCloseable {
+final class Talk implements Remote, AutoCloseable {
   private static final long FAR_TOO_LONG = 60;
 
   final Surround machine = new Surround();
   final List<PublishDiagnosticsParams> published = new CopyOnWriteArrayList<>();
   final List<String> said = new CopyOnWriteArrayList<>();
   final List<String> logged = new CopyOnWriteArrayList<>();
-  final List<Object> progress = new CopyOnWriteArrayList<>();
+  final List<Object> passes = new CopyOnWriteArrayList<>();
   final List<RegistrationParams> registered = new CopyOnWriteArrayList<>();
   final List<ResponseMessage> responses = new CopyOnWriteArrayList<>();
   final CompletableFuture<Integer> ended;
-  final LanguageServer server;
+  final Peer server;
 
   /** What is set under {@code tallystick}. */
   volatile Object settings;
 
   /** The answer to the question what is set; empty for one that comes at once. */
   volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
+
+  /** How far pairs have come, as it was told. */
+  final List<PairProgress> progress = new CopyOnWriteArrayList<>();
 
   /** What the client was told to ask for again. */
   final List<String> refreshed = new CopyOnWriteArrayList<>();
@@ -78,12 +80,15 @@ final class Talk implements LanguageClient, AutoCloseable {
   private final Pipe toClient = new Pipe();
   private final ExecutorService threads = Executors.newCachedThreadPool();
 
+  /** The server, with what it can be asked beyond the protocol. */
+  interface Peer extends LanguageServer, OwnRequests {}
+
   private Talk() {
     ended = Session.start(toServer.in, toClient.out, machine.machine(), "0.0-test");
-    Launcher<LanguageServer> launcher =
-        new LSPLauncher.Builder<LanguageServer>()
+    Launcher<Peer> launcher =
+        new LSPLauncher.Builder<Peer>()
             .setLocalService(this)
-            .setRemoteInterface(LanguageServer.class)
+            .setRemoteInterface(Peer.class)
             .setInput(toClient.in)
             .setOutput(toServer.out)
             .setExecutorService(threads)
@@ -244,6 +249,11 @@ final class Talk implements LanguageClient, AutoCloseable {
   }
 
   @Override
+  public void stands(PairProgress now) {
+    progress.add(now);
+  }
+
+  @Override
   public void showMessage(MessageParams params) {
     said.add(params.getMessage());
   }
@@ -261,13 +271,13 @@ final class Talk implements LanguageClient, AutoCloseable {
 
   @Override
   public CompletableFuture<Void> createProgress(WorkDoneProgressCreateParams params) {
-    progress.add(params);
+    passes.add(params);
     return CompletableFuture.completedFuture(null);
   }
 
   @Override
   public void notifyProgress(ProgressParams params) {
-    progress.add(params.getValue().getLeft());
+    passes.add(params.getValue().getLeft());
   }
 
   @Override
