@@ -30,7 +30,9 @@ class SourcesTest {
   private static final Pattern SLEEP =
       Pattern.compile(
           "\\.sle"
-              + "ep\\(|vim\\.wa"
+              + "ep\\(|\\((sle"
+              + "ep|s"
+              + "it)-for|vim\\.wa"
               + "it\\(\\s*\\d+\\s*\\)|Locks"
               + "upport\\.park|(set|waitFor)Time"
               + "out\\(");
@@ -56,7 +58,7 @@ class SourcesTest {
 
   @Test
   void noTestIsSkippedAndNoneSleeps() {
-    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua");
+    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua", ".el");
     assertTrue(tests.size() > 10, tests::toString);
     assertNone(tests, code -> SKIPPED.matcher(code).find() || SLEEP.matcher(code).find());
     List<Path> client = Repository.files(Repository.client(), ".ts", ".mjs");
@@ -66,7 +68,8 @@ class SourcesTest {
 
   @Test
   void noSourceIsTooLong() {
-    List<Path> sources = Repository.files(Repository.root(), ".java", ".lua", ".js", ".mjs", ".ts");
+    List<Path> sources =
+        Repository.files(Repository.root(), ".java", ".lua", ".el", ".js", ".mjs", ".ts");
     assertNone(sources, code -> code.lines().count() > LONGEST_FILE);
   }
 
@@ -75,8 +78,8 @@ class SourcesTest {
     Path root = Repository.root();
     assertNone(
         Repository.files(
-            root, ".java", ".lua", ".js", ".mjs", ".ts", ".md", ".xml", ".json", ".jsonl", ".txt",
-            "run"),
+            root, ".java", ".lua", ".el", ".js", ".mjs", ".ts", ".md", ".xml", ".json", ".jsonl",
+            ".txt", "run"),
         text -> MACHINE.matcher(text).find());
   }
 
