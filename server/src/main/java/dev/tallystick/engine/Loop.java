@@ -218,7 +218,7 @@ public final class Loop implements AutoCloseable {
 
   private Known answer(Question question, Text text) {
     List<Settled> known = pairs.of(question).flatMap(pair -> pair.known().stream()).toList();
-    return new Known(question.file(), text, known, bulletin);
+    return new Known(question.file(), text, known, bulletin, library::version);
   }
 
   private void publish() {

@@ -1,5 +1,8 @@
 package dev.tallystick.lsp;
 
+import java.util.List;
+import org.eclipse.lsp4j.CodeActionKind;
+import org.eclipse.lsp4j.CodeActionOptions;
 import org.eclipse.lsp4j.CodeLensOptions;
 import org.eclipse.lsp4j.DiagnosticRegistrationOptions;
 import org.eclipse.lsp4j.SaveOptions;
@@ -27,6 +30,9 @@ final class Capabilities {
     can.setDocumentHighlightProvider(true);
     can.setCodeLensProvider(new CodeLensOptions(false));
     can.setInlayHintProvider(true);
+    if (client.takesActions()) {
+      can.setCodeActionProvider(actions(client.resolvesEdits()));
+    }
     if (client.pulls()) {
       can.setDiagnosticProvider(findings());
     }
@@ -40,6 +46,12 @@ final class Capabilities {
     sync.setChange(TextDocumentSyncKind.Incremental);
     sync.setSave(new SaveOptions(false));
     return sync;
+  }
+
+  private static CodeActionOptions actions(boolean resolved) {
+    CodeActionOptions actions = new CodeActionOptions(List.of(CodeActionKind.QuickFix));
+    actions.setResolveProvider(resolved);
+    return actions;
   }
 
   /** An edit of one file changes the findings of the other. */
