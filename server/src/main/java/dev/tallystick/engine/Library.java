@@ -10,6 +10,7 @@ import java.util.Collection;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.OptionalLong;
 import java.util.Set;
 import java.util.stream.Stream;
@@ -189,6 +190,15 @@ final class Library {
   /** What is known of a file that the editor shows. */
   Optional<Document> document(Path file) {
     return shelf.document(file);
+  }
+
+  /** The editor's number for the text of a file; empty if it does not show the file. */
+  OptionalInt version(Path file) {
+    return shelf
+        .document(file)
+        .map(Document::version)
+        .map(OptionalInt::of)
+        .orElse(OptionalInt.empty());
   }
 
   /** The text of a file; empty if it cannot be read or is lost. */

@@ -236,6 +236,6 @@ public final class Loop implements AutoCloseable {
 
   private Known answer(Question question, Text text) {
     List<Settled> known = pairs.of(question).flatMap(pair -> pair.known().stream()).toList();
-    return new Known(question.file(), text, known, bulletin);
+    return new Known(question.file(), text, known, bulletin, library::version);
   }
 }

@@ -2,6 +2,8 @@ package dev.tallystick.lsp;
 
 import dev.tallystick.prose.Format;
 import java.util.List;
+import org.eclipse.lsp4j.CodeActionKind;
+import org.eclipse.lsp4j.CodeActionOptions;
 import org.eclipse.lsp4j.CodeLensOptions;
 import org.eclipse.lsp4j.DiagnosticRegistrationOptions;
 import org.eclipse.lsp4j.ExecuteCommandOptions;
@@ -35,6 +37,9 @@ final class Capabilities {
     can.setDocumentHighlightProvider(true);
     can.setCodeLensProvider(new CodeLensOptions(false));
     can.setInlayHintProvider(true);
+    if (client.takesActions()) {
+      can.setCodeActionProvider(actions(client.resolvesEdits()));
+    }
     if (client.pulls()) {
       can.setDiagnosticProvider(findings());
     }
@@ -65,6 +70,12 @@ final class Capabilities {
             List.of(
                 new FileOperationFilter(files, "file"), new FileOperationFilter(folders, "file"))));
     return operations;
+  }
+
+  private static CodeActionOptions actions(boolean resolved) {
+    CodeActionOptions actions = new CodeActionOptions(List.of(CodeActionKind.QuickFix));
+    actions.setResolveProvider(resolved);
+    return actions;
   }
 
   /** An edit of one file changes the findings of the other. */

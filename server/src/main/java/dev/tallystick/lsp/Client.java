@@ -8,6 +8,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import org.eclipse.lsp4j.ClientCapabilities;
+import org.eclipse.lsp4j.CodeActionCapabilities;
+import org.eclipse.lsp4j.CodeActionResolveSupportCapabilities;
 import org.eclipse.lsp4j.CodeLensWorkspaceCapabilities;
 import org.eclipse.lsp4j.DefinitionCapabilities;
 import org.eclipse.lsp4j.DiagnosticCapabilities;
@@ -22,6 +24,7 @@ import org.eclipse.lsp4j.PublishDiagnosticsCapabilities;
 import org.eclipse.lsp4j.TextDocumentClientCapabilities;
 import org.eclipse.lsp4j.WindowClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
+import org.eclipse.lsp4j.WorkspaceEditCapabilities;
 import org.eclipse.lsp4j.WorkspaceFolder;
 
 /** What a client can do, as far as it matters here. What it does not declare it cannot do. */
@@ -114,6 +117,32 @@ final class Client {
     return yes(
         text(TextDocumentClientCapabilities::getDocumentSymbol)
             .map(DocumentSymbolCapabilities::getHierarchicalDocumentSymbolSupport));
+  }
+
+  /** Whether it takes code actions that are more than a command. */
+  boolean takesActions() {
+    return actions().map(CodeActionCapabilities::getCodeActionLiteralSupport).isPresent();
+  }
+
+  /** Whether it asks for the edit of a code action only when the user has chosen it. */
+  boolean resolvesEdits() {
+    return yes(actions().map(CodeActionCapabilities::getDataSupport))
+        && actions()
+            .map(CodeActionCapabilities::getResolveSupport)
+            .map(CodeActionResolveSupportCapabilities::getProperties)
+            .filter(properties -> properties.contains("edit"))
+            .isPresent();
+  }
+
+  private Optional<CodeActionCapabilities> actions() {
+    return text(TextDocumentClientCapabilities::getCodeAction);
+  }
+
+  /** Whether it takes edits that say of which version of a text they are. */
+  boolean takesVersions() {
+    return yes(
+        workspace(WorkspaceClientCapabilities::getWorkspaceEdit)
+            .map(WorkspaceEditCapabilities::getDocumentChanges));
   }
 
   /** Whether it can be asked to watch files. */

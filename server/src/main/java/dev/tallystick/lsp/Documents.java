@@ -1,22 +1,21 @@
 package dev.tallystick.lsp;
 
 import dev.tallystick.engine.Answer;
-import dev.tallystick.engine.Change;
-import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Known;
 import dev.tallystick.engine.Loop;
 import dev.tallystick.engine.Question;
-import dev.tallystick.text.Span;
-import dev.tallystick.text.Text;
-import java.nio.file.Path;
 import java.util.List;
-import java.util.Objects;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import org.eclipse.lsp4j.CodeAction;
+import org.eclipse.lsp4j.CodeActionContext;
+import org.eclipse.lsp4j.CodeActionKind;
+import org.eclipse.lsp4j.CodeActionParams;
 import org.eclipse.lsp4j.CodeLens;
 import org.eclipse.lsp4j.CodeLensParams;
+import org.eclipse.lsp4j.Command;
 import org.eclipse.lsp4j.DefinitionParams;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
 import org.eclipse.lsp4j.DidCloseTextDocumentParams;
@@ -35,16 +34,12 @@ import org.eclipse.lsp4j.InlayHintParams;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
-import org.eclipse.lsp4j.Range;
 import org.eclipse.lsp4j.ReferenceParams;
 import org.eclipse.lsp4j.SelectionRange;
 import org.eclipse.lsp4j.SelectionRangeParams;
 import org.eclipse.lsp4j.SymbolInformation;
-import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
-import org.eclipse.lsp4j.TextDocumentItem;
 import org.eclipse.lsp4j.TextDocumentPositionParams;
-import org.eclipse.lsp4j.VersionedTextDocumentIdentifier;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
 import org.eclipse.lsp4j.services.TextDocumentService;
 
@@ -52,12 +47,9 @@ import org.eclipse.lsp4j.services.TextDocumentService;
  * What a client tells and asks about texts. Those without a file are in no pair: nothing is said.
  */
 final class Documents implements TextDocumentService {
-  /** An edit that does not say what came: from now on the text is not known. */
-  private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
-
   private final Requests requests;
   private final Board board;
-  private Loop loop;
+  private final Sync sync = new Sync();
   private Conversion conversion;
   private Views views;
 
@@ -68,70 +60,29 @@ final class Documents implements TextDocumentService {
 
   /** The session has begun. */
   void begin(Loop with, Conversion by, Views in) {
-    loop = with;
+    sync.begin(with, by.client().encoding());
     conversion = by;
     views = in;
   }
 
   @Override
   public void didOpen(DidOpenTextDocumentParams params) {
-    TextDocumentItem item = params.getTextDocument();
-    tell(
-        item.getUri(),
-        file ->
-            new Event.Opened(
-                file,
-                item.getUri(),
-                item.getVersion(),
-                Objects.requireNonNullElse(item.getLanguageId(), ""),
-                new Text(item.getText())));
+    sync.opened(params);
   }
 
   @Override
   public void didChange(DidChangeTextDocumentParams params) {
-    VersionedTextDocumentIdentifier document = params.getTextDocument();
-    int version = document.getVersion() == null ? 0 : document.getVersion();
-    List<Change> changes = changes(params.getContentChanges());
-    tell(document.getUri(), file -> new Event.Edited(file, document.getUri(), version, changes));
+    sync.changed(params);
   }
 
   @Override
   public void didSave(DidSaveTextDocumentParams params) {
-    tell(params.getTextDocument().getUri(), Event.Saved::new);
+    sync.saved(params);
   }
 
   @Override
   public void didClose(DidCloseTextDocumentParams params) {
-    tell(params.getTextDocument().getUri(), Event.Closed::new);
-  }
-
-  private void tell(String uri, Function<Path, Event> event) {
-    if (loop != null) {
-      Uris.text(uri).map(event).ifPresent(loop::post);
-    }
-  }
-
-  private List<Change> changes(List<TextDocumentContentChangeEvent> events) {
-    return events == null ? List.of(UNKNOWN) : events.stream().map(this::change).toList();
-  }
-
-  private Change change(TextDocumentContentChangeEvent event) {
-    if (event == null || event.getText() == null) {
-      return UNKNOWN;
-    }
-    Range range = event.getRange();
-    return range == null
-        ? new Change.Whole(new Text(event.getText()))
-        : new Change.Part(text -> span(text, range), event.getText());
-  }
-
-  /** Where a range lies; nowhere if it starts behind its end or behind the text. */
-  private Optional<Span> span(Text text, Range range) {
-    int start = conversion.client().encoding().offset(text, range.getStart());
-    int end = conversion.client().encoding().offset(text, range.getEnd());
-    int line = range.getStart().getLine();
-    boolean fits = line >= 0 && line <= text.lines() && start <= end;
-    return fits ? Optional.of(new Span(start, end)) : Optional.empty();
+    sync.closed(params);
   }
 
   @Override
@@ -191,6 +142,46 @@ final class Documents implements TextDocumentService {
         Optional.of(params),
         Question.Reach.PAIRS,
         known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  @Override
+  public CompletableFuture<List<Either<Command, CodeAction>>> codeAction(CodeActionParams params) {
+    String uri = params.getTextDocument().getUri();
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getRange()),
+        Question.Reach.PAIRS,
+        known ->
+            wantsFixes(params.getContext())
+                ? stubs(uri).at(known, params.getRange()).stream()
+                    .map(Either::<Command, CodeAction>forRight)
+                    .toList()
+                : List.of());
+  }
+
+  private Stubs stubs(String uri) {
+    return new Stubs(conversion.client(), board, uri);
+  }
+
+  /** Whether a client that names the kinds of action that it wants names ours. */
+  private static boolean wantsFixes(CodeActionContext context) {
+    return context == null
+        || context.getOnly() == null
+        || context.getOnly().contains(CodeActionKind.QuickFix)
+        || context.getOnly().contains(CodeActionKind.Empty);
+  }
+
+  @Override
+  public CompletableFuture<CodeAction> resolveCodeAction(CodeAction action) {
+    Optional<Stubs.Ticket> ticket = Stubs.Ticket.of(action.getData());
+    return requests.ask(
+        new TextDocumentIdentifier(ticket.map(Stubs.Ticket::uri).orElse("")),
+        ticket,
+        Question.Reach.PAIRS,
+        known ->
+            stubs(ticket.get().uri())
+                .resolved(known, ticket.get())
+                .orElseThrow(Requests::modified));
   }
 
   @Override

@@ -74,6 +74,11 @@ final class Requests {
     return ask(document, named, reach, convert, MODIFIED);
   }
 
+  /** What a client is told whose text was edited before. */
+  static ResponseErrorException modified() {
+    return new ResponseErrorException(MODIFIED);
+  }
+
   /** Asks for the findings of a document. */
   <T> CompletableFuture<T> askFindings(
       TextDocumentIdentifier document, Function<Known, T> convert) {
