@@ -146,14 +146,14 @@ final class Documents implements TextDocumentService {
 
   @Override
   public CompletableFuture<List<Either<Command, CodeAction>>> codeAction(CodeActionParams params) {
-    String uri = params.getTextDocument().getUri();
+    TextDocumentIdentifier document = params.getTextDocument();
     return requests.ask(
-        params.getTextDocument(),
+        document,
         Optional.ofNullable(params.getRange()),
         Question.Reach.PAIRS,
         known ->
             wantsFixes(params.getContext())
-                ? stubs(uri).at(known, params.getRange()).stream()
+                ? stubs(document.getUri()).at(known, params.getRange()).stream()
                     .map(Either::<Command, CodeAction>forRight)
                     .toList()
                 : List.of());

@@ -13,6 +13,8 @@ import org.eclipse.lsp4j.InitializeParams;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** What the user sets, and what the user is asked. */
 class SettingsSessionTest {
@@ -89,18 +91,47 @@ class SettingsSessionTest {
     }
   }
 
-  @Test
-  void whatIsWrongIsSaidInWordsThatHelp() {
-    try (Talk talk = Talk.in(folder)) {
-      push(talk, Map.of("lens", "yes", "inlay", 1, "restMillis", 200));
+  /** Sets them in the way that a client has: by being asked, or by sending them. */
+  private static void set(Talk talk, boolean pulled, Object settings) {
+    talk.settings = settings;
+    push(talk, pulled ? Map.of() : settings);
+  }
+
+  private Talk client(boolean pulled) {
+    return Talk.in(
+        folder, params -> params.getCapabilities().getWorkspace().setConfiguration(pulled));
+  }
+
+  @ParameterizedTest
+  @ValueSource(booleans = {false, true})
+  void whatIsWrongIsSaidInWordsThatHelp(boolean pulled) {
+    try (Talk talk = client(pulled)) {
+      set(talk, pulled, Map.of("lens", "yes", "inlay", 1, "restMillis", 200));
       assertEquals(
           List.of(
               "The setting tallystick.lens must be true or false. Until then it counts as false.",
               "The setting tallystick.inlay must be true or false. Until then it counts as false."),
           talk.said);
-      push(talk, List.of("lens"));
+      set(talk, pulled, List.of("lens"));
       assertEquals(3, talk.said.size());
       assertTrue(talk.said.get(2).contains("must be an object"), talk.said.get(2));
+    }
+  }
+
+  @ParameterizedTest
+  @ValueSource(booleans = {false, true})
+  void figuresAreSwitchedOnAndOff(boolean pulled) {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = client(pulled)) {
+      Buffer english = talk.open(work.en(), Ferry.EN);
+      set(talk, pulled, Map.of("lens", true, "inlay", true));
+      assertEquals(1, ViewsSessionTest.lenses(talk, english).size());
+      assertEquals(1, ViewsSessionTest.hints(talk, english, ViewsSessionTest.ALL).size());
+
+      set(talk, pulled, Map.of("lens", "no", "inlay", false));
+      assertEquals(0, ViewsSessionTest.lenses(talk, english).size());
+      assertEquals(0, ViewsSessionTest.hints(talk, english, ViewsSessionTest.ALL).size());
+      assertEquals(1, talk.said.size());
     }
   }
 

@@ -35,7 +35,7 @@ class ViewsSessionTest {
           .replace("\nDie Fahrgäste", "\n## Marken\n\nDie Fahrgäste")
           .replace("\nAm Ende", "\n## Die Nacht\n\nAm Ende");
 
-  private static final Range ALL = new Range(new Position(0, 0), new Position(9999, 0));
+  static final Range ALL = new Range(new Position(0, 0), new Position(9999, 0));
 
   @TempDir Path folder;
   private Work work;
@@ -58,14 +58,14 @@ class ViewsSessionTest {
     params.setInitializationOptions(Map.of("lens", true, "inlay", true));
   }
 
-  private static List<? extends CodeLens> lenses(Talk talk, Buffer buffer) {
+  static List<? extends CodeLens> lenses(Talk talk, Buffer buffer) {
     return Talk.answer(
         talk.server
             .getTextDocumentService()
             .codeLens(new CodeLensParams(new TextDocumentIdentifier(buffer.uri))));
   }
 
-  private static List<InlayHint> hints(Talk talk, Buffer buffer, Range range) {
+  static List<InlayHint> hints(Talk talk, Buffer buffer, Range range) {
     return Talk.answer(
         talk.server
             .getTextDocumentService()
