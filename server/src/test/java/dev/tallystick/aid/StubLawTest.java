@@ -32,7 +32,7 @@ class StubLawTest {
   /** Without the title. */
   private static List<List<String>> paragraphs(String text) {
     return Arrays.stream(text.split("\n\n"))
-        .skip(1)
+        .filter(paragraph -> !paragraph.startsWith("#"))
         .map(paragraph -> paragraph.strip().lines().toList())
         .toList();
   }
