@@ -106,8 +106,7 @@ local function expected(...)
   return sorted(german), sorted(english)
 end
 
-local function await_marks(what, ...)
-  local german, english = expected(...)
+local function await_exactly(what, german, english)
   await(what .. ', in the translation', function()
     return marked(GERMAN) == german
   end, function()
@@ -118,6 +117,22 @@ local function await_marks(what, ...)
   end, function()
     return marked(ENGLISH) .. '\nexpected:\n' .. english
   end)
+end
+
+local function await_marks(what, ...)
+  local german, english = expected(...)
+  await_exactly(what, german, english)
+end
+
+--- Puts a missing sentence in by the code action offered at the cursor.
+local function await_stub(what, sentence)
+  vim.ui.select = function(actions, _, choose)
+    choose(actions[1], 1)
+  end
+  vim.lsp.buf.code_action()
+  local german, english = expected()
+  local untranslated = 'untranslated: ' .. sentence
+  await_exactly(what, sorted(vim.list_extend(vim.split(german, '\n'), { untranslated })), english)
 end
 
 --- Puts the cursor into a sentence of the current buffer, some bytes behind its start.
@@ -164,7 +179,10 @@ local function session()
   vim.api.nvim_buf_set_text(0, line, column, line, column + #DELETED + 1, {})
   await_marks('a deleted sentence is an omission', ITS_SOURCE)
 
-  vim.cmd('silent undo')
+  vim.api.nvim_win_set_cursor(0, { line + 1, column })
+  await_stub('the sentence comes over to be translated', ITS_SOURCE)
+
+  vim.cmd('silent earlier 1f') -- to the text of the file
   await_marks('after undo it is none')
 
   put_cursor(GERMAN, DELETED)
