@@ -69,6 +69,12 @@ final class Server implements LanguageServer {
 
   @Override
   public CompletableFuture<Object> shutdown() {
+    if (loop == null) {
+      throw refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
+    }
+    if (shutDown) {
+      throw refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
+    }
     shutDown = true;
     documents.end();
     return CompletableFuture.completedFuture(null);

@@ -19,9 +19,9 @@ final class Uris {
 
   private Uris() {}
 
-  /** The file that a URI names; empty if it names none on this machine. */
+  /** The file that a URI names; empty if it names none on this machine, or is missing. */
   static Optional<Path> file(String uri) {
-    if (!uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
+    if (uri == null || !uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
       return Optional.empty();
     }
     String path = uri.substring(FILE.length());

@@ -1,6 +1,5 @@
 package dev.tallystick.lsp;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -37,8 +36,6 @@ import org.eclipse.lsp4j.TextDocumentIdentifier;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.eclipse.lsp4j.jsonrpc.Launcher;
-import org.eclipse.lsp4j.jsonrpc.RemoteEndpoint;
-import org.eclipse.lsp4j.jsonrpc.messages.ResponseMessage;
 import org.eclipse.lsp4j.launch.LSPLauncher;
 import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.LanguageServer;
@@ -52,7 +49,6 @@ final class Talk implements LanguageClient, AutoCloseable {
   final List<String> said = new CopyOnWriteArrayList<>();
   final List<String> logged = new CopyOnWriteArrayList<>();
   final List<RegistrationParams> registered = new CopyOnWriteArrayList<>();
-  final List<ResponseMessage> responses = new CopyOnWriteArrayList<>();
   final CompletableFuture<Integer> ended;
   final LanguageServer server;
 
@@ -63,7 +59,6 @@ final class Talk implements LanguageClient, AutoCloseable {
   volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
 
   InitializeResult initialized;
-  private final RemoteEndpoint endpoint;
   private final Pipe toServer = new Pipe();
   private final Pipe toClient = new Pipe();
   private final ExecutorService threads = Executors.newCachedThreadPool();
@@ -77,17 +72,8 @@ final class Talk implements LanguageClient, AutoCloseable {
             .setInput(toClient.in)
             .setOutput(toServer.out)
             .setExecutorService(threads)
-            .wrapMessages(
-                consumer ->
-                    message -> {
-                      if (message instanceof ResponseMessage response) {
-                        responses.add(response);
-                      }
-                      consumer.consume(message);
-                    })
             .create();
     server = launcher.getRemoteProxy();
-    endpoint = launcher.getRemoteEndpoint();
     launcher.startListening();
   }
 
@@ -133,16 +119,6 @@ final class Talk implements LanguageClient, AutoCloseable {
   void begin(InitializeParams params) {
     initialized = answer(server.initialize(params));
     server.initialized(new InitializedParams());
-  }
-
-  /** Asks something in words of its own. */
-  CompletableFuture<Object> raw(String method, Object params) {
-    return endpoint.request(method, params);
-  }
-
-  /** Tells something in words of its own. */
-  void tellRaw(String method, Object params) {
-    endpoint.notify(method, params);
   }
 
   /** Opens a file in the editor. */
@@ -257,11 +233,6 @@ final class Talk implements LanguageClient, AutoCloseable {
   @Override
   public void telemetryEvent(Object event) {
     throw new AssertionError("nothing leaves the machine");
-  }
-
-  /** The editor is gone. */
-  void hangUp() throws IOException {
-    toServer.out.close();
   }
 
   @Override
