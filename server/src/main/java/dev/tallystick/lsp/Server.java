@@ -78,6 +78,12 @@ final class Server implements LanguageServer, OwnRequests {
 
   @Override
   public CompletableFuture<Object> shutdown() {
+    if (loop == null) {
+      throw refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
+    }
+    if (shutDown) {
+      throw refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
+    }
     shutDown = true;
     requests.end();
     return CompletableFuture.completedFuture(null);

@@ -28,7 +28,7 @@ final class Uris {
    * untitled:1}, a relative path made of the URI, which is no file's.
    */
   static Optional<Path> text(String uri) {
-    if (uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
+    if (uri == null || uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
       return file(uri);
     }
     return SCHEME.matcher(uri).matches()
@@ -36,9 +36,9 @@ final class Uris {
         : Optional.empty();
   }
 
-  /** The file that a URI names; empty if it names none on this machine. */
+  /** The file that a URI names; empty if it names none on this machine, or is missing. */
   static Optional<Path> file(String uri) {
-    if (!uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
+    if (uri == null || !uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
       return Optional.empty();
     }
     String path = uri.substring(FILE.length());

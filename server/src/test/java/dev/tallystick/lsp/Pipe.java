@@ -47,6 +47,9 @@ final class Pipe {
 
         @Override
         public int read(byte[] bytes, int from, int length) throws IOException {
+          if (length == 0) {
+            return 0;
+          }
           if (at == chunk.length && !ended) {
             chunk = take();
             at = 0;

@@ -2,18 +2,14 @@ package dev.tallystick.lsp;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
-import static org.junit.jupiter.api.Assertions.assertThrows;
 
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.CompletableFuture;
-import java.util.concurrent.CompletionException;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.InitializeParams;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.WorkspaceFolder;
-import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
-import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -51,41 +47,6 @@ class QuestionSessionTest {
 
       talk.machine.release();
       assertEquals(JumpSessionTest.WINCH_EN, JumpSessionTest.text(Talk.answer(asked)));
-    }
-  }
-
-  @Test
-  void aQuestionWhoseTextIsEditedMeanwhileIsToldSo() {
-    try (Talk talk = Talk.in(folder)) {
-      talk.machine.hold();
-      Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
-      CompletableFuture<Hover> asked = german.ask("410 Gliedern");
-      german.type("Winter", "Frost");
-
-      CompletionException told = assertThrows(CompletionException.class, () -> Talk.answer(asked));
-      assertEquals(
-          ResponseErrorCode.ContentModified.getValue(),
-          ((ResponseErrorException) told.getCause()).getResponseError().getCode());
-    }
-  }
-
-  @Test
-  void aCancelledQuestionIsTakenBack() {
-    try (Talk talk = Talk.in(folder)) {
-      talk.machine.hold();
-      Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
-      german.ask("410 Gliedern").cancel(true);
-      CompletableFuture<Hover> other = german.ask("Marken");
-      talk.barrier();
-
-      assertEquals(
-          List.of(ResponseErrorCode.RequestCancelled.getValue()),
-          talk.responses.stream()
-              .filter(response -> response.getError() != null)
-              .map(response -> response.getError().getCode())
-              .toList());
-      talk.machine.release();
-      assertEquals("Carts cross for 2 tokens.", JumpSessionTest.text(Talk.answer(other)));
     }
   }
 

@@ -1,6 +1,5 @@
 package dev.tallystick.lsp;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -40,8 +39,6 @@ import org.eclipse.lsp4j.WorkDoneProgressCreateParams;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.eclipse.lsp4j.jsonrpc.Launcher;
-import org.eclipse.lsp4j.jsonrpc.RemoteEndpoint;
-import org.eclipse.lsp4j.jsonrpc.messages.ResponseMessage;
 import org.eclipse.lsp4j.launch.LSPLauncher;
 import org.eclipse.lsp4j.services.LanguageServer;
 
@@ -55,7 +52,6 @@ final class Talk implements Remote, AutoCloseable {
   final List<String> logged = new CopyOnWriteArrayList<>();
   final List<Object> passes = new CopyOnWriteArrayList<>();
   final List<RegistrationParams> registered = new CopyOnWriteArrayList<>();
-  final List<ResponseMessage> responses = new CopyOnWriteArrayList<>();
   final CompletableFuture<Integer> ended;
   final Peer server;
 
@@ -75,7 +71,6 @@ final class Talk implements Remote, AutoCloseable {
   volatile CompletableFuture<Void> refreshing = CompletableFuture.completedFuture(null);
 
   InitializeResult initialized;
-  private final RemoteEndpoint endpoint;
   private final Pipe toServer = new Pipe();
   private final Pipe toClient = new Pipe();
   private final ExecutorService threads = Executors.newCachedThreadPool();
@@ -93,17 +88,8 @@ final class Talk implements Remote, AutoCloseable {
             .setOutput(toServer.out)
             .setExecutorService(threads)
             .configureGson(RelatedReports::teach)
-            .wrapMessages(
-                consumer ->
-                    message -> {
-                      if (message instanceof ResponseMessage response) {
-                        responses.add(response);
-                      }
-                      consumer.consume(message);
-                    })
             .create();
     server = launcher.getRemoteProxy();
-    endpoint = launcher.getRemoteEndpoint();
     launcher.startListening();
   }
 
@@ -149,16 +135,6 @@ final class Talk implements Remote, AutoCloseable {
   void begin(InitializeParams params) {
     initialized = answer(server.initialize(params));
     server.initialized(new InitializedParams());
-  }
-
-  /** Asks something in words of its own. */
-  CompletableFuture<Object> raw(String method, Object params) {
-    return endpoint.request(method, params);
-  }
-
-  /** Tells something in words of its own. */
-  void tellRaw(String method, Object params) {
-    endpoint.notify(method, params);
   }
 
   /** Opens a file in the editor. */
@@ -313,11 +289,6 @@ final class Talk implements Remote, AutoCloseable {
   @Override
   public void telemetryEvent(Object event) {
     throw new AssertionError("nothing leaves the machine");
-  }
-
-  /** The editor is gone. */
-  void hangUp() throws IOException {
-    toServer.out.close();
   }
 
   @Override
