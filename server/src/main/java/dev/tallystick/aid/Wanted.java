@@ -107,13 +107,26 @@ public record Wanted(List<Integer> segments, Reason reason, Optional<Finding> fi
     private Span around(int gap) {
       Text text = result.target().text();
       int start = Gap.word(text.string(), gap).map(Span::start).orElse(gap);
-      int end =
-          result.target().segments().stream()
-              .mapToInt(segment -> segment.span().start())
-              .filter(at -> at >= gap)
-              .findFirst()
-              .orElse(text.length());
+      int end = firstBehind(gap);
       return new Span(Math.min(start, gap), Math.max(gap, end));
+    }
+
+    /** Where the first target sentence behind an offset starts; the text's end if none does. */
+    private int firstBehind(int offset) {
+      List<Segment> segments = result.target().segments();
+      int low = 0;
+      int high = segments.size();
+      while (low < high) {
+        int middle = (low + high) / 2;
+        if (segments.get(middle).span().start() < offset) {
+          low = middle + 1;
+        } else {
+          high = middle;
+        }
+      }
+      return low == segments.size()
+          ? result.target().text().length()
+          : segments.get(low).span().start();
     }
 
     private List<Segment> source() {

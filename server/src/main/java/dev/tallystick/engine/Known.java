@@ -73,7 +73,7 @@ public final class Known {
 
   /** The sentences of the whole file, in each of its pairs. */
   public List<Count> counts() {
-    return own().stream().map(pair -> pair.tally(file).whole()).toList();
+    return own().stream().map(pair -> pair.count(file)).toList();
   }
 
   /** What it is paired with: the other files, as the editor names them. */

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.check.OnSide;
 import java.nio.file.Path;
 
 /**
@@ -15,7 +16,13 @@ public record Settled(FilePair files, PairResult result, long editedAt) {
     return Counterpart.at(files, result, files.side(file), offset);
   }
 
-  /** The sentences of a file, counted. */
+  /** The sentences of a file. */
+  Count count(Path file) {
+    OnSide side = files.side(file);
+    return States.of(result).count(side, files.language(side.other()).name());
+  }
+
+  /** The sentences in the sections of a file. */
   Tally tally(Path file) {
     return Tally.of(files, result, files.side(file));
   }

@@ -29,12 +29,14 @@ public record Standing(FilePair files, String source, String target, Optional<Fi
 
   /** How a pair stands whose texts are known. */
   static Standing of(Settled pair, Map<Code, Integer> findings, Uris uris) {
+    PairResult result = pair.result();
+    States states = States.of(result);
     Figures figures =
         new Figures(
-            pair.result().progress(),
+            result.progress(),
             findings,
-            pair.tally(pair.files().file(OnSide.SOURCE)).whole(),
-            pair.tally(pair.files().file(OnSide.TARGET)).whole());
+            states.count(OnSide.SOURCE, pair.files().targetLanguage().name()),
+            states.count(OnSide.TARGET, pair.files().sourceLanguage().name()));
     return of(pair.files(), Optional.of(figures), uris);
   }
 

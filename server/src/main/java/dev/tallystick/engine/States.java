@@ -78,6 +78,32 @@ final class States {
     }
   }
 
+  /** All sentences of a side; a verbatim block is none. */
+  Count count(OnSide side, String otherLanguage) {
+    int[] own = numbers(side);
+    int[] ofSource = side == OnSide.SOURCE ? own : numbers(OnSide.SOURCE);
+    return new Count(
+        otherLanguage,
+        Arrays.stream(own).sum(),
+        own[State.MATCHED.ordinal()]
+            + own[State.MOVED.ordinal()]
+            + own[State.UNTRANSLATED.ordinal()],
+        own[State.ADDED.ordinal()],
+        ofSource[State.MISSING.ordinal()],
+        ofSource[State.PENDING.ordinal()]);
+  }
+
+  /** How many sentences of a side are in each state. */
+  private int[] numbers(OnSide side) {
+    List<Segment> segments = result.reading(side).segments();
+    State[] states = side == OnSide.SOURCE ? source : target;
+    int[] numbers = new int[State.values().length];
+    for (int i = 0; i < states.length; i++) {
+      numbers[states[i].ordinal()] += segments.get(i).verbatim() ? 0 : 1;
+    }
+    return numbers;
+  }
+
   /** The state of a segment by its index. */
   State at(OnSide side, int index) {
     return side == OnSide.SOURCE ? source[index] : target[index];

@@ -6,7 +6,7 @@ import java.util.List;
 import java.util.function.IntPredicate;
 import java.util.function.IntUnaryOperator;
 
-/** Counts the sentences of one side of a pair. A verbatim block is none. */
+/** Counts the sentences in the sections of one side of a pair. A verbatim block is none. */
 final class Tally {
   private final String language;
   private final int size;
@@ -56,15 +56,8 @@ final class Tally {
 
   /** The sentences of a section. */
   Count of(Section section) {
-    return between(section.from(), section.to());
-  }
-
-  /** All sentences, with those that would come before the first. */
-  Count whole() {
-    return between(-1, size);
-  }
-
-  private Count between(int from, int to) {
+    int from = section.from();
+    int to = section.to();
     return new Count(
         language,
         between(sentences, from, to),

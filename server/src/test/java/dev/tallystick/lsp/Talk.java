@@ -43,7 +43,7 @@ import org.eclipse.lsp4j.launch.LSPLauncher;
 import org.eclipse.lsp4j.services.LanguageServer;
 
 /** A scripted client on the other end of a real connection. It keeps all that it is told. */
-final class Talk implements Remote, AutoCloseable {
+final class Talk extends Listener implements AutoCloseable {
   private static final long FAR_TOO_LONG = 60;
 
   final Surround machine = new Surround();
@@ -60,15 +60,6 @@ final class Talk implements Remote, AutoCloseable {
 
   /** The answer to the question what is set; empty for one that comes at once. */
   volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
-
-  /** How far pairs have come, as it was told. */
-  final List<PairProgress> progress = new CopyOnWriteArrayList<>();
-
-  /** What the client was told to ask for again. */
-  final List<String> refreshed = new CopyOnWriteArrayList<>();
-
-  /** The answer to that. */
-  volatile CompletableFuture<Void> refreshing = CompletableFuture.completedFuture(null);
 
   InitializeResult initialized;
   private final Pipe toServer = new Pipe();
@@ -225,11 +216,6 @@ final class Talk implements Remote, AutoCloseable {
   }
 
   @Override
-  public void stands(PairProgress now) {
-    progress.add(now);
-  }
-
-  @Override
   public void showMessage(MessageParams params) {
     said.add(params.getMessage());
   }
@@ -261,24 +247,6 @@ final class Talk implements Remote, AutoCloseable {
     List<Object> values = new ArrayList<>();
     params.getItems().forEach(item -> values.add(settings));
     return answer.orElseGet(() -> CompletableFuture.completedFuture(values));
-  }
-
-  @Override
-  public CompletableFuture<Void> refreshDiagnostics() {
-    refreshed.add("findings");
-    return refreshing;
-  }
-
-  @Override
-  public CompletableFuture<Void> refreshCodeLenses() {
-    refreshed.add("lenses");
-    return refreshing;
-  }
-
-  @Override
-  public CompletableFuture<Void> refreshInlayHints() {
-    refreshed.add("hints");
-    return refreshing;
   }
 
   @Override
