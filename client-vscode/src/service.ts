@@ -95,6 +95,7 @@ export class Service {
       documentSelector: [...FILTERS],
       outputChannel: this.log,
       diagnosticCollectionName: "tallystick",
+      diagnosticPullOptions: { onChange: true }, // else marks wait for a change of the other file
       revealOutputChannelOn: RevealOutputChannelOn.Never,
       initializationFailedHandler: () => false,
       errorHandler: {

@@ -169,9 +169,7 @@ public final class Loop implements AutoCloseable {
     if (event instanceof Event.Paired paired) {
       library.pair(paired).map(Announcements::unreadable).ifPresent(audience::say);
     } else if (event instanceof Event.Marked marked) {
-      if (!pairs.mark(marked.file(), marked.finished())) {
-        audience.say(Announcements.alone(marked.file()));
-      }
+      pairs.mark(marked);
     } else if (event instanceof Event.FolderWanted wanted) {
       library.want(wanted.folder());
     } else if (event instanceof Event.FoldersDeclined) {
@@ -214,6 +212,7 @@ public final class Loop implements AutoCloseable {
     if (pairs.keep(library.pairs())) {
       library.retain(pairs.files());
     }
+    pairs.applyMarks(library, file -> audience.say(Announcements.alone(file)));
     pairs.take(library, workers);
     pass.left(pairs.unsettled());
     pairs.show(caret.last());

@@ -10,6 +10,7 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
 import java.util.TreeSet;
+import java.util.function.Consumer;
 import java.util.stream.Stream;
 
 /**
@@ -20,6 +21,7 @@ final class PairStates {
   private final Map<FilePair, PairState> states = new TreeMap<>();
   private final Map<Path, List<PairState>> byFile = new HashMap<>();
   private final Set<Path> finished = new TreeSet<>();
+  private final List<Event.Marked> marks = new ArrayList<>();
 
   /**
    * Keeps these pairs and no others.
@@ -93,19 +95,34 @@ final class PairStates {
     of(file).filter(pair -> pair.files().target().equals(file)).forEach(pair -> pair.edited(turn));
   }
 
+  /** A translation, or all translations of a source, are finished, or drafts again. */
+  void mark(Event.Marked marked) {
+    marks.add(marked);
+  }
+
   /**
-   * A translation, or all translations of a source, are finished, or drafts again.
+   * Does what was said of files of which it is known by now what they are paired with.
    *
-   * @return whether the file is in a pair
+   * @param alone told of each that is in no pair
    */
-  boolean mark(Path file, boolean asFinished) {
-    List<Path> targets = of(file).map(pair -> pair.files().target()).toList();
-    if (asFinished) {
+  void applyMarks(Library library, Consumer<Path> alone) {
+    for (Event.Marked marked : List.copyOf(marks)) {
+      if (library.listed(marked.file())) {
+        marks.remove(marked);
+        apply(marked, alone);
+      }
+    }
+  }
+
+  private void apply(Event.Marked marked, Consumer<Path> alone) {
+    List<Path> targets = of(marked.file()).map(pair -> pair.files().target()).toList();
+    if (targets.isEmpty()) {
+      alone.accept(marked.file());
+    } else if (marked.finished()) {
       finished.addAll(targets);
     } else {
       targets.forEach(finished::remove);
     }
-    return !targets.isEmpty();
   }
 
   /** Files have other names. */

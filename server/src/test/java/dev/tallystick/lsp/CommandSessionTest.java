@@ -12,6 +12,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.concurrent.CompletionException;
 import java.util.concurrent.atomic.AtomicInteger;
+import org.eclipse.lsp4j.InitializeParams;
+import org.eclipse.lsp4j.WorkspaceFolder;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -191,6 +193,24 @@ class CommandSessionTest {
       talk.command(FINISHED, uri(work.en()));
       talk.settle();
       assertEquals(List.of("omission", "omission"), talk.codes(work.en()));
+    }
+  }
+
+  @Test
+  void aMarkWaitsUntilTheFilesOfTheFolderAreKnown() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    try (Talk talk = Talk.silent()) {
+      talk.machine.holdListing();
+      InitializeParams params = Talk.params();
+      params.setWorkspaceFolders(List.of(new WorkspaceFolder(uri(folder), "work")));
+      talk.begin(params);
+      talk.open(work.de(), BEGUN);
+      talk.command(FINISHED, uri(work.de()));
+      talk.machine.release();
+      talk.settle();
+      assertEquals(List.of(), talk.said);
+      assertEquals(List.of("omission"), talk.codes(work.en()));
     }
   }
 
