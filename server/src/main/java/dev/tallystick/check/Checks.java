@@ -10,7 +10,11 @@ public final class Checks {
 
   /** The findings of a pair: those on the source first, each side in the order of its text. */
   public static List<Finding> findings(Subject subject) {
-    Pending pending = Pending.of(subject);
+    return findings(subject, Pending.of(subject));
+  }
+
+  /** The same, where it is known already which sentences are pending. */
+  public static List<Finding> findings(Subject subject, Pending pending) {
     List<Finding> findings = new ArrayList<>();
     findings.addAll(Omissions.find(subject, pending));
     findings.addAll(Additions.find(subject));

@@ -22,7 +22,10 @@ public enum Code {
     this.severity = severity;
   }
 
-  /** How loudly it is said. Never an error: that is the reviser's verdict. */
+  /**
+   * How loudly it is said where no project says otherwise. Never an error: that is the reviser's
+   * verdict.
+   */
   public Severity severity() {
     return severity;
   }

@@ -21,8 +21,8 @@ public final class Pending {
     this.source = source;
   }
 
-  /** The pending sentences of a pair. */
-  static Pending of(Subject subject) {
+  /** The pending sentences of a pair; none if it is no draft. */
+  public static Pending of(Subject subject) {
     boolean[] pending = new boolean[subject.source().size()];
     if (subject.draft()) {
       boolean[] open = open(subject);
@@ -35,8 +35,8 @@ public final class Pending {
     return new Pending(pending);
   }
 
-  /** Whether a source sentence waits for its translation. */
-  boolean source(int index) {
+  /** Whether a source sentence, by its index, waits for its translation. */
+  public boolean source(int index) {
     return source[index];
   }
 

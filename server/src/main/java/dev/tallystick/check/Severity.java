@@ -1,6 +1,7 @@
 package dev.tallystick.check;
 
 import java.util.Locale;
+import java.util.Optional;
 
 /** How loudly a finding is said, from quiet to loud. */
 public enum Severity {
@@ -14,5 +15,15 @@ public enum Severity {
   /** The name in output and settings. */
   public String word() {
     return name().toLowerCase(Locale.ROOT);
+  }
+
+  /** The severity with this name. */
+  public static Optional<Severity> of(String word) {
+    for (Severity severity : values()) {
+      if (severity.word().equals(word)) {
+        return Optional.of(severity);
+      }
+    }
+    return Optional.empty();
   }
 }

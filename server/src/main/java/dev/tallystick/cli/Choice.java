@@ -14,6 +14,6 @@ final class Choice {
     return String.join(", ", ambiguity.files())
         + ": which of these is the source cannot be told. Choose with --source-language: "
         + choices
-        + ".";
+        + ". Or set \"sourceLanguage\" in tallystick.json.";
   }
 }

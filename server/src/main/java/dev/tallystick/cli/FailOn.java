@@ -6,6 +6,7 @@ import dev.tallystick.check.Severity;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -15,11 +16,13 @@ import picocli.CommandLine.TypeConversionException;
 /**
  * Which findings make a check fail.
  *
- * @param codes the codes that do
+ * @param least those that are said at least so loudly, if a level counts
+ * @param codes the codes that count, whatever their level
  */
-record FailOn(Set<Code> codes) {
+record FailOn(Optional<Severity> least, Set<Code> codes) {
   boolean fails(Finding finding) {
-    return codes.contains(finding.code());
+    boolean loud = least.filter(level -> finding.severity().compareTo(level) >= 0).isPresent();
+    return loud || codes.contains(finding.code());
   }
 
   /** Reads a level, or a list of codes. */
@@ -27,28 +30,17 @@ record FailOn(Set<Code> codes) {
     @Override
     public FailOn convert(String value) {
       if (value.equals("never")) {
-        return new FailOn(Set.of());
+        return new FailOn(Optional.empty(), Set.of());
       }
-      for (Severity severity : Severity.values()) {
-        if (severity.word().equals(value)) {
-          return atLeast(severity);
-        }
+      Optional<Severity> least = Severity.of(value);
+      if (least.isPresent()) {
+        return new FailOn(least, Set.of());
       }
       List<Code> codes = new ArrayList<>();
       for (String word : value.split(",")) {
         codes.add(Code.of(word.strip().toLowerCase(Locale.ROOT)).orElseThrow(() -> unknown(word)));
       }
-      return new FailOn(Set.copyOf(codes));
-    }
-
-    private static FailOn atLeast(Severity severity) {
-      List<Code> codes = new ArrayList<>();
-      for (Code code : Code.values()) {
-        if (code.severity().compareTo(severity) >= 0) {
-          codes.add(code);
-        }
-      }
-      return new FailOn(Set.copyOf(codes));
+      return new FailOn(Optional.empty(), Set.copyOf(codes));
     }
 
     private static TypeConversionException unknown(String word) {

@@ -1,6 +1,7 @@
 package dev.tallystick.cli;
 
 import dev.tallystick.align.Aligner;
+import dev.tallystick.check.Levels;
 import dev.tallystick.engine.Disk;
 import dev.tallystick.engine.Intake;
 import dev.tallystick.engine.Listing;
@@ -16,8 +17,8 @@ import dev.tallystick.run.Cancellation;
 import dev.tallystick.text.Decoded;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.function.UnaryOperator;
 
 /**
@@ -28,14 +29,16 @@ final class Job {
   private final Console console;
   private final Pairs pairs;
   private final Listing files;
+  private final Map<Pair, Levels> levels;
   private String lastSource = "";
   private Reading lastReading;
   private boolean complete = true;
 
-  private Job(Console console, Pairs pairs, Listing files) {
+  private Job(Console console, Pairs pairs, Listing files, Map<Pair, Levels> levels) {
     this.console = console;
     this.pairs = pairs;
     this.files = files;
+    this.levels = levels;
   }
 
   /**
@@ -57,7 +60,7 @@ final class Job {
       String target = Listing.name(paths.get(1));
       List<Pair> pair = List.of(Pairing.named(source, target, rules));
       Pairs pairs = new Pairs(pair, List.of(), List.of());
-      return new Job(console, pairs, Listing.of(paths, UnaryOperator.identity()));
+      return new Job(console, pairs, Listing.of(paths, UnaryOperator.identity()), Map.of());
     }
     throw new Refused("Name one folder, or one source file and one translation.");
   }
@@ -67,20 +70,10 @@ final class Job {
    *
    * @throws Refused if one cannot be listed
    */
-  static Job ofFolders(Console console, List<Path> folders, Rules rules) {
-    List<Path> found = new ArrayList<>();
-    List<String> unread = new ArrayList<>();
-    for (Path folder : folders) {
-      try {
-        found.addAll(Disk.REAL.files(folder, unread::add));
-      } catch (Unreadable e) {
-        throw new Refused(e.getMessage());
-      }
-    }
-    unread.forEach(console.err()::println);
-    Listing files = Listing.of(found, Path::normalize);
-    Job job = new Job(console, Pairing.pairs(files.names(), rules), files);
-    job.complete = unread.isEmpty();
+  static Job ofFolders(Console console, List<Path> folders, Rules options) {
+    Folders found = Folders.of(console, folders, options);
+    Job job = new Job(console, found.pairs(), found.files(), found.levels());
+    job.complete = found.complete();
     return job;
   }
 
@@ -98,7 +91,8 @@ final class Job {
     try {
       Reading source = source(pair);
       Reading target = read(pair.target(), pair.targetLanguage());
-      return PairResult.of(source, target, aligner, draft, Cancellation.NONE);
+      return PairResult.of(source, target, aligner, draft, Cancellation.NONE)
+          .at(levels.getOrDefault(pair, Levels.USUAL));
     } catch (Unreadable e) {
       complete = false;
       console.err().println(e.getMessage());

@@ -2,17 +2,24 @@ package dev.tallystick.cli;
 
 import dev.tallystick.text.Decoded;
 import dev.tallystick.text.Problem;
+import dev.tallystick.text.Text;
+import java.util.List;
 
-/** Says where bytes of a file are no text. The rest of the file is worked on all the same. */
+/** Says where something is wrong in a file. The rest of the file counts all the same. */
 final class Malformed {
   private Malformed() {}
 
-  /** Prints each place on the error console, and says whether there were any. */
+  /** Prints each place whose bytes are no text, and says whether there were any. */
   static boolean tell(Console console, Object file, Decoded decoded) {
-    for (Problem problem : decoded.problems()) {
-      Location at = Location.of(decoded.text(), problem.span().start());
+    return tell(console, file, decoded.text(), decoded.problems());
+  }
+
+  /** Prints each place on the error console, and says whether there were any. */
+  static boolean tell(Console console, Object file, Text text, List<Problem> problems) {
+    for (Problem problem : problems) {
+      Location at = Location.of(text, problem.span().start());
       console.err().println(file + ":" + at + ": " + problem.message());
     }
-    return !decoded.problems().isEmpty();
+    return !problems.isEmpty();
   }
 }

@@ -18,13 +18,24 @@ final class Announcements {
         + " checked in it. Please close and reopen the file.";
   }
 
+  static String unreadable(Path file) {
+    return file.getFileName()
+        + ": there is no such text file, so it cannot be paired. Check the name.";
+  }
+
+  static String alone(Path file) {
+    return file.getFileName()
+        + ": this file is in no pair, so it cannot be marked. Pair it with its source first.";
+  }
+
   static String choice(Ambiguity question) {
     List<String> files = question.files();
     String more = files.size() > MOST_FILES ? " and " + (files.size() - MOST_FILES) + " more" : "";
     return "Choose the source language: which of "
         + files.stream().limit(MOST_FILES).collect(Collectors.joining(", "))
         + more
-        + " is the source cannot be told. Set tallystick.sourceLanguage to one of: "
+        + " is the source cannot be told."
+        + " Set \"sourceLanguage\" in tallystick.json or tallystick.sourceLanguage to one of: "
         + question.choices().stream().map(Language::tag).collect(Collectors.joining(", "))
         + ".";
   }

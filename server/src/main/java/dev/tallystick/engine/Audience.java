@@ -5,6 +5,20 @@ public interface Audience {
   /** The findings of a file are now these. */
   void publish(Publication publication);
 
+  /**
+   * Many pairs are being examined.
+   *
+   * @param done so many are examined; all of them at the end
+   * @param total of so many
+   */
+  void pass(int done, int total);
+
+  /** A pair has come so far: told when it is another figure than before. */
+  void stands(Standing standing);
+
+  /** All that came of one event is told, and who could be answered is answered. */
+  void turned();
+
   /** Something the user should know; shown once, in full sentences. */
   void say(String message);
 

@@ -2,6 +2,7 @@ package dev.tallystick.engine;
 
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
+import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalInt;
@@ -17,6 +18,7 @@ import java.util.TreeSet;
 final class Bulletin implements Uris {
   private final Map<Path, Publication> last = new TreeMap<>();
   private final Map<Path, String> names = new TreeMap<>();
+  private final Map<Path, Grounds> grounds = new TreeMap<>();
   private final Audience audience;
 
   Bulletin(Audience audience) {
@@ -31,7 +33,35 @@ final class Bulletin implements Uris {
           new Publication(before.uri(), OptionalInt.empty(), before.text(), List.of()));
       last.remove(file);
     }
-    names.put(file, uri);
+    if (!uri.equals(names.put(file, uri))) {
+      grounds.clear(); // others may point at this one
+    }
+  }
+
+  /**
+   * Whether all that a file's notices rest on is as it was when they were published last.
+   *
+   * @param now the objects; the same ones for as long as nothing changes
+   */
+  boolean rests(Path file, List<Object> now) {
+    Grounds before = grounds.put(file, new Grounds(now));
+    return before != null && before.same(now);
+  }
+
+  /** What a publication rests on. */
+  private record Grounds(List<Object> objects) {
+    boolean same(List<Object> others) {
+      boolean same = objects.size() == others.size();
+      for (int i = 0; same && i < others.size(); i++) {
+        same = objects.get(i) == others.get(i); // comparing texts would cost more than it saves
+      }
+      return same;
+    }
+  }
+
+  /** Nothing is to be shown in any other file than these, nor is anything. */
+  void retain(Collection<Path> files) {
+    grounds.keySet().retainAll(files);
   }
 
   @Override

@@ -18,6 +18,7 @@ import java.util.stream.Collectors;
  * @param side the side that was asked about
  * @param here the text of that side
  * @param there the text of the other
+ * @param state how it stands with the sentence; nobody has got yet to a file without sentences
  * @param sentence the sentence at the place; empty, at the start, in a file without sentences
  * @param match all sentences on this side that share a counterpart with it, in order; itself alone
  *     if it has none
@@ -32,6 +33,7 @@ public record Counterpart(
     OnSide side,
     Text here,
     Text there,
+    State state,
     Span sentence,
     List<Span> match,
     List<Span> counterpart,
@@ -69,7 +71,7 @@ public record Counterpart(
     private Counterpart moved(Move move) {
       Segment here = segment(move, side);
       Segment there = segment(move, side.other());
-      return counterpart(here.span(), List.of(here), List.of(there), there.span());
+      return counterpart(State.MOVED, here.span(), List.of(here), List.of(there), there.span());
     }
 
     private Counterpart inPlace(int index) {
@@ -79,24 +81,26 @@ public record Counterpart(
         at++;
       }
       if (index < 0 || at == matches.size()) {
-        return counterpart(new Span(0, 0), List.of(), List.of(), new Span(0, 0));
+        return counterpart(State.PENDING, new Span(0, 0), List.of(), List.of(), new Span(0, 0));
       }
       Match match = matches.get(at);
       Segment segment = mine().get(index);
+      State state = States.of(result).at(side, index);
       if (match.twoSided()) {
         List<Segment> theirs = segments(match, side.other());
-        return counterpart(segment.span(), segments(match, side), theirs, cover(theirs));
+        return counterpart(state, segment.span(), segments(match, side), theirs, cover(theirs));
       }
-      return counterpart(segment.span(), List.of(segment), List.of(), gapBefore(at));
+      return counterpart(state, segment.span(), List.of(segment), List.of(), gapBefore(at));
     }
 
     private Counterpart counterpart(
-        Span sentence, List<Segment> match, List<Segment> counterpart, Span jump) {
+        State state, Span sentence, List<Segment> match, List<Segment> counterpart, Span jump) {
       return new Counterpart(
           files,
           side,
           result.reading(side).text(),
           result.reading(side.other()).text(),
+          state,
           sentence,
           match.stream().map(Segment::span).toList(),
           counterpart.stream().map(Segment::span).toList(),

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import java.io.IOException;
 import java.nio.file.FileVisitResult;
@@ -26,29 +27,22 @@ public interface Disk {
   byte[] read(Path file) throws Unreadable;
 
   /**
-   * The files in a folder, however deep, whose names have the extension of a format; hidden files
-   * and folders are passed over, and links that lead out of the folder. Sorted.
+   * The files in a folder, however deep, whose names have the extension of a format, and right in
+   * it its {@code tallystick.json}; hidden files and folders are passed over, and links that lead
+   * out of the folder. Sorted.
    *
    * @throws Unreadable if the folder cannot be listed
    */
   List<Path> files(Path folder) throws Unreadable;
 
   /**
-   * The same, of the upper part of a folder only.
-   *
-   * @throws Unreadable if the folder cannot be listed
-   */
-  default List<Path> files(Folder folder) throws Unreadable {
-    return files(folder.path()).stream().filter(folder::holds).toList();
-  }
-
-  /**
-   * The same, with a message for each folder or file on the way that cannot be looked into.
+   * The same, of a folder or its upper part, with a message for each folder or file on the way that
+   * cannot be looked into.
    *
    * @throws Unreadable if the folder itself cannot be listed
    */
-  default List<Path> files(Path folder, Consumer<String> unread) throws Unreadable {
-    return files(folder);
+  default List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
+    return files(folder.path()).stream().filter(folder::holds).toList();
   }
 
   /** The disk of this machine. */
@@ -76,20 +70,11 @@ public interface Disk {
 
     @Override
     public List<Path> files(Path folder) throws Unreadable {
-      return files(new Folder(folder, Folder.DEEP));
+      return files(new Folder(folder, Folder.DEEP), message -> {});
     }
 
     @Override
-    public List<Path> files(Folder folder) throws Unreadable {
-      return files(folder, message -> {});
-    }
-
-    @Override
-    public List<Path> files(Path folder, Consumer<String> unread) throws Unreadable {
-      return files(new Folder(folder, Folder.DEEP), unread);
-    }
-
-    private static List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
+    public List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
       List<Path> found = new ArrayList<>();
       Path path = folder.path();
       try {
@@ -103,7 +88,7 @@ public interface Disk {
     }
   }
 
-  /** Collects files of known formats. */
+  /** Collects files of known formats, and the facts of the project. */
   final class Collector extends SimpleFileVisitor<Path> {
     private final Path folder;
     private final Path root;
@@ -125,9 +110,11 @@ public interface Disk {
 
     @Override
     public FileVisitResult visitFile(Path file, BasicFileAttributes attributes) throws IOException {
-      boolean ours =
-          !Folder.hides(file) && Format.ofName(file.getFileName().toString()).isPresent();
-      if (ours && (attributes.isSymbolicLink() ? staysInside(file) : attributes.isRegularFile())) {
+      boolean prose = Format.ofName(file.getFileName().toString()).isPresent();
+      boolean ours = file.equals(folder.resolve(ProjectFile.NAME)) || prose;
+      if (ours
+          && !Folder.hides(file)
+          && (attributes.isSymbolicLink() ? staysInside(file) : attributes.isRegularFile())) {
         found.add(file);
       }
       return FileVisitResult.CONTINUE;

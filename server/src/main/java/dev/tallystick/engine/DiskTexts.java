@@ -6,10 +6,12 @@ import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Collection;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.Set;
 import java.util.TreeMap;
 import java.util.function.Consumer;
 
@@ -23,6 +25,7 @@ import java.util.function.Consumer;
  */
 final class DiskTexts {
   private final Map<Path, Optional<Decoded>> known = new TreeMap<>();
+  private final Set<Path> touched = new HashSet<>();
   private final Map<Path, Half> halves = new TreeMap<>();
   private final Map<Path, String> told = new TreeMap<>();
   private final Disk disk;
@@ -48,19 +51,25 @@ final class DiskTexts {
     return decoded(file).map(Decoded::problems).orElse(List.of());
   }
 
+  /** Why a file cannot be read, if it could not be when it was looked at last. */
+  Optional<String> trouble(Path file) {
+    return Optional.ofNullable(told.get(file));
+  }
+
   private Optional<Decoded> decoded(Path file) {
-    Optional<Decoded> decoded = known.get(file);
-    if (decoded == null) {
-      decoded = read(file);
-      known.put(file, decoded);
+    if (!known.containsKey(file)) {
+      known.put(file, read(file));
+    } else if (touched.remove(file)) {
+      reread(file);
     }
-    return decoded;
+    return known.get(file);
   }
 
   /** Nobody needs these files any more. */
   void forget(Collection<Path> files) {
     known.keySet().removeAll(files);
     halves.keySet().removeAll(files);
+    touched.removeAll(files);
     told.keySet().removeAll(files);
   }
 
@@ -69,11 +78,19 @@ final class DiskTexts {
     return List.copyOf(known.keySet());
   }
 
-  /** A file has been written, perhaps. */
+  /** Whether the text of a file is at hand, so that the disk need not be asked. */
+  boolean knows(Path file) {
+    return known.containsKey(file) && !touched.contains(file);
+  }
+
+  /** A file has been written, perhaps; it is read when somebody wants its text. */
   void changed(Path file) {
-    if (!known.containsKey(file)) {
-      return;
+    if (known.containsKey(file)) {
+      touched.add(file);
     }
+  }
+
+  private void reread(Path file) {
     Optional<Decoded> now = read(file);
     if (!looksHalf(known.get(file), now)) {
       halves.remove(file);
@@ -87,7 +104,7 @@ final class DiskTexts {
   void settle(long rest) {
     for (Map.Entry<Path, Half> entry : List.copyOf(halves.entrySet())) {
       Path file = entry.getKey();
-      changed(file);
+      reread(file);
       Half half = halves.get(file);
       if (half != null && alarm.millis() - half.since() >= rest) {
         halves.remove(file);

@@ -12,25 +12,32 @@ import java.util.OptionalInt;
  * knows what the editor shows, until it sends the whole text again.
  */
 final class Document {
+  private final String language;
   private int version;
   private Text text;
   private boolean lost;
   private boolean announced;
   private boolean due = true;
 
-  private Document(int version, Text text, boolean lost) {
+  private Document(String language, int version, Text text, boolean lost) {
+    this.language = language;
     this.version = version;
     this.text = text;
     this.lost = lost;
   }
 
-  static Document opened(int version, Text text) {
-    return new Document(version, text, false);
+  /**
+   * One that the editor shows.
+   *
+   * @param language what the editor takes it for, as LSP names it; may be empty
+   */
+  static Document opened(String language, int version, Text text) {
+    return new Document(language, version, text, false);
   }
 
   /** One that is edited though it was never opened. Nothing is known of it. */
   static Document unknown() {
-    return new Document(0, new Text(""), true);
+    return new Document("", 0, new Text(""), true);
   }
 
   /**
@@ -69,6 +76,11 @@ final class Document {
   private int replace(Span span, String replacement) {
     text = text.with(new Edit(span, replacement));
     return span.start() + replacement.length();
+  }
+
+  /** What the editor takes it for, as LSP names it; may be empty. */
+  String language() {
+    return language;
   }
 
   int version() {

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.pairing.Language;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
@@ -13,9 +14,10 @@ public sealed interface Event {
    * @param file the file, which need not exist yet
    * @param uri how the editor names it, kept as it is
    * @param version the editor's number for the text
+   * @param language what the editor takes it for, as LSP names it; may be empty
    * @param text the text in the editor
    */
-  record Opened(Path file, String uri, int version, Text text) implements Event {}
+  record Opened(Path file, String uri, int version, String language, Text text) implements Event {}
 
   /**
    * A text was edited in the editor.
@@ -54,6 +56,33 @@ public sealed interface Event {
   record SettingsChanged(Settings settings) implements Event {}
 
   /**
+   * The user says that two files belong together.
+   *
+   * @param source the source
+   * @param target its translation
+   * @param sourceLanguage its language, if the user names it
+   * @param targetLanguage its language, if the user names it
+   */
+  record Paired(
+      Path source,
+      Path target,
+      Optional<Language> sourceLanguage,
+      Optional<Language> targetLanguage)
+      implements Event {}
+
+  /** The user says that a translation, or all of a source, are finished, or drafts again. */
+  record Marked(Path file, boolean finished) implements Event {}
+
+  /** The user wants all pairs looked at: those of one folder, or of all. */
+  record FolderWanted(Optional<Path> folder) implements Event {}
+
+  /** The user wants only the open pairs looked at, and no more of the others. */
+  record FoldersDeclined() implements Event {}
+
+  /** Files or folders have other names now. */
+  record Renamed(Renaming renaming) implements Event {}
+
+  /**
    * A worker is done with a pair.
    *
    * @param task what it was given
@@ -66,9 +95,9 @@ public sealed interface Event {
   /**
    * A worker has listed a folder.
    *
-   * @param trouble why that cannot be done, for the log; then there are no files
+   * @param troubles what in it cannot be looked into, and why, for the log
    */
-  record Listed(Path folder, List<Path> files, Optional<String> trouble) implements Event {}
+  record Listed(Path folder, List<Path> files, List<String> troubles) implements Event {}
 
   /** A moment has come that someone waits for. Who, the state tells. */
   record TimerDue() implements Event {}

@@ -3,6 +3,7 @@ package dev.tallystick.engine;
 import dev.tallystick.check.OnSide;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Pair;
+import dev.tallystick.pairing.Why;
 import java.nio.file.Path;
 import java.util.Comparator;
 
@@ -13,21 +14,30 @@ import java.util.Comparator;
  * @param target its translation, absolute
  * @param sourceLanguage language of the source
  * @param targetLanguage language of the translation
+ * @param why how the two were found to belong together
  */
-public record FilePair(Path source, Path target, Language sourceLanguage, Language targetLanguage)
+public record FilePair(
+    Path source, Path target, Language sourceLanguage, Language targetLanguage, Why why)
     implements Comparable<FilePair> {
   private static final Comparator<FilePair> ORDER =
       Comparator.comparing(FilePair::source)
           .thenComparing(FilePair::targetLanguage)
           .thenComparing(FilePair::target)
-          .thenComparing(FilePair::sourceLanguage);
+          .thenComparing(FilePair::sourceLanguage)
+          .thenComparing(FilePair::why);
+
+  /** Two that the user named. */
+  public FilePair(Path source, Path target, Language sourceLanguage, Language targetLanguage) {
+    this(source, target, sourceLanguage, targetLanguage, Why.ARGUMENT);
+  }
 
   static FilePair of(Listing listing, Pair pair) {
     return new FilePair(
         listing.file(pair.source()),
         listing.file(pair.target()),
         pair.sourceLanguage(),
-        pair.targetLanguage());
+        pair.targetLanguage(),
+        pair.why());
   }
 
   /** The file on a side. */

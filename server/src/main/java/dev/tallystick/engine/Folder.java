@@ -1,5 +1,7 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.project.Names;
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import java.nio.file.Path;
 
@@ -20,7 +22,8 @@ public record Folder(Path path, int depth) {
 
   /** Whether a list of its files has a file, if there is such a file. */
   boolean lists(Path file) {
-    if (!holds(file) || Format.ofName(String.valueOf(file.getFileName())).isEmpty()) {
+    boolean prose = Format.ofName(String.valueOf(file.getFileName())).isPresent();
+    if (!holds(file) || !prose && !file.equals(path.resolve(ProjectFile.NAME))) {
       return false;
     }
     for (Path name : path.relativize(file)) {
@@ -33,7 +36,6 @@ public record Folder(Path path, int depth) {
 
   /** Whether files of this name, or in a folder of this name, are passed over. */
   static boolean hides(Path path) {
-    String name = String.valueOf(path.getFileName());
-    return name.startsWith(".") || name.equals("node_modules");
+    return Names.hides(String.valueOf(path.getFileName()));
   }
 }

@@ -5,6 +5,7 @@ import static java.nio.file.StandardWatchEventKinds.ENTRY_DELETE;
 import static java.nio.file.StandardWatchEventKinds.ENTRY_MODIFY;
 import static java.nio.file.StandardWatchEventKinds.OVERFLOW;
 
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Threads;
 import java.io.IOException;
@@ -177,14 +178,17 @@ final class FolderWatch implements Watch {
       listing |= event.kind() != ENTRY_MODIFY;
       if (event.kind() == ENTRY_CREATE && Files.isDirectory(path)) {
         walker.execute(() -> addInside(path));
-      } else if (event.kind() == ENTRY_DELETE
-          || Format.ofName(path.getFileName().toString()).isPresent()) {
+      } else if (event.kind() == ENTRY_DELETE || matters(path.getFileName().toString())) {
         files.add(path);
       }
     }
     if (!files.isEmpty()) {
       post.accept(new Event.FilesChanged(files, listing));
     }
+  }
+
+  private static boolean matters(String name) {
+    return Format.ofName(name).isPresent() || name.equals(ProjectFile.NAME);
   }
 
   /** A folder has appeared in a watched one. */

@@ -6,14 +6,14 @@ import java.lang.Character.UnicodeScript;
 import java.util.Optional;
 
 /** Where to show that nothing stands at a place: editors draw no empty stretch. */
-final class Gap {
+public final class Gap {
   /** Where no blanks are written a run of letters is no word but half a sentence. */
   private static final int LONGEST = 20;
 
   private Gap() {}
 
   /** The word that ends at or before a place, else the first one behind it; empty without any. */
-  static Optional<Span> word(String text, int place) {
+  public static Optional<Span> word(String text, int place) {
     int end = place;
     while (end > 0 && !inWord(text.codePointBefore(end))) {
       end -= Character.charCount(text.codePointBefore(end));

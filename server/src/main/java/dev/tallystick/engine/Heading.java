@@ -14,15 +14,6 @@ import java.util.List;
  */
 public record Heading(
     String title, Span span, Span section, List<Count> counts, List<Heading> inside) {
-  /**
-   * The sentences of a section in one pair.
-   *
-   * @param language the English name of the other side's language
-   * @param matched those that have a counterpart
-   * @param sentences all of them, the heading's own included
-   */
-  public record Count(String language, int matched, int sentences) {}
-
   /** Keeps the lists unchangeable. */
   public Heading {
     counts = List.copyOf(counts);

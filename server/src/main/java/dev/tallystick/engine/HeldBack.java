@@ -7,6 +7,7 @@ import dev.tallystick.text.Edit;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * Which findings are not shown yet: new ones about the sentence that is being written. Nobody wants
@@ -54,17 +55,24 @@ final class HeldBack {
    * Findings as they were shown, with the texts they were found in.
    *
    * @param findings the findings
-   * @param source the source then
-   * @param target the translation then
+   * @param in all that was found then
    */
-  record Shown(List<Finding> findings, Text source, Text target) {
-    static final Shown NOTHING = new Shown(List.of(), new Text(""), new Text(""));
+  record Shown(List<Finding> findings, Optional<PairResult> in) {
+    static final Shown NOTHING = new Shown(List.of(), Optional.empty());
+
+    Shown(List<Finding> findings, PairResult in) {
+      this(findings, Optional.of(in));
+    }
+
+    /** Whether it is these findings in these texts. */
+    boolean is(List<Finding> others, PairResult inOthers) {
+      return in.filter(result -> result == inOthers).isPresent() && findings.equals(others);
+    }
 
     /** Whether a finding is one of these, whatever has been edited since. */
     boolean has(Finding finding, PairResult now) {
-      boolean onSource = finding.side() == OnSide.SOURCE;
-      Edit since =
-          Differences.between(onSource ? source : target, now.reading(finding.side()).text());
+      Text before = in.map(result -> result.reading(finding.side()).text()).orElse(new Text(""));
+      Edit since = Differences.between(before, now.reading(finding.side()).text());
       return findings.stream()
           .filter(old -> old.code() == finding.code() && old.side() == finding.side())
           .anyMatch(old -> touches(old.span(), since, finding.span()));

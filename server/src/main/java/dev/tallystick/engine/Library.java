@@ -1,14 +1,19 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.check.Levels;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.Collection;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.OptionalLong;
 import java.util.Set;
+import java.util.stream.Stream;
 
 /**
  * The files that matter: what stands in them, and which belong together. Keeps the folders that
@@ -33,7 +38,7 @@ final class Library {
     shelf.open(file, document);
     workspace
         .root(file)
-        .filter(root -> root.folder().lists(file) && !root.files().contains(file))
+        .filter(root -> root.folder().lists(file) && !root.has(file))
         .filter(root -> root.request(true))
         .ifPresent(this::list);
     foldersMoved();
@@ -54,11 +59,52 @@ final class Library {
   /** What the user has set counts from now on. */
   void rules(Settings settings) {
     workspace.rules(settings.rules());
+    workspace.scope(settings.folders());
   }
 
-  /** A worker has listed a folder. */
-  void listed(Event.Listed listed) {
+  /**
+   * The user says that two files belong together.
+   *
+   * @return a file that cannot be read; then they do not
+   */
+  Optional<Path> pair(Event.Paired paired) {
+    for (Path file : List.of(paired.source(), paired.target())) {
+      if (shelf.text(file).isEmpty()) {
+        return Optional.of(file);
+      }
+    }
+    workspace.pair(paired);
+    foldersMoved();
+    return Optional.empty();
+  }
+
+  /** All pairs of a folder, or of all folders, are wanted from now on. */
+  void want(Optional<Path> folder) {
+    workspace.want(folder);
+  }
+
+  /** Only the open pairs are wanted from now on. */
+  void decline() {
+    workspace.decline();
+  }
+
+  /** Files or folders have other names. */
+  void rename(Renaming renaming) {
+    workspace.rename(renaming);
+    List<Path> files = new ArrayList<>(renaming.names().keySet());
+    files.addAll(renaming.names().values());
+    reread(new Event.FilesChanged(files, true));
+  }
+
+  /**
+   * A worker has listed a folder.
+   *
+   * @return what could not be looked into, as far as it was not told before
+   */
+  List<String> listed(Event.Listed listed) {
+    List<String> news = workspace.news(listed.folder(), listed.troubles());
     workspace.listed(listed.folder(), listed.files()).ifPresent(this::list);
+    return news;
   }
 
   /** Files were written: reads those that matter, and lists the folders that may have others. */
@@ -105,9 +151,30 @@ final class Library {
     return workspace.root(file).filter(Root::awaited).isEmpty();
   }
 
-  /** The pairs with an open side, sorted. */
+  /** Whether it is known which files there are in all folders that wanted pairs may be in. */
+  boolean complete() {
+    return workspace.complete();
+  }
+
+  /** Whether the editor shows a side of a pair. */
+  boolean shows(FilePair pair) {
+    return shelf.open().contains(pair.source()) || shelf.open().contains(pair.target());
+  }
+
+  /** Whether both texts of a pair are at hand, so that the disk need not be asked. */
+  boolean knows(FilePair pair) {
+    return shelf.knows(pair.source()) && shelf.knows(pair.target());
+  }
+
+  /** The pairs that are wanted, sorted: those with an open side, or all in some folders. */
   List<FilePair> pairs() {
+    workspace.readProjects(shelf);
     return workspace.pairs();
+  }
+
+  /** How loudly findings in a pair are said. */
+  Levels levels(FilePair pair) {
+    return workspace.levels(pair);
   }
 
   /** What the user has to be asked about the open files, and has not been. */
@@ -125,6 +192,15 @@ final class Library {
     return shelf.document(file);
   }
 
+  /** The editor's number for the text of a file; empty if it does not show the file. */
+  OptionalInt version(Path file) {
+    return shelf
+        .document(file)
+        .map(Document::version)
+        .map(OptionalInt::of)
+        .orElse(OptionalInt.empty());
+  }
+
   /** The text of a file; empty if it cannot be read or is lost. */
   Optional<Text> text(Path file) {
     return shelf.text(file);
@@ -135,13 +211,35 @@ final class Library {
     return shelf.problems(file);
   }
 
+  /** What is wrong in a file that settles what holds in a folder; nothing in any other. */
+  List<Problem> flaws(Path file) {
+    return projects()
+        .filter(project -> project.file().equals(file))
+        .flatMap(project -> project.problems(shelf).stream())
+        .toList();
+  }
+
+  /** The files that something is wrong in that {@link #flaws} tells. */
+  List<Path> flawed() {
+    return projects()
+        .filter(project -> !project.problems(shelf).isEmpty())
+        .map(FolderProject::file)
+        .toList();
+  }
+
+  private Stream<FolderProject> projects() {
+    return workspace.roots().stream().map(Root::project);
+  }
+
   /** The sheet of the current text; the same one as long as the text stays the same. */
   Optional<Sheet> sheet(Path file, String language) {
     return shelf.sheet(file, language);
   }
 
-  /** Forgets what is known of all files but these. */
+  /** Forgets what is known of all files but these, and those that settle what holds. */
   void retain(Collection<Path> files) {
-    shelf.retain(files);
+    Set<Path> kept = new HashSet<>(files);
+    projects().map(FolderProject::file).forEach(kept::add);
+    shelf.retain(kept);
   }
 }

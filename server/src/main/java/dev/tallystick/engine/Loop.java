@@ -1,20 +1,13 @@
 package dev.tallystick.engine;
 
-import dev.tallystick.check.OnSide;
 import dev.tallystick.run.Fault;
 import dev.tallystick.run.Threads;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalInt;
-import java.util.Set;
-import java.util.TreeMap;
-import java.util.TreeSet;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
-import java.util.stream.Stream;
 
 /**
  * Keeps what is shown in step with what is written.
@@ -54,9 +47,12 @@ public final class Loop implements AutoCloseable {
   private final Library library;
   private final Caret caret;
   private final Bell bell;
-  private final Map<FilePair, PairState> pairs = new TreeMap<>();
+  private final PairStates pairs = new PairStates();
   private final Questions questions = new Questions();
   private final Bulletin bulletin;
+  private final Display display;
+  private final Pass pass;
+  private final Standings standings;
   private boolean started;
   private boolean set;
   private long turn;
@@ -72,6 +68,9 @@ public final class Loop implements AutoCloseable {
     this.caret = new Caret(machine.alarm());
     this.bell = new Bell(machine.alarm(), () -> post(new Event.TimerDue()));
     this.bulletin = new Bulletin(audience);
+    this.display = new Display(library, pairs, bulletin);
+    this.pass = new Pass(audience);
+    this.standings = new Standings(audience, bulletin);
     this.thread = Threads.daemons("tallystick-loop").newThread(this::run);
   }
 
@@ -132,7 +131,8 @@ public final class Loop implements AutoCloseable {
       caret.lift();
     } else if (event instanceof Event.Opened opened) {
       bulletin.name(opened.file(), opened.uri());
-      library.open(opened.file(), Document.opened(opened.version(), opened.text()));
+      library.open(
+          opened.file(), Document.opened(opened.language(), opened.version(), opened.text()));
     } else if (event instanceof Event.Closed closed) {
       library.close(closed.file());
       caret.closed(closed.file());
@@ -146,10 +146,12 @@ public final class Loop implements AutoCloseable {
     if (event instanceof Event.FilesChanged changed) {
       library.reread(changed);
     } else if (event instanceof Event.Listed listed) {
-      library.listed(listed);
-      listed.trouble().ifPresent(audience::log);
+      library.listed(listed).forEach(audience::log);
     } else if (event instanceof Event.FoldersChanged changed) {
       library.change(changed);
+    } else if (event instanceof Event.Renamed renamed) {
+      library.rename(renamed.renaming());
+      pairs.rename(renamed.renaming());
     } else if (event instanceof Event.Begun) {
       started = true;
     } else if (event instanceof Event.SettingsChanged changed) {
@@ -157,6 +159,23 @@ public final class Loop implements AutoCloseable {
       set = true;
       library.rules(changed.settings());
       caret.rest(changed.settings().restMillis());
+    } else {
+      handleCommand(event);
+    }
+  }
+
+  /** What the user wants done. */
+  private void handleCommand(Event event) {
+    if (event instanceof Event.Paired paired) {
+      library.pair(paired).map(Announcements::unreadable).ifPresent(audience::say);
+    } else if (event instanceof Event.Marked marked) {
+      if (!pairs.mark(marked.file(), marked.finished())) {
+        audience.say(Announcements.alone(marked.file()));
+      }
+    } else if (event instanceof Event.FolderWanted wanted) {
+      library.want(wanted.folder());
+    } else if (event instanceof Event.FoldersDeclined) {
+      library.decline();
     }
   }
 
@@ -168,7 +187,7 @@ public final class Loop implements AutoCloseable {
     }
     Document document = library.document(file).orElseThrow();
     OptionalInt end = document.edit(edited.version(), edited.changes());
-    questions.edited(file, pairs.keySet());
+    questions.edited(file, pairs.pairs());
     if (document.announcesLoss()) {
       audience.say(Announcements.lost(file));
     }
@@ -178,20 +197,13 @@ public final class Loop implements AutoCloseable {
   /** The translator has written something that ends at an offset. */
   private void write(Path file, int offset) {
     caret.edited(file, offset);
-    for (PairState pair : pairs.values()) {
-      if (pair.files().target().equals(file)) {
-        pair.edited(turn);
-      }
-    }
+    pairs.edited(file, turn);
   }
 
   private void finish(Event.Examined examined) {
-    Task task = examined.task();
-    PairState state = pairs.get(task.files());
-    if (state != null) {
-      state.finish(task, examined.result());
-    }
-    examined.fault().ifPresent(fault -> audience.log(Announcements.fault(task.files(), fault)));
+    pairs.finish(examined);
+    FilePair files = examined.task().files();
+    examined.fault().ifPresent(fault -> audience.log(Announcements.fault(files, fault)));
   }
 
   /** Brings everything in line with what is known now. */
@@ -199,100 +211,31 @@ public final class Loop implements AutoCloseable {
     if (!started) {
       return;
     }
+    if (pairs.keep(library.pairs())) {
+      library.retain(pairs.files());
+    }
+    pairs.take(library, workers);
+    pass.left(pairs.unsettled());
+    pairs.show(caret.last());
+    display.update();
+    standings.tell(pairs.all());
+    questions.answer(library.open(), this::ready, this::answer);
     caret.due().ifPresent(bell::at);
     library.due(caret.restMillis()).ifPresent(bell::at);
-    keepWantedPairs();
-    for (PairState pair : pairs.values()) {
-      pair.take(sheet(pair, OnSide.SOURCE), sheet(pair, OnSide.TARGET)).ifPresent(workers::examine);
-      pair.show(caret.last());
-    }
-    questions.answer(library.open(), this::ready, this::answer);
-    publish();
     if (set) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));
     }
-  }
-
-  private void keepWantedPairs() {
-    List<FilePair> wanted = library.pairs();
-    if (wanted.equals(List.copyOf(pairs.keySet()))) {
-      return;
-    }
-    Set<FilePair> gone = new TreeSet<>(pairs.keySet());
-    wanted.forEach(gone::remove);
-    gone.forEach(pair -> pairs.remove(pair).drop());
-    wanted.forEach(pair -> pairs.computeIfAbsent(pair, PairState::new));
-    library.retain(pairedFiles());
-  }
-
-  private Optional<Sheet> sheet(PairState pair, OnSide side) {
-    return library.sheet(pair.files().file(side), pair.files().language(side).tag());
-  }
-
-  private Set<Path> pairedFiles() {
-    Set<Path> files = new TreeSet<>();
-    for (FilePair pair : pairs.keySet()) {
-      files.add(pair.source());
-      files.add(pair.target());
-    }
-    return files;
-  }
-
-  /** Whether all is known that there is to know of the current text of a file. */
-  private boolean ready(Path file) {
-    return library.listed(file) && pairsOf(file).allMatch(PairState::settled);
-  }
-
-  private Stream<PairState> pairsOf(Path file) {
-    return pairs.values().stream().filter(pair -> pair.files().has(file));
+    audience.turned();
   }
 
   /** Whether a question can be answered. */
   private boolean ready(Question question) {
-    return library.listed(question.file()) && pairsOf(question).allMatch(PairState::settled);
-  }
-
-  private Stream<PairState> pairsOf(Question question) {
-    return question.pairs(pairs.keySet()).stream().map(pairs::get);
+    boolean listed = question.aboutText() ? library.listed(question.file()) : library.complete();
+    return listed && pairs.of(question).allMatch(PairState::settled);
   }
 
   private Known answer(Question question, Text text) {
-    List<Settled> known = pairsOf(question).flatMap(pair -> pair.known().stream()).toList();
-    return new Known(question.file(), text, known, bulletin);
-  }
-
-  private void publish() {
-    Set<Path> files = pairedFiles();
-    files.addAll(bulletin.files());
-    files.addAll(library.open());
-    for (Path file : files) {
-      if (ready(file)) {
-        publish(file);
-      }
-    }
-  }
-
-  private Stream<Notice> findings(PairState pair, Path file) {
-    return pair.notices(pair.files().side(file), bulletin).stream();
-  }
-
-  private Stream<Notice> faults(Path file) {
-    return library.problems(file).stream().map(Notice::of);
-  }
-
-  private void publish(Path file) {
-    List<Notice> notices =
-        pairsOf(file)
-            .flatMap(pair -> Stream.concat(findings(pair, file), faults(file)))
-            .sorted()
-            .distinct()
-            .toList();
-    Optional<Document> document = library.document(file);
-    if (document.isPresent()) {
-      bulletin.publish(file, document.get(), notices);
-    } else {
-      Optional<Text> text = notices.isEmpty() ? Optional.empty() : library.text(file);
-      bulletin.publish(file, text.orElse(new Text("")), notices);
-    }
+    List<Settled> known = pairs.of(question).flatMap(pair -> pair.known().stream()).toList();
+    return new Known(question.file(), text, known, bulletin, library::version);
   }
 }

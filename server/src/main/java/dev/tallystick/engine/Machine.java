@@ -31,7 +31,7 @@ public record Machine(
         Disk.REAL,
         Alarm.ofMachine(),
         new Activity(),
-        Examiner.DRAFT,
+        Examiner.ADAPTIVE,
         workers,
         FolderWatch::open,
         false);

@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.check.Code;
+import dev.tallystick.check.Severity;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
@@ -12,11 +13,13 @@ import java.util.Optional;
  * A finding as one of the two files shows it, or a fault of the file itself.
  *
  * @param code the kind of the finding; none of a fault of the file
+ * @param severity how loudly it is said
  * @param span where to show it, never empty, in UTF-16 offsets
  * @param message what to say there
  * @param related the place in the other file, if there is one to point at
  */
-public record Notice(Optional<Code> code, Span span, String message, Optional<Related> related)
+public record Notice(
+    Optional<Code> code, Severity severity, Span span, String message, Optional<Related> related)
     implements Comparable<Notice> {
   private static final Comparator<Notice> ORDER =
       Comparator.comparing(Notice::span)
@@ -26,7 +29,8 @@ public record Notice(Optional<Code> code, Span span, String message, Optional<Re
 
   /** A fault of the file itself. */
   static Notice of(Problem problem) {
-    return new Notice(Optional.empty(), problem.span(), problem.message(), Optional.empty());
+    return new Notice(
+        Optional.empty(), Severity.WARNING, problem.span(), problem.message(), Optional.empty());
   }
 
   /**

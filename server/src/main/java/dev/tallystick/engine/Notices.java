@@ -47,13 +47,17 @@ final class Notices {
     OnSide other = finding.side().other();
     Optional<Notice.Related> related =
         place(finding).map(place -> related(other, place, counterWords(finding)));
-    return new Notice(Optional.of(finding.code()), finding.span(), finding.message(), related);
+    return notice(finding, finding.span(), finding.message(), related);
   }
 
   private Notice atCounterpart(Finding finding, Span place) {
     Notice.Related source = related(finding.side(), finding.span(), "The source sentence");
-    return new Notice(
-        Optional.of(finding.code()), place, finding.counterMessage(), Optional.of(source));
+    return notice(finding, place, finding.counterMessage(), Optional.of(source));
+  }
+
+  private static Notice notice(
+      Finding finding, Span span, String message, Optional<Notice.Related> related) {
+    return new Notice(Optional.of(finding.code()), finding.severity(), span, message, related);
   }
 
   private static String counterWords(Finding finding) {

@@ -21,7 +21,7 @@ final class Outline {
       return List.of();
     }
     List<Section> sections = Section.of(pairs.get(0).reading(file));
-    List<Tally> tallies = pairs.stream().map(pair -> Tally.of(pair, file)).toList();
+    List<Tally> tallies = pairs.stream().map(pair -> pair.tally(file)).toList();
     return new Outline(sections, tallies).before(Integer.MAX_VALUE);
   }
 

@@ -4,7 +4,9 @@ import dev.tallystick.align.Aligner;
 import dev.tallystick.align.Alignment;
 import dev.tallystick.check.Checks;
 import dev.tallystick.check.Finding;
+import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
+import dev.tallystick.check.Pending;
 import dev.tallystick.check.Progress;
 import dev.tallystick.check.Subject;
 import dev.tallystick.run.Cancellation;
@@ -17,6 +19,7 @@ import java.util.List;
  * @param target the translation, read
  * @param alignment which sentences stand for which
  * @param findings what is worth telling, the source's first
+ * @param pending which source sentences nobody has got to yet
  * @param progress how far the translation has come
  */
 public record PairResult(
@@ -24,6 +27,7 @@ public record PairResult(
     Reading target,
     Alignment alignment,
     List<Finding> findings,
+    Pending pending,
     Progress progress) {
   /**
    * Aligns and checks: a pure function of its arguments.
@@ -35,8 +39,14 @@ public record PairResult(
     Alignment alignment = aligner.align(source.units(), target.units(), cancellation);
     Subject subject =
         new Subject(source.segments(), target.segments(), target.language(), alignment, draft);
-    return new PairResult(
-        source, target, alignment, Checks.findings(subject), Progress.of(subject));
+    Pending pending = Pending.of(subject);
+    List<Finding> findings = Checks.findings(subject, pending);
+    return new PairResult(source, target, alignment, findings, pending, Progress.of(subject));
+  }
+
+  /** The same with the findings that a project wants to hear of, as loudly as it wants. */
+  public PairResult at(Levels levels) {
+    return new PairResult(source, target, alignment, levels.apply(findings), pending, progress);
   }
 
   /** One of the two texts, read. */

@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.check.Finding;
+import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
 import java.util.List;
 import java.util.Optional;
@@ -16,7 +17,10 @@ final class PairState {
   private final FilePair files;
   private Task task;
   private boolean running;
+  private boolean waiting;
+  private Optional<PairResult> found = Optional.empty();
   private Optional<PairResult> result = Optional.empty();
+  private Levels levels = Levels.USUAL;
   private HeldBack.Shown shown = HeldBack.Shown.NOTHING;
   private long editedAt;
 
@@ -30,24 +34,43 @@ final class PairState {
 
   /** Whether nothing more is to come for the current texts. */
   boolean settled() {
-    return !running;
+    return !running && !waiting;
+  }
+
+  /** Whether a worker has it. */
+  boolean running() {
+    return running;
+  }
+
+  /** Its texts may be others by now, but its turn has not come. */
+  void await() {
+    waiting = true;
+  }
+
+  /** Whether all is as it was when the texts were taken. */
+  boolean current(Optional<Sheet> source, Optional<Sheet> target, boolean draft) {
+    if (source.isEmpty() || target.isEmpty()) {
+      return task == null;
+    }
+    return task != null && task.isAbout(source.get(), target.get(), draft);
   }
 
   /**
    * Takes the current texts; whatever was found in others, or is being looked for, is dropped.
    *
+   * @param draft whether the translation is still being written
    * @return work to be done, if the texts are new and both there
    */
-  Optional<Task> take(Optional<Sheet> source, Optional<Sheet> target) {
-    if (source.isEmpty() || target.isEmpty()) {
-      drop();
-      return Optional.empty();
-    }
-    if (task != null && task.source() == source.get() && task.target() == target.get()) {
+  Optional<Task> take(Optional<Sheet> source, Optional<Sheet> target, boolean draft) {
+    waiting = false;
+    if (current(source, target, draft)) {
       return Optional.empty();
     }
     drop();
-    task = new Task(files, source.get(), target.get());
+    if (source.isEmpty() || target.isEmpty()) {
+      return Optional.empty();
+    }
+    task = new Task(files, source.get(), target.get(), draft);
     running = true;
     return Optional.of(task);
   }
@@ -59,15 +82,28 @@ final class PairState {
     }
     task = null;
     running = false;
-    result = Optional.empty();
+    take(Optional.empty());
   }
 
   /** Takes a worker's result, unless the texts have moved on. */
-  void finish(Task done, Optional<PairResult> found) {
+  void finish(Task done, Optional<PairResult> now) {
     if (task == done) {
       running = false;
-      result = found;
+      take(now);
     }
+  }
+
+  /** The project wants findings told so loudly. */
+  void at(Levels now) {
+    if (!now.equals(levels)) {
+      levels = now;
+      take(found);
+    }
+  }
+
+  private void take(Optional<PairResult> now) {
+    found = now;
+    result = now.map(one -> one.at(levels));
   }
 
   /** The pair's translation was edited; the turn tells which pair was edited last. */
@@ -77,7 +113,7 @@ final class PairState {
 
   /** Decides what is to be shown: all findings but those about what is being written. */
   void show(Optional<Caret.Edited> caret) {
-    if (running) {
+    if (!settled()) {
       return;
     }
     if (result.isEmpty()) {
@@ -90,12 +126,19 @@ final class PairState {
             .filter(edited -> files.has(edited.file()))
             .map(edited -> withoutHeld(now, edited))
             .orElse(now.findings());
-    shown = new HeldBack.Shown(findings, now.source().text(), now.target().text());
+    if (!shown.is(findings, now)) {
+      shown = new HeldBack.Shown(findings, now);
+    }
   }
 
   private List<Finding> withoutHeld(PairResult now, Caret.Edited edited) {
     HeldBack held = new HeldBack(now, files.side(edited.file()), edited.offset());
     return now.findings().stream().filter(finding -> !held.holds(finding, shown)).toList();
+  }
+
+  /** The findings that are shown: the same object for as long as nothing about them changes. */
+  HeldBack.Shown shown() {
+    return shown;
   }
 
   /** What a side shows. */

@@ -22,7 +22,9 @@ public final class Question {
     /** To the pairs that the file is in. */
     PAIRS,
     /** Also to the other translations of its source. */
-    FAMILY
+    FAMILY,
+    /** To all pairs of a folder. */
+    FOLDER
   }
 
   /** Takes the answer, on the loop's thread. One of the two is called, once. */
@@ -34,7 +36,7 @@ public final class Question {
     void outdated();
   }
 
-  /** Asks about a file. */
+  /** Asks about a file, or about a folder; the empty path means all folders. */
   public Question(Path file, Reach reach, Reply reply) {
     this.file = file;
     this.reach = reach;
@@ -45,8 +47,17 @@ public final class Question {
     return file;
   }
 
+  /** Whether it is about one text, which has to be open and stay as it is. */
+  boolean aboutText() {
+    return reach != Reach.FOLDER;
+  }
+
   /** Of all pairs those that the answer rests on, in their order. */
   List<FilePair> pairs(Collection<FilePair> all) {
+    if (reach == Reach.FOLDER) {
+      boolean any = file.toString().isEmpty();
+      return all.stream().filter(pair -> any || pair.target().startsWith(file)).toList();
+    }
     List<FilePair> own = all.stream().filter(pair -> pair.has(file)).toList();
     if (reach == Reach.PAIRS) {
       return own;

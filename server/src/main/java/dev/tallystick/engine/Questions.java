@@ -37,7 +37,7 @@ final class Questions {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
       Question question = all.next().question();
       boolean concerned = question.pairs(pairs).stream().anyMatch(pair -> pair.has(file));
-      if (concerned || question.file().equals(file)) {
+      if (question.aboutText() && (concerned || question.file().equals(file))) {
         all.remove();
         question.reply().outdated();
       }
@@ -49,12 +49,10 @@ final class Questions {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
       Waiting one = all.next();
       Question question = one.question();
-      if (!open.contains(question.file())) {
+      if (ready.test(question)) {
         all.remove();
-        question.reply().answer(Known.NOTHING);
-      } else if (ready.test(question)) {
-        all.remove();
-        question.reply().answer(oracle.answer(question, one.text()));
+        boolean shown = !question.aboutText() || open.contains(question.file());
+        question.reply().answer(shown ? oracle.answer(question, one.text()) : Known.NOTHING);
       }
     }
   }

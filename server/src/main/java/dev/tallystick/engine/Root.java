@@ -9,13 +9,16 @@ import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Predicate;
 import java.util.function.Supplier;
 
 /** A folder within which files are paired, and what was last found in it. */
 final class Root {
   private final Folder folder;
+  private final FolderProject project;
   private List<Path> files = List.of();
+  private Set<String> told = Set.of();
   private Listing listed = Listing.of(List.of(), file -> file);
   private Optional<Pairs> pairs = Optional.empty();
   private boolean listing;
@@ -25,14 +28,25 @@ final class Root {
 
   Root(Folder folder) {
     this.folder = folder;
+    this.project = new FolderProject(folder.path());
   }
 
   Folder folder() {
     return folder;
   }
 
+  /** What is settled for the files in it. */
+  FolderProject project() {
+    return project;
+  }
+
   List<Path> files() {
     return files;
+  }
+
+  /** Whether a file is one of those that were found when the folder was listed last. */
+  boolean has(Path file) {
+    return files.contains(file) || project.onDisk() && project.file().equals(file);
   }
 
   /** Whether it is not known yet which files there are, so that nothing can be said of them. */
@@ -60,7 +74,8 @@ final class Root {
    * @return whether the folder is to be listed once more
    */
   boolean listed(List<Path> found) {
-    files = List.copyOf(found);
+    project.listed(found);
+    files = found.stream().filter(file -> !file.equals(project.file())).toList();
     pairs = Optional.empty();
     listing = again;
     again = false;
@@ -68,16 +83,27 @@ final class Root {
     return listing;
   }
 
+  /** Of what could not be looked into, what is new since the folder was listed last. */
+  List<String> news(List<String> troubles) {
+    List<String> news = troubles.stream().filter(trouble -> !told.contains(trouble)).toList();
+    told = Set.copyOf(troubles);
+    return news;
+  }
+
   /** The files or the rules have changed: they are to be paired anew. */
   void forget() {
     pairs = Optional.empty();
   }
 
-  /** What belongs together among some files of this folder. */
-  Pairs pairs(Supplier<List<Path>> among, Rules rules) {
+  /**
+   * What belongs together among some files of this folder.
+   *
+   * @param set what the user has set, which the project beats
+   */
+  Pairs pairs(Supplier<List<Path>> among, Rules set) {
     if (pairs.isEmpty()) {
       listed = Listing.of(among.get(), folder.path()::relativize);
-      pairs = Optional.of(Pairing.pairs(listed.names(), rules));
+      pairs = Optional.of(Pairing.pairs(listed.names(), project.project().rules(set)));
     }
     return pairs.get();
   }

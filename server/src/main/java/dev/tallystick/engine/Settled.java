@@ -9,10 +9,15 @@ import java.nio.file.Path;
  * @param result what was found in its texts
  * @param editedAt the turn of the last edit of the translation; 0 if there was none
  */
-record Settled(FilePair files, PairResult result, long editedAt) {
+public record Settled(FilePair files, PairResult result, long editedAt) {
   /** What stands for the sentence at a place of a file, a UTF-16 offset. */
   Counterpart counterpart(Path file, int offset) {
     return Counterpart.at(files, result, files.side(file), offset);
+  }
+
+  /** The sentences of a file, counted. */
+  Tally tally(Path file) {
+    return Tally.of(files, result, files.side(file));
   }
 
   /** One of the two texts, read. */

@@ -26,8 +26,8 @@ final class Sheet {
   }
 
   /** Whether this is still the sheet of a text that has come anew. */
-  boolean shows(Text current, String inLanguage) {
-    return language.equals(inLanguage) && text.equals(current);
+  boolean shows(Text current, Format inFormat) {
+    return format == inFormat && text.equals(current);
   }
 
   /** The text has moved on: whoever still works on this sheet may stop. */

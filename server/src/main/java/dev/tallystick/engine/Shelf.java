@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.prose.Format;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -16,7 +17,7 @@ import java.util.TreeMap;
  */
 final class Shelf {
   private final Map<Path, Document> open = new TreeMap<>();
-  private final Map<Path, Sheet> sheets = new TreeMap<>();
+  private final Map<Path, Map<String, Sheet>> sheets = new TreeMap<>();
   private final DiskTexts disk;
 
   Shelf(DiskTexts disk) {
@@ -45,7 +46,7 @@ final class Shelf {
   Optional<Text> text(Path file) {
     Document document = open.get(file);
     if (document == null) {
-      return disk.text(file);
+      return onDisk(file) ? disk.text(file) : Optional.empty();
     }
     return document.lost() ? Optional.empty() : Optional.of(document.text());
   }
@@ -54,20 +55,51 @@ final class Shelf {
    * What is wrong with the bytes of a file; nothing of one that the editor shows, as it has none.
    */
   List<Problem> problems(Path file) {
-    return open.containsKey(file) ? List.of() : disk.problems(file);
+    return open.containsKey(file) || !onDisk(file) ? List.of() : disk.problems(file);
   }
 
-  /** The sheet of the current text; the same one as long as the text stays the same. */
+  /** Why a file that the editor does not show cannot be read, if it cannot. */
+  Optional<String> trouble(Path file) {
+    return open.containsKey(file) ? Optional.empty() : disk.trouble(file);
+  }
+
+  /**
+   * The sheet of the current text; the same one as long as the text stays the same. A file that is
+   * taken for two languages, in a pair made by hand and in another, has one for each.
+   */
   Optional<Sheet> sheet(Path file, String language) {
-    Sheet sheet = sheets.get(file);
     Optional<Text> text = text(file);
-    if (sheet != null && text.isPresent() && sheet.shows(text.get(), language)) {
-      return Optional.of(sheet);
+    Format format = format(file);
+    Map<String, Sheet> known = sheets.computeIfAbsent(file, path -> new TreeMap<>());
+    known.values().removeIf(sheet -> outdate(sheet, text, format));
+    text.ifPresent(now -> known.computeIfAbsent(language, tag -> new Sheet(now, format, tag)));
+    return Optional.ofNullable(known.get(language));
+  }
+
+  /** Tells whoever works on a sheet to stop if the text has moved on; whether it has. */
+  private static boolean outdate(Sheet sheet, Optional<Text> text, Format format) {
+    boolean current = text.isPresent() && sheet.shows(text.get(), format);
+    if (!current) {
+      sheet.outdate();
     }
-    outdate(sheet);
-    sheets.remove(file);
-    text.ifPresent(now -> sheets.put(file, new Sheet(now, Intake.format(file), language)));
-    return Optional.ofNullable(sheets.get(file));
+    return !current;
+  }
+
+  /** The format of a file by its name, else by what the editor takes it for. */
+  private Format format(Path file) {
+    return Format.ofName(String.valueOf(file.getFileName()))
+        .or(() -> document(file).flatMap(document -> Format.ofLanguage(document.language())))
+        .orElse(Format.PLAIN);
+  }
+
+  /** Whether the text of a file is at hand, so that the disk need not be asked. */
+  boolean knows(Path file) {
+    return open.containsKey(file) || disk.knows(file);
+  }
+
+  /** A buffer without a file has a relative path. */
+  private static boolean onDisk(Path file) {
+    return file.isAbsolute();
   }
 
   /** Forgets what is known of all other files. */
@@ -76,18 +108,13 @@ final class Shelf {
     others.addAll(disk.files());
     others.removeAll(files);
     for (Path file : others) {
-      outdate(sheets.remove(file));
+      sheets.getOrDefault(file, Map.of()).values().forEach(Sheet::outdate);
+      sheets.remove(file);
     }
     disk.forget(others);
   }
 
   DiskTexts disk() {
     return disk;
-  }
-
-  private static void outdate(Sheet sheet) {
-    if (sheet != null) {
-      sheet.outdate();
-    }
   }
 }

@@ -7,12 +7,14 @@ public final class Task implements Cancellation {
   private final FilePair files;
   private final Sheet source;
   private final Sheet target;
+  private final boolean draft;
   private volatile boolean dropped;
 
-  Task(FilePair files, Sheet source, Sheet target) {
+  Task(FilePair files, Sheet source, Sheet target, boolean draft) {
     this.files = files;
     this.source = source;
     this.target = target;
+    this.draft = draft;
   }
 
   FilePair files() {
@@ -25,6 +27,16 @@ public final class Task implements Cancellation {
 
   Sheet target() {
     return target;
+  }
+
+  /** Whether the translation is still being written. */
+  boolean draft() {
+    return draft;
+  }
+
+  /** Whether it is about these texts, in this state. */
+  boolean isAbout(Sheet currentSource, Sheet currentTarget, boolean inDraft) {
+    return source == currentSource && target == currentTarget && draft == inDraft;
   }
 
   /** Nobody wants the result any more. */

@@ -5,6 +5,7 @@ import dev.tallystick.run.Cancellation;
 import dev.tallystick.run.Fault;
 import dev.tallystick.run.Threads;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.ExecutorService;
@@ -12,9 +13,13 @@ import java.util.concurrent.Executors;
 import java.util.function.Consumer;
 import java.util.function.Supplier;
 
-/** A few threads that examine pairs and list folders. What they find comes back as an event. */
+/**
+ * A few threads that examine pairs and list folders. What they find comes back as an event. Pairs
+ * that nobody looks at have threads of their own, so that none that is open waits behind them.
+ */
 final class Workers {
   private final ExecutorService pool;
+  private final ExecutorService aside;
   private final Machine machine;
   private final Consumer<Event> post;
 
@@ -23,24 +28,37 @@ final class Workers {
     this.post = post;
     this.pool =
         Executors.newFixedThreadPool(machine.workers(), Threads.daemons("tallystick-worker"));
+    this.aside =
+        Executors.newFixedThreadPool(machine.workers(), Threads.daemons("tallystick-aside"));
   }
 
-  void examine(Task task) {
-    run(() -> examined(task));
+  /**
+   * Examines a pair.
+   *
+   * @param open whether the editor shows a side of it
+   */
+  void examine(Task task, boolean open) {
+    run(open ? pool : aside, () -> examined(task));
+  }
+
+  /** How many pairs that are not open can be examined at once. */
+  int aside() {
+    return machine.workers();
   }
 
   void list(Folder folder) {
-    run(() -> listed(folder));
+    run(pool, () -> listed(folder));
   }
 
   void stop() {
     pool.shutdownNow();
+    aside.shutdownNow();
   }
 
-  private void run(Supplier<Event> work) {
+  private void run(ExecutorService by, Supplier<Event> work) {
     Activity activity = machine.activity();
     activity.begin();
-    pool.execute(
+    by.execute(
         () -> {
           try {
             post.accept(work.get());
@@ -58,7 +76,9 @@ final class Workers {
     try {
       task.check();
       PairResult result =
-          machine.examiner().examine(task.source().reading(), task.target().reading(), task);
+          machine
+              .examiner()
+              .examine(task.source().reading(), task.target().reading(), task.draft(), task);
       return new Event.Examined(task, Optional.of(result), Optional.empty());
     } catch (Cancellation.Cancelled e) {
       return new Event.Examined(task, Optional.empty(), Optional.empty());
@@ -68,14 +88,15 @@ final class Workers {
   }
 
   private Event listed(Folder folder) {
+    List<String> troubles = new ArrayList<>();
     try {
-      List<Path> files = machine.disk().files(folder);
-      return new Event.Listed(folder.path(), files, Optional.empty());
+      List<Path> files = machine.disk().files(folder, troubles::add);
+      return new Event.Listed(folder.path(), files, troubles);
     } catch (Unreadable e) {
-      return new Event.Listed(folder.path(), List.of(), Optional.of(e.getMessage()));
+      return new Event.Listed(folder.path(), List.of(), List.of(e.getMessage()));
     } catch (RuntimeException | Error e) {
       String fault = Announcements.fault(folder, Fault.where(e));
-      return new Event.Listed(folder.path(), List.of(), Optional.of(fault));
+      return new Event.Listed(folder.path(), List.of(), List.of(fault));
     }
   }
 }

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.check.Levels;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.pairing.Pairs;
 import dev.tallystick.pairing.Rules;
@@ -28,7 +29,10 @@ final class Workspace {
 
   private final Map<Path, Root> named = new TreeMap<>();
   private final Map<Path, Root> own = new TreeMap<>();
+  private final MadePairs made = new MadePairs();
+  private final Scope scope = new Scope();
   private Rules rules = Rules.NONE;
+  private boolean usual = true;
 
   private final Set<Path> open = new TreeSet<>();
   private Optional<List<FilePair>> pairs = Optional.empty();
@@ -36,6 +40,40 @@ final class Workspace {
   void rules(Rules now) {
     rules = now;
     roots().forEach(Root::forget);
+    pairs = Optional.empty();
+  }
+
+  /** The setting: whether all pairs of the editor's folders are wanted. */
+  void scope(boolean folders) {
+    scope.set(folders);
+    pairs = Optional.empty();
+  }
+
+  /** All pairs of a folder, or of all folders, are wanted, whatever the setting. */
+  void want(Optional<Path> folder) {
+    scope.want(
+        roots().stream()
+            .map(root -> root.folder().path())
+            .filter(path -> folder.isEmpty() || folder.get().startsWith(path))
+            .toList());
+    pairs = Optional.empty();
+  }
+
+  /** Only the open pairs are wanted from now on. */
+  void decline() {
+    scope.decline();
+    pairs = Optional.empty();
+  }
+
+  /** The user says that two files belong together. */
+  void pair(Event.Paired paired) {
+    made.add(paired);
+    pairs = Optional.empty();
+  }
+
+  /** Files have other names. */
+  void rename(Renaming renaming) {
+    made.rename(renaming);
     pairs = Optional.empty();
   }
 
@@ -50,13 +88,18 @@ final class Workspace {
   void open(Collection<Path> files) {
     open.clear();
     open.addAll(files);
-    for (Path file : open) {
+    made.retainBuffers(open);
+    Set<Path> concerned = new TreeSet<>(open);
+    made.all().stream()
+        .filter(this::hasOpenSide)
+        .forEach(pair -> concerned.addAll(List.of(pair.source(), pair.target())));
+    for (Path file : concerned) {
       if (root(file).isEmpty() && file.getParent() != null) {
         own.put(file.getParent(), new Root(new Folder(file.getParent(), SHALLOW)));
       }
     }
     Set<Path> used = new HashSet<>();
-    open.forEach(file -> root(file).ifPresent(root -> used.add(root.folder().path())));
+    concerned.forEach(file -> root(file).ifPresent(root -> used.add(root.folder().path())));
     own.keySet().retainAll(used);
     roots().forEach(Root::forget);
     pairs = Optional.empty();
@@ -71,6 +114,33 @@ final class Workspace {
     pairs = Optional.empty();
     return Optional.ofNullable(named.getOrDefault(folder, own.get(folder)))
         .filter(root -> root.listed(files));
+  }
+
+  /** Of what could not be looked into in a folder, what was not told before. */
+  List<String> news(Path folder, List<String> troubles) {
+    Root root = named.getOrDefault(folder, own.get(folder));
+    return root == null ? List.of() : root.news(troubles);
+  }
+
+  /** Reads the {@code tallystick.json} of each folder, where its text is new. */
+  void readProjects(Shelf shelf) {
+    usual = true;
+    for (Root root : roots()) {
+      if (root.project().take(shelf)) {
+        root.forget();
+        pairs = Optional.empty();
+      }
+      usual &= levels(root).equals(Levels.USUAL);
+    }
+  }
+
+  /** How loudly findings in a pair are said. */
+  Levels levels(FilePair pair) {
+    return usual ? Levels.USUAL : root(pair.source()).map(Workspace::levels).orElse(Levels.USUAL);
+  }
+
+  private static Levels levels(Root root) {
+    return root.project().project().levels();
   }
 
   /** All folders that count. */
@@ -96,36 +166,54 @@ final class Workspace {
         : own.values().stream().filter(root -> root.folder().holds(file)).findFirst();
   }
 
-  /** The pairs with an open side, sorted. */
+  /** The pairs that are wanted, sorted: those with an open side, or all in some folders. */
   List<FilePair> pairs() {
     if (pairs.isEmpty()) {
-      List<FilePair> wanted = new ArrayList<>();
-      rootsOfOpen().forEach(root -> wanted.addAll(root.absolute(found(root), this::wanted)));
-      wanted.sort(null);
+      Set<FilePair> wanted = new TreeSet<>();
+      made.all().stream().filter(this::hasOpenSide).forEach(wanted::add);
+      for (Root root : concerned()) {
+        boolean whole = whole(root);
+        wanted.addAll(
+            root.absolute(
+                found(root), pair -> (whole || hasOpenSide(pair)) && !made.overrule(pair)));
+      }
       pairs = Optional.of(List.copyOf(wanted));
     }
     return pairs.get();
   }
 
-  private boolean wanted(FilePair pair) {
+  private boolean hasOpenSide(FilePair pair) {
     return open.contains(pair.source()) || open.contains(pair.target());
   }
 
-  /** What the user has to be asked about the open files, and has not been. */
+  private boolean whole(Root root) {
+    Path path = root.folder().path();
+    return scope.whole(path, named.containsKey(path));
+  }
+
+  /** What the user has to be asked about the files of wanted pairs, and has not been. */
   List<Ambiguity> questions() {
     List<Ambiguity> questions = new ArrayList<>();
-    for (Root root : rootsOfOpen()) {
+    for (Root root : concerned()) {
       if (!root.awaited()) {
-        root.question(found(root), open).ifPresent(questions::add);
+        Collection<Path> about = whole(root) ? root.files() : open;
+        root.question(found(root), about).ifPresent(questions::add);
       }
     }
     return questions;
   }
 
-  private Set<Root> rootsOfOpen() {
+  /** The folders that wanted pairs may be in. */
+  private Set<Root> concerned() {
     Set<Root> roots = new LinkedHashSet<>();
     open.forEach(file -> root(file).ifPresent(roots::add));
+    roots().stream().filter(this::whole).forEach(roots::add);
     return roots;
+  }
+
+  /** Whether it is known which files there are in all folders that wanted pairs may be in. */
+  boolean complete() {
+    return concerned().stream().noneMatch(Root::awaited);
   }
 
   private Pairs found(Root root) {

@@ -1,6 +1,5 @@
 package dev.tallystick.lsp;
 
-import dev.tallystick.check.Code;
 import dev.tallystick.check.OnSide;
 import dev.tallystick.check.Severity;
 import dev.tallystick.engine.Answer;
@@ -43,8 +42,8 @@ record Conversion(Client client) {
 
   private Diagnostic diagnostic(Publication publication, Notice notice) {
     Range range = client.encoding().range(publication.text(), notice.span());
-    Severity severity = notice.code().map(Code::severity).orElse(Severity.WARNING);
-    Diagnostic diagnostic = new Diagnostic(range, notice.message(), severity(severity), SOURCE);
+    Diagnostic diagnostic =
+        new Diagnostic(range, notice.message(), severity(notice.severity()), SOURCE);
     notice.code().ifPresent(code -> diagnostic.setCode(code.word()));
     if (client.related()) {
       notice.related().ifPresent(at -> diagnostic.setRelatedInformation(List.of(related(at))));

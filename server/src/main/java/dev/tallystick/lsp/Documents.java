@@ -1,43 +1,45 @@
 package dev.tallystick.lsp;
 
 import dev.tallystick.engine.Answer;
-import dev.tallystick.engine.Change;
-import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Known;
 import dev.tallystick.engine.Loop;
 import dev.tallystick.engine.Question;
-import dev.tallystick.text.Span;
-import dev.tallystick.text.Text;
-import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.BiFunction;
 import java.util.function.Function;
+import org.eclipse.lsp4j.CodeAction;
+import org.eclipse.lsp4j.CodeActionContext;
+import org.eclipse.lsp4j.CodeActionKind;
+import org.eclipse.lsp4j.CodeActionParams;
+import org.eclipse.lsp4j.CodeLens;
+import org.eclipse.lsp4j.CodeLensParams;
+import org.eclipse.lsp4j.Command;
 import org.eclipse.lsp4j.DefinitionParams;
 import org.eclipse.lsp4j.DidChangeTextDocumentParams;
 import org.eclipse.lsp4j.DidCloseTextDocumentParams;
 import org.eclipse.lsp4j.DidOpenTextDocumentParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
+import org.eclipse.lsp4j.DocumentDiagnosticParams;
+import org.eclipse.lsp4j.DocumentDiagnosticReport;
 import org.eclipse.lsp4j.DocumentHighlight;
 import org.eclipse.lsp4j.DocumentHighlightParams;
 import org.eclipse.lsp4j.DocumentSymbol;
 import org.eclipse.lsp4j.DocumentSymbolParams;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.HoverParams;
+import org.eclipse.lsp4j.InlayHint;
+import org.eclipse.lsp4j.InlayHintParams;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
-import org.eclipse.lsp4j.Range;
 import org.eclipse.lsp4j.ReferenceParams;
 import org.eclipse.lsp4j.SelectionRange;
 import org.eclipse.lsp4j.SelectionRangeParams;
 import org.eclipse.lsp4j.SymbolInformation;
-import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
-import org.eclipse.lsp4j.TextDocumentItem;
 import org.eclipse.lsp4j.TextDocumentPositionParams;
-import org.eclipse.lsp4j.VersionedTextDocumentIdentifier;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
 import org.eclipse.lsp4j.services.TextDocumentService;
 
@@ -45,78 +47,42 @@ import org.eclipse.lsp4j.services.TextDocumentService;
  * What a client tells and asks about texts. Those without a file are in no pair: nothing is said.
  */
 final class Documents implements TextDocumentService {
-  /** An edit that does not say what came: from now on the text is not known. */
-  private static final Change UNKNOWN = new Change.Part(text -> Optional.empty(), "");
-
-  private final Requests requests = new Requests();
-  private Loop loop;
+  private final Requests requests;
+  private final Board board;
+  private final Sync sync = new Sync();
   private Conversion conversion;
+  private Views views;
 
-  /** The session has begun. */
-  void begin(Loop with, Conversion by) {
-    loop = with;
-    conversion = by;
-    requests.begin(with);
+  Documents(Requests requests, Board board) {
+    this.requests = requests;
+    this.board = board;
   }
 
-  /** Nothing is answered any more. */
-  void end() {
-    requests.end();
+  /** The session has begun. */
+  void begin(Loop with, Conversion by, Views in) {
+    sync.begin(with, by.client().encoding());
+    conversion = by;
+    views = in;
   }
 
   @Override
   public void didOpen(DidOpenTextDocumentParams params) {
-    TextDocumentItem item = params.getTextDocument();
-    tell(
-        item.getUri(),
-        file -> new Event.Opened(file, item.getUri(), item.getVersion(), new Text(item.getText())));
+    sync.opened(params);
   }
 
   @Override
   public void didChange(DidChangeTextDocumentParams params) {
-    VersionedTextDocumentIdentifier document = params.getTextDocument();
-    int version = document.getVersion() == null ? 0 : document.getVersion();
-    List<Change> changes = changes(params.getContentChanges());
-    tell(document.getUri(), file -> new Event.Edited(file, document.getUri(), version, changes));
+    sync.changed(params);
   }
 
   @Override
   public void didSave(DidSaveTextDocumentParams params) {
-    tell(params.getTextDocument().getUri(), Event.Saved::new);
+    sync.saved(params);
   }
 
   @Override
   public void didClose(DidCloseTextDocumentParams params) {
-    tell(params.getTextDocument().getUri(), Event.Closed::new);
-  }
-
-  private void tell(String uri, Function<Path, Event> event) {
-    if (loop != null) {
-      Uris.file(uri).map(event).ifPresent(loop::post);
-    }
-  }
-
-  private List<Change> changes(List<TextDocumentContentChangeEvent> events) {
-    return events == null ? List.of(UNKNOWN) : events.stream().map(this::change).toList();
-  }
-
-  private Change change(TextDocumentContentChangeEvent event) {
-    if (event == null || event.getText() == null) {
-      return UNKNOWN;
-    }
-    Range range = event.getRange();
-    return range == null
-        ? new Change.Whole(new Text(event.getText()))
-        : new Change.Part(text -> span(text, range), event.getText());
-  }
-
-  /** Where a range lies; nowhere if it starts behind its end or behind the text. */
-  private Optional<Span> span(Text text, Range range) {
-    int start = conversion.client().encoding().offset(text, range.getStart());
-    int end = conversion.client().encoding().offset(text, range.getEnd());
-    int line = range.getStart().getLine();
-    boolean fits = line >= 0 && line <= text.lines() && start <= end;
-    return fits ? Optional.of(new Span(start, end)) : Optional.empty();
+    sync.closed(params);
   }
 
   @Override
@@ -134,6 +100,16 @@ final class Documents implements TextDocumentService {
   public CompletableFuture<List<? extends DocumentHighlight>> documentHighlight(
       DocumentHighlightParams params) {
     return ask(params, answer -> conversion.highlights(answer));
+  }
+
+  /** What stands for a sentence, in each pair. */
+  CompletableFuture<List<Placed>> counterpart(TextDocumentPositionParams params) {
+    return ask(
+        params,
+        answer ->
+            answer.all().stream()
+                .map(at -> Placed.of(at, conversion.client().encoding()))
+                .toList());
   }
 
   @Override
@@ -166,6 +142,80 @@ final class Documents implements TextDocumentService {
         Optional.of(params),
         Question.Reach.PAIRS,
         known -> new Symbols(conversion.client(), document.getUri()).of(known));
+  }
+
+  @Override
+  public CompletableFuture<List<Either<Command, CodeAction>>> codeAction(CodeActionParams params) {
+    TextDocumentIdentifier document = params.getTextDocument();
+    return requests.ask(
+        document,
+        Optional.ofNullable(params.getRange()),
+        Question.Reach.PAIRS,
+        known ->
+            wantsFixes(params.getContext())
+                ? stubs(document.getUri()).at(known, params.getRange()).stream()
+                    .map(Either::<Command, CodeAction>forRight)
+                    .toList()
+                : List.of());
+  }
+
+  private Stubs stubs(String uri) {
+    return new Stubs(conversion.client(), board, uri);
+  }
+
+  /** Whether a client that names the kinds of action that it wants names ours. */
+  private static boolean wantsFixes(CodeActionContext context) {
+    return context == null
+        || context.getOnly() == null
+        || context.getOnly().contains(CodeActionKind.QuickFix)
+        || context.getOnly().contains(CodeActionKind.Empty);
+  }
+
+  @Override
+  public CompletableFuture<CodeAction> resolveCodeAction(CodeAction action) {
+    Optional<Stubs.Ticket> ticket = Stubs.Ticket.of(action.getData());
+    return requests.ask(
+        new TextDocumentIdentifier(ticket.map(Stubs.Ticket::uri).orElse("")),
+        ticket,
+        Question.Reach.PAIRS,
+        known ->
+            stubs(ticket.get().uri())
+                .resolved(known, ticket.get())
+                .orElseThrow(Requests::modified));
+  }
+
+  @Override
+  public CompletableFuture<List<? extends CodeLens>> codeLens(CodeLensParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.of(params),
+        Question.Reach.PAIRS,
+        known -> views.lenses().wanted() ? Lenses.of(known) : List.of());
+  }
+
+  @Override
+  public CompletableFuture<List<InlayHint>> inlayHint(InlayHintParams params) {
+    return requests.ask(
+        params.getTextDocument(),
+        Optional.ofNullable(params.getRange()),
+        Question.Reach.PAIRS,
+        known ->
+            views.hints().wanted()
+                ? new Hints(conversion.client().encoding()).within(known, params.getRange())
+                : List.of());
+  }
+
+  @Override
+  public CompletableFuture<DocumentDiagnosticReport> diagnostic(DocumentDiagnosticParams params) {
+    TextDocumentIdentifier document = params.getTextDocument();
+    boolean related = conversion != null && conversion.client().pullsRelated();
+    return requests.askFindings(
+        document,
+        known ->
+            board.report(
+                document.getUri(),
+                params.getPreviousResultId(),
+                related ? known.others() : List.of()));
   }
 
   private <T> CompletableFuture<T> ask(

@@ -8,11 +8,31 @@ import java.nio.file.Path;
 import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import java.util.function.Function;
+import java.util.function.Supplier;
+import org.eclipse.lsp4j.DiagnosticServerCancellationData;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
+import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
+import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
 
 /** Asks the loop what a client wants to know. */
 final class Requests {
+  /** What a client is told whose text was edited before the answer was there. */
+  private static final ResponseError MODIFIED =
+      new ResponseError(ResponseErrorCode.ContentModified, "The text has changed since.", null);
+
+  /**
+   * The same for one that asks for findings. Some take {@code ContentModified} for an empty list
+   * there, and would show for a moment that nothing is wrong.
+   */
+  private static final ResponseError ASK_AGAIN =
+      new ResponseError(
+          ResponseErrorCode.ServerCancelled,
+          "The text has changed since. Ask again.",
+          new DiagnosticServerCancellationData(true));
+
+  private static final Path NO_FILE = Path.of("");
+
   private Loop loop;
   private boolean over;
 
@@ -27,6 +47,20 @@ final class Requests {
   }
 
   /**
+   * Looks whether anything can be asked.
+   *
+   * @throws org.eclipse.lsp4j.jsonrpc.ResponseErrorException if the session has not begun, or ends
+   */
+  void check() {
+    if (loop == null) {
+      throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
+    }
+    if (over) {
+      throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
+    }
+  }
+
+  /**
    * Asks about a document. The future is handed out as it is, so that the client's cancelling
    * reaches it.
    *
@@ -37,26 +71,51 @@ final class Requests {
       Optional<?> named,
       Question.Reach reach,
       Function<Known, T> convert) {
-    if (loop == null) {
-      throw Server.refused(ResponseErrorCode.ServerNotInitialized, "The session has not begun.");
-    }
-    if (over) {
-      throw Server.refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
-    }
+    return ask(document, named, reach, convert, MODIFIED);
+  }
+
+  /** What a client is told whose text was edited before. */
+  static ResponseErrorException modified() {
+    return new ResponseErrorException(MODIFIED);
+  }
+
+  /** Asks for the findings of a document. */
+  <T> CompletableFuture<T> askFindings(
+      TextDocumentIdentifier document, Function<Known, T> convert) {
+    return ask(document, Optional.ofNullable(document), Question.Reach.PAIRS, convert, ASK_AGAIN);
+  }
+
+  /** Asks about no document in particular: answered as soon as all that came before is handled. */
+  <T> CompletableFuture<T> ask(Supplier<T> convert) {
+    check();
+    return post(NO_FILE, Question.Reach.PAIRS, known -> convert.get(), MODIFIED);
+  }
+
+  /** Asks about a folder, or about all of them: answered when all pairs in it are examined. */
+  <T> CompletableFuture<T> askFolder(Optional<Path> folder, Function<Known, T> convert) {
+    check();
+    return post(folder.orElse(NO_FILE), Question.Reach.FOLDER, convert, MODIFIED);
+  }
+
+  private <T> CompletableFuture<T> ask(
+      TextDocumentIdentifier document,
+      Optional<?> named,
+      Question.Reach reach,
+      Function<Known, T> convert,
+      ResponseError outdated) {
+    check();
     if (document == null || named.isEmpty()) {
       throw Server.refused(ResponseErrorCode.InvalidParams, "A document and a position, please.");
     }
-    CompletableFuture<T> asked = new CompletableFuture<>();
-    Optional<Path> file = Uris.file(document.getUri());
-    if (file.isEmpty()) {
-      asked.complete(convert.apply(Known.NOTHING));
-      return asked;
-    }
-    post(new Question(file.get(), reach, new Reply<>(asked, convert)), asked);
-    return asked;
+    return Uris.text(document.getUri())
+        .map(file -> post(file, reach, convert, outdated))
+        .orElseGet(() -> CompletableFuture.completedFuture(convert.apply(Known.NOTHING)));
   }
 
-  private void post(Question question, CompletableFuture<?> asked) {
+  private <T> CompletableFuture<T> post(
+      Path path, Question.Reach reach, Function<Known, T> convert, ResponseError outdated) {
+    CompletableFuture<T> asked = new CompletableFuture<>();
+    Question question = new Question(path, reach, new Reply<>(asked, convert, outdated));
     asked.whenComplete(
         (answer, fault) -> {
           if (asked.isCancelled()) {
@@ -64,10 +123,12 @@ final class Requests {
           }
         });
     loop.post(new Event.Asked(question));
+    return asked;
   }
 
   /** Completes what the client waits for. */
-  private record Reply<T>(CompletableFuture<T> asked, Function<Known, T> convert)
+  private record Reply<T>(
+      CompletableFuture<T> asked, Function<Known, T> convert, ResponseError tooLate)
       implements Question.Reply {
     @Override
     public void answer(Known known) {
@@ -80,8 +141,7 @@ final class Requests {
 
     @Override
     public void outdated() {
-      asked.completeExceptionally(
-          Server.refused(ResponseErrorCode.ContentModified, "The text has changed since."));
+      asked.completeExceptionally(new ResponseErrorException(tooLate));
     }
   }
 }

@@ -10,10 +10,11 @@ import org.eclipse.lsp4j.InitializeResult;
 import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.ServerInfo;
 import org.eclipse.lsp4j.SetTraceParams;
+import org.eclipse.lsp4j.TextDocumentPositionParams;
+import org.eclipse.lsp4j.WorkDoneProgressCancelParams;
 import org.eclipse.lsp4j.jsonrpc.ResponseErrorException;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseError;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.LanguageServer;
 import org.eclipse.lsp4j.services.TextDocumentService;
 import org.eclipse.lsp4j.services.WorkspaceService;
@@ -22,15 +23,19 @@ import org.eclipse.lsp4j.services.WorkspaceService;
  * The life of a session. Called by the thread that reads messages, which does nothing here but put
  * events into the loop's queue.
  */
-final class Server implements LanguageServer {
+final class Server implements LanguageServer, OwnRequests {
   private final Machine machine;
   private final String version;
   private final CompletableFuture<Integer> ended;
-  private final Documents documents = new Documents();
-  private final Surroundings surroundings = new Surroundings();
-  private LanguageClient remote;
+  private final Requests requests = new Requests();
+  private final Board board = new Board();
+  private final Documents documents = new Documents(requests, board);
+  private final Surroundings surroundings =
+      new Surroundings(requests, board, new Commands(requests));
+  private Remote remote;
   private Loop loop;
   private Client client;
+  private PassReport report;
   private volatile boolean shutDown;
 
   Server(Machine machine, String version, CompletableFuture<Integer> ended) {
@@ -39,7 +44,7 @@ final class Server implements LanguageServer {
     this.ended = ended;
   }
 
-  void connect(LanguageClient to) {
+  void connect(Remote to) {
     remote = to;
   }
 
@@ -50,9 +55,13 @@ final class Server implements LanguageServer {
     }
     client = Client.of(params);
     Conversion conversion = new Conversion(client);
-    loop = new Loop(machine.watchedByEditor(client.watches()), new Editor(remote, conversion));
-    documents.begin(loop, conversion);
-    surroundings.begin(loop, client, remote, machine.alarm());
+    Views views = new Views(client, remote);
+    report = new PassReport(remote);
+    Editor editor = new Editor(remote, conversion, board, views, report);
+    loop = new Loop(machine.watchedByEditor(client.watches()), editor);
+    requests.begin(loop);
+    documents.begin(loop, conversion, views);
+    surroundings.begin(loop, client, views, remote, machine.alarm());
     loop.post(new Event.FoldersChanged(client.folders(), List.of()));
     loop.start();
     InitializeResult result = new InitializeResult(Capabilities.of(client));
@@ -76,7 +85,7 @@ final class Server implements LanguageServer {
       throw refused(ResponseErrorCode.InvalidRequest, "The session is shut down.");
     }
     shutDown = true;
-    documents.end();
+    requests.end();
     return CompletableFuture.completedFuture(null);
   }
 
@@ -93,8 +102,20 @@ final class Server implements LanguageServer {
   }
 
   @Override
+  public void cancelProgress(WorkDoneProgressCancelParams params) {
+    if (loop != null && report.is(params.getToken())) {
+      loop.post(new Event.FoldersDeclined());
+    }
+  }
+
+  @Override
   public void setTrace(SetTraceParams params) {
     // Nothing is traced.
+  }
+
+  @Override
+  public CompletableFuture<List<Placed>> counterpart(TextDocumentPositionParams params) {
+    return documents.counterpart(params);
   }
 
   @Override

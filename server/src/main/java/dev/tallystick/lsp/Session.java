@@ -30,7 +30,6 @@ import org.eclipse.lsp4j.jsonrpc.messages.ResponseErrorCode;
 import org.eclipse.lsp4j.jsonrpc.messages.ResponseMessage;
 import org.eclipse.lsp4j.jsonrpc.services.ServiceEndpoints;
 import org.eclipse.lsp4j.launch.LSPLauncher;
-import org.eclipse.lsp4j.services.LanguageClient;
 
 /** A client's connection, from the first message to the last. */
 public final class Session {
@@ -70,10 +69,10 @@ public final class Session {
       InputStream in, OutputStream out, Machine machine, String version) {
     ExecutorService readers = Executors.newCachedThreadPool(Threads.daemons("tallystick-reader"));
     Server server = new Server(machine, version, ended);
-    Launcher<LanguageClient> launcher =
-        new LSPLauncher.Builder<LanguageClient>()
+    Launcher<Remote> launcher =
+        new LSPLauncher.Builder<Remote>()
             .setLocalService(server)
-            .setRemoteInterface(LanguageClient.class)
+            .setRemoteInterface(Remote.class)
             .setInput(in)
             .setOutput(out)
             .setExecutorService(readers)

@@ -16,7 +16,11 @@ import java.util.Optional;
  */
 final class SettingsReader {
   private static final String REST = "restMillis";
+  private static final String SCOPE = "scope";
   private static final String SOURCE_LANGUAGE = "sourceLanguage";
+  private static final String LENS = "lens";
+  private static final String INLAY = "inlay";
+  private static final String PROGRESS = "progress";
   private static final long LONGEST_REST = 600_000;
 
   private final List<String> problems = new ArrayList<>();
@@ -25,29 +29,64 @@ final class SettingsReader {
    * Settings, and what is wrong with them.
    *
    * @param settings those that are right, the rest by default
+   * @param lens whether figures are to be shown above the lines
+   * @param inlay whether figures are to be shown behind the lines
    * @param problems each a sentence for the user
    */
-  record Read(Settings settings, List<String> problems) {}
+  record Read(Settings settings, boolean lens, boolean inlay, List<String> problems) {}
 
   private SettingsReader() {}
 
-  /** Reads the section, which is an object if all is well; null means that nothing is set. */
-  static Read read(Object section) {
-    return new SettingsReader().of(new Gson().toJsonTree(section));
+  /**
+   * Reads the section, which is an object if all is well; null means that nothing is set.
+   *
+   * @param options what the client sent at the start; it counts where the section says nothing
+   */
+  static Read read(Object options, Object section) {
+    SettingsReader reader = new SettingsReader();
+    JsonObject all = new JsonObject();
+    reader.add(all, options);
+    reader.add(all, section);
+    return reader.of(all);
   }
 
-  private Read of(JsonElement section) {
-    Settings settings = Settings.DEFAULT;
-    if (section instanceof JsonObject object) {
-      settings = new Settings(rest(object.get(REST)), language(object.get(SOURCE_LANGUAGE)));
-    } else if (!section.isJsonNull()) {
+  private void add(JsonObject all, Object section) {
+    JsonElement json = new Gson().toJsonTree(section);
+    if (json instanceof JsonObject object) {
+      object.entrySet().stream()
+          .filter(entry -> !entry.getValue().isJsonNull())
+          .forEach(entry -> all.add(entry.getKey(), entry.getValue()));
+    } else if (!json.isJsonNull()) {
       problems.add("The settings under tallystick must be an object with keys and values.");
     }
-    return new Read(settings, List.copyOf(problems));
+  }
+
+  private Read of(JsonObject object) {
+    Settings settings =
+        new Settings(
+            rest(object.get(REST)),
+            language(object.get(SOURCE_LANGUAGE)),
+            folders(object.get(SCOPE)));
+    boolean lens = yes(LENS, object.get(LENS));
+    boolean inlay = yes(INLAY, object.get(INLAY));
+    yes(PROGRESS, object.get(PROGRESS)); // read at the start, told here if it is wrong
+    return new Read(settings, lens, inlay, List.copyOf(problems));
+  }
+
+  private boolean yes(String key, JsonElement value) {
+    if (value == null) {
+      return false;
+    }
+    if (value instanceof JsonPrimitive said && said.isBoolean()) {
+      return said.getAsBoolean();
+    }
+    problems.add(
+        "The setting tallystick." + key + " must be true or false. Until then it counts as false.");
+    return false;
   }
 
   private long rest(JsonElement value) {
-    if (value == null || value.isJsonNull()) {
+    if (value == null) {
       return Settings.DEFAULT.restMillis();
     }
     if (value instanceof JsonPrimitive number && number.isNumber()) {
@@ -65,8 +104,21 @@ final class SettingsReader {
     return Settings.DEFAULT.restMillis();
   }
 
+  private boolean folders(JsonElement value) {
+    if (value == null) {
+      return Settings.DEFAULT.folders();
+    }
+    String word = value instanceof JsonPrimitive one && one.isString() ? one.getAsString() : "";
+    if (!word.equals("open") && !word.equals("folder")) {
+      problems.add(
+          "The setting tallystick.scope must be open (the pairs with an open file) or folder (all"
+              + " pairs of the folder). Until then it counts as open.");
+    }
+    return word.equals("folder");
+  }
+
   private Optional<Language> language(JsonElement value) {
-    if (value == null || value.isJsonNull()) {
+    if (value == null) {
       return Optional.empty();
     }
     if (value instanceof JsonPrimitive tag && tag.isString()) {

@@ -3,48 +3,68 @@ package dev.tallystick.lsp;
 import com.google.gson.JsonObject;
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Loop;
+import dev.tallystick.engine.Renaming;
 import dev.tallystick.engine.Settings;
+import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Alarm;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.CompletableFuture;
 import org.eclipse.lsp4j.ConfigurationItem;
 import org.eclipse.lsp4j.ConfigurationParams;
 import org.eclipse.lsp4j.DidChangeConfigurationParams;
 import org.eclipse.lsp4j.DidChangeWatchedFilesParams;
 import org.eclipse.lsp4j.DidChangeWatchedFilesRegistrationOptions;
 import org.eclipse.lsp4j.DidChangeWorkspaceFoldersParams;
+import org.eclipse.lsp4j.ExecuteCommandParams;
 import org.eclipse.lsp4j.FileChangeType;
 import org.eclipse.lsp4j.FileEvent;
+import org.eclipse.lsp4j.FileRename;
 import org.eclipse.lsp4j.FileSystemWatcher;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.MessageType;
 import org.eclipse.lsp4j.Registration;
 import org.eclipse.lsp4j.RegistrationParams;
+import org.eclipse.lsp4j.RenameFilesParams;
+import org.eclipse.lsp4j.WorkspaceDiagnosticParams;
+import org.eclipse.lsp4j.WorkspaceDiagnosticReport;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.WorkspaceService;
 
 /** What a client tells about folders, files and settings. */
 final class Surroundings implements WorkspaceService {
   private static final String SECTION = "tallystick";
 
+  private final Commands commands;
+  private final Requests requests;
+  private final Board board;
   private Loop loop;
   private Client client;
-  private LanguageClient remote;
+  private Views views;
+  private Remote remote;
   private Alarm alarm;
   private List<String> told = List.of();
   private boolean taken;
 
+  Surroundings(Requests requests, Board board, Commands commands) {
+    this.requests = requests;
+    this.board = board;
+    this.commands = commands;
+  }
+
   /** The session has begun, but nothing may be sent yet. */
-  void begin(Loop with, Client of, LanguageClient at, Alarm by) {
+  void begin(Loop with, Client of, Views in, Remote at, Alarm by) {
     loop = with;
     client = of;
+    views = in;
     remote = at;
     alarm = by;
+    commands.begin(with, at);
   }
 
   /** The client is ready: registers what is to be registered, and gets the settings. */
@@ -76,12 +96,12 @@ final class Surroundings implements WorkspaceService {
   }
 
   private static DidChangeWatchedFilesRegistrationOptions watchers() {
-    String extensions =
-        Stream.of(Format.values())
-            .flatMap(format -> format.extensions().stream())
-            .collect(Collectors.joining(","));
-    FileSystemWatcher watcher = new FileSystemWatcher(Either.forLeft("**/*.{" + extensions + "}"));
-    return new DidChangeWatchedFilesRegistrationOptions(List.of(watcher));
+    return new DidChangeWatchedFilesRegistrationOptions(
+        List.of(watcher("*.{" + Format.everyExtension() + "}"), watcher(ProjectFile.NAME)));
+  }
+
+  private static FileSystemWatcher watcher(String name) {
+    return new FileSystemWatcher(Either.forLeft("**/" + name));
   }
 
   @Override
@@ -114,12 +134,20 @@ final class Surroundings implements WorkspaceService {
   /** Called by the thread that reads messages, or by the alarm. */
   private synchronized void takeSettings(Object section) {
     taken = true;
-    SettingsReader.Read read = SettingsReader.read(section);
+    SettingsReader.Read read = SettingsReader.read(section(client.options()), section);
     if (!read.problems().equals(told)) {
       told = read.problems();
       told.forEach(problem -> remote.showMessage(new MessageParams(MessageType.Warning, problem)));
     }
     loop.post(new Event.SettingsChanged(read.settings()));
+    views.lenses().want(read.lens());
+    views.hints().want(read.inlay());
+  }
+
+  /** Answered at once, with what is known: whoever asks here asks again and again. */
+  @Override
+  public CompletableFuture<WorkspaceDiagnosticReport> diagnostic(WorkspaceDiagnosticParams params) {
+    return requests.ask(() -> board.report(params.getPreviousResultIds()));
   }
 
   @Override
@@ -142,5 +170,25 @@ final class Surroundings implements WorkspaceService {
       List<Path> removed = Client.paths(params.getEvent().getRemoved());
       loop.post(new Event.FoldersChanged(added, removed));
     }
+  }
+
+  @Override
+  public void didRenameFiles(RenameFilesParams params) {
+    Map<Path, Path> names = new HashMap<>();
+    for (FileRename rename : params.getFiles()) {
+      Optional<Path> before = Uris.file(rename.getOldUri());
+      Optional<Path> now = Uris.file(rename.getNewUri());
+      if (before.isPresent() && now.isPresent()) {
+        names.put(before.get(), now.get());
+      }
+    }
+    if (loop != null && !names.isEmpty()) {
+      loop.post(new Event.Renamed(new Renaming(names)));
+    }
+  }
+
+  @Override
+  public CompletableFuture<Object> executeCommand(ExecuteCommandParams params) {
+    return commands.execute(params);
   }
 }

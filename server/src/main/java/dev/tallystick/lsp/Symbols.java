@@ -5,7 +5,6 @@ import dev.tallystick.engine.Known;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.Collectors;
 import org.eclipse.lsp4j.DocumentSymbol;
 import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.SymbolInformation;
@@ -37,7 +36,7 @@ record Symbols(Client client, String uri) {
         SymbolKind.String,
         client.encoding().range(text, heading.section()),
         client.encoding().range(text, heading.span()),
-        detail(heading.counts()),
+        Figures.words(heading.counts()),
         heading.inside().stream().map(inner -> tree(text, inner)).toList());
   }
 
@@ -53,20 +52,5 @@ record Symbols(Client client, String uri) {
               new SymbolInformation(heading.title(), SymbolKind.String, section, around)));
       addFlat(symbols, text, heading.inside(), heading.title());
     }
-  }
-
-  /** How much is matched; with the language before it, where there are several. */
-  private static String detail(List<Heading.Count> counts) {
-    if (counts.size() == 1) {
-      return words(counts.get(0));
-    }
-    return counts.stream()
-        .map(count -> count.language() + ": " + words(count))
-        .collect(Collectors.joining(", "));
-  }
-
-  private static String words(Heading.Count count) {
-    String unit = count.sentences() == 1 ? " sentence" : " sentences";
-    return count.matched() + " of " + count.sentences() + unit + " matched";
   }
 }

@@ -2,6 +2,7 @@ package dev.tallystick.lsp;
 
 import java.io.ByteArrayOutputStream;
 import java.io.File;
+import java.net.URLEncoder;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
@@ -17,7 +18,23 @@ final class Uris {
   private static final String FILE = "file:";
   private static final Pattern DRIVE = Pattern.compile("/+[A-Za-z]:.*", Pattern.DOTALL);
 
+  private static final Pattern SCHEME =
+      Pattern.compile("[A-Za-z][A-Za-z0-9+.-]+:.*", Pattern.DOTALL);
+
   private Uris() {}
+
+  /**
+   * What a URI of a text is called inside: its file, or, for a buffer without a file such as {@code
+   * untitled:1}, a relative path made of the URI, which is no file's.
+   */
+  static Optional<Path> text(String uri) {
+    if (uri == null || uri.toLowerCase(Locale.ROOT).startsWith(FILE)) {
+      return file(uri);
+    }
+    return SCHEME.matcher(uri).matches()
+        ? Optional.of(Path.of(URLEncoder.encode(uri, StandardCharsets.UTF_8).replace("*", "%2A")))
+        : Optional.empty();
+  }
 
   /** The file that a URI names; empty if it names none on this machine, or is missing. */
   static Optional<Path> file(String uri) {

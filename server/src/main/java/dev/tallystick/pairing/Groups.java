@@ -8,6 +8,7 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.function.Predicate;
 
 /**
  * Puts each file into one group at most.
@@ -29,9 +30,11 @@ final class Groups {
    * Forms the groups.
    *
    * @param paths sorted, without duplicates
+   * @param elsewhere those of them that belong elsewhere
    */
-  Groups(Collection<String> paths, Rules rules) {
+  Groups(Collection<String> paths, Predicate<String> elsewhere, Rules rules) {
     this.rules = rules;
+    paths.stream().filter(elsewhere).forEach(taken::add);
     Tags tags = new Tags(rules);
     for (String path : paths) {
       List<Tagged> found = tags.of(path);
@@ -53,7 +56,7 @@ final class Groups {
     return formed;
   }
 
-  /** Whether the file is in a group. */
+  /** Whether the file is in a group, or belongs elsewhere. */
   boolean isTaken(String path) {
     return taken.contains(path);
   }
@@ -85,8 +88,9 @@ final class Groups {
   private List<Group> rank() {
     List<Claim> claims = new ArrayList<>();
     for (Group group : byStem.values()) {
-      if (group.isTranslated()) {
-        claims.add(claim(group));
+      Group free = free(group);
+      if (free.isTranslated()) {
+        claims.add(claim(free));
       }
     }
     claims.sort(Claim.ORDER);
@@ -109,6 +113,15 @@ final class Groups {
   }
 
   private void form(Group group) {
+    Group rest = free(group);
+    if (rest.isTranslated()) {
+      formed.add(rest);
+      rest.members().forEach(member -> taken.add(member.path()));
+    }
+  }
+
+  /** What is left of a group, in the order of the paths. */
+  private Group free(Group group) {
     List<Tagged> left = new ArrayList<>();
     for (Tagged member : group.members()) {
       if (!taken.contains(member.path())) {
@@ -116,11 +129,7 @@ final class Groups {
       }
     }
     left.sort(Comparator.comparing(Tagged::path));
-    Group rest = new Group(group.stem(), left);
-    if (rest.isTranslated()) {
-      formed.add(rest);
-      left.forEach(member -> taken.add(member.path()));
-    }
+    return new Group(group.stem(), left);
   }
 
   /** How convincing a group is. */

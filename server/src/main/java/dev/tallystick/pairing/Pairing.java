@@ -2,12 +2,14 @@ package dev.tallystick.pairing;
 
 import java.util.ArrayList;
 import java.util.Collection;
-import java.util.Comparator;
 import java.util.List;
+import java.util.NavigableSet;
+import java.util.Optional;
 import java.util.TreeSet;
 
 /**
- * Finds the files that are translations of one another by the language tags in their paths.
+ * Finds the files that are translations of one another: those that the project states, and among
+ * the rest those that the language tags in their paths tell. What the project ignores is neither.
  *
  * <p>A tag is the last part of a file's name before the extension ({@code guide.de.md}, {@code
  * guide_pt_BR.txt}) or the name of a folder at any depth ({@code docs/de/guide.md}). It counts only
@@ -38,16 +40,20 @@ public final class Pairing {
    * Sorts the files into pairs, lone files and open questions.
    *
    * @param paths relative paths with {@code /}, in any order; no file is opened
-   * @param rules what the settings say about languages
+   * @param rules what the settings, the project or the command line say
    */
   public static Pairs pairs(Collection<String> paths, Rules rules) {
     Pairing pairing = new Pairing(rules);
     pairing.addAll(new TreeSet<>(paths));
-    return pairing.sorted();
+    return new Pairs(pairing.pairs, pairing.alone, pairing.ambiguities);
   }
 
-  private void addAll(Collection<String> paths) {
-    Groups groups = new Groups(paths, rules);
+  private void addAll(NavigableSet<String> paths) {
+    paths.removeIf(this::isIgnored);
+    StatedPairs stated = new StatedPairs(paths, rules);
+    pairs.addAll(stated.pairs());
+    alone.addAll(stated.alone());
+    Groups groups = new Groups(paths, stated::has, rules);
     Sides sides = new Sides(groups.formed(), rules);
     for (Group group : groups.formed()) {
       sides
@@ -57,16 +63,16 @@ public final class Pairing {
     }
     for (String path : paths) {
       if (!groups.isTaken(path)) {
-        alone.add(new Alone(path, whyAlone(path, groups)));
+        Optional<String> named = stated.whyUnmatched(path);
+        alone.add(new Alone(path, named.orElseGet(() -> whyAlone(path, groups))));
       }
     }
   }
 
-  private Pairs sorted() {
-    pairs.sort(Comparator.comparing(Pair::source).thenComparing(Pair::target));
-    alone.sort(Comparator.comparing(Alone::file));
-    ambiguities.sort(Comparator.comparing(ambiguity -> ambiguity.files().get(0)));
-    return new Pairs(pairs, alone, ambiguities);
+  private boolean isIgnored(String path) {
+    Optional<Glob> glob = rules.ignoring(path);
+    glob.ifPresent(by -> alone.add(new Alone(path, Reasons.ignored(by))));
+    return glob.isPresent();
   }
 
   private void addAmbiguity(Group group, Collection<Language> choices) {

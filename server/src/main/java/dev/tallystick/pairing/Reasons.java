@@ -40,6 +40,21 @@ final class Reasons {
     return "It is in " + language.name() + " like " + source + ", which is the source already.";
   }
 
+  /** A second file that the project states to be a source. */
+  static String secondSource(String source) {
+    return source + " is the source already.";
+  }
+
+  /** The project states the file to belong to one that is not there. */
+  static String noStatedFile(String other) {
+    return "tallystick.json pairs it with " + other + ", and there is no such file.";
+  }
+
+  /** The project does not want the file to count. */
+  static String ignored(Glob glob) {
+    return "tallystick.json ignores it by \"" + glob + "\".";
+  }
+
   /** A file without a tag where a tagged one is the source. */
   static String unknownLanguage(String source) {
     return "Nothing tells its language, and " + source + " is the source already.";

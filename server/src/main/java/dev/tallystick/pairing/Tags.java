@@ -103,7 +103,8 @@ final class Tags {
     language(written).ifPresent(found -> cuts.add(new Cut(start, end, written, found, why)));
   }
 
-  private Optional<Language> language(String written) {
+  /** The language that a tag means; empty for an everyday word whose language nobody has set. */
+  Optional<Language> language(String written) {
     return seen.computeIfAbsent(
         written,
         word -> Language.of(word).filter(found -> !isFileWord(word) || isInSettings(found)));

@@ -8,6 +8,8 @@ public enum Why {
   NAME,
   /** A folder named by a tag: {@code de/guide.md}. */
   FOLDER,
+  /** The project states it: {@code pairs} in {@code tallystick.json}. */
+  PROJECT,
   /** The user named the two on the command line or by a command. */
   ARGUMENT;
 

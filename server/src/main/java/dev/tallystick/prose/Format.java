@@ -5,17 +5,20 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** The file formats, each with its extractor. */
 public enum Format {
   /** Text without markup. */
-  PLAIN("txt", "text"),
+  PLAIN(List.of("plaintext", "text"), "txt", "text"),
   /** CommonMark with tables. */
-  MARKDOWN("md", "markdown", "mkd");
+  MARKDOWN(List.of("markdown"), "md", "markdown", "mkd");
 
+  private final List<String> languages;
   private final List<String> extensions;
 
-  Format(String... extensions) {
+  Format(List<String> languages, String... extensions) {
+    this.languages = languages;
     this.extensions = List.of(extensions);
   }
 
@@ -28,9 +31,23 @@ public enum Format {
         .findFirst();
   }
 
+  /** The format that an editor calls by a name, LSP's {@code languageId}; empty if none is. */
+  public static Optional<Format> ofLanguage(String languageId) {
+    return Arrays.stream(values())
+        .filter(format -> format.languages.contains(languageId))
+        .findFirst();
+  }
+
   /** The extensions that mark a file as this format, without their dot. */
   public List<String> extensions() {
     return extensions;
+  }
+
+  /** All extensions, parted by commas as in a glob. */
+  public static String everyExtension() {
+    return Arrays.stream(values())
+        .flatMap(format -> format.extensions.stream())
+        .collect(Collectors.joining(","));
   }
 
   /**

@@ -69,6 +69,15 @@ class FolderWatchTest {
   }
 
   @Test
+  void theFactsOfAProjectAreTold() throws IOException, InterruptedException {
+    watch.over(List.of(new Folder(folder, Folder.DEEP)));
+    await(ANYTHING::equals);
+    Path file = Files.writeString(folder.resolve("tallystick.json"), "{}");
+
+    assertTrue(await(changed -> changed.files().contains(file)).listing());
+  }
+
+  @Test
   void otherFilesAreNotTold() throws IOException, InterruptedException {
     watch.over(List.of(new Folder(folder, Folder.DEEP)));
     await(ANYTHING::equals);

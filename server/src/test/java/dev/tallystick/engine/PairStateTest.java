@@ -27,13 +27,13 @@ class PairStateTest {
   }
 
   private Task take(Sheet target) {
-    return pair.take(Optional.of(source), Optional.of(target)).orElseThrow();
+    return pair.take(Optional.of(source), Optional.of(target), true).orElseThrow();
   }
 
   private static Optional<PairResult> result(Task task) {
     return Optional.of(
-        Examiner.DRAFT.examine(
-            task.source().reading(), task.target().reading(), Cancellation.NONE));
+        Examiner.ADAPTIVE.examine(
+            task.source().reading(), task.target().reading(), task.draft(), Cancellation.NONE));
   }
 
   @Test
@@ -56,13 +56,13 @@ class PairStateTest {
   void theSameTextsMakeNoNewWork() {
     Sheet target = sheet("Die Glocke läutet.", "de");
     take(target);
-    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.of(target)));
+    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.of(target), true));
   }
 
   @Test
   void withoutOneTextNothingMoreIsToCome() {
     Task task = take(sheet("Die Glocke läutet.", "de"));
-    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.empty()));
+    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.empty(), true));
     assertTrue(pair.settled());
     assertTrue(task.cancelled());
   }

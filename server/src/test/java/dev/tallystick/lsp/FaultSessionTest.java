@@ -57,7 +57,7 @@ class FaultSessionTest {
     Work work = Work.withoutFog(folder);
     try (Talk talk = Talk.in(folder)) {
       talk.machine.examiner =
-          (source, target, cancellation) -> {
+          (source, target, draft, cancellation) -> {
             throw new LinkageError("text of a file");
           };
       Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
@@ -66,7 +66,7 @@ class FaultSessionTest {
       assertTrue(talk.logged.get(0).contains("java.lang.LinkageError at "));
       assertTrue(!talk.logged.get(0).contains("text of a file"));
 
-      talk.machine.examiner = Examiner.DRAFT;
+      talk.machine.examiner = Examiner.ADAPTIVE;
       german.replace("Winter", "Frost");
       assertEquals(List.of("omission"), talk.codes(work.en()));
     }

@@ -1,8 +1,8 @@
 package dev.tallystick.lsp;
 
 /** An invented text in three languages, a sentence a line; the translations lack nothing. */
-final class Ferry {
-  static final String EN =
+public final class Ferry {
+  public static final String EN =
       """
       # The chain ferry
 
@@ -24,7 +24,7 @@ final class Ferry {
       A lantern on the mooring post tells the people on the other bank that no boat will come.
       """;
 
-  static final String DE =
+  public static final String DE =
       """
       # Die Kettenfähre
 
@@ -46,7 +46,7 @@ final class Ferry {
       Eine Laterne am Pfosten sagt den Leuten am anderen Ufer, dass kein Boot mehr kommt.
       """;
 
-  static final String FR =
+  public static final String FR =
       """
       # Le bac à chaîne
 

@@ -217,13 +217,13 @@ class FindingsSessionTest {
   }
 
   @Test
-  void aTextWithoutAFileIsToldNothing() {
+  void aTextWithoutAFileShowsNothing() {
     Work.withoutFog(folder);
     try (Talk talk = Talk.in(folder)) {
       Buffer scratch = talk.open("untitled:Untitled-1", Ferry.DE_WITHOUT_FOG);
       scratch.replace("Winter", "Frost");
 
-      assertTrue(talk.published.isEmpty());
+      assertEquals(List.of(), talk.shown(scratch.uri));
       assertNull(scratch.hover("Frost"));
     }
   }
@@ -234,11 +234,11 @@ class FindingsSessionTest {
     work.write("fr/ferry.md", Ferry.FR_WITHOUT_FOG);
     try (Talk talk = Talk.in(folder)) {
       talk.machine.examiner =
-          (source, target, cancellation) -> {
+          (source, target, draft, cancellation) -> {
             if (target.language().equals("fr")) {
               throw new IllegalStateException(target.text().string());
             }
-            return Examiner.DRAFT.examine(source, target, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
           };
       Buffer english = talk.open(work.en(), Ferry.EN);
       talk.settle();
@@ -248,7 +248,7 @@ class FindingsSessionTest {
       assertTrue(talk.logged.get(0).contains("IllegalStateException at "));
       assertFalse(talk.logged.get(0).contains("bac"));
 
-      talk.machine.examiner = Examiner.DRAFT;
+      talk.machine.examiner = Examiner.ADAPTIVE;
       english.replace("greases", "oils");
       assertEquals(2, talk.shown(work.en()).size());
     }

@@ -50,7 +50,7 @@ class LifecycleSessionTest {
     }
   }
 
-  private static void offer(InitializeParams params, String... offered) {
+  static void offer(InitializeParams params, String... offered) {
     GeneralClientCapabilities general = new GeneralClientCapabilities();
     general.setPositionEncodings(List.of(offered));
     params.getCapabilities().setGeneral(general);

@@ -69,14 +69,14 @@ class OutlineSessionTest {
 
       assertEquals(
           List.of(
-              "The chain ferry - 16 of 17 sentences matched",
-              "  Tokens and tolls - 5 of 6 sentences matched",
+              "The chain ferry - 16 of 17 sentences matched, 1 missing",
+              "  Tokens and tolls - 5 of 6 sentences matched, 1 missing",
               "  The night - 5 of 5 sentences matched"),
           shown(tree(talk, english), ""));
       assertEquals(
           List.of(
-              "Die Kettenfähre - 16 of 16 sentences matched",
-              "  Marken und Preise - 5 of 5 sentences matched",
+              "Die Kettenfähre - 16 of 16 sentences matched, 1 missing",
+              "  Marken und Preise - 5 of 5 sentences matched, 1 missing",
               "  Die Nacht - 5 of 5 sentences matched"),
           shown(tree(talk, german), ""));
     }
@@ -105,7 +105,7 @@ class OutlineSessionTest {
       Buffer english = talk.open(work.en(), EN);
 
       assertEquals(
-          "German: 16 of 17 sentences matched, French: 15 of 17 sentences matched",
+          "German: 16 of 17 sentences matched, 1 missing; French: 15 of 17 sentences matched, 2 missing",
           tree(talk, english).get(0).getDetail());
     }
   }

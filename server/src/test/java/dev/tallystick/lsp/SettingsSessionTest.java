@@ -13,6 +13,8 @@ import org.eclipse.lsp4j.InitializeParams;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** What the user sets, and what the user is asked. */
 class SettingsSessionTest {
@@ -22,7 +24,7 @@ class SettingsSessionTest {
     params.getCapabilities().getWorkspace().setConfiguration(true);
   }
 
-  private static void push(Talk talk, Object settings) {
+  static void push(Talk talk, Object settings) {
     talk.server
         .getWorkspaceService()
         .didChangeConfiguration(new DidChangeConfigurationParams(settings));
@@ -86,6 +88,80 @@ class SettingsSessionTest {
       push(talk, Map.of("sourceLanguage", "xx-nowhere"));
       assertEquals(2, talk.said.size());
       assertTrue(talk.said.get(1).contains("sourceLanguage"));
+    }
+  }
+
+  /** Sets them in the way that a client has: by being asked, or by sending them. */
+  private static void set(Talk talk, boolean pulled, Object settings) {
+    talk.settings = settings;
+    push(talk, pulled ? Map.of() : settings);
+  }
+
+  private Talk client(boolean pulled) {
+    return Talk.in(
+        folder, params -> params.getCapabilities().getWorkspace().setConfiguration(pulled));
+  }
+
+  @ParameterizedTest
+  @ValueSource(booleans = {false, true})
+  void whatIsWrongIsSaidInWordsThatHelp(boolean pulled) {
+    try (Talk talk = client(pulled)) {
+      set(talk, pulled, Map.of("lens", "yes", "inlay", 1, "restMillis", 200));
+      assertEquals(
+          List.of(
+              "The setting tallystick.lens must be true or false. Until then it counts as false.",
+              "The setting tallystick.inlay must be true or false. Until then it counts as false."),
+          talk.said);
+      set(talk, pulled, List.of("lens"));
+      assertEquals(3, talk.said.size());
+      assertTrue(talk.said.get(2).contains("must be an object"), talk.said.get(2));
+    }
+  }
+
+  @ParameterizedTest
+  @ValueSource(booleans = {false, true})
+  void figuresAreSwitchedOnAndOff(boolean pulled) {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = client(pulled)) {
+      Buffer english = talk.open(work.en(), Ferry.EN);
+      set(talk, pulled, Map.of("lens", true, "inlay", true));
+      assertEquals(1, ViewsSessionTest.lenses(talk, english).size());
+      assertEquals(1, ViewsSessionTest.hints(talk, english, ViewsSessionTest.ALL).size());
+
+      set(talk, pulled, Map.of("lens", "no", "inlay", false));
+      assertEquals(0, ViewsSessionTest.lenses(talk, english).size());
+      assertEquals(0, ViewsSessionTest.hints(talk, english, ViewsSessionTest.ALL).size());
+      assertEquals(1, talk.said.size());
+    }
+  }
+
+  @Test
+  void settingsThatComeAtTheStartCountUntilOthersCome() {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    for (boolean pulled : List.of(false, true)) {
+      try (Talk talk =
+          Talk.in(
+              folder,
+              params -> {
+                params.setInitializationOptions(Map.of("restMillis", 200, "progress", "often"));
+                params.getCapabilities().getWorkspace().setConfiguration(pulled);
+              })) {
+        Buffer german = talk.open(work.de(), Ferry.DE);
+        german.replace(Ferry.FOG_DE + "\n", "");
+        talk.pass(200);
+        assertEquals(List.of("omission"), talk.codes(work.en()));
+        assertEquals(1, talk.said.size());
+        assertTrue(talk.said.get(0).contains("tallystick.progress"), talk.said.get(0));
+
+        talk.settings = Map.of("restMillis", 900);
+        push(talk, pulled ? Map.of() : talk.settings);
+        german.replace(Ferry.line(Ferry.DE, "Die Winde zieht") + "\n", "");
+        talk.pass(200);
+        assertEquals(List.of("omission"), talk.codes(work.en()));
+        talk.pass(700);
+        assertEquals(List.of("omission", "omission"), talk.codes(work.en()));
+      }
     }
   }
 

@@ -21,11 +21,13 @@ import java.util.function.Consumer;
  * A machine with a clock moved by hand, workers that can be held up, and a watch that can be told.
  */
 final class Surround {
+  static final int WORKERS = 2;
+
   final HandAlarm alarm = new HandAlarm();
   final Activity activity = new Activity();
 
   /** What workers do; a test may put something else here. */
-  volatile Examiner examiner = Examiner.DRAFT;
+  volatile Examiner examiner = Examiner.ADAPTIVE;
 
   /** What files are read from; a test may put something else here. */
   volatile Disk disk = Disk.REAL;
@@ -38,7 +40,7 @@ final class Surround {
   private volatile Consumer<Event> post;
 
   Machine machine() {
-    return new Machine(new HeldDisk(), alarm, activity, this::examine, 2, this::watch, false);
+    return new Machine(new HeldDisk(), alarm, activity, this::examine, WORKERS, this::watch, false);
   }
 
   /** From now on workers wait before they examine. */
@@ -76,6 +78,12 @@ final class Surround {
       await(listing);
       return disk.files(folder);
     }
+
+    @Override
+    public List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
+      await(listing);
+      return disk.files(folder, unread);
+    }
   }
 
   /** The watch tells something. */
@@ -83,10 +91,11 @@ final class Surround {
     post.accept(event);
   }
 
-  private PairResult examine(Reading source, Reading target, Cancellation cancellation) {
+  private PairResult examine(
+      Reading source, Reading target, boolean draft, Cancellation cancellation) {
     await(gate);
     cancellation.check();
-    return examiner.examine(source, target, cancellation);
+    return examiner.examine(source, target, draft, cancellation);
   }
 
   private Watch watch(Consumer<Event> to) {

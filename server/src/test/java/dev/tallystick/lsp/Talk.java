@@ -18,6 +18,7 @@ import org.eclipse.lsp4j.DidChangeWatchedFilesCapabilities;
 import org.eclipse.lsp4j.DidChangeWatchedFilesParams;
 import org.eclipse.lsp4j.DidSaveTextDocumentParams;
 import org.eclipse.lsp4j.DocumentSymbolCapabilities;
+import org.eclipse.lsp4j.ExecuteCommandParams;
 import org.eclipse.lsp4j.FileChangeType;
 import org.eclipse.lsp4j.FileEvent;
 import org.eclipse.lsp4j.HoverParams;
@@ -27,30 +28,32 @@ import org.eclipse.lsp4j.InitializedParams;
 import org.eclipse.lsp4j.MessageActionItem;
 import org.eclipse.lsp4j.MessageParams;
 import org.eclipse.lsp4j.Position;
+import org.eclipse.lsp4j.ProgressParams;
 import org.eclipse.lsp4j.PublishDiagnosticsCapabilities;
 import org.eclipse.lsp4j.PublishDiagnosticsParams;
 import org.eclipse.lsp4j.RegistrationParams;
 import org.eclipse.lsp4j.ShowMessageRequestParams;
 import org.eclipse.lsp4j.TextDocumentClientCapabilities;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
+import org.eclipse.lsp4j.WorkDoneProgressCreateParams;
 import org.eclipse.lsp4j.WorkspaceClientCapabilities;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.eclipse.lsp4j.jsonrpc.Launcher;
 import org.eclipse.lsp4j.launch.LSPLauncher;
-import org.eclipse.lsp4j.services.LanguageClient;
 import org.eclipse.lsp4j.services.LanguageServer;
 
 /** A scripted client on the other end of a real connection. It keeps all that it is told. */
-final class Talk implements LanguageClient, AutoCloseable {
+final class Talk implements Remote, AutoCloseable {
   private static final long FAR_TOO_LONG = 60;
 
   final Surround machine = new Surround();
   final List<PublishDiagnosticsParams> published = new CopyOnWriteArrayList<>();
   final List<String> said = new CopyOnWriteArrayList<>();
   final List<String> logged = new CopyOnWriteArrayList<>();
+  final List<Object> passes = new CopyOnWriteArrayList<>();
   final List<RegistrationParams> registered = new CopyOnWriteArrayList<>();
   final CompletableFuture<Integer> ended;
-  final LanguageServer server;
+  final Peer server;
 
   /** What is set under {@code tallystick}. */
   volatile Object settings;
@@ -58,20 +61,33 @@ final class Talk implements LanguageClient, AutoCloseable {
   /** The answer to the question what is set; empty for one that comes at once. */
   volatile Optional<CompletableFuture<List<Object>>> answer = Optional.empty();
 
+  /** How far pairs have come, as it was told. */
+  final List<PairProgress> progress = new CopyOnWriteArrayList<>();
+
+  /** What the client was told to ask for again. */
+  final List<String> refreshed = new CopyOnWriteArrayList<>();
+
+  /** The answer to that. */
+  volatile CompletableFuture<Void> refreshing = CompletableFuture.completedFuture(null);
+
   InitializeResult initialized;
   private final Pipe toServer = new Pipe();
   private final Pipe toClient = new Pipe();
   private final ExecutorService threads = Executors.newCachedThreadPool();
 
+  /** The server, with what it can be asked beyond the protocol. */
+  interface Peer extends LanguageServer, OwnRequests {}
+
   private Talk() {
     ended = Session.start(toServer.in, toClient.out, machine.machine(), "0.0-test");
-    Launcher<LanguageServer> launcher =
-        new LSPLauncher.Builder<LanguageServer>()
+    Launcher<Peer> launcher =
+        new LSPLauncher.Builder<Peer>()
             .setLocalService(this)
-            .setRemoteInterface(LanguageServer.class)
+            .setRemoteInterface(Peer.class)
             .setInput(toClient.in)
             .setOutput(toServer.out)
             .setExecutorService(threads)
+            .configureGson(RelatedReports::teach)
             .create();
     server = launcher.getRemoteProxy();
     launcher.startListening();
@@ -144,13 +160,19 @@ final class Talk implements LanguageClient, AutoCloseable {
     answer(
         server
             .getTextDocumentService()
-            .hover(
-                new HoverParams(
-                    new TextDocumentIdentifier("untitled:nothing"), new Position(0, 0))));
+            .hover(new HoverParams(new TextDocumentIdentifier("nothing"), new Position(0, 0))));
   }
 
   static <T> T answer(CompletableFuture<T> asked) {
     return asked.orTimeout(FAR_TOO_LONG, TimeUnit.SECONDS).join();
+  }
+
+  /** The user gives a command. */
+  Object command(String name, Object... arguments) {
+    return answer(
+        server
+            .getWorkspaceService()
+            .executeCommand(new ExecuteCommandParams(name, List.of(arguments))));
   }
 
   /** Lets time pass. */
@@ -203,6 +225,11 @@ final class Talk implements LanguageClient, AutoCloseable {
   }
 
   @Override
+  public void stands(PairProgress now) {
+    progress.add(now);
+  }
+
+  @Override
   public void showMessage(MessageParams params) {
     said.add(params.getMessage());
   }
@@ -219,10 +246,39 @@ final class Talk implements LanguageClient, AutoCloseable {
   }
 
   @Override
+  public CompletableFuture<Void> createProgress(WorkDoneProgressCreateParams params) {
+    passes.add(params);
+    return CompletableFuture.completedFuture(null);
+  }
+
+  @Override
+  public void notifyProgress(ProgressParams params) {
+    passes.add(params.getValue().getLeft());
+  }
+
+  @Override
   public CompletableFuture<List<Object>> configuration(ConfigurationParams params) {
     List<Object> values = new ArrayList<>();
     params.getItems().forEach(item -> values.add(settings));
     return answer.orElseGet(() -> CompletableFuture.completedFuture(values));
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshDiagnostics() {
+    refreshed.add("findings");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshCodeLenses() {
+    refreshed.add("lenses");
+    return refreshing;
+  }
+
+  @Override
+  public CompletableFuture<Void> refreshInlayHints() {
+    refreshed.add("hints");
+    return refreshing;
   }
 
   @Override

@@ -23,9 +23,9 @@ class WorkSessionTest {
   private static List<Seen> watch(Talk talk) {
     List<Seen> seen = new CopyOnWriteArrayList<>();
     talk.machine.examiner =
-        (source, target, cancellation) -> {
+        (source, target, draft, cancellation) -> {
           seen.add(new Seen(source, target));
-          return Examiner.DRAFT.examine(source, target, cancellation);
+          return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
         };
     return seen;
   }

@@ -101,6 +101,7 @@ class LanguageTest {
   void wordsOfWhyAreLowerCase() {
     assertEquals("name", Why.NAME.word());
     assertEquals("folder", Why.FOLDER.word());
+    assertEquals("project", Why.PROJECT.word());
     assertEquals("argument", Why.ARGUMENT.word());
   }
 

@@ -97,6 +97,37 @@ class PairingTest {
   }
 
   @Test
+  void scriptsAndRegionsInNamesAndFoldersAtAnyDepth() {
+    check(
+        """
+        guide.md
+        guide.zh-Hant.md
+        guide.pt-BR.md
+        guide.sr-Latn.md
+        guide.zh-Hant-TW.md
+        guide.es-419.md
+        a/b/en/c/note.md
+        a/b/zh-Hant-HK/c/note.md
+        a/b/es-419/c/note.md
+        a/b/sr_Cyrl/c/note.md
+        plan_en.txt
+        plan_es_419.txt
+        plan_zh_Hant_TW.txt
+        =>
+        a/b/en/c/note.md -> a/b/es-419/c/note.md (en>es-419, folder)
+        a/b/en/c/note.md -> a/b/sr_Cyrl/c/note.md (en>sr-Cyrl, folder)
+        a/b/en/c/note.md -> a/b/zh-Hant-HK/c/note.md (en>zh-Hant-HK, folder)
+        guide.md -> guide.es-419.md (und>es-419, name)
+        guide.md -> guide.pt-BR.md (und>pt-BR, name)
+        guide.md -> guide.sr-Latn.md (und>sr-Latn, name)
+        guide.md -> guide.zh-Hant-TW.md (und>zh-Hant-TW, name)
+        guide.md -> guide.zh-Hant.md (und>zh-Hant, name)
+        plan_en.txt -> plan_es_419.txt (en>es-419, name)
+        plan_en.txt -> plan_zh_Hant_TW.txt (en>zh-Hant-TW, name)
+        """);
+  }
+
+  @Test
   void longTagBeatsItsLastPart() {
     check(
         """

@@ -41,6 +41,11 @@ public final class Repository {
     return root().resolve("server/src/test");
   }
 
+  /** The client for VS Code. */
+  static Path client() {
+    return root().resolve("client-vscode");
+  }
+
   /** The files under a folder that belong to us, sorted, whose names end so. */
   static List<Path> files(Path folder, String... endings) {
     List<Path> files = new ArrayList<>();

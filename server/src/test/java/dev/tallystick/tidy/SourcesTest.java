@@ -22,11 +22,20 @@ class SourcesTest {
               + "led|Assump"
               + "tions|\\bassum"
               + "e(That|True|False)\\(|abor"
-              + "t\\(");
+              + "t\\(|\\.(sk"
+              + "ip|to"
+              + "do)\\(");
 
   /** Waiting for time instead of for something to happen. */
   private static final Pattern SLEEP =
-      Pattern.compile("\\.sle" + "ep\\(|vim\\.wa" + "it\\(\\s*\\d+\\s*\\)|Locks" + "upport\\.park");
+      Pattern.compile(
+          "\\.sle"
+              + "ep\\(|\\((sle"
+              + "ep|s"
+              + "it)-for|vim\\.wa"
+              + "it\\(\\s*\\d+\\s*\\)|Locks"
+              + "upport\\.park|(set|waitFor)Time"
+              + "out\\(");
 
   private static final Pattern MACHINE =
       Pattern.compile(
@@ -49,14 +58,18 @@ class SourcesTest {
 
   @Test
   void noTestIsSkippedAndNoneSleeps() {
-    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua");
+    List<Path> tests = Repository.files(Repository.tests(), ".java", ".lua", ".el");
     assertTrue(tests.size() > 10, tests::toString);
     assertNone(tests, code -> SKIPPED.matcher(code).find() || SLEEP.matcher(code).find());
+    List<Path> client = Repository.files(Repository.client(), ".ts", ".mjs");
+    assertTrue(client.size() > 10, client::toString);
+    assertNone(client, code -> SKIPPED.matcher(code).find() || SLEEP.matcher(code).find());
   }
 
   @Test
   void noSourceIsTooLong() {
-    List<Path> sources = Repository.files(Repository.root(), ".java", ".lua", ".js", ".ts");
+    List<Path> sources =
+        Repository.files(Repository.root(), ".java", ".lua", ".el", ".js", ".mjs", ".ts");
     assertNone(sources, code -> code.lines().count() > LONGEST_FILE);
   }
 
@@ -65,8 +78,16 @@ class SourcesTest {
     Path root = Repository.root();
     assertNone(
         Repository.files(
-            root, ".java", ".lua", ".js", ".ts", ".md", ".xml", ".json", ".jsonl", ".txt", "run"),
+            root, ".java", ".lua", ".el", ".js", ".mjs", ".ts", ".md", ".xml", ".json", ".jsonl",
+            ".txt", "run"),
         text -> MACHINE.matcher(text).find());
+  }
+
+  @Test
+  void noLockFileNamesARegistry() {
+    List<Path> locks = Repository.files(Repository.root(), "package-lock.json");
+    assertTrue(locks.size() > 1, locks::toString);
+    assertNone(locks, text -> text.contains("\"resolved\""));
   }
 
   private static void assertNone(List<Path> files, Predicate<String> forbidden) {

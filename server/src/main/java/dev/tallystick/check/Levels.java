@@ -1,0 +1,37 @@
+package dev.tallystick.check;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * How loudly the findings of a project are said. Never as an error: that is the reviser's verdict.
+ *
+ * @param changed the codes whose level is another than usual; empty for one that is off
+ */
+public record Levels(Map<Code, Optional<Severity>> changed) {
+  /** Each code at its own level. */
+  public static final Levels USUAL = new Levels(Map.of());
+
+  /** The word for a code of which nothing is said. */
+  public static final String OFF = "off";
+
+  /** Takes a copy. */
+  public Levels {
+    changed = Map.copyOf(changed);
+  }
+
+  /** How loudly findings of this code are said; empty if they are not. */
+  public Optional<Severity> of(Code code) {
+    return changed.getOrDefault(code, Optional.of(code.severity()));
+  }
+
+  /** The findings that are said, each at its level, in the order given. */
+  public List<Finding> apply(List<Finding> findings) {
+    return changed.isEmpty()
+        ? findings
+        : findings.stream()
+            .flatMap(finding -> of(finding.code()).map(finding::at).stream())
+            .toList();
+  }
+}

@@ -1,0 +1,138 @@
+package dev.tallystick.cli;
+
+import dev.tallystick.check.Levels;
+import dev.tallystick.engine.Disk;
+import dev.tallystick.engine.Folder;
+import dev.tallystick.engine.Intake;
+import dev.tallystick.engine.Listing;
+import dev.tallystick.engine.Unreadable;
+import dev.tallystick.pairing.Pair;
+import dev.tallystick.pairing.Pairing;
+import dev.tallystick.pairing.Pairs;
+import dev.tallystick.pairing.Rules;
+import dev.tallystick.project.Project;
+import dev.tallystick.project.ProjectFile;
+import dev.tallystick.text.Decoded;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * The files in some folders, and what belongs together among them. A folder with a {@code
+ * tallystick.json} is paired by itself and by what that says; all others are paired together. What
+ * cannot be read, or is wrong in a {@code tallystick.json}, is told on the error console.
+ */
+final class Folders {
+  private final Console console;
+  private final Rules options;
+  private final List<Path> all = new ArrayList<>();
+  private final Map<Pair, Levels> levels = new HashMap<>();
+  private Pairs pairs = Pairs.NONE;
+  private boolean complete = true;
+
+  private Folders(Console console, Rules options) {
+    this.console = console;
+    this.options = options;
+  }
+
+  /**
+   * Looks into folders.
+   *
+   * @param options what the command line says, which beats the projects
+   * @throws Refused if one cannot be listed
+   */
+  static Folders of(Console console, List<Path> folders, Rules options) {
+    Folders found = new Folders(console, options);
+    folders.forEach(found::list);
+    found.pair(folders);
+    return found;
+  }
+
+  Pairs pairs() {
+    return pairs;
+  }
+
+  /** How loudly findings are said in the pairs of a project. */
+  Map<Pair, Levels> levels() {
+    return levels;
+  }
+
+  /** All files, by the names that they have in the pairs. */
+  Listing files() {
+    return Listing.of(all, Path::normalize);
+  }
+
+  /** Whether all could be looked into, and nothing is wrong in a project. */
+  boolean complete() {
+    return complete;
+  }
+
+  private void list(Path folder) {
+    List<String> unread = new ArrayList<>();
+    try {
+      all.addAll(Disk.REAL.files(new Folder(folder, Folder.DEEP), unread::add));
+    } catch (Unreadable e) {
+      throw new Refused(e.getMessage());
+    }
+    unread.forEach(console.err()::println);
+    complete &= unread.isEmpty();
+  }
+
+  private void pair(List<Path> folders) {
+    Map<Path, List<Path>> projects = new LinkedHashMap<>();
+    for (Path folder : folders) {
+      if (all.removeIf(folder.resolve(ProjectFile.NAME)::equals)) {
+        projects.put(folder, new ArrayList<>());
+      }
+    }
+    List<Path> others = new ArrayList<>();
+    for (Path file : all) {
+      innermost(file, projects.keySet()).map(projects::get).orElse(others).add(file);
+    }
+    projects.forEach(this::pairProject);
+    Listing names = Listing.of(others, Path::normalize);
+    pairs = pairs.and(Pairing.pairs(names.names(), options));
+  }
+
+  private static Optional<Path> innermost(Path file, Collection<Path> folders) {
+    return folders.stream()
+        .filter(folder -> plain(file).startsWith(plain(folder)))
+        .max(Comparator.comparingInt(folder -> plain(folder).getNameCount()));
+  }
+
+  private static Path plain(Path path) {
+    return path.toAbsolutePath().normalize();
+  }
+
+  private void pairProject(Path folder, List<Path> files) {
+    Project project = read(folder.resolve(ProjectFile.NAME));
+    Listing names = Listing.of(files, file -> plain(folder).relativize(plain(file)));
+    Pairs found =
+        Pairing.pairs(names.names(), project.rules(Rules.NONE).under(options))
+            .renamed(name -> Listing.name(names.file(name).normalize()));
+    found.pairs().forEach(pair -> levels.put(pair, project.levels()));
+    pairs = pairs.and(found);
+  }
+
+  private Project read(Path file) {
+    try {
+      Decoded decoded = Intake.load(Disk.REAL, file);
+      ProjectFile read = ProjectFile.of(decoded.text());
+      String name = Listing.name(file.normalize());
+      boolean malformed = Malformed.tell(console, name, decoded);
+      malformed |= Malformed.tell(console, name, decoded.text(), read.problems());
+      complete &= !malformed;
+      return read.project();
+    } catch (Unreadable e) {
+      console.err().println(e.getMessage());
+      complete = false;
+      return Project.NONE;
+    }
+  }
+}

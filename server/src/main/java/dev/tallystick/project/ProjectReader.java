@@ -1,0 +1,99 @@
+package dev.tallystick.project;
+
+import dev.tallystick.check.Code;
+import dev.tallystick.check.Levels;
+import dev.tallystick.check.Severity;
+import dev.tallystick.pairing.Glob;
+import dev.tallystick.pairing.Language;
+import java.io.IOException;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+
+/** Reads the facts of a project, key by key. What is read stays read if a later part is broken. */
+final class ProjectReader {
+  /** Every level by its name. */
+  static final List<String> LEVELS =
+      Stream.concat(Stream.of(Levels.OFF), Stream.of(Severity.values()).map(Severity::word))
+          .toList();
+
+  private final Values values;
+  private final PairReader pairs;
+  private final Map<Code, Optional<Severity>> levels = new EnumMap<>(Code.class);
+  private final List<Glob> ignored = new ArrayList<>();
+  private Optional<Language> sourceLanguage = Optional.empty();
+
+  ProjectReader(Values values) {
+    this.values = values;
+    this.pairs = new PairReader(values);
+  }
+
+  /** The keys of the file, each with its reader. */
+  Map<String, Values.Value> keys() {
+    Map<String, Values.Value> keys = new LinkedHashMap<>();
+    keys.put("$schema", name -> values.skip()); // where an editor finds the schema
+    keys.put("sourceLanguage", name -> sourceLanguage = values.language(name));
+    keys.put("pairs", name -> values.elements(name, "A pair", pairs::read));
+    keys.put("checks", name -> values.members(name, checks()));
+    keys.put("ignore", name -> values.elements(name, "A name to ignore", this::readIgnored));
+    return keys;
+  }
+
+  void read() throws IOException {
+    values.members("The file", keys());
+    values.end();
+  }
+
+  /**
+   * What was read.
+   *
+   * @param whole whether that is all there is
+   */
+  Project project(boolean whole) {
+    return new Project(
+        sourceLanguage,
+        pairs.rules(sourceLanguage.isPresent() || !whole),
+        new Levels(levels),
+        ignored);
+  }
+
+  private Map<String, Values.Value> checks() {
+    return Stream.of(Code.values())
+        .collect(
+            Collectors.toMap(
+                Code::word,
+                code -> name -> readLevel(code, name),
+                (a, b) -> a,
+                LinkedHashMap::new));
+  }
+
+  private void readLevel(Code code, String name) throws IOException {
+    Optional<Tokens.Word> word = values.string(name);
+    if (word.isEmpty()) {
+      return;
+    }
+    String level = word.get().value();
+    if (LEVELS.contains(level)) {
+      levels.put(code, Severity.of(level));
+    } else {
+      String allowed = " is no level. Allowed are: " + String.join(", ", LEVELS) + ".";
+      values.problem(word.get().span(), Values.quote(level) + allowed);
+    }
+  }
+
+  private void readIgnored(String name) throws IOException {
+    Optional<Tokens.Word> word = values.string(name);
+    if (word.isPresent()) {
+      String glob = word.get().value();
+      Names.faultOfGlob(glob)
+          .ifPresentOrElse(
+              fault -> values.problem(word.get().span(), fault),
+              () -> Glob.of(glob).ifPresent(ignored::add));
+    }
+  }
+}

@@ -1,0 +1,115 @@
+package dev.tallystick.aid;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import dev.tallystick.check.OnSide;
+import dev.tallystick.engine.Examiner;
+import dev.tallystick.engine.PairResult;
+import dev.tallystick.engine.Reading;
+import dev.tallystick.prose.Format;
+import dev.tallystick.run.Cancellation;
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
+import java.util.List;
+import java.util.Random;
+import java.util.stream.IntStream;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.EnumSource;
+
+/** Whatever the texts are: nothing of the translation is lost, and nothing fails. */
+class StubRandomTest {
+  private static final int ROUNDS = 400;
+  private static final List<String> PIECES =
+      List.of(
+          "The ferry leaves at noon. ",
+          "Nobody swims here at night, not even in July. ",
+          "Das Boot liegt im Hafen. ",
+          "**Stop now.** ",
+          "[A bell](b.md) rings.",
+          "語る。船が出る。",
+          "🛶 ",
+          "\n",
+          "\n",
+          "\n\n",
+          "\n\n",
+          "\r\n",
+          "\r",
+          "- ",
+          "1. ",
+          "> ",
+          "  ",
+          "## ",
+          "===\n",
+          "| One | Two |\n|---|---|\n| Three | Four |\n",
+          "```\ncode\n```\n",
+          "<div>\n",
+          "<!-- note -->\n",
+          "[^1]: ",
+          "---\n",
+          "\uFEFF",
+          "\\",
+          "`x`");
+
+  private static String text(Random random) {
+    StringBuilder text = new StringBuilder();
+    for (int i = random.nextInt(30); i > 0; i--) {
+      text.append(PIECES.get(random.nextInt(PIECES.size())));
+    }
+    return text.toString();
+  }
+
+  private static Reading read(Random random, Format format, String language) {
+    return Reading.of(new Text(text(random)), format, language, Cancellation.NONE);
+  }
+
+  @ParameterizedTest
+  @EnumSource(Format.class)
+  void nothingIsLostAndNothingFails(Format format) {
+    Random random = new Random(7);
+    int edited = 0;
+    for (int round = 0; round < ROUNDS; round++) {
+      PairResult pair =
+          Examiner.ADAPTIVE.examine(
+              read(random, format, "en"), read(random, format, "de"), true, Cancellation.NONE);
+      Places places = new Places(pair);
+      List<Integer> missing =
+          IntStream.range(0, pair.source().segments().size())
+              .filter(i -> !places.matched(i) && random.nextInt(4) > 0)
+              .boxed()
+              .toList();
+      List<LineEdit> edits = Stub.edits(pair, format, missing);
+      edited += edits.isEmpty() ? 0 : 1;
+      check(pair.target().text(), edits);
+      ask(pair, random);
+    }
+    assertTrue(edited > ROUNDS / 4, "edits in " + edited + " of " + ROUNDS);
+  }
+
+  private static void check(Text target, List<LineEdit> edits) {
+    int next = 0;
+    for (LineEdit edit : edits) {
+      assertTrue(next <= edit.from() && edit.from() < edit.to(), edits::toString);
+      assertTrue(edit.to() <= target.lines(), edits::toString);
+      next = edit.to();
+    }
+    String before = target.string().replaceAll("[\\s>]+", "");
+    String after = Stubbed.apply(target.string(), edits).replaceAll("[\\s>]+", "");
+    int at = 0;
+    for (int i = 0; i < after.length() && at < before.length(); i++) {
+      at += after.charAt(i) == before.charAt(at) ? 1 : 0;
+    }
+    assertEquals(before.length(), at, () -> "lost: " + target.string() + "\n" + edits);
+  }
+
+  private static void ask(PairResult pair, Random random) {
+    for (OnSide side : OnSide.values()) {
+      int length = pair.reading(side).text().length();
+      int start = random.nextInt(length + 1);
+      int end = start + random.nextInt(length - start + 1);
+      for (Wanted wanted : Wanted.at(pair, side, new Span(start, end))) {
+        assertTrue(!wanted.segments().isEmpty());
+      }
+    }
+  }
+}

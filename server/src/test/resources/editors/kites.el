@@ -1,0 +1,281 @@
+;;; kites.el --- A translator at work in Emacs  -*- lexical-binding: t -*-
+
+;; The same session as in kites.lua, in a terminal: one source, three languages, another program
+;; that writes into the source.  Each step waits for what must come; the first that does not come
+;; ends the run.  The caller gives, by the environment: SNIPPET (the set-up that README.md shows),
+;; JOB (the folder of the job), SENTENCES (its sentences by name and language), NEXT (texts that the
+;; source will have), TOLD (where to tell).
+
+(setq native-comp-deferred-compilation nil ; the machine has other work
+      read-process-output-max 1048576)
+(require 'package)
+(package-initialize)
+(require 'cl-lib)
+(require 'flymake)
+(require 'json)
+(require 'xref)
+(require 'eglot)
+(load (getenv "SNIPPET") nil t t)
+
+(defconst patience 60 "Seconds; a machine at work may be slow, but the answer must come.")
+(defconst translations '("de" "he" "ja"))
+(defconst planted '(("de" "tie") ("he" "gloves") ("ja" "knots")))
+(defconst sentences
+  (with-temp-buffer
+    (insert-file-contents (getenv "SENTENCES"))
+    (json-parse-buffer)))
+
+(defun tell (line)
+  (write-region (concat line "\n") nil (getenv "TOLD") t 'quiet))
+
+(defun sentence (name language)
+  (gethash language (gethash name sentences)))
+
+(defun file (language)
+  (format "%s/kites.%s.md" (getenv "JOB") language))
+
+(defun next (text)
+  (format "%s/%s.md" (getenv "NEXT") text))
+
+;;; What is seen
+
+(defun await (what expected actual)
+  "Wait until ACTUAL gives EXPECTED, while Emacs obeys its keyboard and its timers as ever."
+  (let* ((deadline (time-add nil patience))
+         (poll (run-with-timer
+                0 0.05
+                (lambda ()
+                  (when (or (equal (funcall actual) expected) (time-less-p deadline nil))
+                    (exit-recursive-edit))))))
+    (unwind-protect (recursive-edit)
+      (cancel-timer poll)))
+  (let ((seen (funcall actual)))
+    (unless (equal seen expected)
+      (error "not seen: %s\nseen instead:\n%s\nexpected:\n%s" what seen expected))
+    (tell (concat "ok: " what))))
+
+(defun shown (message text)
+  "A diagnostic with a MESSAGE on a TEXT; at a gap, the sentence that is missing counts."
+  (string-match "\\`tallystick \\[\\([a-z]+\\)\\]: \\([^z-a]*\\)\\'" message)
+  (let ((code (match-string 1 message))
+        (words (replace-regexp-in-string "[\u2068\u2069]" "" (match-string 2 message))))
+    (if (and (string-match "\\`Missing here: \"\\([^z-a]*\\)\"\\'" words) (not (equal text "")))
+        (concat "gap: " (match-string 1 words))
+      (concat code ": " text))))
+
+(defun marked-in-buffer ()
+  (mapcar (lambda (diagnostic)
+            (shown (flymake-diagnostic-text diagnostic)
+                   (buffer-substring-no-properties (flymake-diagnostic-beg diagnostic)
+                                                   (flymake-diagnostic-end diagnostic))))
+          (flymake-diagnostics)))
+
+(defun sentence-at-point (language)
+  "The known sentence that begins at point."
+  (or (cl-loop for name being the hash-keys of sentences
+               for words = (sentence name language)
+               thereis (and words (looking-at-p (regexp-quote words)) words))
+      "no sentence"))
+
+(defun marked-on-disk (language)
+  "What Emacs knows of a file that it does not show: only where each diagnostic begins."
+  (with-temp-buffer
+    (insert-file-contents (file language))
+    (mapcar (lambda (diagnostic)
+              (pcase-let ((`(,line . ,column) (flymake-diagnostic-beg diagnostic)))
+                (goto-char (point-min))
+                (forward-line (1- line))
+                (eglot-move-to-lsp-abiding-column (1- column))
+                (shown (flymake-diagnostic-text diagnostic) (sentence-at-point language))))
+            (cdr (assoc (file language) flymake-list-only-diagnostics)))))
+
+(defun marked (language)
+  (let ((buffer (find-buffer-visiting (file language))))
+    (string-join (sort (if buffer (with-current-buffer buffer (marked-in-buffer))
+                         (marked-on-disk language))
+                       #'string<)
+                 "\n")))
+
+(defun await-marks (what missing &optional added)
+  "Wait until just some sentences are marked.
+MISSING names by language those that are missing in a translation, ADDED those that its source does
+not have."
+  (let (source expected)
+    (dolist (language translations)
+      (let (marks)
+        (dolist (name (cdr (assoc language missing)))
+          (push (concat "omission: " (sentence name "en")) source)
+          (push (concat "gap: " (sentence name "en")) marks))
+        (dolist (name added)
+          (push (concat "addition: " (sentence name language)) marks))
+        (push (string-join (sort marks #'string<) "\n") expected)))
+    (push (string-join (sort source #'string<) "\n") expected)
+    (await what (string-join expected "\n--\n")
+           (lambda () (mapconcat #'marked '("en" "ja" "he" "de") "\n--\n")))))
+
+(defun here ()
+  (format "%s: %s" (file-name-nondirectory (or buffer-file-name ""))
+          (if (string-match "\\.\\([a-z]+\\)\\.md\\'" (or buffer-file-name ""))
+              (sentence-at-point (match-string 1 buffer-file-name))
+            "")))
+
+(defun there (name language)
+  (format "kites.%s.md: %s" language (sentence name language)))
+
+(defun listed ()
+  "The places in the list of what was found."
+  (with-current-buffer (or (get-buffer "*xref*") (current-buffer))
+    (goto-char (point-min))
+    (let (found match)
+      (while (setq match (text-property-search-forward 'xref-item))
+        (let ((at (xref-location-marker (xref-item-location (prop-match-value match)))))
+          (with-current-buffer (marker-buffer at)
+            (save-excursion
+              (goto-char at)
+              (push (here) found)))))
+      (string-join (sort found #'string<) "\n"))))
+
+;;; What is done
+
+(defun elsewhere (program &rest arguments)
+  "Another process does something to a file."
+  (unless (eq 0 (apply #'call-process program nil nil nil arguments))
+    (error "%s %s" program arguments)))
+
+(defun press (keys)
+  "Presses KEYS, which Emacs reads as soon as it waits."
+  (setq unread-command-events
+        (append unread-command-events (listify-key-sequence (kbd keys)))))
+
+(defun replace (old new)
+  "Puts NEW where the text OLD stands once in the current buffer."
+  (goto-char (point-min))
+  (search-forward old)
+  (undo-boundary)
+  (replace-match new t t)
+  (undo-boundary))
+
+(defun put-cursor (words)
+  "Some characters behind the start of WORDS."
+  (goto-char (point-min))
+  (search-forward words)
+  (goto-char (+ 3 (match-beginning 0))))
+
+(defun visit (language)
+  (switch-to-buffer (find-file-noselect (file language))))
+
+(defun jump (from to name)
+  (visit from)
+  (put-cursor (sentence name from))
+  (press "M-.")
+  (await (format "from %s to %s" from to) (there name to) #'here))
+
+(defun ask (method more)
+  "Asks what no command of eglot asks: the answer is looked at by the caller."
+  (when (seq-empty-p (jsonrpc-request (eglot-current-server) method
+                                      (append (eglot--TextDocumentPositionParams) more)))
+    (error "nothing found: %s" method)))
+
+(defun session ()
+  (dolist (language translations)
+    (visit language)
+    (delete-other-windows)
+    (when (equal language "de")
+      (press "M-x eglot RET")
+      (await "the server is there" t (lambda () (and (eglot-current-server) t)))))
+  (visit "de")
+  (dolist (language '("he" "ja"))
+    (select-window (split-window-below))
+    (balance-windows)
+    (visit language))
+  (await-marks "what is planted is marked" planted)
+
+  (elsewhere "cp" (next "longer") (file "en"))
+  (await-marks "a sentence added on disk is missing in three languages"
+               '(("de" "tie" "turn") ("he" "gloves" "turn") ("ja" "knots" "turn")))
+  (elsewhere "mv" (next "shorter") (file "en"))
+  (await-marks "a sentence deleted on disk is too much in three languages" planted '("lost"))
+  (elsewhere "cp" (next "first") (file "en"))
+  (await-marks "with the first source everything is as at first" planted)
+
+  (visit "he")
+  (replace (concat (sentence "silk" "he") " ") "")
+  (await-marks "a sentence deleted in Hebrew is missing"
+               '(("de" "tie") ("he" "gloves" "silk") ("ja" "knots")))
+  (press "C-/")
+  (await-marks "after undo it is not" planted)
+
+  (visit "de")
+  (await "the lines end with CR LF" 1 (lambda () (coding-system-eol-type buffer-file-coding-system)))
+  (replace (concat (sentence "box" "de") " ")
+           (format "%s\n%s\n" (sentence "box" "de")
+                   (replace-regexp-in-string "\\` *\\([^ ]+\\) " "\\1\n" (sentence "tie" "de"))))
+  (await-marks "a sentence put into German is not missing" '(("he" "gloves") ("ja" "knots")))
+  (press "C-/")
+  (await-marks "after undo it is" planted)
+  (press "M-x undo-redo RET")
+  (await-marks "after redo it is not" '(("he" "gloves") ("ja" "knots")))
+  (press "C-x C-s")
+  (await "saved" nil #'buffer-modified-p)
+
+  (jump "de" "en" "oil")
+  (jump "en" "de" "oil")
+  (jump "ja" "en" "room")
+  (put-cursor (sentence "room" "en"))
+  (press "M-?")
+  (await "references in all languages"
+         (mapconcat (lambda (language) (there "room" language)) '("de" "en" "he" "ja") "\n")
+         #'listed)
+  (delete-other-windows)
+  (visit "en")
+
+  (put-cursor (sentence "oil" "en"))
+  (press "C-h .")
+  (await "hover in all languages" t
+         (lambda ()
+           (cl-every (lambda (language)
+                       (cl-some (lambda (buffer)
+                                  (and (string-match-p "eldoc" (buffer-name buffer))
+                                       (with-current-buffer buffer
+                                         (save-excursion
+                                           (goto-char (point-min))
+                                           (search-forward (sentence "oil" language) nil t)))))
+                                (buffer-list)))
+                     translations)))
+  (ask :textDocument/documentHighlight nil)
+  (ask :textDocument/selectionRange `(:positions ,(vector (eglot--pos-to-lsp-position))))
+  (ask :textDocument/documentSymbol nil)
+
+  (delete-other-windows)
+  (dolist (language translations)
+    (select-window (split-window-below))
+    (balance-windows)
+    (visit language))
+  (other-window 1)
+  (visit "en")
+  (elsewhere "cp" (next "longer") (file "en"))
+  (revert-buffer t t t)
+  (await-marks "a source reloaded by the editor is followed"
+               '(("de" "turn") ("he" "gloves" "turn") ("ja" "knots" "turn")))
+
+  (select-window (get-buffer-window (find-buffer-visiting (file "ja"))))
+  (replace (sentence "room" "ja") "")
+  (press "C-x C-s M-x tallystick-finished RET")
+  (await-marks "in a finished translation the last sentence is missing"
+               '(("de" "turn") ("he" "gloves" "turn") ("ja" "knots" "turn" "room"))))
+
+(add-hook 'emacs-startup-hook
+          (lambda ()
+            (condition-case fault
+                (progn
+                  (session)
+                  (tell "all seen")
+                  (eglot-shutdown (eglot-current-server) nil 10)
+                  (set-buffer-modified-p nil)
+                  (kill-emacs 0))
+              (error
+               (tell (error-message-string fault))
+               (kill-emacs 1))))
+          t)
+
+;;; kites.el ends here
