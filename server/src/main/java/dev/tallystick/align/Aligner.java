@@ -36,7 +36,7 @@ public enum Aligner {
         Lattice lattice = Lattice.banded(scorer, sides, band, cancellation);
         Posteriors posteriors = new Posteriors(lattice, cancellation);
         fit = Refit.from(posteriors, lattice, fit);
-        band = Band.around(lattice.chain(), sides);
+        band = posteriors.band();
       }
       Evidence evidence = Evidence.full(texts, fit);
       Weighed weighed = Weighed.of(evidence, band, sides, cancellation);

@@ -13,7 +13,7 @@ import java.util.Optional;
  */
 final class Anchors {
   /** Columns at either side of the line between two anchors. */
-  private static final int MARGIN = 4;
+  private static final int MARGIN = 2;
 
   /** Two anchors agree if their distances differ by no more than this, and a share of them. */
   private static final int SLACK = 3;

@@ -19,6 +19,15 @@ record Band(int[] first, int[] last) {
   /** A match of more sentences than this counts as such a place. */
   private static final int PLAIN = 3;
 
+  /** These rows, wide enough that one can get through by leaving out unit after unit. */
+  static Band passable(int[] first, int[] last) {
+    for (int row = 1; row < first.length; row++) {
+      last[row - 1] = Math.max(last[row - 1], first[row]);
+      last[row] = Math.max(last[row], last[row - 1]);
+    }
+    return new Band(first, last);
+  }
+
   /** The band around a chain of matches: a pure function of the chain. */
   static Band around(List<Match> chain, Sides sides) {
     int targets = sides.target().size();

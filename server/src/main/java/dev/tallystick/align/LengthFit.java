@@ -40,19 +40,16 @@ final class LengthFit {
 
   LengthModel fit() {
     double ratio = ratio();
-    double total = 0;
-    for (int i = 0; i < count; i++) {
-      total += weight[i];
-    }
-    if (total < ENOUGH) {
-      return model(ratio, 1, 4);
+    if (total() < ENOUGH) {
+      return new Scaled(ratio, 1).model(4);
     }
     LengthModel best = null;
     double likeliest = Double.NEGATIVE_INFINITY;
     for (double power : POWERS) {
+      Scaled scaled = new Scaled(ratio, power);
       for (double freedom : FREEDOMS) {
-        LengthModel model = model(ratio, power, freedom);
-        double likelihood = likelihood(model);
+        LengthModel model = scaled.model(freedom);
+        double likelihood = scaled.likelihood(model);
         if (likelihood > likeliest) {
           likeliest = likelihood;
           best = model;
@@ -72,41 +69,74 @@ final class LengthFit {
     return l1 > 0 && l2 > 0 ? l2 / l1 : start;
   }
 
-  private LengthModel model(double ratio, double power, double freedom) {
-    double[] unit = new double[count];
-    double typical = 0;
+  private double total() {
     double total = 0;
     for (int i = 0; i < count; i++) {
-      double off = target[i] - ratio * source[i];
-      unit[i] = off * off / Math.pow(source[i], power);
-      typical += weight[i] * source[i];
       total += weight[i];
     }
-    // The published spread holds at a power of 1 and a ratio of 1; carried over to this power it
-    // gives the same deviation at the average length.
-    double average = total > 0 ? typical / total : 100;
-    double prior = 6.8 * ratio * ratio * Math.pow(average, 1 - power);
-    double spread = prior;
-    for (int step = 0; step < STEPS; step++) {
-      double sum = PRIOR * prior;
-      for (int i = 0; i < count; i++) {
-        sum += weight[i] * (freedom + 1) / (freedom + unit[i] / spread) * unit[i];
-      }
-      spread = sum / (total + PRIOR);
-    }
-    return new LengthModel(ratio, spread, power, freedom);
+    return total;
   }
 
-  private double likelihood(LengthModel model) {
-    double nu = model.freedom();
-    double constant = LengthTable.constant(nu);
-    double sum = 0;
-    for (int i = 0; i < count; i++) {
-      double variance = model.variance(source[i]);
-      double off = target[i] - model.ratio() * source[i];
-      double tail = (nu + 1) / 2 * Math.log1p(off * off / variance / nu);
-      sum += weight[i] * (constant - Math.log(variance) / 2 - tail);
+  /** The pairs as they look if the variance grows with one power of the source length. */
+  private final class Scaled {
+    private final double ratio;
+    private final double power;
+    private final double total = total();
+
+    /** For each pair the square of its error, over the power of its source length. */
+    private final double[] errors = new double[count];
+
+    /** Weighted sum of the logs of that power. */
+    private final double logs;
+
+    Scaled(double ratio, double power) {
+      this.ratio = ratio;
+      this.power = power;
+      double sum = 0;
+      for (int i = 0; i < count; i++) {
+        double off = target[i] - ratio * source[i];
+        double log = power * Math.log(source[i]);
+        errors[i] = off * off * Math.exp(-log);
+        sum += weight[i] * log;
+      }
+      this.logs = sum;
     }
-    return sum;
+
+    LengthModel model(double freedom) {
+      double prior = prior();
+      double spread = prior;
+      for (int step = 0; step < STEPS; step++) {
+        double sum = PRIOR * prior;
+        for (int i = 0; i < count; i++) {
+          sum += weight[i] * (freedom + 1) / (freedom + errors[i] / spread) * errors[i];
+        }
+        spread = sum / (total + PRIOR);
+      }
+      return new LengthModel(ratio, spread, power, freedom);
+    }
+
+    /**
+     * The published spread holds at a power of 1 and a ratio of 1; carried over to this power it
+     * gives the same deviation at the average length.
+     */
+    private double prior() {
+      double typical = 0;
+      for (int i = 0; i < count; i++) {
+        typical += weight[i] * source[i];
+      }
+      double average = total > 0 ? typical / total : 100;
+      return 6.8 * ratio * ratio * Math.pow(average, 1 - power);
+    }
+
+    double likelihood(LengthModel model) {
+      double nu = model.freedom();
+      double scale = 1 / (model.spread() * nu);
+      double tails = 0;
+      for (int i = 0; i < count; i++) {
+        tails += weight[i] * Math.log(1 + errors[i] * scale);
+      }
+      double peaks = total * (LengthTable.constant(nu) - Math.log(model.spread()) / 2) - logs / 2;
+      return peaks - (nu + 1) / 2 * tails;
+    }
   }
 }

@@ -63,7 +63,7 @@ final class LengthTable {
 
   private double tail(double z) {
     double nu = model.freedom();
-    return -(nu + 1) / 2 * Math.log1p(z * z / nu);
+    return -(nu + 1) / 2 * Math.log(1 + z * z / nu);
   }
 
   private static double[] logs() {

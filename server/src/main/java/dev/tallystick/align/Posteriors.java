@@ -12,6 +12,9 @@ final class Posteriors {
   /** Cells whose chains lie this far below the best one hold no link worth mentioning (nats). */
   private static final double NEGLIGIBLE = -14;
 
+  /** How far below the best chain through its row one may lie and still be looked at (nats). */
+  private static final double REACH = 20;
+
   private final Lattice lattice;
   private final Scorer scorer;
   private final int shapes;
@@ -50,7 +53,7 @@ final class Posteriors {
       Row forward = lattice.row(row);
       for (int column = forward.first; column <= forward.last; column++) {
         int at = column - forward.first;
-        if (forward.best[at] + onward[row].best[at] - totalBest > NEGLIGIBLE) {
+        if (through(row, at) - totalBest > NEGLIGIBLE) {
           for (int shape = 0; shape < shapes; shape++) {
             double posterior = link(shape, row, column);
             if (posterior >= least) {
@@ -60,6 +63,37 @@ final class Posteriors {
         }
       }
     }
+  }
+
+  /**
+   * Where to look again with other parameters: narrow where one chain is far ahead of all others,
+   * wide where it is not.
+   */
+  Band band() {
+    int[] first = new int[targets + 1];
+    int[] last = new int[targets + 1];
+    for (int row = 0; row <= targets; row++) {
+      int to = lattice.row(row).last - lattice.row(row).first;
+      double best = Row.NOWHERE;
+      for (int at = 0; at <= to; at++) {
+        best = Math.max(best, through(row, at));
+      }
+      int from = 0;
+      while (through(row, from) < best - REACH) {
+        from++;
+      }
+      while (through(row, to) < best - REACH) {
+        to--;
+      }
+      first[row] = lattice.row(row).first + from;
+      last[row] = lattice.row(row).first + to;
+    }
+    return Band.passable(first, last);
+  }
+
+  /** The worth of the best chain through a cell. */
+  private double through(int row, int at) {
+    return lattice.row(row).best[at] + onward[row].best[at];
   }
 
   private double worth(int row, int at, int shape) {

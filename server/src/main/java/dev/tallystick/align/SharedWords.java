@@ -166,7 +166,9 @@ final class SharedWords {
     double[] worth = new double[given.size() * Shape.MOST];
     for (int from = 0; from < given.size(); from++) {
       for (int n = 1; n <= Shape.MOST && from + n <= given.size(); n++) {
-        worth[from * Shape.MOST + n - 1] = log(from, from + n, 0);
+        double general = 1 + generalBefore[from + n] - generalBefore[from];
+        int words = 1 + givenBefore[from + n] - givenBefore[from];
+        worth[from * Shape.MOST + n - 1] = Math.log(FLOOR + (1 - FLOOR) * general / words);
       }
     }
     return worth;
@@ -184,10 +186,11 @@ final class SharedWords {
     return sum;
   }
 
-  private double log(int givenFrom, int givenTo, double own) {
+  /** How much more each unit of its weight makes a shared word worth than one not shared. */
+  private double step(int givenFrom, int givenTo) {
     double general = 1 + generalBefore[givenTo] - generalBefore[givenFrom];
     int words = 1 + givenBefore[givenTo] - givenBefore[givenFrom];
-    return Math.log(FLOOR + (1 - FLOOR) * (general + own) / words);
+    return (1 - FLOOR) / (FLOOR * words + (1 - FLOOR) * general);
   }
 
   private Near near(int j, int from, int to) {
@@ -218,47 +221,68 @@ final class SharedWords {
     final int from;
     final int to;
 
-    /** Words and their places, ordered by word. */
-    private int[] word = new int[4];
+    /** For each given unit the last entry of a word that it has, or -1. */
+    private final int[] lastOf;
 
-    private int[] unit = new int[4];
-    private double[] trust = new double[4];
+    /** For each entry the one before it in the same given unit, or -1. */
+    private int[] before = new int[4];
+
+    private int[] word = new int[4];
+    private double[] weight = new double[4];
     private int count;
 
     Near(int[] words, int from, int to) {
       this.from = from;
       this.to = to;
+      this.lastOf = new int[to - from];
+      Arrays.fill(lastOf, -1);
       for (int number : words) {
         int[] at = places[number];
         for (int k = firstFrom(at, from); k < at.length && at[k] < to; k++) {
-          add(number, at[k], trusts[number][k]);
+          add(number, at[k] - from, rarity[number] * trusts[number][k]);
         }
       }
     }
 
-    private void add(int number, int at, double trusted) {
-      if (count == word.length) {
-        word = Arrays.copyOf(word, 2 * count);
-        unit = Arrays.copyOf(unit, 2 * count);
-        trust = Arrays.copyOf(trust, 2 * count);
+    private void add(int number, int unit, double weighs) {
+      int last = lastOf[unit];
+      if (last >= 0 && word[last] == number) {
+        weight[last] += weighs; // a word may stand twice in one unit
+        return;
       }
+      if (count == word.length) {
+        before = Arrays.copyOf(before, 2 * count);
+        word = Arrays.copyOf(word, 2 * count);
+        weight = Arrays.copyOf(weight, 2 * count);
+      }
+      before[count] = last;
       word[count] = number;
-      unit[count] = at;
-      trust[count++] = trusted;
+      weight[count] = weighs;
+      lastOf[unit] = count++;
     }
 
     /** What the shared words say beyond what they would say if they were not shared. */
     double beyondPlain(int givenFrom, int givenTo) {
-      double plainWord = plain[givenFrom * Shape.MOST + givenTo - givenFrom - 1];
+      double step = step(givenFrom, givenTo);
       double sum = 0;
-      double own = 0;
-      for (int i = 0; i < count; i++) {
-        own += unit[i] >= givenFrom && unit[i] < givenTo ? trust[i] : 0;
-        boolean lastOfWord = i + 1 == count || word[i + 1] != word[i];
-        if (lastOfWord && own > 0) {
-          sum += log(givenFrom, givenTo, rarity[word[i]] * own) - plainWord;
+      for (int unit = givenFrom; unit < givenTo; unit++) {
+        for (int entry = lastOf[unit - from]; entry >= 0; entry = before[entry]) {
+          int number = word[entry];
+          if (weight(number, givenFrom, unit) == 0) {
+            double own = weight[entry] + weight(number, unit + 1, givenTo);
+            sum += Math.log(1 + own * step);
+          }
         }
-        own = lastOfWord ? 0 : own;
+      }
+      return sum;
+    }
+
+    private double weight(int number, int givenFrom, int givenTo) {
+      double sum = 0;
+      for (int unit = givenFrom; unit < givenTo; unit++) {
+        for (int entry = lastOf[unit - from]; entry >= 0; entry = before[entry]) {
+          sum += word[entry] == number ? weight[entry] : 0;
+        }
       }
       return sum;
     }

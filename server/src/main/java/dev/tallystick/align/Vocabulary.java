@@ -2,12 +2,21 @@ package dev.tallystick.align;
 
 import java.util.Arrays;
 
-/** The words of a text, numbered from 0. */
+/** The words of a text, numbered from 0 in the order in which they first stand there. */
 final class Vocabulary {
+  /** Keys are hashed well already, so a word lies at its key's last bits or soon behind. */
   private final long[] keys;
 
-  private Vocabulary(long[] ascending) {
-    this.keys = ascending;
+  /** For each place the number of its word; -1 where there is none. */
+  private final int[] numbers;
+
+  private int size;
+
+  private Vocabulary(int words) {
+    int places = Integer.highestOneBit(words + 1) * 4;
+    this.keys = new long[places];
+    this.numbers = new int[places];
+    Arrays.fill(numbers, -1);
   }
 
   static Vocabulary of(Side side) {
@@ -15,29 +24,37 @@ final class Vocabulary {
     for (Unit unit : side.units) {
       words += unit.words().length;
     }
-    long[] keys = new long[words];
-    int at = 0;
+    Vocabulary vocabulary = new Vocabulary(words);
     for (Unit unit : side.units) {
       for (Unit.Word word : unit.words()) {
-        keys[at++] = word.key();
+        vocabulary.add(word);
       }
     }
-    Arrays.sort(keys);
-    int distinct = 0;
-    for (int i = 0; i < keys.length; i++) {
-      if (i == 0 || keys[i] != keys[i - 1]) {
-        keys[distinct++] = keys[i];
-      }
+    return vocabulary;
+  }
+
+  private void add(Unit.Word word) {
+    int place = place(word.key());
+    if (numbers[place] < 0) {
+      keys[place] = word.key();
+      numbers[place] = size++;
     }
-    return new Vocabulary(Arrays.copyOf(keys, distinct));
+  }
+
+  private int place(long key) {
+    int place = (int) key & keys.length - 1;
+    while (numbers[place] >= 0 && keys[place] != key) {
+      place = place + 1 & keys.length - 1;
+    }
+    return place;
   }
 
   int size() {
-    return keys.length;
+    return size;
   }
 
   /** The number of a word, or less than 0 if the text does not have it. */
   int number(Unit.Word word) {
-    return Arrays.binarySearch(keys, word.key());
+    return numbers[place(word.key())];
   }
 }

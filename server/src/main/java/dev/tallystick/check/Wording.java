@@ -1,6 +1,7 @@
 package dev.tallystick.check;
 
 import com.ibm.icu.util.ULocale;
+import dev.tallystick.text.Isolate;
 
 /** The messages, in a translator's language: what, where, figures last. */
 final class Wording {

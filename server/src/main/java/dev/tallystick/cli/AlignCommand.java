@@ -7,6 +7,7 @@ import dev.tallystick.segment.Segment;
 import dev.tallystick.text.Span;
 import java.io.IOException;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.concurrent.Callable;
@@ -58,13 +59,13 @@ final class AlignCommand implements Callable<Integer> {
   private void print(List<Segment> sources, List<Segment> targets, double confidence)
       throws IOException {
     if (format.forPrograms()) {
-      new JsonLine()
+      new JsonLine(console.out())
           .span("source", span(sources))
           .span("target", span(targets))
           .put("sourceSentences", sources.size())
           .put("targetSentences", targets.size())
           .share("confidence", confidence)
-          .printTo(console.out());
+          .end();
     } else {
       String shape =
           String.format(Locale.ROOT, "%d-%d  %.3f", sources.size(), targets.size(), confidence);
@@ -75,7 +76,13 @@ final class AlignCommand implements Callable<Integer> {
   }
 
   private static List<Segment> sentences(List<Segment> segments, int from, int to) {
-    return segments.subList(from, to).stream().filter(segment -> !segment.verbatim()).toList();
+    List<Segment> sentences = new ArrayList<>(to - from);
+    for (Segment segment : segments.subList(from, to)) {
+      if (!segment.verbatim()) {
+        sentences.add(segment);
+      }
+    }
+    return sentences;
   }
 
   private static Span span(List<Segment> segments) {

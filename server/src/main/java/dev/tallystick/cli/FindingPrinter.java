@@ -104,7 +104,7 @@ abstract class FindingPrinter {
     void print(Pair pair, PairResult result) throws IOException {
       for (Finding finding : result.findings()) {
         Location at = Location.of(result.reading(finding.side()).text(), finding.span().start());
-        new JsonLine()
+        new JsonLine(console.out())
             .put("code", finding.code().word())
             .put("severity", finding.severity().word())
             .put("side", finding.side().word())
@@ -121,7 +121,7 @@ abstract class FindingPrinter {
             .close()
             .share("confidence", finding.confidence())
             .put("message", finding.message())
-            .printTo(console.out());
+            .end();
       }
     }
 

@@ -4,14 +4,15 @@ import com.google.gson.stream.JsonWriter;
 import dev.tallystick.text.Span;
 import java.io.IOException;
 import java.io.PrintWriter;
-import java.io.StringWriter;
 
-/** One line of JSON, its fields in the order they are put. */
+/** One line of JSON, printed field by field in the order they are put. */
 final class JsonLine {
-  private final StringWriter line = new StringWriter();
-  private final JsonWriter json = new JsonWriter(line);
+  private final PrintWriter out;
+  private final JsonWriter json;
 
-  JsonLine() throws IOException {
+  JsonLine(PrintWriter out) throws IOException {
+    this.out = out;
+    this.json = new JsonWriter(out);
     json.setHtmlSafe(false);
     json.setSerializeNulls(true);
     json.beginObject();
@@ -54,8 +55,8 @@ final class JsonLine {
     return this;
   }
 
-  void printTo(PrintWriter out) throws IOException {
+  void end() throws IOException {
     json.endObject();
-    out.println(line);
+    out.println();
   }
 }

@@ -94,7 +94,7 @@ final class PairsCommand implements Callable<Integer> {
 
   private void printForPrograms(Pair pair, PairResult result) throws IOException {
     JsonLine line =
-        new JsonLine()
+        new JsonLine(console.out())
             .put("source", pair.source())
             .put("target", pair.target())
             .put("sourceLanguage", pair.sourceLanguage().tag())
@@ -106,7 +106,7 @@ final class PairsCommand implements Callable<Integer> {
     for (Map.Entry<Code, Integer> count : counts(result).entrySet()) {
       line.put(count.getKey().word(), count.getValue());
     }
-    line.close().printTo(console.out());
+    line.close().end();
   }
 
   private static Map<Code, Integer> counts(PairResult result) {

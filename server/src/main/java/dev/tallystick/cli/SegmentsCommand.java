@@ -57,11 +57,11 @@ final class SegmentsCommand implements Callable<Integer> {
       }
       String block = segment.block().kind().name().toLowerCase(Locale.ROOT);
       if (format.forPrograms()) {
-        new JsonLine()
+        new JsonLine(console.out())
             .put("start", segment.span().start())
             .put("end", segment.span().end())
             .put("block", block)
-            .printTo(console.out());
+            .end();
       } else {
         console.out().println(console.paint(block, "2") + "\t" + segment.prose());
       }

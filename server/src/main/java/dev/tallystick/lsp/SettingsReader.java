@@ -21,6 +21,10 @@ final class SettingsReader {
   private static final String LENS = "lens";
   private static final String INLAY = "inlay";
   private static final String PROGRESS = "progress";
+
+  /** What a user can set; the rest is between client and server. */
+  static final List<String> KEYS = List.of(REST, SOURCE_LANGUAGE, SCOPE, LENS, INLAY);
+
   private static final long LONGEST_REST = 600_000;
 
   private final List<String> problems = new ArrayList<>();

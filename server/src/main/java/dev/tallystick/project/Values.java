@@ -2,6 +2,7 @@ package dev.tallystick.project;
 
 import com.google.gson.stream.JsonToken;
 import dev.tallystick.pairing.Language;
+import dev.tallystick.text.Isolate;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Span;
 import java.io.IOException;
@@ -111,7 +112,8 @@ final class Values {
   static String quote(String text) {
     boolean longer = text.codePointCount(0, text.length()) > LONGEST_QUOTE;
     int end = longer ? text.offsetByCodePoints(0, LONGEST_QUOTE) : text.length();
-    return "\"" + text.substring(0, end) + (longer ? "..." : "") + "\"";
+    String shown = Isolate.balanced(text.substring(0, end)) + (longer ? "..." : "");
+    return '"' + Isolate.of(shown) + '"';
   }
 
   /** Passes over a value. */

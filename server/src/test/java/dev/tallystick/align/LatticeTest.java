@@ -1,5 +1,6 @@
 package dev.tallystick.align;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -120,17 +121,42 @@ class LatticeTest {
       Sides sides = Sample.faithful(seed, 35).sides();
       Evidence.Texts texts = Evidence.Texts.of(sides);
       Scorer scorer = Evidence.full(texts, Fit.start(1.1, sides.target()));
-      List<Match> way = Lattice.wide(scorer, sides, 60, Cancellation.NONE).chain();
-      Band band = Band.around(way, sides);
-      Lattice narrow = Lattice.banded(scorer, sides, band, Cancellation.NONE);
       Lattice whole = Lattice.banded(scorer, sides, everything(sides), Cancellation.NONE);
-      assertEquals(whole.chain(), narrow.chain());
-      Posteriors inBand = new Posteriors(narrow, Cancellation.NONE);
       Posteriors inAll = new Posteriors(whole, Cancellation.NONE);
-      assertSame(inAll.sourceNull(), inBand.sourceNull());
-      assertSame(inAll.targetNull(), inBand.targetNull());
-      inAll.links(1e-4, (shape, t, s, p) -> assertEquals(p, inBand.link(shape, t, s), 1e-6));
+      List<Match> way = Lattice.wide(scorer, sides, 60, Cancellation.NONE).chain();
+      for (Band band : List.of(Band.around(way, sides), inAll.band())) {
+        Lattice narrow = Lattice.banded(scorer, sides, band, Cancellation.NONE);
+        assertEquals(whole.chain(), narrow.chain());
+        Posteriors inBand = new Posteriors(narrow, Cancellation.NONE);
+        assertSame(inAll.sourceNull(), inBand.sourceNull());
+        assertSame(inAll.targetNull(), inBand.targetNull());
+        inAll.links(1e-4, (shape, t, s, p) -> assertEquals(p, inBand.link(shape, t, s), 1e-6));
+      }
     }
+  }
+
+  @Test
+  void aBandIsNarrowOnlyWhereTheWayIsPlain() {
+    Sample sample = Sample.faithful(3, 60);
+    sample.target.subList(25, 35).clear();
+    Sides sides = sample.sides();
+    Scorer scorer = Evidence.full(Evidence.Texts.of(sides), Fit.start(1.1, sides.target()));
+    Lattice whole = Lattice.banded(scorer, sides, everything(sides), Cancellation.NONE);
+    Band band = new Posteriors(whole, Cancellation.NONE).band();
+    assertTrue(width(band, 10) <= 6, () -> "width " + width(band, 10));
+    assertTrue(band.first()[25] <= 25 && band.last()[25] >= 35, () -> "width " + width(band, 25));
+  }
+
+  private static int width(Band band, int row) {
+    return band.last()[row] - band.first()[row] + 1;
+  }
+
+  /** Whatever the rows are, each reaches to where the next one starts, and none falls back. */
+  @Test
+  void aBandCanBePassedWithoutLinks() {
+    Band band = Band.passable(new int[] {0, 2, 1, 7}, new int[] {0, 4, 3, 9});
+    assertArrayEquals(new int[] {0, 2, 1, 7}, band.first());
+    assertArrayEquals(new int[] {2, 4, 7, 9}, band.last());
   }
 
   private static void assertSame(double[] expected, double[] actual) {

@@ -5,11 +5,12 @@ import org.junit.jupiter.api.Test;
 /** Sensible cases that come out wrong today: the rows show what comes, the comment what should. */
 class ShortfallPairsTest {
   @Test
-  void theWayIsLostAtALongHole() {
+  void aLongHoleBeginsTwoSentencesTooEarly() {
     PairCheck.of("en", "de")
         .draft(
             """
-            # today: the links behind the hole are lost; the nine sentences of the hole should be pending
+            # today: the two sentences before the hole are taken for two of it; they should keep their
+            # counterparts, and the nine of the hole be pending
             ¶ # Fire drill in the paper store
             | # Brandübung im Papierlager
             ¶ The alarm in hall 3 is tested on the first Monday of the month, at 10.15 sharp.
@@ -21,45 +22,45 @@ class ShortfallPairsTest {
             ¶ ## What to carry
             | ## Was mitzunehmen ist
             ¶ Take your coat and nothing else; the ledgers stay where they are, in cabinet 12.
-            | Nehmen Sie den Mantel und sonst nichts; die Bücher bleiben, wo sie sind, in Schrank 12.
+            | - !omission
             The cat of the bindery has her own basket, which hangs beside the clock.
-            | Die Katze der Buchbinderei hat einen eigenen Korb, der neben der Uhr hängt.
+            | - !...
             ¶ Do not run on the stairs, and do not go back for the 2 canaries of the accountant.
-            | ## Danach !length
+            | Nehmen Sie den Mantel und sonst nichts; die Bücher bleiben, wo sie sind, in Schrank 12. !...
             ¶ They are fireproof, he says, but we have never had the heart to find out.
-            | Hat der Pförtner 46 Köpfe gezählt, pfeift er zweimal.
+            | Die Katze der Buchbinderei hat einen eigenen Korb, der neben der Uhr hängt. !...
             ¶ The lift stops at floor 2 as soon as the bell rings, and its doors stay open.
-            | Schreiben Sie auf, wie lange es gedauert hat, und hängen Sie das Blatt in die Kantine.
+            | - !...
             Whoever is inside walks down by the iron steps on the yard side of the building.
-            | Die Bestzeit liegt bei 3 Minuten und 20 Sekunden, aufgestellt 2011 von der Nachtschicht.
+            | - !...
             ¶ The hoses are older than the house, but they are dried and rolled every week.
-            | ## Fragen / ¶ Darf ich mein Telefonat mit Kopenhagen noch zu Ende führen?
+            | - !...
             Only the people with a blue badge may open the hydrants, and only in pairs.
-            | Nein, und Frau Tollander wird Ihren Namen im roten Buch vermerken.
+            | - !...
             ¶ Buckets of sand stand under each window, and they are not meant for cigarettes.
-            | Was geschieht, wenn die Übung auf einen Feiertag fällt, etwa auf den 1. Mai?
+            | - !...
             If one of them is empty, tell the caretaker, who keeps 9 sacks in the cellar.
-            | Dann findet sie am Dienstag statt, und die Sirene wird ohne die Kapelle geprüft.
+            | - !...
             ¶ Last spring the rain came through the roof and did more harm than any fire.
-            | - ~
+            | - !...
             ¶ ## Afterwards
-            | - ~
+            | ## Danach
             ¶ When the porter has counted 46 heads, he blows the whistle twice.
-            | - ~
-            Write down how long it took, and hang the sheet on the board in the canteen.
-            | - ~
+            | Hat der Pförtner 46 Köpfe gezählt, pfeift er zweimal.
+            ¶ Write down how long it took, and hang the sheet on the board in the canteen.
+            | Schreiben Sie auf, wie lange es gedauert hat, und hängen Sie das Blatt in die Kantine.
             The best time so far is 3 minutes and 20 seconds, set by the night shift in 2011.
-            | - ~
+            | Die Bestzeit liegt bei 3 Minuten und 20 Sekunden, aufgestellt 2011 von der Nachtschicht.
             ¶ ## Questions
-            | - ~
+            | ## Fragen
             ¶ May I finish my telephone call with Copenhagen first?
-            | - ~
+            | ¶ Darf ich mein Telefonat mit Kopenhagen noch zu Ende führen?
             No, and Ms Tollander will note down your name in the red book.
-            | - ~
+            | Nein, und Frau Tollander wird Ihren Namen im roten Buch vermerken.
             ¶ What happens if the drill falls on a holiday, such as 1 May?
-            | - ~
+            | Was geschieht, wenn die Übung auf einen Feiertag fällt, etwa auf den 1. Mai?
             Then it is held on the Tuesday, and the siren is tested without the band.
-            | - ~
+            | Dann findet sie am Dienstag statt, und die Sirene wird ohne die Kapelle geprüft.
             """);
   }
 

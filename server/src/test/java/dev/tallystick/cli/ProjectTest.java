@@ -115,7 +115,8 @@ class ProjectTest {
     project("{\n  \"colour\": 1,\n  \"checks\": { \"untranslated\": \"hint\" }\n}\n");
     Outcome outcome = check();
     assertEquals(2, outcome.exit());
-    String place = Outcome.shown(folder.resolve("tallystick.json")) + ":2:3: \"colour\" means";
+    String place =
+        Outcome.shown(folder.resolve("tallystick.json")) + ":2:3: \"\u2068colour\u2069\" means";
     assertTrue(outcome.err().startsWith(place), outcome::err);
     assertEquals(1, outcome.err().lines().count(), outcome::err);
     assertEquals("hint", Fields.string(outcome.json().get(0), "severity"));

@@ -2,10 +2,13 @@ package dev.tallystick.project;
 
 import static dev.tallystick.project.ProjectTable.check;
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Rules;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
+import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 
@@ -280,6 +283,14 @@ class ProjectFileTest {
         ignore 🔔/ä
         ignore b"c
         """);
+  }
+
+  @Test
+  void quotedTextDoesNotTurnTheMessageAroundIt() {
+    List<Problem> problems = ProjectFile.of(new Text("{\"אור\": 1}")).problems();
+    assertTrue(
+        problems.get(0).message().startsWith("\"\u2068אור\u2069\" means nothing here."),
+        problems.toString());
   }
 
   @Test

@@ -73,7 +73,7 @@ final class ProjectTable {
     return " ".repeat(start.column())
         + "^".repeat(length)
         + (more ? "+ " : " ")
-        + problem.message();
+        + problem.message().replaceAll("[\u2068\u2069]", ""); // unseen, so no table shows them
   }
 
   private static String facts(Project project) {
