@@ -61,7 +61,7 @@ final class Telegraph implements AutoCloseable {
   List<JsonObject> take() {
     for (int i = 0; i < 2; i++) { // the server may have been told more meanwhile
       call();
-      machine.activity.idle().orTimeout(FAR_TOO_LONG, TimeUnit.SECONDS).join();
+      await(machine.activity.idle());
     }
     call();
     synchronized (came) {
@@ -82,7 +82,12 @@ final class Telegraph implements AutoCloseable {
         {"textDocument":{"uri":"file:///nobody/knows.md"},"position":{"line":0,"character":0}}}"""
             .formatted(CALL + called);
     send(frame(hover.getBytes(StandardCharsets.UTF_8)));
-    CompletableFuture.anyOf(answered, ended).orTimeout(FAR_TOO_LONG, TimeUnit.SECONDS).join();
+    await(answered);
+  }
+
+  /** Waits, unless the session is over: then nothing more comes. */
+  private void await(CompletableFuture<Void> awaited) {
+    CompletableFuture.anyOf(awaited, ended).orTimeout(FAR_TOO_LONG, TimeUnit.SECONDS).join();
   }
 
   private void read() {
