@@ -96,10 +96,10 @@
                        #'string<)
                  "\n")))
 
-(defun await-marks (what missing &optional added)
-  "Wait until just some sentences are marked.
-MISSING names by language those that are missing in a translation, ADDED those that its source does
-not have."
+(defun await-marks (what missing &optional added copied)
+  "Wait until just some sentences are marked, given by name.
+MISSING has by language those that are missing in a translation, ADDED those that its source does
+not have, COPIED by language the one that is a copy of its source."
   (let (source expected)
     (dolist (language translations)
       (let (marks)
@@ -108,6 +108,8 @@ not have."
           (push (concat "gap: " (sentence name "en")) marks))
         (dolist (name added)
           (push (concat "addition: " (sentence name language)) marks))
+        (dolist (name (cdr (assoc language copied)))
+          (push (concat "untranslated: " (sentence name "en")) marks))
         (push (string-join (sort marks #'string<) "\n") expected)))
     (push (string-join (sort source #'string<) "\n") expected)
     (await what (string-join expected "\n--\n")
@@ -137,6 +139,18 @@ not have."
 
 ;;; What is done
 
+(defun save ()
+  (press "C-x C-s")
+  (await (concat "saved " (buffer-name)) nil #'buffer-modified-p))
+
+(defun assert-crlf ()
+  "What Emacs has saved has the line ends that it had."
+  (with-temp-buffer
+    (insert-file-contents-literally (file "de"))
+    (let ((all (how-many "\n")) (right (how-many "\r\n")))
+      (unless (and (> all 10) (= all right))
+        (error "%d of %d lines end with CR LF" right all)))))
+
 (defun elsewhere (program &rest arguments)
   "Another process does something to a file."
   (unless (eq 0 (apply #'call-process program nil nil nil arguments))
@@ -164,6 +178,10 @@ not have."
 (defun visit (language)
   (switch-to-buffer (find-file-noselect (file language))))
 
+(defun show (language)
+  "Goes to the window of a file."
+  (select-window (get-buffer-window (find-buffer-visiting (file language)))))
+
 (defun jump (from to name)
   (visit from)
   (put-cursor (sentence name from))
@@ -177,13 +195,12 @@ not have."
     (error "nothing found: %s" method)))
 
 (defun session ()
-  (dolist (language translations)
-    (visit language)
-    (delete-other-windows)
-    (when (equal language "de")
-      (press "M-x eglot RET")
-      (await "the server is there" t (lambda () (and (eglot-current-server) t)))))
+  (setq-default eglot-workspace-configuration '(:tallystick (:scope "folder")))
   (visit "de")
+  (delete-other-windows)
+  (press "M-x eglot RET")
+  (await "the server is there" t (lambda () (and (eglot-current-server) t)))
+  (await-marks "what is planted is marked in files that are not open too" planted)
   (dolist (language '("he" "ja"))
     (select-window (split-window-below))
     (balance-windows)
@@ -206,17 +223,20 @@ not have."
   (await-marks "after undo it is not" planted)
 
   (visit "de")
-  (await "the lines end with CR LF" 1 (lambda () (coding-system-eol-type buffer-file-coding-system)))
-  (replace (concat (sentence "box" "de") " ")
-           (format "%s\n%s\n" (sentence "box" "de")
-                   (replace-regexp-in-string "\\` *\\([^ ]+\\) " "\\1\n" (sentence "tie" "de"))))
-  (await-marks "a sentence put into German is not missing" '(("he" "gloves") ("ja" "knots")))
+  (goto-char (point-min))
+  (press "M-x flymake-goto-next-error RET M-x eglot-code-actions RET RET")
+  (await-marks "a code action puts the missing sentence into German"
+               '(("he" "gloves") ("ja" "knots")) nil '(("de" "tie")))
   (press "C-/")
-  (await-marks "after undo it is" planted)
+  (await-marks "after undo it is missing again" planted)
   (press "M-x undo-redo RET")
-  (await-marks "after redo it is not" '(("he" "gloves") ("ja" "knots")))
-  (press "C-x C-s")
-  (await "saved" nil #'buffer-modified-p)
+  (await-marks "after redo it is there" '(("he" "gloves") ("ja" "knots")) nil '(("de" "tie")))
+  (save)
+  (assert-crlf)
+  (replace (sentence "tie" "en")
+           (replace-regexp-in-string "\\` *\\([^ ]+\\) " "\\1\n" (sentence "tie" "de")))
+  (await-marks "it is translated" '(("he" "gloves") ("ja" "knots")))
+  (save)
 
   (jump "de" "en" "oil")
   (jump "en" "de" "oil")
@@ -229,6 +249,10 @@ not have."
   (delete-other-windows)
   (visit "en")
 
+  (put-cursor (sentence "gloves" "en"))
+  (press "M-x eglot-code-actions RET RET")
+  (await-marks "from the source a sentence is put into Hebrew"
+               '(("ja" "knots")) nil '(("he" "gloves")))
   (put-cursor (sentence "oil" "en"))
   (press "C-h .")
   (await "hover in all languages" t
@@ -256,13 +280,16 @@ not have."
   (elsewhere "cp" (next "longer") (file "en"))
   (revert-buffer t t t)
   (await-marks "a source reloaded by the editor is followed"
-               '(("de" "turn") ("he" "gloves" "turn") ("ja" "knots" "turn")))
+               '(("de" "turn") ("he" "turn") ("ja" "knots" "turn")) nil '(("he" "gloves")))
 
-  (select-window (get-buffer-window (find-buffer-visiting (file "ja"))))
+  (show "he")
+  (save)
+  (show "ja")
   (replace (sentence "room" "ja") "")
   (press "C-x C-s M-x tallystick-finished RET")
   (await-marks "in a finished translation the last sentence is missing"
-               '(("de" "turn") ("he" "gloves" "turn") ("ja" "knots" "turn" "room"))))
+               '(("de" "turn") ("he" "turn") ("ja" "knots" "turn" "room")) nil
+               '(("he" "gloves"))))
 
 (add-hook 'emacs-startup-hook
           (lambda ()

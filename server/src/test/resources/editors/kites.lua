@@ -23,18 +23,21 @@ local function elsewhere(...)
   assert(vim.v.shell_error == 0, table.concat({ ... }, ' '))
 end
 
---- Waits until just these sentences are marked, given by language and name: those that are missing
---- in a translation, and those that its source does not have.
-local function await_marks(what, missing, added)
+--- Waits until just these sentences are marked, given by name: those that are missing in each
+--- translation; those that its source does not have; and by language the one that is a copy.
+local function await_marks(what, missing, added, copied)
   local expected = { en = {} }
   for _, language in ipairs(TRANSLATIONS) do
     expected[language] = {}
-    for _, name in ipairs(missing[language]) do
+    for _, name in ipairs(missing[language] or {}) do
       table.insert(expected.en, 'omission: ' .. S[name].en)
       table.insert(expected[language], 'gap: ' .. S[name].en)
     end
     for _, name in ipairs(added or {}) do
       table.insert(expected[language], 'addition: ' .. S[name][language])
+    end
+    if copied and copied[language] then
+      table.insert(expected[language], 'untranslated: ' .. S[copied[language]].en)
     end
   end
   local function everywhere(marks)
@@ -81,6 +84,14 @@ local function await_references(name)
   vim.cmd('cclose')
 end
 
+--- What the editor has saved has the line ends that it had.
+local function assert_crlf()
+  local saved = assert(io.open(file('de'), 'rb')):read('*a')
+  local _, all = saved:gsub('\n', '')
+  local _, right = saved:gsub('\r\n', '')
+  assert(all > 10 and all == right, string.format('%d of %d lines end with CR LF', right, all))
+end
+
 --- Asks what no key of the set-up asks: the answers are looked at by the caller.
 local function ask(method, params)
   local answers = assert(vim.lsp.buf_request_sync(0, method, params, 30000), 'no answer: ' .. method)
@@ -93,6 +104,9 @@ translator.run(function()
   vim.cmd('filetype on')
   vim.cmd('cd ' .. vim.fn.fnameescape(JOB))
   dofile(vim.env.SNIPPET)
+  vim.ui.select = function(offered, _, choose)
+    choose(offered[1], 1)
+  end
   for _, language in ipairs(TRANSLATIONS) do
     edit(language)
   end
@@ -116,13 +130,20 @@ translator.run(function()
   await_marks('after undo it is not', PLANTED)
 
   edit('de')
-  assert(vim.bo.fileformat == 'dos')
-  translator.replace(S.box.de .. ' ', S.box.de .. '\n' .. S.tie.de:gsub(' ', '\n', 1) .. '\n')
-  await_marks('a sentence put into German is not missing', { de = {}, he = { 'gloves' }, ja = { 'knots' } })
+  local copied = { de = 'tie' }
+  vim.api.nvim_win_set_cursor(0, { 1, 0 })
+  press(']d')
+  press('gra')
+  await_marks('a code action puts the missing sentence into German',
+    { he = { 'gloves' }, ja = { 'knots' } }, {}, copied)
   vim.cmd('silent undo')
-  await_marks('after undo it is', PLANTED)
+  await_marks('after undo it is missing again', PLANTED)
   vim.cmd('silent redo')
-  await_marks('after redo it is not', { de = {}, he = { 'gloves' }, ja = { 'knots' } })
+  await_marks('after redo it is there', { he = { 'gloves' }, ja = { 'knots' } }, {}, copied)
+  vim.cmd('silent write')
+  assert_crlf()
+  translator.replace(S.tie.en, (S.tie.de:gsub(' ', '\n', 1)))
+  await_marks('it is translated', { he = { 'gloves' }, ja = { 'knots' } })
   vim.cmd('silent write')
 
   jump('de', 'en', 'oil')
@@ -130,6 +151,11 @@ translator.run(function()
   edit('ja')
   jump('ja', 'en', 'room')
   await_references('room')
+
+  translator.put_cursor(S.gloves.en)
+  press('gra')
+  copied = { he = 'gloves' }
+  await_marks('from the source a sentence is put into Hebrew', { ja = { 'knots' } }, {}, copied)
 
   translator.put_cursor(S.oil.en)
   press('K')
@@ -150,14 +176,14 @@ translator.run(function()
   elsewhere('cp', NEXT .. '/longer.md', file('en'))
   vim.cmd('silent checktime')
   await_marks('a source reloaded by the editor is followed',
-    { de = { 'turn' }, he = { 'gloves', 'turn' }, ja = { 'knots', 'turn' } })
+    { de = { 'turn' }, he = { 'turn' }, ja = { 'knots', 'turn' } }, {}, copied)
 
   edit('ja')
   translator.replace(S.room.ja, '')
-  vim.cmd('silent write')
+  vim.cmd('silent wall')
   vim.lsp.buf.execute_command({
     command = 'tallystick.finished', arguments = { vim.uri_from_bufnr(0) },
   })
   await_marks('in a finished translation the last sentence is missing',
-    { de = { 'turn' }, he = { 'gloves', 'turn' }, ja = { 'knots', 'turn', 'room' } })
+    { de = { 'turn' }, he = { 'turn' }, ja = { 'knots', 'turn', 'room' } }, {}, copied)
 end)

@@ -45,6 +45,7 @@ local function start()
     name = 'tallystick',
     cmd = { JAVA, '-Xlog:disable', '-Xlog:all=warning:stderr', '-jar', JAR, 'serve' },
     root_dir = DEMO,
+    init_options = { scope = 'folder' },
     flags = { debounce_text_changes = 0 },
     on_exit = function(code)
       exit_code = code
@@ -57,6 +58,9 @@ translator.run(function()
   local client = start()
   assert(vim.lsp.buf_attach_client(0, client))
   await_marks('what is planted is marked')
+  translator.await('the setting is heard: other pairs are watched too', function()
+    return translator.marked(DEMO .. '/de/boat-and-stores.md') ~= ''
+  end)
 
   translator.replace(DELETED .. ' ', '')
   await_marks('a deleted sentence is an omission', ITS_SOURCE)

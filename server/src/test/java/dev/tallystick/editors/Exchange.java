@@ -36,10 +36,8 @@ final class Exchange {
 
   private void follow(JsonObject message) {
     String method = Wire.text(message, "method");
-    JsonObject params =
-        message.get("params") instanceof JsonObject object ? object : new JsonObject();
-    JsonObject document =
-        params.get("textDocument") instanceof JsonObject object ? object : new JsonObject();
+    JsonObject params = Wire.object(message, "params");
+    JsonObject document = Wire.object(params, "textDocument");
     String uri = Wire.text(document, "uri");
     switch (method) {
       case "textDocument/didOpen" -> take(document, Wire.text(document, "text"));
@@ -53,7 +51,9 @@ final class Exchange {
       case "textDocument/didClose" -> open.remove(uri);
       default -> {
         if (message.has("id") && !method.isEmpty()) {
-          asked.put(Wire.text(message, "id"), new Asked(method, uri, Map.copyOf(open)));
+          // An action that is to be completed names its file in what the server added to it.
+          String about = uri + Wire.text(Wire.object(params, "data"), "uri");
+          asked.put(Wire.text(message, "id"), new Asked(method, about, Map.copyOf(open)));
         }
       }
     }

@@ -108,12 +108,12 @@ record KiteJob(Path folder, Map<String, Map<String, String>> sentences) {
         text("en", Set.of(NEW)), text("en", Set.of()), text("en", Set.of(NEW, DELETED)));
   }
 
-  /** The German file after the missing sentence was put into it, in lines of its own. */
+  /** The German file after the missing sentence was put into it, with a line end within. */
   String germanInTheEnd() {
     String before = sentence("box", "de");
     String added = sentence("tie", "de").replaceFirst(" ", "\n");
     String text = text("de", Set.of(NEW, PLANTED.get("de"))).replace("\r\n", "\n");
-    return lines("de", text.replace(before + " ", before + "\n" + added + "\n"));
+    return lines("de", text.replace(before + " ", before + " " + added + " "));
   }
 
   /** With the line ends that the file has. */

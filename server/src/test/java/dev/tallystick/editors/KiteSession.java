@@ -24,6 +24,7 @@ record KiteSession(KiteJob job, Desk desk) {
           "textDocument/definition",
           "textDocument/references",
           "textDocument/hover",
+          "textDocument/codeAction",
           "textDocument/documentHighlight",
           "textDocument/documentSymbol",
           "textDocument/selectionRange");

@@ -67,8 +67,7 @@ final class Places {
 
   /** The file that ranges in an object lie in. */
   private static String own(JsonObject object, String around) {
-    String document =
-        object.get("textDocument") instanceof JsonObject named ? Wire.text(named, "uri") : "";
+    String document = Wire.text(Wire.object(object, "textDocument"), "uri");
     String uri = Wire.text(object, "uri") + Wire.text(object, "targetUri") + document;
     return uri.isEmpty() ? around : uri;
   }

@@ -42,17 +42,14 @@ record Wire(List<JsonObject> messages) {
     return Integer.parseInt(line.substring(LENGTH.length()).strip());
   }
 
-  /** The requests and notifications of a kind. */
-  List<JsonObject> params(String method) {
-    return messages.stream()
-        .filter(message -> text(message, "method").equals(method))
-        .map(message -> message.getAsJsonObject("params"))
-        .toList();
-  }
-
   /** A member that is text or a number; empty if there is none. */
   static String text(JsonObject object, String name) {
     JsonElement member = object.get(name);
     return member == null || !member.isJsonPrimitive() ? "" : member.getAsString();
+  }
+
+  /** A member that is an object; an empty one if there is none. */
+  static JsonObject object(JsonObject object, String name) {
+    return object.get(name) instanceof JsonObject member ? member : new JsonObject();
   }
 }
