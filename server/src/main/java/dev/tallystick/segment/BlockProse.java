@@ -8,12 +8,14 @@ import java.util.List;
 
 /** The prose of a block as one line, with the way back to the file. */
 final class BlockProse {
+  private final String raw;
   private final String string;
   private final List<Span> pieces;
   private final int[] before;
 
   BlockProse(Text text, Block block) {
-    this.string = oneLine(block.prose(text.string()));
+    this.raw = block.prose(text.string());
+    this.string = oneLine(raw);
     this.pieces = block.pieces();
     this.before = new int[pieces.size()];
     int length = 0;
@@ -26,6 +28,11 @@ final class BlockProse {
   /** The prose; a line end is a blank for each of its characters, so offsets stay. */
   String string() {
     return string;
+  }
+
+  /** The prose with its line ends as they are. */
+  String raw() {
+    return raw;
   }
 
   /** The stretch of the file from the first to the last character of this stretch of prose. */

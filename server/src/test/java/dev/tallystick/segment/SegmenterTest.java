@@ -71,21 +71,6 @@ class SegmenterTest {
     return String.join(" | ", stripped);
   }
 
-  /** Today: CLDR's lists lack these, so a sentence ends where it should not. */
-  static List<Arguments> gapsInTheLists() {
-    return List.of(
-        of("en", "Ask Dr. | Alder about the gate."),
-        of("en", "Bring tools, e.g. | Hammers, and rope."),
-        of("de", "Fragen Sie Prof. | Weiss nach dem Tor."),
-        of("de", "Das Tor ist ca. | Zwei Meter hoch."));
-  }
-
-  @ParameterizedTest(name = "{0}: {1}")
-  @MethodSource("gapsInTheLists")
-  void abbreviationsThatAreNotListedEndASentence(String language, String marked) {
-    sentencesEndWhereTheLanguageEndsThem(language, marked);
-  }
-
   /** UAX #29 alone parts here: a bracket, a number of a list, an ellipsis make no sentence. */
   @ParameterizedTest
   @ValueSource(
