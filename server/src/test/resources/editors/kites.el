@@ -4,20 +4,11 @@
 ;; that writes into the source.  Each step waits for what must come; the first that does not come
 ;; ends the run.  The caller gives, by the environment: SNIPPET (the set-up that README.md shows),
 ;; JOB (the folder of the job), SENTENCES (its sentences by name and language), NEXT (texts that the
-;; source will have), TOLD (where to tell).
+;; source will have), SCRIPTS (the folder of this file), TOLD (where to tell).
 
-(setq native-comp-deferred-compilation nil ; the machine has other work
-      read-process-output-max 1048576)
-(require 'package)
-(package-initialize)
-(require 'cl-lib)
-(require 'flymake)
-(require 'json)
-(require 'xref)
-(require 'eglot)
+(load (concat (getenv "SCRIPTS") "/translator.el") nil t t)
 (load (getenv "SNIPPET") nil t t)
 
-(defconst patience 60 "Seconds; a machine at work may be slow, but the answer must come.")
 (defconst translations '("de" "he" "ja"))
 (defconst planted '(("de" "tie") ("he" "gloves") ("ja" "knots")))
 (defconst sentences
@@ -25,50 +16,16 @@
     (insert-file-contents (getenv "SENTENCES"))
     (json-parse-buffer)))
 
-(defun tell (line)
-  (write-region (concat line "\n") nil (getenv "TOLD") t 'quiet))
-
 (defun sentence (name language)
   (gethash language (gethash name sentences)))
 
 (defun file (language)
   (format "%s/kites.%s.md" (getenv "JOB") language))
 
-(defun next (text)
+(defun next-source (text)
   (format "%s/%s.md" (getenv "NEXT") text))
 
 ;;; What is seen
-
-(defun await (what expected actual)
-  "Wait until ACTUAL gives EXPECTED, while Emacs obeys its keyboard and its timers as ever."
-  (let* ((deadline (time-add nil patience))
-         (poll (run-with-timer
-                0 0.05
-                (lambda ()
-                  (when (or (equal (funcall actual) expected) (time-less-p deadline nil))
-                    (exit-recursive-edit))))))
-    (unwind-protect (recursive-edit)
-      (cancel-timer poll)))
-  (let ((seen (funcall actual)))
-    (unless (equal seen expected)
-      (error "not seen: %s\nseen instead:\n%s\nexpected:\n%s" what seen expected))
-    (tell (concat "ok: " what))))
-
-(defun shown (message text)
-  "A diagnostic with a MESSAGE on a TEXT; at a gap, the sentence that is missing counts."
-  (string-match "\\`tallystick \\[\\([a-z]+\\)\\]: \\([^z-a]*\\)\\'" message)
-  (let ((code (match-string 1 message))
-        (words (replace-regexp-in-string "[\u2068\u2069]" "" (match-string 2 message))))
-    (if (and (string-match "\\`Missing here: \"\\([^z-a]*\\)\"\\'" words) (not (equal text "")))
-        (concat "gap: " (match-string 1 words))
-      (concat code ": " text))))
-
-(defun marked-in-buffer ()
-  (mapcar (lambda (diagnostic)
-            (shown (flymake-diagnostic-text diagnostic)
-                   (buffer-substring-no-properties (flymake-diagnostic-beg diagnostic)
-                                                   (flymake-diagnostic-end diagnostic))))
-          (flymake-diagnostics)))
 
 (defun sentence-at-point (language)
   "The known sentence that begins at point."
@@ -139,10 +96,6 @@ not have, COPIED by language the one that is a copy of its source."
 
 ;;; What is done
 
-(defun save ()
-  (press "C-x C-s")
-  (await (concat "saved " (buffer-name)) nil #'buffer-modified-p))
-
 (defun assert-crlf ()
   "What Emacs has saved has the line ends that it had."
   (with-temp-buffer
@@ -150,30 +103,6 @@ not have, COPIED by language the one that is a copy of its source."
     (let ((all (how-many "\n")) (right (how-many "\r\n")))
       (unless (and (> all 10) (= all right))
         (error "%d of %d lines end with CR LF" right all)))))
-
-(defun elsewhere (program &rest arguments)
-  "Another process does something to a file."
-  (unless (eq 0 (apply #'call-process program nil nil nil arguments))
-    (error "%s %s" program arguments)))
-
-(defun press (keys)
-  "Presses KEYS, which Emacs reads as soon as it waits."
-  (setq unread-command-events
-        (append unread-command-events (listify-key-sequence (kbd keys)))))
-
-(defun replace (old new)
-  "Puts NEW where the text OLD stands once in the current buffer."
-  (goto-char (point-min))
-  (search-forward old)
-  (undo-boundary)
-  (replace-match new t t)
-  (undo-boundary))
-
-(defun put-cursor (words)
-  "Some characters behind the start of WORDS."
-  (goto-char (point-min))
-  (search-forward words)
-  (goto-char (+ 3 (match-beginning 0))))
 
 (defun visit (language)
   (switch-to-buffer (find-file-noselect (file language))))
@@ -207,12 +136,12 @@ not have, COPIED by language the one that is a copy of its source."
     (visit language))
   (await-marks "what is planted is marked" planted)
 
-  (elsewhere "cp" (next "longer") (file "en"))
+  (elsewhere "cp" (next-source "longer") (file "en"))
   (await-marks "a sentence added on disk is missing in three languages"
                '(("de" "tie" "turn") ("he" "gloves" "turn") ("ja" "knots" "turn")))
-  (elsewhere "mv" (next "shorter") (file "en"))
+  (elsewhere "mv" (next-source "shorter") (file "en"))
   (await-marks "a sentence deleted on disk is too much in three languages" planted '("lost"))
-  (elsewhere "cp" (next "first") (file "en"))
+  (elsewhere "cp" (next-source "first") (file "en"))
   (await-marks "with the first source everything is as at first" planted)
 
   (visit "he")
@@ -277,7 +206,7 @@ not have, COPIED by language the one that is a copy of its source."
     (visit language))
   (other-window 1)
   (visit "en")
-  (elsewhere "cp" (next "longer") (file "en"))
+  (elsewhere "cp" (next-source "longer") (file "en"))
   (revert-buffer t t t)
   (await-marks "a source reloaded by the editor is followed"
                '(("de" "turn") ("he" "turn") ("ja" "knots" "turn")) nil '(("he" "gloves")))
@@ -291,18 +220,6 @@ not have, COPIED by language the one that is a copy of its source."
                '(("de" "turn") ("he" "turn") ("ja" "knots" "turn" "room")) nil
                '(("he" "gloves"))))
 
-(add-hook 'emacs-startup-hook
-          (lambda ()
-            (condition-case fault
-                (progn
-                  (session)
-                  (tell "all seen")
-                  (eglot-shutdown (eglot-current-server) nil 10)
-                  (set-buffer-modified-p nil)
-                  (kill-emacs 0))
-              (error
-               (tell (error-message-string fault))
-               (kill-emacs 1))))
-          t)
+(run #'session)
 
 ;;; kites.el ends here
