@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.prose.Format;
+import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -64,16 +65,16 @@ final class Shelf {
   }
 
   /** The sheet of the current text; the same one as long as the text stays the same. */
-  Optional<Sheet> sheet(Path file, String language) {
+  Optional<Sheet> sheet(Path file, String language, Srx rules) {
     Sheet sheet = sheets.get(file);
     Optional<Text> text = text(file);
     Format format = format(file);
-    if (sheet != null && text.isPresent() && sheet.shows(text.get(), format, language)) {
+    if (sheet != null && text.isPresent() && sheet.shows(text.get(), format, language, rules)) {
       return Optional.of(sheet);
     }
     outdate(sheet);
     sheets.remove(file);
-    text.ifPresent(now -> sheets.put(file, new Sheet(now, format, language)));
+    text.ifPresent(now -> sheets.put(file, new Sheet(now, format, language, rules)));
     return Optional.ofNullable(sheets.get(file));
   }
 
