@@ -185,8 +185,10 @@ final class SrxReader {
       return Optional.of(Pattern.compile(pattern, Pattern.CASE_INSENSITIVE));
     } catch (PatternSyntaxException e) {
       problem(tag, "\"" + pattern + "\" is no regular expression (" + e.getDescription() + ").");
-      return Optional.empty();
+    } catch (StackOverflowError e) {
+      problem(tag, "This pattern is nested too deep.");
     }
+    return Optional.empty();
   }
 
   private boolean yes(XMLStreamReader reader, String name, boolean usual, Span tag) {

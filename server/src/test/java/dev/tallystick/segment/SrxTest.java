@@ -9,6 +9,7 @@ import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Random;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -209,5 +210,41 @@ class SrxTest {
         };
     assertEquals(Sentences.of(language, prose), parted(file, language, prose));
     assertTrue(Sentences.of(language, prose).size() > 1);
+  }
+
+  /** A law: a file with anything in it is read, what is wrong lies in it, and texts are parted. */
+  @Test
+  void anyFileIsRead() {
+    String sound =
+        file(
+            "cascade=\"yes\"",
+            rules("A", "no -- Mill\\. -- \\s", "yes -- [.!]+ -- \\s") + rules("B", "yes -- x -- y"),
+            map("en.*", "A") + map(".*", "B"));
+    List<String> scraps =
+        List.of(
+            "<", ">", "&", "</rule>", "<rule>", "(", "[", "*", "\"", "\uD83D", "\r", "\u0000",
+            "<!--");
+    Random random = new Random(5);
+    for (int i = 0; i < 2_000; i++) {
+      StringBuilder xml = new StringBuilder(sound);
+      for (int k = 1 + random.nextInt(3); k > 0; k--) {
+        int at = random.nextInt(xml.length());
+        int end = Math.min(xml.length(), at + random.nextInt(20));
+        xml.replace(at, end, scraps.get(random.nextInt(scraps.size())));
+      }
+      SrxFile file = SrxFile.of(new Text(xml.toString()));
+      for (Problem problem : file.problems()) {
+        assertTrue(problem.span().end() <= xml.length(), xml::toString);
+      }
+      assertTrue(parted(file, "en", "One is here. Two is there.").size() > 0, xml::toString);
+    }
+  }
+
+  @Test
+  void patternsNestedTooDeepAreTold() {
+    String deep = "(".repeat(20_000) + "a" + ")".repeat(20_000);
+    SrxFile file =
+        SrxFile.of(new Text(file("", rules("A", "yes -- " + deep + " -- "), map(deep, "A"))));
+    assertEquals(2, file.problems().size());
   }
 }
