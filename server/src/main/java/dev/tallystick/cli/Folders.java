@@ -10,6 +10,7 @@ import dev.tallystick.pairing.Pair;
 import dev.tallystick.pairing.Pairing;
 import dev.tallystick.pairing.Pairs;
 import dev.tallystick.pairing.Rules;
+import dev.tallystick.project.Names;
 import dev.tallystick.project.Project;
 import dev.tallystick.project.ProjectFile;
 import dev.tallystick.text.Decoded;
@@ -33,6 +34,7 @@ final class Folders {
   private final Rules options;
   private final List<Path> all = new ArrayList<>();
   private final Map<Pair, Levels> levels = new HashMap<>();
+  private final Map<Pair, NamedRules> rules = new HashMap<>();
   private Pairs pairs = Pairs.NONE;
   private boolean complete = true;
 
@@ -63,6 +65,11 @@ final class Folders {
     return levels;
   }
 
+  /** The rules for sentence borders in the pairs of a project. */
+  Map<Pair, NamedRules> rules() {
+    return rules;
+  }
+
   /** All files, by the names that they have in the pairs. */
   Listing files() {
     return Listing.of(all, Path::normalize);
@@ -86,6 +93,9 @@ final class Folders {
 
   private void pair(List<Path> folders) {
     Map<Path, List<Path>> projects = new LinkedHashMap<>();
+    List<Path> named =
+        all.stream().filter(file -> Names.isRules(String.valueOf(file.getFileName()))).toList();
+    all.removeAll(named);
     for (Path folder : folders) {
       if (all.removeIf(folder.resolve(ProjectFile.NAME)::equals)) {
         projects.put(folder, new ArrayList<>());
@@ -95,7 +105,7 @@ final class Folders {
     for (Path file : all) {
       innermost(file, projects.keySet()).map(projects::get).orElse(others).add(file);
     }
-    projects.forEach(this::pairProject);
+    projects.forEach((folder, files) -> pairProject(folder, files, named));
     Listing names = Listing.of(others, Path::normalize);
     pairs = pairs.and(Pairing.pairs(names.names(), options));
   }
@@ -110,29 +120,65 @@ final class Folders {
     return path.toAbsolutePath().normalize();
   }
 
-  private void pairProject(Path folder, List<Path> files) {
-    Project project = read(folder.resolve(ProjectFile.NAME));
-    Listing names = Listing.of(files, file -> plain(folder).relativize(plain(file)));
+  /**
+   * Pairs the files of a project.
+   *
+   * @param named the files of rules for sentence borders that there are
+   */
+  private void pairProject(Path folder, List<Path> files, List<Path> named) {
+    Path file = folder.resolve(ProjectFile.NAME);
+    Decoded decoded = load(file);
+    ProjectFile read = decoded == null ? ProjectFile.NONE : read(file, decoded);
+    Project project = read.project();
+    NamedRules borders = rules(folder, named, read, decoded);
+    Listing names = Listing.of(files, path -> plain(folder).relativize(plain(path)));
     Pairs found =
         Pairing.pairs(names.names(), project.rules(Rules.NONE).under(options))
             .renamed(name -> Listing.name(names.file(name).normalize()));
     found.pairs().forEach(pair -> levels.put(pair, project.levels()));
+    found.pairs().forEach(pair -> rules.put(pair, borders));
     pairs = pairs.and(found);
   }
 
-  private Project read(Path file) {
+  private ProjectFile read(Path file, Decoded decoded) {
+    ProjectFile read = ProjectFile.of(decoded.text());
+    boolean malformed = Malformed.tell(console, name(file), decoded);
+    malformed |= Malformed.tell(console, name(file), decoded.text(), read.problems());
+    complete &= !malformed;
+    return read;
+  }
+
+  /** The text of a file; null if it cannot be read. */
+  private Decoded load(Path file) {
     try {
-      Decoded decoded = Intake.load(Disk.REAL, file);
-      ProjectFile read = ProjectFile.of(decoded.text());
-      String name = Listing.name(file.normalize());
-      boolean malformed = Malformed.tell(console, name, decoded);
-      malformed |= Malformed.tell(console, name, decoded.text(), read.problems());
-      complete &= !malformed;
-      return read.project();
+      return Intake.load(Disk.REAL, file);
     } catch (Unreadable e) {
       console.err().println(e.getMessage());
       complete = false;
-      return Project.NONE;
+      return null;
     }
+  }
+
+  private NamedRules rules(Path folder, List<Path> named, ProjectFile project, Decoded decoded) {
+    Optional<Path> file = project.project().segmentation().map(folder::resolve);
+    try {
+      if (file.filter(named::contains).isPresent()) {
+        NamedRules read = NamedRules.read(console, file.get());
+        complete &= read.sound();
+        return read;
+      }
+    } catch (Unreadable e) {
+      console.err().println(e.getMessage());
+    }
+    if (file.isPresent()) {
+      Path json = folder.resolve(ProjectFile.NAME);
+      Malformed.tell(console, name(json), decoded.text(), project.withoutRules());
+      complete = false;
+    }
+    return NamedRules.NONE;
+  }
+
+  private static String name(Path file) {
+    return Listing.name(file.normalize());
   }
 }

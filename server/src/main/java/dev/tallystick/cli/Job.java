@@ -30,15 +30,22 @@ final class Job {
   private final Pairs pairs;
   private final Listing files;
   private final Map<Pair, Levels> levels;
+  private final Map<Pair, NamedRules> rules;
   private String lastSource = "";
   private Reading lastReading;
   private boolean complete = true;
 
-  private Job(Console console, Pairs pairs, Listing files, Map<Pair, Levels> levels) {
+  private Job(
+      Console console,
+      Pairs pairs,
+      Listing files,
+      Map<Pair, Levels> levels,
+      Map<Pair, NamedRules> rules) {
     this.console = console;
     this.pairs = pairs;
     this.files = files;
     this.levels = levels;
+    this.rules = rules;
   }
 
   /**
@@ -60,7 +67,8 @@ final class Job {
       String target = Listing.name(paths.get(1));
       List<Pair> pair = List.of(Pairing.named(source, target, rules));
       Pairs pairs = new Pairs(pair, List.of(), List.of());
-      return new Job(console, pairs, Listing.of(paths, UnaryOperator.identity()), Map.of());
+      Listing files = Listing.of(paths, UnaryOperator.identity());
+      return new Job(console, pairs, files, Map.of(), Map.of());
     }
     throw new Refused("Name one folder, or one source file and one translation.");
   }
@@ -72,7 +80,7 @@ final class Job {
    */
   static Job ofFolders(Console console, List<Path> folders, Rules options) {
     Folders found = Folders.of(console, folders, options);
-    Job job = new Job(console, found.pairs(), found.files(), found.levels());
+    Job job = new Job(console, found.pairs(), found.files(), found.levels(), found.rules());
     job.complete = found.complete();
     return job;
   }
@@ -90,7 +98,7 @@ final class Job {
   PairResult result(Pair pair, Aligner aligner, boolean draft) {
     try {
       Reading source = source(pair);
-      Reading target = read(pair.target(), pair.targetLanguage());
+      Reading target = read(pair.target(), pair.targetLanguage(), rules(pair));
       return PairResult.of(source, target, aligner, draft, Cancellation.NONE)
           .at(levels.getOrDefault(pair, Levels.USUAL));
     } catch (Unreadable e) {
@@ -104,16 +112,25 @@ final class Job {
   private Reading source(Pair pair) throws Unreadable {
     String key = pair.source() + " " + pair.sourceLanguage().tag();
     if (!key.equals(lastSource)) {
-      lastReading = read(pair.source(), pair.sourceLanguage());
+      lastReading = read(pair.source(), pair.sourceLanguage(), rules(pair));
       lastSource = key;
     }
     return lastReading;
   }
 
-  private Reading read(String file, Language language) throws Unreadable {
+  private NamedRules rules(Pair pair) {
+    return rules.getOrDefault(pair, NamedRules.NONE);
+  }
+
+  private Reading read(String file, Language language, NamedRules borders) throws Unreadable {
     Path path = files.file(file);
     Decoded decoded = Intake.load(Disk.REAL, path);
     complete &= !Malformed.tell(console, file, decoded);
-    return Reading.of(decoded.text(), Intake.format(path), language.tag(), Cancellation.NONE);
+    Reading read =
+        Reading.of(
+            decoded.text(), Intake.format(path), language.tag(), borders.srx(), Cancellation.NONE);
+    borders.tell(console, read.endless());
+    complete &= read.endless().isEmpty();
+    return read;
   }
 }

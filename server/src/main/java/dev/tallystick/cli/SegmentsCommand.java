@@ -7,6 +7,7 @@ import dev.tallystick.engine.Unreadable;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.Segment;
+import dev.tallystick.segment.SrxExport;
 import dev.tallystick.text.Decoded;
 import java.nio.file.Path;
 import java.util.Locale;
@@ -15,6 +16,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
 import picocli.CommandLine.Spec;
 
@@ -40,7 +42,12 @@ final class SegmentsCommand implements Callable<Integer> {
 
   @Mixin private FormatOption format;
 
-  @Parameters(index = "0", paramLabel = "FILE", description = "The file.")
+  @Option(
+      names = "--rules",
+      description = "Prints the rules for the language in the form of SRX 2.0 instead; no file.")
+  private boolean rules;
+
+  @Parameters(index = "0", arity = "0..1", paramLabel = "FILE", description = "The file.")
   private Path file;
 
   SegmentsCommand(Console console) {
@@ -49,6 +56,14 @@ final class SegmentsCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws Exception {
+    if (rules == (file != null)) {
+      throw new ParameterException(
+          command.commandLine(), "Name a file, or ask for --rules, but not both.");
+    }
+    if (rules) {
+      console.out().print(SrxExport.of(language.tag()));
+      return Tallystick.FINE;
+    }
     Decoded decoded = load();
     boolean malformed = Malformed.tell(console, file, decoded);
     for (Segment segment : read(decoded).segments()) {

@@ -28,8 +28,8 @@ public interface Disk {
 
   /**
    * The files in a folder, however deep, whose names have the extension of a format, and right in
-   * it its {@code tallystick.json}; hidden files and folders are passed over, and links that lead
-   * out of the folder. Sorted.
+   * it its {@code tallystick.json}; also files of rules for sentence borders. Hidden files and
+   * folders are passed over, and links that lead out of the folder. Sorted.
    *
    * @throws Unreadable if the folder cannot be listed
    */
@@ -111,7 +111,8 @@ public interface Disk {
     @Override
     public FileVisitResult visitFile(Path file, BasicFileAttributes attributes) throws IOException {
       boolean prose = Format.ofName(file.getFileName().toString()).isPresent();
-      boolean ours = file.equals(folder.resolve(ProjectFile.NAME)) || prose;
+      boolean settles = file.equals(folder.resolve(ProjectFile.NAME)) || FolderRules.isRules(file);
+      boolean ours = settles || prose;
       if (ours
           && !Folder.hides(file)
           && (attributes.isSymbolicLink() ? staysInside(file) : attributes.isRegularFile())) {

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -26,6 +27,7 @@ final class Display {
     files.addAll(bulletin.files());
     files.addAll(library.open());
     files.addAll(library.flawed());
+    endless().map(Endless::rules).forEach(files::add);
     bulletin.retain(files);
     for (Path file : files) {
       if (ready(file)) {
@@ -52,7 +54,7 @@ final class Display {
   /** All that the notices of a file are made of: the same objects mean the same notices. */
   private List<Object> grounds(Path file, Optional<Document> document) {
     List<Object> grounds = new ArrayList<>(pairs.of(file).map(PairState::shown).toList());
-    grounds.addAll(library.flaws(file));
+    flaws(file).forEach(grounds::add);
     document.map(Document::text).ifPresent(grounds::add);
     if (document.isEmpty() && !grounds.isEmpty()) {
       grounds.add(library.problems(file));
@@ -63,10 +65,34 @@ final class Display {
   private List<Notice> notices(Path file) {
     Stream<Notice> paired =
         pairs.of(file).flatMap(pair -> Stream.concat(findings(pair, file), faults(file)));
-    return Stream.concat(paired, library.flaws(file).stream().map(Notice::of))
-        .sorted()
-        .distinct()
-        .toList();
+    return Stream.concat(paired, flaws(file).map(Notice::of)).sorted().distinct().toList();
+  }
+
+  private Stream<Problem> flaws(Path file) {
+    Stream<Problem> inTexts =
+        endless().filter(found -> found.rules().equals(file)).map(Endless::problem).distinct();
+    return Stream.concat(
+        library.flaws(file).stream(), FolderRules.isRules(file) ? inTexts : Stream.of());
+  }
+
+  /** A rule for sentence borders that did not come to an end over a text, and its file. */
+  private record Endless(Path rules, Problem problem) {}
+
+  private Stream<Endless> endless() {
+    return pairs.all().stream()
+        .flatMap(pair -> pair.known().stream())
+        .flatMap(
+            pair ->
+                Stream.of(pair.files().source(), pair.files().target())
+                    .flatMap(side -> endless(pair, side)));
+  }
+
+  private Stream<Endless> endless(Settled pair, Path side) {
+    List<Problem> problems = pair.reading(side).endless();
+    return problems.isEmpty()
+        ? Stream.of()
+        : library.rulesFor(side).stream()
+            .flatMap(rules -> problems.stream().map(problem -> new Endless(rules, problem)));
   }
 
   private Stream<Notice> findings(PairState pair, Path file) {

@@ -23,7 +23,8 @@ public record Folder(Path path, int depth) {
   /** Whether a list of its files has a file, if there is such a file. */
   boolean lists(Path file) {
     boolean prose = Format.ofName(String.valueOf(file.getFileName())).isPresent();
-    if (!holds(file) || !prose && !file.equals(path.resolve(ProjectFile.NAME))) {
+    boolean rules = FolderRules.isRules(file);
+    if (!holds(file) || !prose && !rules && !file.equals(path.resolve(ProjectFile.NAME))) {
       return false;
     }
     for (Path name : path.relativize(file)) {

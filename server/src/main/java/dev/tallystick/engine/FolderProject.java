@@ -19,10 +19,12 @@ final class FolderProject {
   private boolean onDisk;
   private Optional<Text> text = Optional.empty();
   private ProjectFile read = ProjectFile.NONE;
+  private final FolderRules rules;
 
   /** The one of a folder. */
   FolderProject(Path folder) {
     file = folder.resolve(ProjectFile.NAME);
+    rules = new FolderRules(folder);
   }
 
   Path file() {
@@ -37,10 +39,17 @@ final class FolderProject {
   /** The folder was listed. */
   void listed(List<Path> files) {
     onDisk = files.contains(file);
+    rules.listed(files);
   }
 
   /** Reads the file if its text is new; whether the project is another one now. */
   boolean take(Shelf shelf) {
+    boolean other = takeProject(shelf);
+    rules.take(read.project().segmentation(), shelf);
+    return other;
+  }
+
+  private boolean takeProject(Shelf shelf) {
     boolean there = onDisk || shelf.document(file).isPresent();
     Optional<Text> now = there ? shelf.text(file) : Optional.empty();
     if (there && now.isEmpty() || now.equals(text)) {
@@ -57,14 +66,35 @@ final class FolderProject {
     return read.project();
   }
 
+  /** The rules for sentence borders. */
+  FolderRules rules() {
+    return rules;
+  }
+
+  /** The files that settle what holds: this one and that of the rules. */
+  List<Path> files() {
+    List<Path> files = new ArrayList<>(List.of(file));
+    rules.file().ifPresent(files::add);
+    return files;
+  }
+
+  /** What is wrong in one of these files; nothing in any other. */
+  List<Problem> flaws(Path of, Shelf shelf) {
+    if (of.equals(file)) {
+      return problems(shelf);
+    }
+    return rules.file().filter(of::equals).isPresent() ? rules.problems(shelf) : List.of();
+  }
+
   /** What is wrong in it, or with its bytes, or that it cannot be read at all. */
-  List<Problem> problems(Shelf shelf) {
+  private List<Problem> problems(Shelf shelf) {
     if (!onDisk && shelf.document(file).isEmpty()) {
       return List.of();
     }
     List<Problem> problems = new ArrayList<>(shelf.problems(file));
     if (shelf.text(file).isPresent()) {
       problems.addAll(read.problems());
+      problems.addAll(rules.missing() ? read.withoutRules() : List.of());
     } else {
       shelf.trouble(file).ifPresent(why -> problems.add(new Problem(new Span(0, 0), why)));
     }

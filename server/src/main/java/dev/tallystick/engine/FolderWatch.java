@@ -5,6 +5,7 @@ import static java.nio.file.StandardWatchEventKinds.ENTRY_DELETE;
 import static java.nio.file.StandardWatchEventKinds.ENTRY_MODIFY;
 import static java.nio.file.StandardWatchEventKinds.OVERFLOW;
 
+import dev.tallystick.project.Names;
 import dev.tallystick.project.ProjectFile;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Threads;
@@ -188,7 +189,7 @@ final class FolderWatch implements Watch {
   }
 
   private static boolean matters(String name) {
-    return Format.ofName(name).isPresent() || name.equals(ProjectFile.NAME);
+    return Format.ofName(name).isPresent() || name.equals(ProjectFile.NAME) || Names.isRules(name);
   }
 
   /** A folder has appeared in a watched one. */

@@ -2,6 +2,7 @@ package dev.tallystick.engine;
 
 import dev.tallystick.check.Levels;
 import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -213,17 +214,14 @@ final class Library {
 
   /** What is wrong in a file that settles what holds in a folder; nothing in any other. */
   List<Problem> flaws(Path file) {
-    return projects()
-        .filter(project -> project.file().equals(file))
-        .flatMap(project -> project.problems(shelf).stream())
-        .toList();
+    return projects().flatMap(project -> project.flaws(file, shelf).stream()).toList();
   }
 
   /** The files that something is wrong in that {@link #flaws} tells. */
   List<Path> flawed() {
     return projects()
-        .filter(project -> !project.problems(shelf).isEmpty())
-        .map(FolderProject::file)
+        .flatMap(project -> project.files().stream())
+        .filter(file -> !flaws(file).isEmpty())
         .toList();
   }
 
@@ -231,15 +229,27 @@ final class Library {
     return workspace.roots().stream().map(Root::project);
   }
 
-  /** The sheet of the current text; the same one as long as the text stays the same. */
+  /**
+   * The sheet of the current text; the same one as long as the text and the rules stay the same.
+   */
   Optional<Sheet> sheet(Path file, String language) {
-    return shelf.sheet(file, language);
+    Srx rules = project(file).map(FolderProject::rules).map(FolderRules::srx).orElse(Srx.NONE);
+    return shelf.sheet(file, language, rules);
+  }
+
+  /** The file with the rules for sentence borders that hold for a file. */
+  Optional<Path> rulesFor(Path file) {
+    return project(file).map(FolderProject::rules).flatMap(FolderRules::file);
+  }
+
+  private Optional<FolderProject> project(Path file) {
+    return workspace.root(file).map(Root::project);
   }
 
   /** Forgets what is known of all files but these, and those that settle what holds. */
   void retain(Collection<Path> files) {
     Set<Path> kept = new HashSet<>(files);
-    projects().map(FolderProject::file).forEach(kept::add);
+    projects().map(FolderProject::files).forEach(kept::addAll);
     shelf.retain(kept);
   }
 }

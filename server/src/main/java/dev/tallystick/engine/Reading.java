@@ -5,8 +5,12 @@ import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Segmenter;
+import dev.tallystick.segment.Srx;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * One side of a pair, read: its sentences and verbatim blocks, and what the aligner knows of each.
@@ -15,19 +19,31 @@ import java.util.List;
  * @param language its language as a BCP 47 tag, {@code und} if unknown
  * @param segments its sentences and verbatim blocks in order
  * @param units the same as the aligner sees them, one for each segment
+ * @param endless the rules of the project that did not come to an end over the text, each at its
+ *     place in the file of rules
  */
-public record Reading(Text text, String language, List<Segment> segments, List<Unit> units) {
+public record Reading(
+    Text text, String language, List<Segment> segments, List<Unit> units, List<Problem> endless) {
   /** Keeps the lists unchangeable. */
   public Reading {
     segments = List.copyOf(segments);
     units = List.copyOf(units);
+    endless = List.copyOf(endless);
   }
 
   /** Reads a file. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
+    return of(text, format, language, Srx.NONE, cancellation);
+  }
+
+  /** Reads a file by the rules for sentence borders that its project has. */
+  public static Reading of(
+      Text text, Format format, String language, Srx rules, Cancellation cancellation) {
+    Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
-        Segmenter.of(language).segments(text, format.blocks(text), cancellation);
+        Segmenter.of(language, rules)
+            .segments(text, format.blocks(text), endless::add, cancellation);
     List<Unit> units = segments.stream().map(segment -> Units.unit(text, segment)).toList();
-    return new Reading(text, language, segments, units);
+    return new Reading(text, language, segments, units, List.copyOf(endless));
   }
 }

@@ -46,7 +46,9 @@ final class Root {
 
   /** Whether a file is one of those that were found when the folder was listed last. */
   boolean has(Path file) {
-    return files.contains(file) || project.onDisk() && project.file().equals(file);
+    return files.contains(file)
+        || project.onDisk() && project.file().equals(file)
+        || project.rules().onDisk(file);
   }
 
   /** Whether it is not known yet which files there are, so that nothing can be said of them. */
@@ -75,7 +77,10 @@ final class Root {
    */
   boolean listed(List<Path> found) {
     project.listed(found);
-    files = found.stream().filter(file -> !file.equals(project.file())).toList();
+    files =
+        found.stream()
+            .filter(file -> !file.equals(project.file()) && !FolderRules.isRules(file))
+            .toList();
     pairs = Optional.empty();
     listing = again;
     again = false;

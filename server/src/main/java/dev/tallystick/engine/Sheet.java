@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.prose.Format;
+import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Text;
 
 /**
@@ -11,14 +12,21 @@ final class Sheet {
   private final Text text;
   private final Format format;
   private final String language;
+  private final Srx rules;
   private Reading reading;
   private volatile boolean outdated;
 
-  /** A text in a language, a BCP 47 tag. */
-  Sheet(Text text, Format format, String language) {
+  /**
+   * A text in a language.
+   *
+   * @param language a BCP 47 tag
+   * @param rules for its sentence borders
+   */
+  Sheet(Text text, Format format, String language, Srx rules) {
     this.text = text;
     this.format = format;
     this.language = language;
+    this.rules = rules;
   }
 
   Text text() {
@@ -26,8 +34,8 @@ final class Sheet {
   }
 
   /** Whether this is still the sheet of a text that has come anew. */
-  boolean shows(Text current, Format inFormat) {
-    return format == inFormat && text.equals(current);
+  boolean shows(Text current, Format inFormat, Srx byRules) {
+    return format == inFormat && rules == byRules && text.equals(current);
   }
 
   /** The text has moved on: whoever still works on this sheet may stop. */
@@ -46,7 +54,7 @@ final class Sheet {
    */
   synchronized Reading reading() {
     if (reading == null) {
-      reading = Reading.of(text, format, language, this::outdated);
+      reading = Reading.of(text, format, language, rules, this::outdated);
     }
     return reading;
   }

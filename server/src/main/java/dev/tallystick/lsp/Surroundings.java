@@ -97,7 +97,10 @@ final class Surroundings implements WorkspaceService {
 
   private static DidChangeWatchedFilesRegistrationOptions watchers() {
     return new DidChangeWatchedFilesRegistrationOptions(
-        List.of(watcher("*.{" + Format.everyExtension() + "}"), watcher(ProjectFile.NAME)));
+        List.of(
+            watcher("*.{" + Format.everyExtension() + "}"),
+            watcher(ProjectFile.NAME),
+            watcher("*.srx")));
   }
 
   private static FileSystemWatcher watcher(String name) {

@@ -34,6 +34,22 @@ public final class Names {
         .or(() -> faultOfExtension(written));
   }
 
+  /** What is wrong with the name of a file of rules for sentence borders. */
+  static Optional<String> faultOfRules(String written) {
+    return faultOfPath(written)
+        .or(() -> hidden(written))
+        .or(
+            () ->
+                isRules(written)
+                    ? Optional.empty()
+                    : Optional.of("Rules for sentence borders are in a file that ends in .srx."));
+  }
+
+  /** Whether a file of this name has rules for sentence borders. */
+  public static boolean isRules(String name) {
+    return name.endsWith(".srx");
+  }
+
   private static Optional<String> faultOfPath(String written) {
     if (written.isEmpty()) {
       return Optional.of("The name is empty." + FROM_HERE);

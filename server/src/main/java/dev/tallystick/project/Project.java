@@ -15,12 +15,17 @@ import java.util.Optional;
  * @param pairs the files that belong together, whatever their names tell
  * @param levels how loudly each kind of finding is said
  * @param ignored the files that do not count
+ * @param segmentation the file with rules for sentence borders, if one is named
  */
 public record Project(
-    Optional<Language> sourceLanguage, List<PairRule> pairs, Levels levels, List<Glob> ignored) {
+    Optional<Language> sourceLanguage,
+    List<PairRule> pairs,
+    Levels levels,
+    List<Glob> ignored,
+    Optional<String> segmentation) {
   /** Nothing is set. */
   public static final Project NONE =
-      new Project(Optional.empty(), List.of(), Levels.USUAL, List.of());
+      new Project(Optional.empty(), List.of(), Levels.USUAL, List.of(), Optional.empty());
 
   /** Takes copies. */
   public Project {

@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * A {@code tallystick.json}, read. It is JSON by RFC 8259, with two slips that people make by
@@ -15,13 +16,14 @@ import java.util.List;
  *
  * @param project what it says, as far as it is right
  * @param problems what is wrong in it, by place; none if it can be taken as it is
+ * @param segmentation where it names the file with rules for sentence borders, if it does
  */
-public record ProjectFile(Project project, List<Problem> problems) {
+public record ProjectFile(Project project, List<Problem> problems, Optional<Span> segmentation) {
   /** The name of the file. It counts at the root of a folder only. */
   public static final String NAME = "tallystick.json";
 
   /** Without a file. */
-  public static final ProjectFile NONE = new ProjectFile(Project.NONE, List.of());
+  public static final ProjectFile NONE = new ProjectFile(Project.NONE, List.of(), Optional.empty());
 
   private static final int LONGEST = 1_000_000;
   private static final int MOST_PROBLEMS = 100;
@@ -53,12 +55,21 @@ public record ProjectFile(Project project, List<Problem> problems) {
     }
     Project project = reader.project(whole);
     problems.sort(Comparator.comparing(Problem::span));
-    return new ProjectFile(project, problems.subList(0, Math.min(problems.size(), MOST_PROBLEMS)));
+    int told = Math.min(problems.size(), MOST_PROBLEMS);
+    return new ProjectFile(project, problems.subList(0, told), reader.segmentation());
+  }
+
+  /** What to say if the named file with rules for sentence borders is not there. */
+  public List<Problem> withoutRules() {
+    String message =
+        "There is no such file in the folder, or it cannot be read. Sentences end by our own rules.";
+    return segmentation.stream().map(place -> new Problem(place, message)).toList();
   }
 
   /** All of it, as far as it can be shown, is wrong. */
   private static ProjectFile wrong(Text text, String message) {
     Span firstLine = new Span(0, text.lineEnd(0));
-    return new ProjectFile(Project.NONE, List.of(new Problem(firstLine, message)));
+    return new ProjectFile(
+        Project.NONE, List.of(new Problem(firstLine, message)), Optional.empty());
   }
 }

@@ -5,6 +5,7 @@ import dev.tallystick.check.Levels;
 import dev.tallystick.check.Severity;
 import dev.tallystick.pairing.Glob;
 import dev.tallystick.pairing.Language;
+import dev.tallystick.text.Span;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.EnumMap;
@@ -27,6 +28,7 @@ final class ProjectReader {
   private final Map<Code, Optional<Severity>> levels = new EnumMap<>(Code.class);
   private final List<Glob> ignored = new ArrayList<>();
   private Optional<Language> sourceLanguage = Optional.empty();
+  private Optional<Tokens.Word> segmentation = Optional.empty();
 
   ProjectReader(Values values) {
     this.values = values;
@@ -40,6 +42,7 @@ final class ProjectReader {
     keys.put("sourceLanguage", name -> sourceLanguage = values.language(name));
     keys.put("pairs", name -> values.elements(name, "A pair", pairs::read));
     keys.put("checks", name -> values.members(name, checks()));
+    keys.put("segmentation", this::readSegmentation);
     keys.put("ignore", name -> values.elements(name, "A name to ignore", this::readIgnored));
     return keys;
   }
@@ -59,7 +62,20 @@ final class ProjectReader {
         sourceLanguage,
         pairs.rules(sourceLanguage.isPresent() || !whole),
         new Levels(levels),
-        ignored);
+        ignored,
+        segmentation.map(Tokens.Word::value));
+  }
+
+  /** Where the file with rules for sentence borders is named. */
+  Optional<Span> segmentation() {
+    return segmentation.map(Tokens.Word::span);
+  }
+
+  private void readSegmentation(String name) throws IOException {
+    Optional<Tokens.Word> word = values.string(name);
+    Optional<String> fault = word.flatMap(file -> Names.faultOfRules(file.value()));
+    fault.ifPresent(message -> values.problem(word.get().span(), message));
+    segmentation = fault.isPresent() ? Optional.empty() : word;
   }
 
   private Map<String, Values.Value> checks() {

@@ -3,12 +3,14 @@ package dev.tallystick.segment;
 import com.ibm.icu.impl.ICUData;
 import com.ibm.icu.util.ULocale;
 import com.ibm.icu.util.UResourceBundle;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.MissingResourceException;
 import java.util.Set;
+import java.util.stream.Collectors;
 
 /**
  * Abbreviations with a stop, from CLDR and from our own collection, matched from the start of a
@@ -65,6 +67,19 @@ final class Abbreviations {
       // CLDR has no list for this language.
     }
     return listed;
+  }
+
+  /** The first parts of those with blanks inside, with what comes behind each. */
+  Map<String, Set<String>> heads() {
+    return Collections.unmodifiableMap(heads);
+  }
+
+  /** All of a kind, in no order. */
+  Set<String> of(String kind) {
+    return kinds.entrySet().stream()
+        .filter(entry -> entry.getValue().contains(kind))
+        .map(Map.Entry::getKey)
+        .collect(Collectors.toSet());
   }
 
   /**

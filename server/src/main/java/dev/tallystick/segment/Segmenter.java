@@ -1,9 +1,9 @@
 package dev.tallystick.segment;
 
-import com.ibm.icu.text.BreakIterator;
 import com.ibm.icu.util.ULocale;
 import dev.tallystick.prose.Block;
 import dev.tallystick.run.Cancellation;
+import dev.tallystick.text.Problem;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
@@ -11,6 +11,7 @@ import java.util.BitSet;
 import java.util.List;
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.function.Consumer;
 
 /**
  * Parts blocks into sentences by UAX #29, as ICU tailors it for the language; then mends the
@@ -20,15 +21,23 @@ public final class Segmenter {
   private static final Map<String, Borders> KNOWN = new ConcurrentHashMap<>();
 
   private final Borders borders;
+  private final List<SrxRule> rules;
 
-  private Segmenter(Borders borders) {
+  private Segmenter(Borders borders, List<SrxRule> rules) {
     this.borders = borders;
+    this.rules = rules;
   }
 
   /** The segmenter for a language as a BCP 47 tag; {@code und} for an unknown one. */
   public static Segmenter of(String language) {
-    return new Segmenter(
-        KNOWN.computeIfAbsent(language, tag -> new Borders(ULocale.forLanguageTag(tag))));
+    return of(language, Srx.NONE);
+  }
+
+  /** The same by the rules of a project, where they have any for the language. */
+  public static Segmenter of(String language, Srx rules) {
+    Borders borders =
+        KNOWN.computeIfAbsent(language, tag -> new Borders(ULocale.forLanguageTag(tag)));
+    return new Segmenter(borders, rules.rules(language));
   }
 
   /** Loads what the first segmenter would have to wait for: most of a second on a slow machine. */
@@ -39,23 +48,34 @@ public final class Segmenter {
 
   /** The sentences and verbatim blocks of a file, in its order. */
   public List<Segment> segments(Text text, List<Block> blocks, Cancellation cancellation) {
-    BreakIterator iterator = borders.iterator();
+    return segments(text, blocks, problem -> {}, cancellation);
+  }
+
+  /**
+   * The same.
+   *
+   * @param endless takes each rule of the project that does not come to an end in the text, by its
+   *     place in the file of rules
+   */
+  public List<Segment> segments(
+      Text text, List<Block> blocks, Consumer<Problem> endless, Cancellation cancellation) {
+    TextBorders inText = new TextBorders(borders, rules, endless);
     List<Segment> segments = new ArrayList<>();
     for (Block block : blocks) {
       cancellation.check();
       if (block.kind() == Block.Kind.VERBATIM) {
         segments.add(new Segment(block.extent(), "", block, true));
       } else {
-        addSentences(segments, iterator, block, new BlockProse(text, block));
+        addSentences(segments, inText, block, new BlockProse(text, block));
       }
     }
     return segments;
   }
 
-  private void addSentences(
-      List<Segment> segments, BreakIterator iterator, Block block, BlockProse prose) {
+  private static void addSentences(
+      List<Segment> segments, TextBorders borders, Block block, BlockProse prose) {
     boolean opens = true;
-    for (Span sentence : sentences(iterator, prose)) {
+    for (Span sentence : sentences(borders, prose)) {
       String words = sentence.of(prose.string());
       segments.add(new Segment(prose.inFile(sentence), words, block, opens));
       opens = false;
@@ -63,20 +83,22 @@ public final class Segmenter {
   }
 
   /** The sentences of a block, white space trimmed; fragments join. */
-  private List<Span> sentences(BreakIterator iterator, BlockProse block) {
+  private static List<Span> sentences(TextBorders borders, BlockProse block) {
     String prose = block.string();
     List<Span> spans = new ArrayList<>();
-    BitSet ends = borders.of(iterator, prose, block.raw());
+    BitSet ends = borders.of(block);
     ends.set(prose.length());
     int start = 0;
     for (int end = ends.nextSetBit(0); end >= 0; end = ends.nextSetBit(end + 1)) {
       Span trimmed = Blank.trim(prose, start, end);
       if (!trimmed.isEmpty()) {
-        addOrJoin(spans, prose, trimmed);
+        addOrJoin(spans, prose, trimmed, borders.replaced());
       }
       start = end;
     }
-    joinLastNumber(spans, prose);
+    if (!borders.replaced()) {
+      joinLastNumber(spans, prose);
+    }
     boolean wordless = spans.size() == 1 && Fragments.letters(spans.get(0).of(prose), 1) == 0;
     return wordless ? List.of() : spans;
   }
@@ -90,12 +112,19 @@ public final class Segmenter {
     }
   }
 
-  private static void addOrJoin(List<Span> spans, String prose, Span next) {
+  private static void addOrJoin(List<Span> spans, String prose, Span next, boolean replaced) {
     int last = spans.size() - 1;
-    if (last >= 0 && Fragments.joins(spans.get(last).of(prose), next.of(prose))) {
+    if (last >= 0 && joins(spans.get(last).of(prose), next.of(prose), replaced)) {
       spans.set(last, spans.get(last).cover(next));
     } else {
       spans.add(next);
     }
+  }
+
+  /** What a project parts stays apart, if there is a letter or digit in either. */
+  private static boolean joins(String first, String second, boolean replaced) {
+    return replaced
+        ? Fragments.letters(first, 1) == 0 || Fragments.letters(second, 1) == 0
+        : Fragments.joins(first, second);
   }
 }

@@ -67,8 +67,8 @@ class ProjectFileTest {
     check(
         """
         { "colour": { "red": [1, 2] }, "ignore": ["a"], "Pairs": [],
-          ^^^^^^^^ "colour" means nothing here. Allowed are: sourceLanguage, pairs, checks, ignore.
-                                                        ^^^^^^^ "Pairs" means nothing here. Allowed are: sourceLanguage, pairs, checks, ignore.
+          ^^^^^^^^ "colour" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
+                                                        ^^^^^^^ "Pairs" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
           "pairs": [{ "source": "a.md", "target": "b.md", "lang": "de" }],
                                                           ^^^^^^ "lang" means nothing here. Allowed are: source, target, sourceLanguage, targetLanguage.
           "checks": { "omision": "off", "order": "off" } }
@@ -278,7 +278,7 @@ class ProjectFileTest {
         """
         { "ignore": ["🔔/\\u00e4", 7, "b\\"c"], "🔔": 1 }
                                   ^ A name to ignore must be a text between quotation marks.
-                                              ^^^^ "🔔" means nothing here. Allowed are: sourceLanguage, pairs, checks, ignore.
+                                              ^^^^ "🔔" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
         =>
         ignore 🔔/ä
         ignore b"c
@@ -299,5 +299,33 @@ class ProjectFileTest {
     assertEquals("fr", Project.NONE.rules(user).sourceLanguage().orElseThrow().tag());
     Project project = ProjectFile.of(new Text("{\"sourceLanguage\": \"de\"}")).project();
     assertEquals("de", project.rules(user).sourceLanguage().orElseThrow().tag());
+  }
+
+  @Test
+  void rulesForSentenceBordersAreNamedInside() {
+    ProjectTable.check(
+        """
+        { "segmentation": "rules/borders.srx" }
+        =>
+        segmentation rules/borders.srx
+        """);
+    ProjectTable.check(
+        """
+        { "segmentation": "borders.xml" }
+                          ^^^^^^^^^^^^^ Rules for sentence borders are in a file that ends in .srx.
+        =>
+        """);
+    ProjectTable.check(
+        """
+        { "segmentation": ["borders.srx"], "ignore": [] }
+                          ^^^^^^^^^^^^^^^ "segmentation" must be a text between quotation marks.
+        =>
+        """);
+    ProjectTable.check(
+        """
+        { "segmentation": "../borders.srx" }
+                          ^^^^^^^^^^^^^^^^ ".." leads out of the folder, or back. Write it as seen from the folder of tallystick.json, such as en/guide.md.
+        =>
+        """);
   }
 }

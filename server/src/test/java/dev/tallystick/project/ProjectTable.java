@@ -95,6 +95,7 @@ final class ProjectTable {
             (code, level) ->
                 lines.add("check " + code.word() + " " + level.map(l -> l.word()).orElse("off")));
     lines.subList(lines.size() - project.levels().changed().size(), lines.size()).sort(null);
+    project.segmentation().ifPresent(file -> lines.add("segmentation " + file));
     project.ignored().forEach(glob -> lines.add("ignore " + glob));
     return lines.stream().map(line -> line + "\n").collect(Collectors.joining());
   }
