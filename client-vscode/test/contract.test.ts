@@ -34,6 +34,10 @@ test("the server is told of texts, of new texts and of the settings of the proje
     { scheme: "file", pattern: TEXTS },
     { scheme: "untitled", language: "markdown" },
     { scheme: "untitled", language: "plaintext" },
+    { scheme: "untitled", language: "srt" },
+    { scheme: "untitled", language: "subrip" },
+    { scheme: "untitled", language: "vtt" },
+    { scheme: "untitled", language: "webvtt" },
     { scheme: "file", pattern: "**/tallystick.json" },
   ]);
 });

@@ -12,7 +12,11 @@ public enum Format {
   /** Text without markup. */
   PLAIN(List.of("plaintext", "text"), "txt", "text"),
   /** CommonMark with tables. */
-  MARKDOWN(List.of("markdown"), "md", "markdown", "mkd");
+  MARKDOWN(List.of("markdown"), "md", "markdown", "mkd"),
+  /** Subtitles as SubRip writes them. */
+  SUBRIP(List.of("srt", "subrip"), "srt"),
+  /** Subtitles as WebVTT has them. */
+  WEBVTT(List.of("vtt", "webvtt"), "vtt");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -59,6 +63,7 @@ public enum Format {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text);
+      case SUBRIP, WEBVTT -> Subtitles.blocks(text);
     };
   }
 }

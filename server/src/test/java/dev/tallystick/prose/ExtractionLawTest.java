@@ -88,7 +88,19 @@ class ExtractionLawTest {
           "END. ",
           "...",
           "key: value\n",
-          "• ");
+          "• ",
+          "WEBVTT\n",
+          "NOTE ",
+          "STYLE\n",
+          "7\n",
+          "00:00:01,000 --> 00:00:02,500\n",
+          "00:02.000 --> 00:09.000 line:0\n",
+          " --> ",
+          "<v Mira>",
+          "<00:01.000>",
+          "{\\an8}",
+          "\u266A",
+          "\n\u2013 ");
 
   @ParameterizedTest
   @EnumSource

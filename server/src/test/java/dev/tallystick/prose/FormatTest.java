@@ -11,6 +11,8 @@ class FormatTest {
     assertEquals(Optional.of(Format.PLAIN), Format.ofName("en/ferry.TXT"));
     assertEquals(Optional.of(Format.MARKDOWN), Format.ofName("de.ferry.md"));
     assertEquals(Optional.of(Format.MARKDOWN), Format.ofName("A.MARKDOWN"));
+    assertEquals(Optional.of(Format.SUBRIP), Format.ofName("ferry.de.srt"));
+    assertEquals(Optional.of(Format.WEBVTT), Format.ofName("ferry.vtt"));
     assertEquals(Optional.empty(), Format.ofName("docs.md/ferry"));
     assertEquals(Optional.empty(), Format.ofName("md"));
     assertEquals(Optional.empty(), Format.ofName("ferry.html"));

@@ -52,6 +52,35 @@ class LinearTimeTest {
   }
 
   @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "a",
+        "a\n",
+        "7\n",
+        "7\n\n",
+        "<",
+        "<v ",
+        "<v\t",
+        "<a>",
+        "{\\",
+        "- ",
+        "-\n",
+        "(",
+        "\u266A",
+        "00:01.000 --> 00:02.000\n",
+        "00:01.000 --> 00:02.000\na\n",
+        "00:01.000 --> 00:02.000\n-a\n\n",
+        "00:01.000 ",
+        "NOTE\n",
+        "STYLE\n\n"
+      })
+  void subtitlesEnd(String fragment) {
+    assertEnds(Format.SUBRIP, fragment);
+    assertEnds(Format.WEBVTT, fragment);
+    assertEnds(Format.WEBVTT, "00:01.000 --> 00:02.000\n" + fragment.repeat(TIMES), 1);
+  }
+
+  @ParameterizedTest
   @ValueSource(strings = {"- ", "| a ", "\\|"})
   void rowsOfATableEnd(String fragment) {
     assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);

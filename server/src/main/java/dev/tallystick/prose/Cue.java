@@ -1,0 +1,39 @@
+package dev.tallystick.prose;
+
+import dev.tallystick.text.Span;
+import java.util.List;
+
+/**
+ * One cue of a subtitle file, or a landmark between cues.
+ *
+ * @param start offset where its number or name begins, or else its times
+ * @param end offset behind its last line
+ * @param times when it is shown; null for text that stands in no cue
+ * @param lines its text, white space around each line left out; none for a landmark
+ */
+record Cue(int start, int end, Times times, List<Span> lines) {
+  /** Keeps the lines unchangeable. */
+  Cue {
+    lines = List.copyOf(lines);
+  }
+
+  boolean isLandmark() {
+    return lines.isEmpty();
+  }
+
+  /**
+   * When a cue is shown.
+   *
+   * @param from milliseconds from the start of the film
+   * @param to the same for its end
+   */
+  record Times(long from, long to) {
+    /** Longer silence than this parts sentences. Common practice, no source. */
+    private static final long LONGEST_PAUSE = 4_000;
+
+    /** Whether a sentence can go on in a cue with the other times. */
+    boolean leadsTo(Times other) {
+      return other.from >= from && other.from - to <= LONGEST_PAUSE;
+    }
+  }
+}
