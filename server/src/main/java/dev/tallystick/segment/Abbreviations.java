@@ -7,6 +7,7 @@ import java.util.Collections;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.MissingResourceException;
 import java.util.Set;
@@ -27,6 +28,9 @@ final class Abbreviations {
   /** What comes behind each part that ends in a stop of those with blanks. */
   private final Map<String, Set<String>> heads = new HashMap<>();
 
+  /** The letters before the last stop of each, so that most words need no longer look. */
+  private final Set<String> lastWords = new HashSet<>();
+
   private final int longest;
 
   /** Those of a language. */
@@ -46,8 +50,10 @@ final class Abbreviations {
   private void add(String kind, Set<String> entries) {
     for (String entry : entries) {
       kinds.computeIfAbsent(entry, k -> new HashSet<>()).add(kind);
+      lastWords.add(lastWord(entry, entry.length()));
       for (int at = entry.indexOf(". "); at >= 0; at = entry.indexOf(". ", at + 1)) {
         String head = entry.substring(0, at + 1);
+        lastWords.add(lastWord(head, head.length()));
         heads.computeIfAbsent(head, k -> new HashSet<>()).add(entry.substring(at + 1));
       }
     }
@@ -87,6 +93,9 @@ final class Abbreviations {
    * on behind it; none if there is no such.
    */
   Set<String> kinds(String prose, int end) {
+    if (!lastWords.contains(lastWord(prose, end))) {
+      return Set.of();
+    }
     int earliest = Math.max(0, end - longest);
     String before = plain(prose, earliest, end);
     String behind = plain(prose, end, Math.min(end + longest, prose.length()));
@@ -103,6 +112,14 @@ final class Abbreviations {
       }
     }
     return Set.of();
+  }
+
+  private static String lastWord(String text, int end) {
+    int from = end - 1;
+    while (from > 0 && Character.isLetterOrDigit(text.charAt(from - 1))) {
+      from--;
+    }
+    return text.substring(from, end - 1).toLowerCase(Locale.ROOT);
   }
 
   /** A stretch with all white space as plain blanks. */

@@ -21,6 +21,9 @@ final class OwnBorders {
     BitSet borders = new BitSet(prose.length());
     for (int i = 0; i < prose.length(); i++) {
       char c = prose.charAt(i);
+      if (c < 0x80 && c != '.') {
+        continue; // nearly all of most texts
+      }
       if (c == '.') {
         addNumberInQuotes(borders, prose, marks, i + 1);
       } else if (c == '…') {
