@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Folder;
+import dev.tallystick.prose.Format;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -267,7 +268,7 @@ class DiskSessionTest {
       assertEquals(List.of(), talk.machine.watched);
       String asked = talk.registered.get(0).getRegistrations().get(0).toString();
       assertTrue(asked.contains("workspace/didChangeWatchedFiles"));
-      assertTrue(asked.contains("**/*.{txt,text,md,markdown,mkd}"), asked);
+      assertTrue(asked.contains("**/*.{" + Format.everyExtension() + "}"), asked);
     }
   }
 }

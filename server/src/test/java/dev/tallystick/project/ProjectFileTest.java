@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Rules;
+import dev.tallystick.prose.Format;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.util.List;
@@ -85,7 +86,7 @@ class ProjectFileTest {
     check(
         """
         { "a key that somebody has written in a whole sentence": 1 }
-          ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ "a key that somebody has written in a who..." means nothing here. Allowed are: sourceLanguage, pairs, checks, ignore.
+          ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ "a key that somebody has written in a who..." means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
         =>
         """);
   }
@@ -203,8 +204,8 @@ class ProjectFileTest {
                       ^^^^^^^^^^^^^ No file can match: names that start with a dot are passed over, and node_modules.
                                                ^^^^^^^^^^^^^^^^^^^^^^^^ No file can match: names that start with a dot are passed over, and node_modules.
           { "source": "a.docx", "target": "Handbuch" },
-                      ^^^^^^^^ No file can match: only files that end in .txt, .text, .md, .markdown, .mkd are read.
-                                          ^^^^^^^^^^ No file can match: only files that end in .txt, .text, .md, .markdown, .mkd are read.
+                      ^^^^^^^^ No file can match: only files that end in EXTENSIONS are read.
+                                          ^^^^^^^^^^ No file can match: only files that end in EXTENSIONS are read.
           { "source": "en/*.md", "target": "de/{name}.md" },
                       ^^^^^^^^^ * and ? mean nothing here. {path} stands for what source and target share.
                                            ^^^^^^^^^^^^^^ "{name}" means nothing here. Allowed are: {path}, {tag}.
@@ -214,7 +215,8 @@ class ProjectFileTest {
           { "source": "A.MD", "target": "{path}/b.md" } ] }
                                         ^^^^^^^^^^^^^ {path} must stand in the source and in the target, or in neither.
         =>
-        """);
+        """
+            .replace("EXTENSIONS", "." + Format.everyExtension().replace(",", ", .")));
   }
 
   @Test
