@@ -4,9 +4,11 @@ import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
 import java.util.stream.Stream;
 
 /** Brings what the editor shows of every file in line with what is known of it. */
@@ -21,7 +23,7 @@ final class Display {
     this.bulletin = bulletin;
   }
 
-  /** Publishes what has changed in the files of which all is known. */
+  /** Publishes what has changed in any files of which all is known. */
   void update() {
     Set<Path> files = pairs.files();
     files.addAll(bulletin.files());
@@ -29,6 +31,20 @@ final class Display {
     files.addAll(library.flawed());
     endless().map(Endless::rules).forEach(files::add);
     bulletin.retain(files);
+    update(files);
+  }
+
+  /** The same, where nothing else can have changed than these files and those of stirred pairs. */
+  void updateOnly(Collection<Path> concerned) {
+    Set<Path> files = new TreeSet<>(concerned);
+    for (PairState pair : pairs.stirred()) {
+      files.add(pair.files().source());
+      files.add(pair.files().target());
+    }
+    update(files);
+  }
+
+  private void update(Set<Path> files) {
     for (Path file : files) {
       if (ready(file)) {
         publish(file);

@@ -188,6 +188,12 @@ final class Library {
     return shelf.open();
   }
 
+  /** Whether the editor shows a file, and nothing but its own pairs rests on its text. */
+  boolean isText(Path file) {
+    return shelf.document(file).isPresent()
+        && projects().noneMatch(project -> project.file().equals(file));
+  }
+
   /** What is known of a file that the editor shows. */
   Optional<Document> document(Path file) {
     return shelf.document(file);

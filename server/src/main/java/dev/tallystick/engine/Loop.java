@@ -5,7 +5,10 @@ import dev.tallystick.run.Threads;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.LinkedBlockingQueue;
 
@@ -22,7 +25,9 @@ import java.util.concurrent.LinkedBlockingQueue;
  * folder, a setting, a result. Then {@link #settle()} brings everything else in line, whatever the
  * event was: which pairs are wanted, which of them need a worker, what is to be shown, who can be
  * answered. That step is written as if nothing were known of the event, so there is one place only
- * where a consequence can be forgotten. It is cheap where nothing has changed.
+ * where a consequence can be forgotten. Only of the two kinds that come most often, the edit of an
+ * open text and what passes between the loop and those who ask or work, it is known which pairs
+ * they can stir; with thousands of pairs in a folder nobody would wait for a look at all of them.
  *
  * <p><b>Workers see snapshots.</b> A {@link Task} holds one state of both texts. When a text moves
  * on, its {@link Sheet} is outdated and the worker leaves at its next check; a result that comes
@@ -55,6 +60,7 @@ public final class Loop implements AutoCloseable {
   private final Standings standings;
   private boolean started;
   private boolean set;
+  private boolean inLine;
   private long turn;
 
   /** Sets up the loop; nothing runs before {@link #start()}. */
@@ -105,13 +111,29 @@ public final class Loop implements AutoCloseable {
   private void turn(Event event) {
     turn++;
     try {
+      Optional<Set<Path>> concerned = inLine ? concerned(event) : Optional.empty();
+      inLine = false;
       handle(event);
-      settle();
+      settle(concerned);
     } catch (RuntimeException | Error e) { // without this thread the server would be deaf
       audience.log("A fault of Tallystick itself: " + Fault.where(e));
     } finally {
       machine.activity().end();
     }
+  }
+
+  /** The only files that an event can change something in at once; empty if it may be any. */
+  private Optional<Set<Path>> concerned(Event event) {
+    if (event instanceof Event.Edited edited && library.isText(edited.file())) {
+      Set<Path> files = new TreeSet<>(Set.of(edited.file()));
+      caret.last().ifPresent(before -> files.add(before.file()));
+      return Optional.of(files);
+    }
+    boolean passing =
+        event instanceof Event.Examined
+            || event instanceof Event.Asked
+            || event instanceof Event.Withdrawn;
+    return passing ? Optional.of(Set.of()) : Optional.empty();
   }
 
   private void handle(Event event) {
@@ -204,27 +226,37 @@ public final class Loop implements AutoCloseable {
     examined.fault().ifPresent(fault -> audience.log(Announcements.fault(files, fault)));
   }
 
-  /** Brings everything in line with what is known now. */
-  private void settle() {
+  /**
+   * Brings everything in line with what is known now.
+   *
+   * @param files all that something has changed in; empty if it may be any
+   */
+  private void settle(Optional<Set<Path>> files) {
     if (!started) {
       return;
     }
+    Optional<Set<Path>> concerned = files;
     if (pairs.keep(library.pairs())) {
       library.retain(pairs.files());
+      standings.retain(pairs.pairs());
+      concerned = Optional.empty();
     }
+    concerned.ifPresentOrElse(pairs::stir, pairs::stirAll);
     pairs.applyMarks(library, file -> audience.say(Announcements.alone(file)));
     pairs.take(library, workers);
     pass.left(pairs.unsettled());
     pairs.show(caret.last());
-    display.update();
-    standings.tell(pairs.all());
+    concerned.ifPresentOrElse(display::updateOnly, display::update);
+    standings.tell(pairs.stirred());
+    pairs.calm();
     questions.answer(library.open(), this::ready, this::answer);
     caret.due().ifPresent(bell::at);
     library.due(caret.restMillis()).ifPresent(bell::at);
-    if (set) {
+    if (set && concerned.isEmpty()) {
       library.questions().forEach(question -> audience.say(Announcements.choice(question)));
     }
     audience.turned();
+    inLine = true;
   }
 
   /** Whether a question can be answered. */

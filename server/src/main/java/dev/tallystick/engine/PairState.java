@@ -18,6 +18,7 @@ final class PairState {
   private Task task;
   private boolean running;
   private boolean waiting;
+  private boolean stirred = true;
   private Optional<PairResult> found = Optional.empty();
   private Optional<PairResult> result = Optional.empty();
   private Levels levels = Levels.USUAL;
@@ -45,6 +46,24 @@ final class PairState {
   /** Its texts may be others by now, but its turn has not come. */
   void await() {
     waiting = true;
+  }
+
+  boolean waiting() {
+    return waiting;
+  }
+
+  /** What holds for it may be something else than in the last turn. */
+  void stir() {
+    stirred = true;
+  }
+
+  boolean stirred() {
+    return stirred;
+  }
+
+  /** All has been done that follows. */
+  void calm() {
+    stirred = false;
   }
 
   /** Whether all is as it was when the texts were taken. */
@@ -89,6 +108,7 @@ final class PairState {
   void finish(Task done, Optional<PairResult> now) {
     if (task == done) {
       running = false;
+      stir();
       take(now);
     }
   }

@@ -22,6 +22,7 @@ final class PairStates {
   private final Map<Path, List<PairState>> byFile = new HashMap<>();
   private final Set<Path> finished = new TreeSet<>();
   private final List<Event.Marked> marks = new ArrayList<>();
+  private List<FilePair> kept = List.of();
 
   /**
    * Keeps these pairs and no others.
@@ -30,9 +31,10 @@ final class PairStates {
    * @return whether they are others than before
    */
   boolean keep(List<FilePair> wanted) {
-    if (wanted.equals(List.copyOf(states.keySet()))) {
+    if (wanted.equals(kept)) {
       return false;
     }
+    kept = List.copyOf(wanted);
     Set<FilePair> gone = new TreeSet<>(states.keySet());
     wanted.forEach(gone::remove);
     gone.forEach(pair -> states.remove(pair).drop());
@@ -46,13 +48,38 @@ final class PairStates {
     return true;
   }
 
+  /** Files may have other texts: what holds for their pairs may be something else. */
+  void stir(Collection<Path> files) {
+    files.forEach(file -> of(file).forEach(PairState::stir));
+  }
+
+  /** Anything may have changed. */
+  void stirAll() {
+    states.values().forEach(PairState::stir);
+  }
+
+  /** All has been done that follows. */
+  void calm() {
+    states.values().forEach(PairState::calm);
+  }
+
+  /** The pairs for which something else may hold than in the last turn, in their order. */
+  List<PairState> stirred() {
+    return states.values().stream().filter(PairState::stirred).toList();
+  }
+
   /**
-   * Gives each pair its current texts, and those that are new to a worker. Pairs without an open
-   * side take turns: each waits until a worker is free, and its files are not even read before.
+   * Gives each stirred pair its current texts, and those that are new to a worker. Pairs without an
+   * open side take turns: each waits until a worker is free, and its files are not even read
+   * before.
    */
   void take(Library library, Workers workers) {
     int free = workers.aside() - (int) states.values().stream().filter(PairState::running).count();
     for (PairState pair : states.values()) {
+      if (!pair.stirred() && (free <= 0 || !pair.waiting())) {
+        continue;
+      }
+      pair.stir();
       pair.at(library.levels(pair.files()));
       boolean open = library.shows(pair.files());
       if (open || free > 0 || library.knows(pair.files())) {
@@ -77,9 +104,9 @@ final class PairStates {
     return Optional.empty();
   }
 
-  /** Decides what each pair shows while the translator writes at a place. */
+  /** Decides what each stirred pair shows while the translator writes at a place. */
   void show(Optional<Caret.Edited> caret) {
-    states.values().forEach(pair -> pair.show(caret));
+    stirred().forEach(pair -> pair.show(caret));
   }
 
   /** A worker is done with one. */
@@ -140,11 +167,6 @@ final class PairStates {
   /** The pairs. */
   Collection<FilePair> pairs() {
     return states.keySet();
-  }
-
-  /** What is kept of each. */
-  Collection<PairState> all() {
-    return states.values();
   }
 
   /** The files of all pairs, sorted. */

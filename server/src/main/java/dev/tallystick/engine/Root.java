@@ -5,8 +5,8 @@ import dev.tallystick.pairing.Pairing;
 import dev.tallystick.pairing.Pairs;
 import dev.tallystick.pairing.Rules;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.Collection;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -120,16 +120,18 @@ final class Root {
 
   /** The first open question about one of these files, unless something was asked before. */
   Optional<Ambiguity> question(Pairs found, Collection<Path> open) {
-    List<String> paths = new ArrayList<>();
+    if (asked || found.ambiguities().isEmpty()) {
+      return Optional.empty();
+    }
+    Set<String> paths = new HashSet<>();
     open.stream()
         .filter(file -> file.startsWith(folder.path()))
         .forEach(file -> paths.add(Listing.name(folder.path().relativize(file))));
     Optional<Ambiguity> question =
         found.ambiguities().stream()
             .filter(ambiguity -> ambiguity.files().stream().anyMatch(paths::contains))
-            .filter(ambiguity -> !asked)
             .findFirst();
-    asked |= question.isPresent();
+    asked = question.isPresent();
     return question;
   }
 }

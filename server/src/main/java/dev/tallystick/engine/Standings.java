@@ -7,9 +7,7 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 import java.util.TreeMap;
-import java.util.TreeSet;
 
 /** What has been told of how far each pair has come, so that only what is new is told. */
 final class Standings {
@@ -25,18 +23,28 @@ final class Standings {
     this.uris = uris;
   }
 
-  /** Tells what is new of these pairs, and that others that were told of are gone. */
+  /** Tells of others that they are gone. */
+  void retain(Collection<FilePair> wanted) {
+    for (FilePair files : List.copyOf(told.keySet())) {
+      if (!wanted.contains(files)) {
+        gone(files);
+      }
+    }
+  }
+
+  /** Tells what is new of these pairs. */
   void tell(Collection<PairState> pairs) {
-    Set<FilePair> gone = new TreeSet<>(told.keySet());
     for (PairState pair : pairs) {
       Optional<Settled> known = pair.known();
-      if (!pair.settled() || known.isPresent()) {
-        gone.remove(pair.files());
-      }
       known.ifPresent(settled -> tell(settled, pair.shown().findings()));
+      if (pair.settled() && known.isEmpty()) {
+        gone(pair.files());
+      }
     }
-    for (FilePair files : gone) {
-      told.remove(files);
+  }
+
+  private void gone(FilePair files) {
+    if (told.remove(files) != null) {
       audience.stands(Standing.gone(files, uris));
     }
   }
