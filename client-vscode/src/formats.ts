@@ -1,8 +1,8 @@
 /** The extensions of the files that the server reads, as README.md lists them. */
-export const EXTENSIONS = ["txt", "text", "md", "markdown", "mkd"] as const;
+export const EXTENSIONS = ["txt", "text", "md", "markdown", "mkd", "html", "htm", "xhtml"] as const;
 
 /** The languages of texts that have no file yet. */
-const LANGUAGES = ["markdown", "plaintext"] as const;
+const LANGUAGES = ["html", "markdown", "plaintext"] as const;
 
 /** The settings of a project. */
 export const PROJECT_FILE = "tallystick.json";

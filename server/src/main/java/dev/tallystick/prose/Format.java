@@ -12,7 +12,9 @@ public enum Format {
   /** Text without markup. */
   PLAIN(List.of("plaintext", "text"), "txt", "text"),
   /** CommonMark with tables. */
-  MARKDOWN(List.of("markdown"), "md", "markdown", "mkd");
+  MARKDOWN(List.of("markdown"), "md", "markdown", "mkd"),
+  /** HTML, also as XHTML. */
+  HTML(List.of("html"), "html", "htm", "xhtml");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -59,6 +61,7 @@ public enum Format {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text);
+      case HTML -> Html.blocks(text);
     };
   }
 }
