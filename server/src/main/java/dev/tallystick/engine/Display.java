@@ -29,7 +29,7 @@ final class Display {
     files.addAll(bulletin.files());
     files.addAll(library.open());
     files.addAll(library.flawed());
-    endless().map(Endless::rules).forEach(files::add);
+    endless(pairs.all()).map(Endless::rules).forEach(files::add);
     bulletin.retain(files);
     update(files);
   }
@@ -41,6 +41,8 @@ final class Display {
       files.add(pair.files().source());
       files.add(pair.files().target());
     }
+    bulletin.files().stream().filter(FolderRules::isRules).forEach(files::add);
+    endless(pairs.stirred()).map(Endless::rules).forEach(files::add);
     update(files);
   }
 
@@ -86,7 +88,10 @@ final class Display {
 
   private Stream<Problem> flaws(Path file) {
     Stream<Problem> inTexts =
-        endless().filter(found -> found.rules().equals(file)).map(Endless::problem).distinct();
+        endless(pairs.all())
+            .filter(found -> found.rules().equals(file))
+            .map(Endless::problem)
+            .distinct();
     return Stream.concat(
         library.flaws(file).stream(), FolderRules.isRules(file) ? inTexts : Stream.of());
   }
@@ -94,8 +99,8 @@ final class Display {
   /** A rule for sentence borders that did not come to an end over a text, and its file. */
   private record Endless(Path rules, Problem problem) {}
 
-  private Stream<Endless> endless() {
-    return pairs.all().stream()
+  private Stream<Endless> endless(Collection<PairState> in) {
+    return in.stream()
         .flatMap(pair -> pair.known().stream())
         .flatMap(
             pair ->

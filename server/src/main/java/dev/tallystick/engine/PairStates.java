@@ -164,6 +164,11 @@ final class PairStates {
     return (int) states.values().stream().filter(pair -> !pair.settled()).count();
   }
 
+  /** What is kept of each. */
+  Collection<PairState> all() {
+    return states.values();
+  }
+
   /** The pairs. */
   Collection<FilePair> pairs() {
     return states.keySet();

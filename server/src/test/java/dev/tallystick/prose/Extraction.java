@@ -71,7 +71,7 @@ final class Extraction {
     return new String(mask);
   }
 
-  private static String blocks(Format format, String source) {
+  static String blocks(Format format, String source) {
     return format.blocks(new Text(source)).stream()
         .map(block -> describe(block, source))
         .collect(Collectors.joining());

@@ -15,7 +15,7 @@ class FormatTest {
     assertEquals(Optional.of(Format.WEBVTT), Format.ofName("ferry.vtt"));
     assertEquals(Optional.empty(), Format.ofName("docs.md/ferry"));
     assertEquals(Optional.empty(), Format.ofName("md"));
-    assertEquals(Optional.empty(), Format.ofName("ferry.html"));
+    assertEquals(Optional.of(Format.HTML), Format.ofName("en/ferry.htm"));
   }
 
   @Test

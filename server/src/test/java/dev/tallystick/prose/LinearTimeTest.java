@@ -81,6 +81,48 @@ class LinearTimeTest {
   }
 
   @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "<div>",
+        "<div>a",
+        "</div>",
+        "<b>a",
+        "<b><p>a",
+        "<i></b>",
+        "<a><table>a",
+        "<table><tr><td>a",
+        "<ul><li>a",
+        "<p title=a>",
+        "a<i title=a>",
+        "<img alt=a>",
+        "<p title=\"",
+        "<a b",
+        "a<br>",
+        "<code>a",
+        "<",
+        "</",
+        "<!--",
+        "<!-- a -->",
+        "<![CDATA[",
+        "&",
+        "&amp",
+        "&a",
+        "&#",
+        "&#1",
+        "&nbsp;",
+        "\0",
+        "a ",
+        "<script>",
+        "<svg>",
+        "<pre>a",
+        "<option>a",
+        "<title>"
+      })
+  void htmlEnds(String fragment) {
+    assertEnds(Format.HTML, fragment);
+  }
+
+  @ParameterizedTest
   @ValueSource(strings = {"- ", "| a ", "\\|"})
   void rowsOfATableEnd(String fragment) {
     assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);

@@ -1,0 +1,143 @@
+package dev.tallystick.prose;
+
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.Deque;
+import java.util.List;
+import java.util.Locale;
+import org.jsoup.nodes.Attribute;
+import org.jsoup.nodes.CDataNode;
+import org.jsoup.nodes.Document;
+import org.jsoup.nodes.Element;
+import org.jsoup.nodes.Node;
+import org.jsoup.nodes.Range;
+import org.jsoup.nodes.TextNode;
+import org.jsoup.parser.Parser;
+import org.jsoup.select.NodeVisitor;
+
+/**
+ * HTML, read as browsers read it. The tree says what a text is in, its place in the file says where
+ * it stands: a browser moves misplaced text about, a translator has it where it was written.
+ */
+final class Html implements NodeVisitor {
+  private final List<Event> events = new ArrayList<>();
+  private final Deque<HtmlContext> contexts = new ArrayDeque<>();
+
+  private Html(Document document) {
+    contexts.push(HtmlContext.of(document));
+  }
+
+  /** What can happen at a place of the file; of several at the same place the first here. */
+  private enum What {
+    BORDER,
+    LINE_END,
+    ATTRIBUTE,
+    IMAGE,
+    TEXT
+  }
+
+  /**
+   * Something that matters to the prose.
+   *
+   * @param mark offset where it starts in the file
+   * @param value its text, if it has one
+   */
+  private record Event(What what, int mark, Span value, HtmlContext context) {}
+
+  static List<Block> blocks(Text text) {
+    Document document = Parser.htmlParser().setTrackPosition(true).parseInput(text.string(), "");
+    Html html = new Html(document);
+    document.traverse(html);
+    html.events.sort(Comparator.comparingInt(Event::mark).thenComparing(Event::what));
+    return html.flow(new HtmlFlow(text.string())).finish();
+  }
+
+  private HtmlFlow flow(HtmlFlow flow) {
+    int end = 0;
+    for (Event event : events) {
+      // A parser that repairs may put a copy of an element elsewhere, with its place in the file.
+      boolean repeated = !event.value().isEmpty() && event.value().start() < end;
+      if (!repeated) {
+        take(flow, event);
+        end = Math.max(end, event.value().end());
+      }
+    }
+    return flow;
+  }
+
+  private static void take(HtmlFlow flow, Event event) {
+    switch (event.what()) {
+      case BORDER -> flow.close();
+      case LINE_END -> flow.addLineEnd(event.mark());
+      case ATTRIBUTE -> flow.attribute(event.value());
+      case IMAGE -> {
+        flow.addBlank(event.mark(), false);
+        flow.text(event.value(), event.context(), true);
+        flow.addBlank(event.value().end(), false);
+      }
+      case TEXT -> flow.text(event.value(), event.context(), false);
+    }
+  }
+
+  @Override
+  public void head(Node node, int depth) {
+    if (node instanceof Element element) {
+      enter(element);
+    } else if (node instanceof TextNode && !(node instanceof CDataNode)) {
+      if (!contexts.element().silent()) {
+        Span span = span(node.sourceRange());
+        events.add(new Event(What.TEXT, span.start(), span, contexts.element()));
+      }
+    }
+  }
+
+  @Override
+  public void tail(Node node, int depth) {
+    if (node instanceof Element) {
+      contexts.pop();
+    }
+  }
+
+  private void enter(Element element) {
+    HtmlContext around = contexts.element();
+    HtmlContext inside = around.in(element);
+    contexts.push(inside);
+    Span tag = span(element.sourceRange());
+    if (around.silent()) {
+      return;
+    }
+    if (inside.block() == element) {
+      events.add(new Event(What.BORDER, tag.start(), new Span(tag.start(), tag.start()), inside));
+    } else if (element.normalName().equals("br")) {
+      events.add(new Event(What.LINE_END, tag.start(), new Span(tag.start(), tag.start()), inside));
+    }
+    if (!inside.fixed() && !tag.isEmpty()) {
+      element.attributes().forEach(attribute -> read(attribute, element, tag, inside));
+    }
+  }
+
+  private void read(Attribute attribute, Element element, Span tag, HtmlContext context) {
+    String name = attribute.getKey().toLowerCase(Locale.ROOT);
+    boolean image = name.equals("alt") && element.normalName().equals("img");
+    if (image || isProse(element, name)) {
+      Span value = span(element.attributes().sourceRange(attribute.getKey()).valueRange());
+      int mark = image ? tag.start() : value.start();
+      if (!value.isEmpty()) {
+        events.add(new Event(image ? What.IMAGE : What.ATTRIBUTE, mark, value, context));
+      }
+    }
+  }
+
+  private static boolean isProse(Element element, String attribute) {
+    String type = element.attr("type").toLowerCase(Locale.ROOT);
+    String name = element.attr("name").toLowerCase(Locale.ROOT);
+    return HtmlTags.isProse(element.normalName(), attribute, type, name);
+  }
+
+  private static Span span(Range range) {
+    return range.isTracked() ? new Span(range.startPos(), range.endPos()) : new Span(0, 0);
+  }
+}
