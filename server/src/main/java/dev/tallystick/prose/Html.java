@@ -4,10 +4,13 @@ import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
 import java.util.Deque;
+import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Set;
 import org.jsoup.nodes.Attribute;
 import org.jsoup.nodes.CDataNode;
 import org.jsoup.nodes.Document;
@@ -24,6 +27,7 @@ import org.jsoup.select.NodeVisitor;
  */
 final class Html implements NodeVisitor {
   private final List<Event> events = new ArrayList<>();
+  private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
   private final Deque<HtmlContext> contexts = new ArrayDeque<>();
 
   private Html(Document document) {
@@ -52,7 +56,7 @@ final class Html implements NodeVisitor {
     Html html = new Html(document);
     document.traverse(html);
     html.events.sort(Comparator.comparingInt(Event::mark).thenComparing(Event::what));
-    return html.flow(new HtmlFlow(text.string())).finish();
+    return html.flow(new HtmlFlow(text.string(), html.parents)).finish();
   }
 
   private HtmlFlow flow(HtmlFlow flow) {
@@ -110,6 +114,7 @@ final class Html implements NodeVisitor {
       return;
     }
     if (inside.block() == element) {
+      parents.add(around.block());
       events.add(new Event(What.BORDER, tag.start(), new Span(tag.start(), tag.start()), inside));
     } else if (element.normalName().equals("br")) {
       events.add(new Event(What.LINE_END, tag.start(), new Span(tag.start(), tag.start()), inside));

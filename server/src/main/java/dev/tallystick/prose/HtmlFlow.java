@@ -3,6 +3,9 @@ package dev.tallystick.prose;
 import dev.tallystick.text.Span;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Set;
+import org.jsoup.nodes.Element;
+import org.jsoup.nodes.Range;
 
 /**
  * Makes blocks of what a page shows, taken in from left to right. White space collapses as it does
@@ -16,6 +19,7 @@ final class HtmlFlow {
   private static final String EMPTY_TAG = "</>";
 
   private final String file;
+  private final Set<Element> parents;
   private final List<Block> blocks = new ArrayList<>();
   private final List<Span> waiting = new ArrayList<>();
   private HtmlContext open;
@@ -28,8 +32,14 @@ final class HtmlFlow {
   private boolean hasCopied;
   private boolean isFixed;
 
-  HtmlFlow(String file) {
+  /**
+   * An empty flow.
+   *
+   * @param parents the elements that have others inside that no sentence crosses
+   */
+  HtmlFlow(String file, Set<Element> parents) {
     this.file = file;
+    this.parents = parents;
   }
 
   /** All blocks so far. */
@@ -150,7 +160,7 @@ final class HtmlFlow {
     int end = 0;
     if (open != null) {
       end = pieces.end();
-      blocks.add(block(new Span(first, end)));
+      add(block(new Span(first, end)));
       open = null;
       lineEnds = false;
     }
@@ -176,6 +186,34 @@ final class HtmlFlow {
             || hasCopied && !hasWords && (isFixed || open.kind() != Block.Kind.HEADING);
     return copied
         ? new Block(Block.Kind.VERBATIM, 0, extent, List.of())
-        : new Block(open.kind(), open.level(), extent, pieces.spans());
+        : new Block(open.kind(), open.level(), withTags(extent), pieces.spans());
+  }
+
+  /** With the tags of the element, if it has no other blocks inside. */
+  private Span withTags(Span prose) {
+    Element element = open.block();
+    if (element == null || parents.contains(element)) {
+      return prose;
+    }
+    int before = blocks.isEmpty() ? 0 : blocks.get(blocks.size() - 1).extent().end();
+    Range tag = element.sourceRange();
+    Range endTag = element.endSourceRange();
+    boolean opens = tag.endPos() > tag.startPos() && tag.startPos() >= before;
+    boolean closes = endTag.endPos() > endTag.startPos();
+    return new Span(
+        opens ? Math.min(tag.startPos(), prose.start()) : prose.start(),
+        closes ? Math.max(endTag.endPos(), prose.end()) : prose.end());
+  }
+
+  /** Adds a block; if the one before it would reach into it, that one ends with its prose. */
+  private void add(Block block) {
+    int last = blocks.size() - 1;
+    if (last >= 0 && blocks.get(last).extent().end() > block.extent().start()) {
+      Block before = blocks.get(last);
+      int end = before.pieces().get(before.pieces().size() - 1).end();
+      Span extent = new Span(before.extent().start(), end);
+      blocks.set(last, new Block(before.kind(), before.level(), extent, before.pieces()));
+    }
+    blocks.add(block);
   }
 }

@@ -334,4 +334,50 @@ class StubTest {
             List.of(2));
     assertEquals(List.of(new LineEdit(2, 3, "Rudern Sie los. Take a rest.\n")), edits);
   }
+
+  @Test
+  void aPageGetsTheParagraphWithItsTags() {
+    assertEquals(
+        """
+        <h1>Fähre</h1>
+        <p>
+          Sie legt ab.
+        </p>
+        <p>
+          The <b>bell</b> rings.
+        </p>
+        <p>Niemand schwimmt.</p>
+        """,
+        Stubbed.in(
+            Format.HTML,
+            """
+            <h1>Ferry</h1>
+            <p>
+              It leaves.
+            </p>
+            <p>
+              The <b>bell</b> rings.
+            </p>
+            <p>Nobody swims.</p>
+            """,
+            """
+            <h1>Fähre</h1>
+            <p>
+              Sie legt ab.
+            </p>
+            <p>Niemand schwimmt.</p>
+            """,
+            "0-0 1-1 2- 3-2"));
+  }
+
+  @Test
+  void aSentenceGoesIntoItsParagraphOfAPageWithItsMarks() {
+    assertEquals(
+        "<p>Sie legt ab. The <b>bell</b>&nbsp;rings. Niemand schwimmt.</p>\n",
+        Stubbed.in(
+            Format.HTML,
+            "<p>It leaves. The <b>bell</b>&nbsp;rings. Nobody swims.</p>\n",
+            "<p>Sie legt ab. Niemand schwimmt.</p>\n",
+            "0-0 1- 2-1"));
+  }
 }

@@ -108,7 +108,8 @@ class DemoTest {
             "he/fog-signal.md",
             JAPANESE,
             "de/lamp.md",
-            "fr/lamp.md"),
+            "fr/lamp.md",
+            "de/visitors.html"),
         targets);
   }
 

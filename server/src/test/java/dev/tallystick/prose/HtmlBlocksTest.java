@@ -83,14 +83,24 @@ class HtmlBlocksTest {
   }
 
   @Test
-  void extentsReachFromTheFirstToTheLastCharacter() {
+  void anElementWithoutOthersInsideIsABlockWithItsTags() {
     Extraction.assertExtents(
         Format.HTML,
-        "<h1><b>The</b> lamp</h1><pre>a\n b\n</pre><p>Lit.<br></p>",
+        "<h1><b>The</b> lamp</h1><pre>a\n b\n</pre><p>\nLit.<br>\n</p><li>bare<ul><li>in</ul></li>"
+            + "<p title=tip>x</p><p>y<i title=late></i></p><p>open<p>1<br><br>2</p>",
         """
-        The</b> lamp
+        <h1><b>The</b> lamp</h1>
         a⏎ b
-        Lit.
+        <p>⏎Lit.<br>⏎</p>
+        bare
+        <li>in
+        tip
+        x</p>
+        <p>y
+        late
+        <p>open
+        <p>1
+        2</p>
         """);
   }
 

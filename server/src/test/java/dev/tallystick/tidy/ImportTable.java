@@ -26,6 +26,7 @@ record ImportTable(Map<String, Row> rows) {
       Map.of(
           "commonmark", "org.commonmark.",
           "icu4j", "com.ibm.icu.",
+          "jsoup", "org.jsoup.",
           "commons-math3", "org.apache.commons.math3.",
           "gson", "com.google.gson.",
           "lsp4j", "org.eclipse.lsp4j.",
