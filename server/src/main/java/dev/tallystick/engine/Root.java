@@ -20,7 +20,10 @@ final class Root {
   private List<Path> files = List.of();
   private Set<String> told = Set.of();
   private Listing listed = Listing.of(List.of(), file -> file);
-  private Optional<Pairs> pairs = Optional.empty();
+  private Pairs pairs = Pairing.pairs(Set.of(), Rules.NONE);
+  private Set<Path> paired = Set.of();
+  private Rules by = Rules.NONE;
+  private boolean current;
   private boolean listing;
   private boolean again;
   private boolean awaited = true;
@@ -76,7 +79,7 @@ final class Root {
   boolean listed(List<Path> found) {
     project.listed(found);
     files = found.stream().filter(file -> !file.equals(project.file())).toList();
-    pairs = Optional.empty();
+    forget();
     listing = again;
     again = false;
     awaited &= listing;
@@ -90,9 +93,9 @@ final class Root {
     return news;
   }
 
-  /** The files or the rules have changed: they are to be paired anew. */
+  /** The files or the rules may have changed: if so, they are to be paired anew. */
   void forget() {
-    pairs = Optional.empty();
+    current = false;
   }
 
   /**
@@ -100,12 +103,21 @@ final class Root {
    *
    * @param set what the user has set, which the project beats
    */
-  Pairs pairs(Supplier<List<Path>> among, Rules set) {
-    if (pairs.isEmpty()) {
-      listed = Listing.of(among.get(), folder.path()::relativize);
-      pairs = Optional.of(Pairing.pairs(listed.names(), project.project().rules(set)));
+  Pairs pairs(Supplier<Set<Path>> among, Rules set) {
+    if (!current) {
+      pair(among.get(), project.project().rules(set));
+      current = true;
     }
-    return pairs.get();
+    return pairs;
+  }
+
+  private void pair(Set<Path> among, Rules rules) {
+    if (!among.equals(paired) || !rules.equals(by)) {
+      listed = Listing.of(among, folder.path()::relativize);
+      pairs = Pairing.pairs(listed.names(), rules);
+      paired = among;
+      by = rules;
+    }
   }
 
   /** The pairs that are wanted, with their files as absolute paths. */
