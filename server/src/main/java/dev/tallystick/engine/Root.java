@@ -20,7 +20,10 @@ final class Root {
   private List<Path> files = List.of();
   private Set<String> told = Set.of();
   private Listing listed = Listing.of(List.of(), file -> file);
-  private Optional<Pairs> pairs = Optional.empty();
+  private Pairs pairs = Pairing.pairs(Set.of(), Rules.NONE);
+  private Set<Path> paired = Set.of();
+  private Rules by = Rules.NONE;
+  private boolean current;
   private boolean listing;
   private boolean again;
   private boolean awaited = true;
@@ -81,7 +84,7 @@ final class Root {
         found.stream()
             .filter(file -> !file.equals(project.file()) && !FolderRules.isRules(file))
             .toList();
-    pairs = Optional.empty();
+    forget();
     listing = again;
     again = false;
     awaited &= listing;
@@ -95,9 +98,9 @@ final class Root {
     return news;
   }
 
-  /** The files or the rules have changed: they are to be paired anew. */
+  /** The files or the rules may have changed: if so, they are to be paired anew. */
   void forget() {
-    pairs = Optional.empty();
+    current = false;
   }
 
   /**
@@ -105,12 +108,21 @@ final class Root {
    *
    * @param set what the user has set, which the project beats
    */
-  Pairs pairs(Supplier<List<Path>> among, Rules set) {
-    if (pairs.isEmpty()) {
-      listed = Listing.of(among.get(), folder.path()::relativize);
-      pairs = Optional.of(Pairing.pairs(listed.names(), project.project().rules(set)));
+  Pairs pairs(Supplier<Set<Path>> among, Rules set) {
+    if (!current) {
+      pair(among.get(), project.project().rules(set));
+      current = true;
     }
-    return pairs.get();
+    return pairs;
+  }
+
+  private void pair(Set<Path> among, Rules rules) {
+    if (!among.equals(paired) || !rules.equals(by)) {
+      listed = Listing.of(among, folder.path()::relativize);
+      pairs = Pairing.pairs(listed.names(), rules);
+      paired = among;
+      by = rules;
+    }
   }
 
   /** The pairs that are wanted, with their files as absolute paths. */

@@ -221,13 +221,14 @@ final class Workspace {
   }
 
   /** The files that belong to a folder: those on the disk, and those only in the editor so far. */
-  private List<Path> files(Root root) {
-    List<Path> files = new ArrayList<>(root.files());
+  private Set<Path> files(Root root) {
+    Set<Path> files = new LinkedHashSet<>(root.files());
     for (Path file : open) {
       if (Format.ofName(file.getFileName().toString()).isPresent()) {
         files.add(file);
       }
     }
-    return files.stream().filter(file -> root(file).filter(root::equals).isPresent()).toList();
+    files.removeIf(file -> root(file).filter(root::equals).isEmpty());
+    return files;
   }
 }
