@@ -1,8 +1,19 @@
 /** The extensions of the files that the server reads, as README.md lists them. */
-export const EXTENSIONS = ["txt", "text", "md", "markdown", "mkd", "srt", "vtt"] as const;
+export const EXTENSIONS = [
+  "txt",
+  "text",
+  "md",
+  "markdown",
+  "mkd",
+  "adoc",
+  "asciidoc",
+  "asc",
+  "srt",
+  "vtt",
+] as const;
 
 /** The languages of texts that have no file yet. */
-const LANGUAGES = ["markdown", "plaintext", "srt", "subrip", "vtt", "webvtt"] as const;
+const LANGUAGES = ["asciidoc", "markdown", "plaintext", "srt", "subrip", "vtt", "webvtt"] as const;
 
 /** The settings of a project. */
 export const PROJECT_FILE = "tallystick.json";

@@ -16,7 +16,9 @@ public enum Format {
   /** Subtitles as SubRip writes them. */
   SUBRIP(List.of("srt", "subrip"), "srt"),
   /** Subtitles as WebVTT has them. */
-  WEBVTT(List.of("vtt", "webvtt"), "vtt");
+  WEBVTT(List.of("vtt", "webvtt"), "vtt"),
+  /** AsciiDoc. */
+  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -64,6 +66,7 @@ public enum Format {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
+      case ASCIIDOC -> AsciiDoc.blocks(text);
     };
   }
 }
