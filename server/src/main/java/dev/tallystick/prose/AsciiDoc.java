@@ -2,8 +2,6 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
-import java.util.ArrayDeque;
-import java.util.Deque;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -14,9 +12,6 @@ import java.util.Optional;
  * never closed opens nothing, so that what is being written does not swallow the rest of the file.
  */
 final class AsciiDoc {
-  /** Deeper nesting than any writer uses is not kept. */
-  private static final int DEEPEST = 100;
-
   /** Below the title of the document: the author, and the revision. */
   private static final int HEADER_LINES = 2;
 
@@ -25,21 +20,14 @@ final class AsciiDoc {
   private final List<Span> lines;
   private final Map<String, Integer> lastDelimiters = new HashMap<>();
   private final AsciiDocBlocks blocks;
-  private final Deque<Frame> frames = new ArrayDeque<>();
-  private AsciiDocList list = new AsciiDocList(0);
+  private final AsciiDocNesting nesting = new AsciiDocNesting();
   private AsciiDocStyle style = AsciiDocStyle.NONE;
-
-  /** Level of the item that the next block belongs to; 0 if to none. */
-  private int attached;
 
   /** Whether a term has just come whose description is still to come. */
   private boolean describes;
 
   private int blankLines;
   private int headerLines;
-
-  /** A delimited block that is open, and what is to be gone on with behind it. */
-  private record Frame(String delimiter, boolean quotes, int attached, AsciiDocList outer) {}
 
   private AsciiDoc(Text text) {
     this.text = text;
@@ -115,21 +103,20 @@ final class AsciiDoc {
       style = style.and(line);
       return at + 1;
     }
-    if (line.equals("+") && !list.isEmpty()) {
+    if (line.equals("+") && nesting.isInList()) {
       blocks.close();
-      list.leave(blankLines);
-      attached = list.level();
+      nesting.attach(blankLines);
       return at + 1;
     }
     return at;
   }
 
   private int readDelimiter(int at, String line) {
-    for (Frame frame : frames) {
-      if (frame.delimiter().equals(line)) {
-        closeFrames(frame);
-        return at + 1;
-      }
+    if (nesting.isOpen(line)) {
+      blocks.close();
+      nesting.close(line);
+      style = AsciiDocStyle.NONE;
+      return at + 1;
     }
     if (AsciiDocSyntax.isUnderline(blocks.onlyLine(), line)) {
       return underline(at, line);
@@ -147,21 +134,12 @@ final class AsciiDoc {
     return at + 1;
   }
 
-  private void closeFrames(Frame last) {
-    blocks.close();
-    while (frames.peek() != last) {
-      frames.pop();
-    }
-    list = frames.pop().outer();
-    attached = 0;
-    style = AsciiDocStyle.NONE;
-  }
-
   private int openDelimited(int at, String line) {
     String closing = AsciiDocSyntax.closing(line);
     boolean comment = line.startsWith("/") || style.isComment();
     if (!comment && !style.isVerbatim() && AsciiDocSyntax.isContainer(line)) {
-      openFrame(line);
+      nesting.open(line, line.startsWith("_") || style.isQuotation());
+      takeStyle();
       return at + 1;
     }
     int end = at + 1;
@@ -169,7 +147,7 @@ final class AsciiDoc {
       end++;
     }
     if (!comment) {
-      takeAttached();
+      nesting.takeItem();
       if (AsciiDocSyntax.isTable(line)) {
         AsciiDocTable.blocks(file, lines.subList(at + 1, end), separator(line))
             .forEach(blocks::add);
@@ -181,23 +159,8 @@ final class AsciiDoc {
     return end + 1;
   }
 
-  private void openFrame(String line) {
-    boolean quotes = line.startsWith("_") || takeStyle().isQuotation();
-    int item = takeAttached();
-    if (frames.size() < DEEPEST) {
-      frames.push(new Frame(line, quotes, item > 0 ? item : around(), list));
-      list = new AsciiDocList(around());
-    }
-    takeStyle();
-  }
-
   private char separator(String line) {
     return style.commaSeparated() ? ',' : line.charAt(0);
-  }
-
-  /** Level of the item that the delimited block around is part of; 0 for none. */
-  private int around() {
-    return frames.isEmpty() ? 0 : frames.element().attached();
   }
 
   /** A further line of the block that is open. */
@@ -225,8 +188,8 @@ final class AsciiDoc {
     boolean described = describes;
     describes = false;
     if (AsciiDocSyntax.isRule(line)) {
-      takeAttached();
-    } else if (!beginHeading(at) && !addMacro(at, line) && !beginItem(at)) {
+      nesting.takeItem();
+    } else if (!beginHeading(at) && !addMacro(at) && !beginItem(at)) {
       beginText(at, isIndented(at) && !described);
     }
     return at + 1;
@@ -246,7 +209,7 @@ final class AsciiDoc {
     }
     headerLines = blocks.hasNone() && heading.get().level() == 1 ? HEADER_LINES : 0;
     takeStyle();
-    takeAttached();
+    nesting.takeItem();
     blocks.open(Block.Kind.HEADING, heading.get().level(), line.start(), heading.get().text());
     blocks.endAt(line.end());
     blocks.close();
@@ -254,13 +217,13 @@ final class AsciiDoc {
   }
 
   /** A macro that stands for a block: of an image the description is prose. */
-  private boolean addMacro(int at, String line) {
+  private boolean addMacro(int at) {
     Optional<List<Span>> prose = AsciiDocSyntax.blockMacro(file, lines.get(at));
     if (prose.isEmpty() || isIndented(at)) {
       return false;
     }
     takeStyle();
-    takeAttached();
+    nesting.takeItem();
     blocks.addMacro(lines.get(at), prose.get());
     return true;
   }
@@ -272,8 +235,7 @@ final class AsciiDoc {
     }
     blocks.close();
     takeStyle();
-    attached = 0;
-    int level = list.enter(item.get().marker());
+    int level = nesting.enterList(item.get().marker());
     int start = lines.get(at).start();
     item.get()
         .term()
@@ -285,7 +247,7 @@ final class AsciiDoc {
             });
     describes = item.get().text().isEmpty();
     if (describes) {
-      attached = level;
+      nesting.attach(0);
     } else {
       int from = item.get().term().isPresent() ? item.get().text().start() : start;
       blocks.open(Block.Kind.ITEM, level, from, item.get().text());
@@ -297,7 +259,7 @@ final class AsciiDoc {
     Span span = lines.get(at);
     if (style.isVerbatim() || style.isComment() || literal && !style.isProse()) {
       boolean comment = takeStyle().isComment();
-      attached = 0;
+      nesting.keepList();
       blocks.openVerbatim(span, comment);
     } else {
       beginParagraph(span.start(), span);
@@ -306,16 +268,14 @@ final class AsciiDoc {
 
   private void beginParagraph(int start, Span first) {
     Span unquoted = AsciiDocSyntax.withoutQuoteMark(file, first);
-    int quotes = takeStyle().isQuotation() || !unquoted.equals(first) ? 1 : 0;
-    int item = takeAttached();
-    for (Frame frame : frames) {
-      quotes += frame.quotes() ? 1 : 0;
-    }
+    boolean quotation = takeStyle().isQuotation() || !unquoted.equals(first);
+    int quotes = nesting.quotations() + (quotation ? 1 : 0);
+    int item = nesting.takeItem();
     Span words = AsciiDocSyntax.withoutLabel(file, unquoted);
     if (quotes > 0) {
       blocks.open(Block.Kind.QUOTATION, quotes, start, words);
-    } else if (item + around() > 0) {
-      blocks.open(Block.Kind.ITEM, item > 0 ? item : around(), start, words);
+    } else if (item > 0) {
+      blocks.open(Block.Kind.ITEM, item, start, words);
     } else {
       blocks.open(Block.Kind.PARAGRAPH, 0, start, words);
     }
@@ -324,16 +284,6 @@ final class AsciiDoc {
   private AsciiDocStyle takeStyle() {
     AsciiDocStyle taken = style;
     style = AsciiDocStyle.NONE;
-    return taken;
-  }
-
-  /** The item that a block belongs to; one that belongs to none ends the list. */
-  private int takeAttached() {
-    int taken = attached;
-    attached = 0;
-    if (taken == 0) {
-      list.clear();
-    }
     return taken;
   }
 
