@@ -5,6 +5,9 @@ export const EXTENSIONS = [
   "md",
   "markdown",
   "mkd",
+  "adoc",
+  "asciidoc",
+  "asc",
   "srt",
   "vtt",
   "html",
@@ -13,7 +16,16 @@ export const EXTENSIONS = [
 ] as const;
 
 /** The languages of texts that have no file yet. */
-const LANGUAGES = ["html", "markdown", "plaintext", "srt", "subrip", "vtt", "webvtt"] as const;
+const LANGUAGES = [
+  "asciidoc",
+  "html",
+  "markdown",
+  "plaintext",
+  "srt",
+  "subrip",
+  "vtt",
+  "webvtt",
+] as const;
 
 /** The settings of a project. */
 export const PROJECT_FILE = "tallystick.json";

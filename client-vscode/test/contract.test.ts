@@ -32,6 +32,7 @@ test("a file's extension counts in any case", () => {
 test("the server is told of texts, of new texts and of the settings of the project", () => {
   assert.deepEqual(FILTERS, [
     { scheme: "file", pattern: TEXTS },
+    { scheme: "untitled", language: "asciidoc" },
     { scheme: "untitled", language: "html" },
     { scheme: "untitled", language: "markdown" },
     { scheme: "untitled", language: "plaintext" },

@@ -18,7 +18,9 @@ public enum Format {
   /** Subtitles as WebVTT has them. */
   WEBVTT(List.of("vtt", "webvtt"), "vtt"),
   /** HTML, also as XHTML. */
-  HTML(List.of("html"), "html", "htm", "xhtml");
+  HTML(List.of("html"), "html", "htm", "xhtml"),
+  /** AsciiDoc. */
+  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -67,6 +69,7 @@ public enum Format {
       case MARKDOWN -> Markdown.blocks(text);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
+      case ASCIIDOC -> AsciiDoc.blocks(text);
     };
   }
 }

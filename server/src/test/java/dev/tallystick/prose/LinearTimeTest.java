@@ -123,6 +123,76 @@ class LinearTimeTest {
   }
 
   @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "a",
+        "a\n",
+        "*",
+        "*a ",
+        " a*",
+        "**a",
+        "^a",
+        "_a_ ",
+        "+",
+        "+a ",
+        "++a",
+        "+++a",
+        "\\",
+        "\\*",
+        "[",
+        "]",
+        "[[",
+        "[a]#",
+        "<<a",
+        "<<a>>",
+        "<<a,",
+        "((a",
+        "(((",
+        "<https://",
+        "https://a[",
+        "https://",
+        "link:",
+        "link:a[",
+        "link:a[b,",
+        "link:a[\"",
+        "image:a[b=",
+        "footnote:[",
+        "footnote:[] ",
+        "* ",
+        "* a\n",
+        "* a\n+\n",
+        "a:: ",
+        "a::b",
+        "a::[",
+        "a::\n",
+        "::: ",
+        ". a\n",
+        "= ",
+        "= a ",
+        "====\n",
+        "====\n\n",
+        "----\na\n",
+        "--\n",
+        "|===\n",
+        "////\n",
+        "[a]\n",
+        "[a\n",
+        ":a: \\\n",
+        "ifdef::a[b]\n",
+        "ifdef::a[",
+        "> a\n",
+        "a\n-\n",
+        "//\n",
+        ".a\n",
+        " a\n\n"
+      })
+  void asciiDocEnds(String fragment) {
+    assertEnds(Format.ASCIIDOC, fragment);
+    assertEnds(Format.ASCIIDOC, "|===\n|" + fragment.repeat(TIMES) + "\n|===", 1);
+    assertEnds(Format.ASCIIDOC, "= a" + " ".repeat(TIMES) + fragment, 1);
+  }
+
+  @ParameterizedTest
   @ValueSource(strings = {"- ", "| a ", "\\|"})
   void rowsOfATableEnd(String fragment) {
     assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
