@@ -10,6 +10,8 @@ import java.util.List;
 import java.util.Random;
 import org.jsoup.nodes.CDataNode;
 import org.jsoup.nodes.Document;
+import org.jsoup.nodes.Element;
+import org.jsoup.nodes.Range;
 import org.jsoup.nodes.TextNode;
 import org.jsoup.parser.Parser;
 import org.junit.jupiter.api.Test;
@@ -118,7 +120,7 @@ class HtmlPositionsTest {
         int start = node.sourceRange().startPos();
         assertTrue(start >= end, source);
         end = node.sourceRange().endPos();
-        String decoded = decoded(source, start, end);
+        String decoded = decoded(source, start, end, false);
         assertEquals(plain(node.getWholeText()), plain(decoded), source);
       }
     }
@@ -175,6 +177,33 @@ class HtmlPositionsTest {
     }
   }
 
+  @Test
+  void everyAttributeStandsWhereTheParserSaysAndReadsAsItDecodes() {
+    Random random = new Random(73);
+    List<String> values =
+        List.of("w", " ", "&amp;", "&ampw", "&copy=", "&notin;", "&", "&#65", "\r\n", "<p>", "😀");
+    for (int page = 0; page < PAGES; page++) {
+      String value = page(random, values);
+      List<String> tags =
+          List.of(
+              "<p title=\"" + value + "\">",
+              "<i alt=x title='" + value + "' title=y/>",
+              "<b TITLE = " + value.replaceAll("[\\s<>]", "") + "w>",
+              "</b>",
+              "<table>",
+              "w",
+              "\uFEFF",
+              "\r\n");
+      String source = page(random, tags);
+      Document document = Parser.htmlParser().setTrackPosition(true).parseInput(source, "");
+      for (Element element : document.select("[title]")) {
+        Range range = element.attributes().sourceRange("title").valueRange();
+        String decoded = decoded(source, range.startPos(), range.endPos(), true);
+        assertEquals(plain(element.attr("title")), plain(decoded), source);
+      }
+    }
+  }
+
   private static String page(Random random, List<String> fragments) {
     StringBuilder page = new StringBuilder();
     for (int i = random.nextInt(30); i >= 0; i--) {
@@ -197,12 +226,12 @@ class HtmlPositionsTest {
     return texts;
   }
 
-  private static String decoded(String source, int start, int end) {
+  private static String decoded(String source, int start, int end, boolean attribute) {
     StringBuilder decoded = new StringBuilder();
     int at = start;
     while (at < end) {
       HtmlReference reference =
-          source.charAt(at) == '&' ? HtmlReference.at(source, at, end, false) : null;
+          source.charAt(at) == '&' ? HtmlReference.at(source, at, end, attribute) : null;
       if (reference == null) {
         decoded.append(source.charAt(at++));
       } else {
