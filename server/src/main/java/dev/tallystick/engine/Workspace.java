@@ -170,7 +170,9 @@ final class Workspace {
   List<FilePair> pairs() {
     if (pairs.isEmpty()) {
       Set<FilePair> wanted = new TreeSet<>();
-      made.all().stream().filter(this::hasOpenSide).forEach(wanted::add);
+      made.all().stream()
+          .filter(pair -> hasOpenSide(pair) || root(pair.target()).filter(this::whole).isPresent())
+          .forEach(wanted::add);
       for (Root root : concerned()) {
         boolean whole = whole(root);
         wanted.addAll(
