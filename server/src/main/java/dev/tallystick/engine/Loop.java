@@ -196,6 +196,7 @@ public final class Loop implements AutoCloseable {
       library.want(wanted.folder());
     } else if (event instanceof Event.FoldersDeclined) {
       library.decline();
+      questions.decline();
     }
   }
 

@@ -32,6 +32,17 @@ final class Questions {
     waiting.removeIf(one -> one.question() == question);
   }
 
+  /** The user does not want the folders looked at any more: no answer would be about all of one. */
+  void decline() {
+    for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
+      Question question = all.next().question();
+      if (!question.aboutText()) {
+        all.remove();
+        question.reply().outdated();
+      }
+    }
+  }
+
   /** A text was edited: who asked about it, or about its counterpart, asked about another text. */
   void edited(Path file, Collection<FilePair> pairs) {
     for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
