@@ -159,9 +159,12 @@ final class PairStates {
     before.forEach(file -> finished.add(renaming.of(file)));
   }
 
-  /** How many pairs something is still to come for. */
-  int unsettled() {
-    return (int) states.values().stream().filter(pair -> !pair.settled()).count();
+  /** How many pairs that the editor does not show something is still to come for. */
+  int unsettledAside(Library library) {
+    return (int)
+        states.values().stream()
+            .filter(pair -> !pair.settled() && !library.shows(pair.files()))
+            .count();
   }
 
   /** The pairs. */

@@ -139,6 +139,22 @@ class ScopeSessionTest {
     }
   }
 
+  /** Each keystroke in the source concerns all of its translations. */
+  @Test
+  void typingInASourceOfManyLanguagesIsNotWorthShowing() {
+    Work work = new Work(folder);
+    Path source = work.write("ferry.md", Ferry.EN);
+    for (String tag : List.of("de", "es", "fr", "it", "nl", "pl")) {
+      work.write("ferry." + tag + ".md", Ferry.DE);
+    }
+    try (Talk talk = Talk.in(folder, ScopeSessionTest::showsProgress)) {
+      Buffer english = talk.open(source, Ferry.EN);
+      talk.settle();
+      english.replace("Two keepers", "Three keepers");
+      assertEquals(List.of(), talk.passes);
+    }
+  }
+
   @Test
   void aClientThatShowsNoProgressIsNotAskedTo() {
     manyPairs();
