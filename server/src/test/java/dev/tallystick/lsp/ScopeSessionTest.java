@@ -215,6 +215,30 @@ class ScopeSessionTest {
     }
   }
 
+  /** The French is not open, but it is asked for too. */
+  @Test
+  void theOtherLanguagesOfAnOpenFileDoNotWaitForTheFolder() {
+    Work work = manyPairs();
+    for (int i = 0; i < MANY; i++) {
+      work.write("fr/ferry" + i + ".md", i == 7 ? Ferry.FR : "Rien.");
+    }
+    CountDownLatch others = new CountDownLatch(1);
+    try (Talk talk = Talk.in(folder)) {
+      talk.machine.examiner =
+          (source, target, draft, cancellation) -> {
+            if (target.text().string().equals(Ferry.DE_WITHOUT_FOG)) {
+              await(others);
+            }
+            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+          };
+      scope(talk, "folder");
+      Buffer german = talk.open(work.file("de/ferry7.md"), Ferry.DE);
+      assertEquals(2, german.references("Winter").size());
+      others.countDown();
+      talk.settle();
+    }
+  }
+
   /** What is not open is read when its turn comes, so that nobody waits for the disk. */
   @Test
   void filesAreReadOneByOneAsWorkersBecomeFree() {
