@@ -196,6 +196,7 @@ public final class Loop implements AutoCloseable {
       library.want(wanted.folder());
     } else if (event instanceof Event.FoldersDeclined) {
       library.decline();
+      questions.decline();
     }
   }
 
@@ -243,8 +244,8 @@ public final class Loop implements AutoCloseable {
     }
     concerned.ifPresentOrElse(pairs::stir, pairs::stirAll);
     pairs.applyMarks(library, file -> audience.say(Announcements.alone(file)));
-    pairs.take(library, workers);
-    pass.left(pairs.unsettled());
+    pairs.take(library, workers, questions.awaited(pairs.pairs()));
+    pass.left(pairs.unsettledAside(library));
     pairs.show(caret.last());
     concerned.ifPresentOrElse(display::updateOnly, display::update);
     standings.tell(pairs.stirred());

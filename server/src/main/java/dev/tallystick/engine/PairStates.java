@@ -72,16 +72,19 @@ final class PairStates {
    * Gives each stirred pair its current texts, and those that are new to a worker. Pairs without an
    * open side take turns: each waits until a worker is free, and its files are not even read
    * before.
+   *
+   * @param awaited pairs that take no turns, though they may not be open
    */
-  void take(Library library, Workers workers) {
+  void take(Library library, Workers workers, Set<FilePair> awaited) {
     int free = workers.aside() - (int) states.values().stream().filter(PairState::running).count();
     for (PairState pair : states.values()) {
-      if (!pair.stirred() && (free <= 0 || !pair.waiting())) {
+      boolean now = free > 0 || awaited.contains(pair.files());
+      if (!pair.stirred() && !(pair.waiting() && now)) {
         continue;
       }
       pair.stir();
       pair.at(library.levels(pair.files()));
-      boolean open = library.shows(pair.files());
+      boolean open = library.shows(pair.files()) || awaited.contains(pair.files());
       if (open || free > 0 || library.knows(pair.files())) {
         Optional<Task> task = take(library, pair, open || free > 0);
         task.ifPresent(work -> workers.examine(work, open));
@@ -159,9 +162,12 @@ final class PairStates {
     before.forEach(file -> finished.add(renaming.of(file)));
   }
 
-  /** How many pairs something is still to come for. */
-  int unsettled() {
-    return (int) states.values().stream().filter(pair -> !pair.settled()).count();
+  /** How many pairs that the editor does not show something is still to come for. */
+  int unsettledAside(Library library) {
+    return (int)
+        states.values().stream()
+            .filter(pair -> !pair.settled() && !library.shows(pair.files()))
+            .count();
   }
 
   /** What is kept of each. */

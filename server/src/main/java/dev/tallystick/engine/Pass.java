@@ -1,6 +1,9 @@
 package dev.tallystick.engine;
 
-/** A look at many pairs, such as the first one at a folder, and how far it has come. */
+/**
+ * A look at many pairs that are not open, such as the first one at a folder, and how far it has
+ * come. Those that are open are done at once, and again at each keystroke.
+ */
 final class Pass {
   /** Fewer pairs than these are done before anyone could read how far they are. */
   private static final int FEW = 4;

@@ -32,7 +32,7 @@ public final class Question {
     /** The answer. */
     void answer(Known known);
 
-    /** The text moved on before the answer was there. */
+    /** The text moved on before the answer was there, or the folder is no longer looked at. */
     void outdated();
   }
 

@@ -4,9 +4,11 @@ import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.HashSet;
 import java.util.Iterator;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.function.Predicate;
 
 /** The questions that wait for their answers. */
@@ -15,6 +17,17 @@ final class Questions {
 
   /** A question, and the text that it was asked of. */
   private record Waiting(Question question, Text text) {}
+
+  /** The pairs that questions about texts rest on: somebody waits for them. */
+  Set<FilePair> awaited(Collection<FilePair> pairs) {
+    Set<FilePair> awaited = new HashSet<>();
+    for (Waiting one : waiting) {
+      if (one.question().aboutText()) {
+        awaited.addAll(one.question().pairs(pairs));
+      }
+    }
+    return awaited;
+  }
 
   /** Finds answers. */
   @FunctionalInterface
@@ -30,6 +43,17 @@ final class Questions {
   /** Nobody waits for this one any more. */
   void remove(Question question) {
     waiting.removeIf(one -> one.question() == question);
+  }
+
+  /** The user does not want the folders looked at any more: no answer would be about all of one. */
+  void decline() {
+    for (Iterator<Waiting> all = waiting.iterator(); all.hasNext(); ) {
+      Question question = all.next().question();
+      if (!question.aboutText()) {
+        all.remove();
+        question.reply().outdated();
+      }
+    }
   }
 
   /** A text was edited: who asked about it, or about its counterpart, asked about another text. */

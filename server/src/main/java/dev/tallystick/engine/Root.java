@@ -27,6 +27,7 @@ final class Root {
   private boolean listing;
   private boolean again;
   private boolean awaited = true;
+  private boolean awaitedAgain;
   private boolean asked;
 
   Root(Folder folder) {
@@ -67,10 +68,16 @@ final class Root {
    */
   boolean request(boolean urgent) {
     awaited |= urgent;
-    again = listing;
+    again |= listing;
+    awaitedAgain |= listing && urgent;
     boolean now = !listing;
     listing = true;
     return now;
+  }
+
+  /** Whether the folder is to be listed now as nothing is known of its files yet. */
+  boolean begin() {
+    return awaited && !listing && request(true);
   }
 
   /**
@@ -87,7 +94,8 @@ final class Root {
     forget();
     listing = again;
     again = false;
-    awaited &= listing;
+    awaited = awaitedAgain;
+    awaitedAgain = false;
     return listing;
   }
 

@@ -35,7 +35,7 @@ final class Workers {
   /**
    * Examines a pair.
    *
-   * @param open whether the editor shows a side of it
+   * @param open whether the editor shows a side of it, or somebody waits for it
    */
   void examine(Task task, boolean open) {
     run(open ? pool : aside, () -> examined(task));

@@ -54,9 +54,13 @@ final class Workspace {
     scope.want(
         roots().stream()
             .map(root -> root.folder().path())
-            .filter(path -> folder.isEmpty() || folder.get().startsWith(path))
+            .filter(path -> folder.isEmpty() || meet(folder.get(), path))
             .toList());
     pairs = Optional.empty();
+  }
+
+  private static boolean meet(Path one, Path other) {
+    return one.startsWith(other) || other.startsWith(one);
   }
 
   /** Only the open pairs are wanted from now on. */
@@ -170,7 +174,9 @@ final class Workspace {
   List<FilePair> pairs() {
     if (pairs.isEmpty()) {
       Set<FilePair> wanted = new TreeSet<>();
-      made.all().stream().filter(this::hasOpenSide).forEach(wanted::add);
+      made.all().stream()
+          .filter(pair -> hasOpenSide(pair) || root(pair.target()).filter(this::whole).isPresent())
+          .forEach(wanted::add);
       for (Root root : concerned()) {
         boolean whole = whole(root);
         wanted.addAll(

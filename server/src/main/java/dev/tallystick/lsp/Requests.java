@@ -88,13 +88,16 @@ final class Requests {
   /** Asks about no document in particular: answered as soon as all that came before is handled. */
   <T> CompletableFuture<T> ask(Supplier<T> convert) {
     check();
-    return post(NO_FILE, Question.Reach.PAIRS, known -> convert.get(), MODIFIED);
+    return post(NO_FILE, Question.Reach.PAIRS, known -> convert.get(), Optional.of(MODIFIED));
   }
 
-  /** Asks about a folder, or about all of them: answered when all pairs in it are examined. */
+  /**
+   * Asks about a folder, or about all of them: answered when all pairs in it are examined, by null
+   * if the user cancels that.
+   */
   <T> CompletableFuture<T> askFolder(Optional<Path> folder, Function<Known, T> convert) {
     check();
-    return post(folder.orElse(NO_FILE), Question.Reach.FOLDER, convert, MODIFIED);
+    return post(folder.orElse(NO_FILE), Question.Reach.FOLDER, convert, Optional.empty());
   }
 
   private <T> CompletableFuture<T> ask(
@@ -108,12 +111,15 @@ final class Requests {
       throw Server.refused(ResponseErrorCode.InvalidParams, "A document and a position, please.");
     }
     return Uris.text(document.getUri())
-        .map(file -> post(file, reach, convert, outdated))
+        .map(file -> post(file, reach, convert, Optional.of(outdated)))
         .orElseGet(() -> CompletableFuture.completedFuture(convert.apply(Known.NOTHING)));
   }
 
   private <T> CompletableFuture<T> post(
-      Path path, Question.Reach reach, Function<Known, T> convert, ResponseError outdated) {
+      Path path,
+      Question.Reach reach,
+      Function<Known, T> convert,
+      Optional<ResponseError> outdated) {
     CompletableFuture<T> asked = new CompletableFuture<>();
     Question question = new Question(path, reach, new Reply<>(asked, convert, outdated));
     asked.whenComplete(
@@ -128,7 +134,7 @@ final class Requests {
 
   /** Completes what the client waits for. */
   private record Reply<T>(
-      CompletableFuture<T> asked, Function<Known, T> convert, ResponseError tooLate)
+      CompletableFuture<T> asked, Function<Known, T> convert, Optional<ResponseError> tooLate)
       implements Question.Reply {
     @Override
     public void answer(Known known) {
@@ -141,7 +147,9 @@ final class Requests {
 
     @Override
     public void outdated() {
-      asked.completeExceptionally(new ResponseErrorException(tooLate));
+      tooLate.ifPresentOrElse(
+          error -> asked.completeExceptionally(new ResponseErrorException(error)),
+          () -> asked.complete(null));
     }
   }
 }

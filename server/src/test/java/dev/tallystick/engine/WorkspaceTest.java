@@ -84,6 +84,21 @@ class WorkspaceTest {
   }
 
   @Test
+  void whoWaitsForTheFilesDoesNotWaitForThoseThatComeMeanwhile() {
+    Root root = new Root(new Folder(JOB, Folder.DEEP));
+    assertTrue(root.begin());
+    assertFalse(root.request(false));
+    assertTrue(root.listed(List.of()), "once more");
+    assertFalse(root.awaited());
+
+    assertFalse(root.request(true));
+    assertTrue(root.listed(List.of()), "once more");
+    assertTrue(root.awaited());
+    assertFalse(root.listed(List.of()));
+    assertFalse(root.awaited());
+  }
+
+  @Test
   void aChangeDuringAListingIsMadeUpForByAnother() {
     Root root = new Root(new Folder(JOB, Folder.DEEP));
     assertTrue(root.request(true));

@@ -12,9 +12,12 @@ import org.eclipse.lsp4j.DocumentHighlight;
 import org.eclipse.lsp4j.DocumentHighlightParams;
 import org.eclipse.lsp4j.Hover;
 import org.eclipse.lsp4j.HoverParams;
+import org.eclipse.lsp4j.Location;
 import org.eclipse.lsp4j.LocationLink;
 import org.eclipse.lsp4j.Position;
 import org.eclipse.lsp4j.Range;
+import org.eclipse.lsp4j.ReferenceContext;
+import org.eclipse.lsp4j.ReferenceParams;
 import org.eclipse.lsp4j.TextDocumentContentChangeEvent;
 import org.eclipse.lsp4j.TextDocumentIdentifier;
 import org.eclipse.lsp4j.TextDocumentItem;
@@ -142,6 +145,15 @@ final class Buffer {
 
   CompletableFuture<Hover> ask(String words) {
     return documents().hover(new HoverParams(new TextDocumentIdentifier(uri), at(words)));
+  }
+
+  /** Where a sentence stands in the other files. */
+  List<? extends Location> references(String words) {
+    return Talk.answer(
+        documents()
+            .references(
+                new ReferenceParams(
+                    new TextDocumentIdentifier(uri), at(words), new ReferenceContext(false))));
   }
 
   List<String> highlighted(String words) {

@@ -95,6 +95,25 @@ class CommandSessionTest {
   }
 
   @Test
+  void aPairMadeByHandIsAmongAllPairsOfTheFolder() {
+    Work work = new Work(folder);
+    Path english = work.write("from-the-client.md", Ferry.EN);
+    Path german = work.write("mine.md", Ferry.DE_WITHOUT_FOG);
+    try (Talk talk = Talk.in(folder)) {
+      Buffer mine = talk.open(german, Ferry.DE_WITHOUT_FOG);
+      talk.command(PAIR, Map.of("source", uri(english), "target", uri(german)));
+      talk.settle();
+      mine.close();
+      assertEquals(List.of(), talk.codes(english));
+
+      talk.command("tallystick.checkFolder");
+      talk.settle();
+      assertEquals(List.of("1 pair checked: 1 finding."), talk.said);
+      assertEquals(List.of("omission"), talk.codes(english));
+    }
+  }
+
+  @Test
   void aPairCanBeTurnedAround() {
     Work work = Work.withoutFog(folder);
     try (Talk talk = Talk.in(folder)) {

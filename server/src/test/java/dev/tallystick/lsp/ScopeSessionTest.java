@@ -109,6 +109,15 @@ class ScopeSessionTest {
   }
 
   @Test
+  void aCommandChecksTheFoldersInsideTheOneThatItNames() {
+    Work.withoutFog(folder.resolve("job"));
+    try (Talk talk = Talk.in(folder.resolve("job"))) {
+      talk.command("tallystick.checkFolder", folder.toUri().toString());
+      assertEquals(List.of("1 pair checked: 1 finding."), talk.said);
+    }
+  }
+
+  @Test
   void theClientIsShownHowFarItHasCome() {
     manyPairs();
     try (Talk talk = Talk.in(folder, ScopeSessionTest::showsProgress)) {
@@ -135,6 +144,22 @@ class ScopeSessionTest {
       talk.open(work.en(), Ferry.EN);
       talk.command("tallystick.checkFolder");
       talk.settle();
+      assertEquals(List.of(), talk.passes);
+    }
+  }
+
+  /** Each keystroke in the source concerns all of its translations. */
+  @Test
+  void typingInASourceOfManyLanguagesIsNotWorthShowing() {
+    Work work = new Work(folder);
+    Path source = work.write("ferry.md", Ferry.EN);
+    for (String tag : List.of("de", "es", "fr", "it", "nl", "pl")) {
+      work.write("ferry." + tag + ".md", Ferry.DE);
+    }
+    try (Talk talk = Talk.in(folder, ScopeSessionTest::showsProgress)) {
+      Buffer english = talk.open(source, Ferry.EN);
+      talk.settle();
+      english.replace("Two keepers", "Three keepers");
       assertEquals(List.of(), talk.passes);
     }
   }
@@ -168,7 +193,8 @@ class ScopeSessionTest {
       talk.machine.release();
       talk.settle();
 
-      assertEquals(found(1, 1), Talk.answer(answer));
+      assertNull(Talk.answer(answer));
+      assertEquals(List.of(), talk.said, "of a part nothing is told as if it were the whole");
       assertEquals(1, withFindings(talk, work, "en"), "the open pair is still watched");
       assertInstanceOf(WorkDoneProgressEnd.class, talk.passes.get(talk.passes.size() - 1));
     }
@@ -195,6 +221,30 @@ class ScopeSessionTest {
       others.countDown();
       talk.settle();
       assertEquals(MANY, withFindings(talk, work, "en"));
+    }
+  }
+
+  /** The French is not open, but it is asked for too. */
+  @Test
+  void theOtherLanguagesOfAnOpenFileDoNotWaitForTheFolder() {
+    Work work = manyPairs();
+    for (int i = 0; i < MANY; i++) {
+      work.write("fr/ferry" + i + ".md", i == 7 ? Ferry.FR : "Rien.");
+    }
+    CountDownLatch others = new CountDownLatch(1);
+    try (Talk talk = Talk.in(folder)) {
+      talk.machine.examiner =
+          (source, target, draft, cancellation) -> {
+            if (target.text().string().equals(Ferry.DE_WITHOUT_FOG)) {
+              await(others);
+            }
+            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+          };
+      scope(talk, "folder");
+      Buffer german = talk.open(work.file("de/ferry7.md"), Ferry.DE);
+      assertEquals(2, german.references("Winter").size());
+      others.countDown();
+      talk.settle();
     }
   }
 
