@@ -108,7 +108,9 @@ class DemoTest {
             "he/fog-signal.md",
             JAPANESE,
             "de/lamp.md",
-            "fr/lamp.md"),
+            "fr/lamp.md",
+            "de/safety-film.srt",
+            "de/weather-log.adoc"),
         targets);
   }
 
