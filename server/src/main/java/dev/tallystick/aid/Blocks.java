@@ -138,7 +138,8 @@ final class Blocks {
 
   private boolean needsBlank(Block.Kind one, Block.Kind other) {
     boolean same = one == other && (one == Block.Kind.ITEM || one == Block.Kind.CELL);
-    return format == Format.MARKDOWN ? !same && one != Block.Kind.HEADING : !same && hasBlank();
+    boolean markup = format == Format.MARKDOWN || format == Format.ASCIIDOC;
+    return markup ? !same && one != Block.Kind.HEADING : !same && hasBlank();
   }
 
   /** Whether the translation has a blank line between some of its blocks. */

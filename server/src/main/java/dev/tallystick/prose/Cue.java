@@ -9,9 +9,10 @@ import java.util.List;
  * @param start offset where its number or name begins, or else its times
  * @param end offset behind its last line
  * @param times when it is shown; null for text that stands in no cue
+ * @param place where on the screen, as far as the cue says it; else empty
  * @param lines its text, white space around each line left out; none for a landmark
  */
-record Cue(int start, int end, Times times, List<Span> lines) {
+record Cue(int start, int end, Times times, String place, List<Span> lines) {
   /** Keeps the lines unchangeable. */
   Cue {
     lines = List.copyOf(lines);
@@ -19,6 +20,14 @@ record Cue(int start, int end, Times times, List<Span> lines) {
 
   boolean isLandmark() {
     return lines.isEmpty();
+  }
+
+  /** Whether a sentence can go on in another cue: soon enough, and at the same place. */
+  boolean leadsTo(Cue other) {
+    return times != null
+        && other.times != null
+        && times.leadsTo(other.times)
+        && place.equals(other.place);
   }
 
   /**
@@ -31,8 +40,7 @@ record Cue(int start, int end, Times times, List<Span> lines) {
     /** Longer silence than this parts sentences. Common practice, no source. */
     private static final long LONGEST_PAUSE = 4_000;
 
-    /** Whether a sentence can go on in a cue with the other times. */
-    boolean leadsTo(Times other) {
+    private boolean leadsTo(Times other) {
       return other.from >= from && other.from - to <= LONGEST_PAUSE;
     }
   }

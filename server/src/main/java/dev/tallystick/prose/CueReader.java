@@ -17,6 +17,8 @@ final class CueReader {
   private static final Pattern NUMBER = Pattern.compile("\\d{1,9}");
   private static final Pattern HEADER = Pattern.compile("WEBVTT(?:[ \\t]|$)");
   private static final Pattern COMMENT = Pattern.compile("NOTE(?:[ \\t]|$)");
+  private static final Pattern PLACE =
+      Pattern.compile("\\b(?:line|region):[\\w.,%-]{1,40}|\\{\\\\an\\d}");
   private static final Pattern LANDMARK = Pattern.compile("(?:STYLE|REGION)$");
 
   private final String file;
@@ -48,7 +50,7 @@ final class CueReader {
       return end;
     }
     if (finds(LANDMARK, first)) {
-      cues.add(new Cue(lines.get(first).start(), lines.get(end - 1).end(), null, List.of()));
+      cues.add(new Cue(lines.get(first).start(), lines.get(end - 1).end(), null, "", List.of()));
       return end;
     }
     boolean named = !isTimes(first) && isTimes(first + 1);
@@ -65,9 +67,20 @@ final class CueReader {
   private void addCue(Span start, int times, int from, int to) {
     if (from < to) {
       Cue.Times shown = times < 0 ? null : times(lines.get(times));
+      String place = place(lines.get(times < 0 ? from : times)) + place(lines.get(from));
       int end = lines.get(to - 1).end();
-      cues.add(new Cue(start.start(), end, shown, lines.subList(from, to)));
+      cues.add(new Cue(start.start(), end, shown, place, lines.subList(from, to)));
     }
+  }
+
+  /** What a line of times, or an override before the text, says of the place on the screen. */
+  private String place(Span line) {
+    Matcher place = PLACE.matcher(file).region(line.start(), line.end());
+    StringBuilder found = new StringBuilder();
+    while (place.find()) {
+      found.append(place.group());
+    }
+    return found.toString();
   }
 
   /** Index of the first line from {@code at} that is blank or belongs to the next cue. */

@@ -9,7 +9,7 @@ import java.util.List;
  * Subtitles: SubRip, and WebVTT as the W3C describes it (from memory). The text of the cues is
  * prose. A sentence that runs over several cues is in one block, which takes in these cues; a block
  * begins where a cue has ended a sentence, where somebody else speaks, at a sound in brackets or a
- * line of a song, and behind a longer silence.
+ * line of a song, behind a longer silence, and at another place on the screen.
  */
 final class Subtitles {
   /** Where fewer cues than one in so many end as a sentence does, each one stands for itself. */
@@ -82,13 +82,8 @@ final class Subtitles {
         || !line.voice().isEmpty() && !line.voice().equals(voice)) {
       return false;
     }
-    return line.cue() == last.cue() || joins && last.goesOnIn(line) && inTime(line.cue());
-  }
-
-  private boolean inTime(Cue cue) {
-    return cue.times() != null
-        && last.cue().times() != null
-        && last.cue().times().leadsTo(cue.times());
+    return line.cue() == last.cue()
+        || joins && last.goesOnIn(line) && last.cue().leadsTo(line.cue());
   }
 
   private void close() {

@@ -380,4 +380,55 @@ class StubTest {
             "<p>Sie legt ab. Niemand schwimmt.</p>\n",
             "0-0 1- 2-1"));
   }
+
+  @Test
+  void aSubtitleComesWithItsTimes() {
+    String times = "00:00:01,000 --> 00:00:02,000\n";
+    String later = "00:00:03,000 --> 00:00:04,000\n";
+    String last = "00:00:05,000 --> 00:00:06,000\n";
+    assertEquals(
+        "1\n"
+            + times
+            + "Rudern Sie los.\n\n2\n"
+            + later
+            + "Take a rest.\n\n"
+            + "2\n"
+            + last
+            + "Warten Sie dort.\n",
+        Stubbed.in(
+            Format.SUBRIP,
+            "1\n"
+                + times
+                + "Row the boat.\n\n2\n"
+                + later
+                + "Take a rest.\n\n"
+                + "3\n"
+                + last
+                + "Wait for us.\n",
+            "1\n" + times + "Rudern Sie los.\n\n2\n" + last + "Warten Sie dort.\n",
+            "0-0 1- 2-1"));
+  }
+
+  @Test
+  void whatASecondSpeakerSaysComesWithItsDash() {
+    String times = "00:01.000 --> 00:02.000\n";
+    assertEquals(
+        "WEBVTT\n\n" + times + "- Wer ist da?\n- It is me.\n",
+        Stubbed.in(
+            Format.WEBVTT,
+            "WEBVTT\n\n" + times + "- Who is there?\n- It is me.\n",
+            "WEBVTT\n\n" + times + "- Wer ist da?\n",
+            "0-0 1-"));
+  }
+
+  @Test
+  void inAsciiDocABlockComesWithItsMarks() {
+    assertEquals(
+        "== Zeug\n\nRudern Sie *los*. Take a *rest*.\n\n* Riemen\n** of ash\n* Tau\n",
+        Stubbed.in(
+            Format.ASCIIDOC,
+            "== Gear\n\nRow the *boat*. Take a *rest*.\n\n* Oars\n** of ash\n* Rope\n",
+            "== Zeug\n\nRudern Sie *los*.\n\n* Riemen\n* Tau\n",
+            "0-0 1-1 2- 3-2 4- 5-3"));
+  }
 }

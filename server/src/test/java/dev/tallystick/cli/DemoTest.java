@@ -109,7 +109,9 @@ class DemoTest {
             JAPANESE,
             "de/lamp.md",
             "fr/lamp.md",
-            "de/visitors.html"),
+            "de/safety-film.srt",
+            "de/visitors.html",
+            "de/weather-log.adoc"),
         targets);
   }
 

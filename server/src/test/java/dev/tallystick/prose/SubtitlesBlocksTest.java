@@ -72,6 +72,29 @@ class SubtitlesBlocksTest {
   }
 
   @Test
+  void whatStandsElsewhereOnTheScreenIsAnotherText() {
+    blocks(
+        """
+        00:01.000 --> 00:02.000 line:0
+        The old port
+
+        00:02.100 --> 00:03.000 align:start
+        {\\an8}The new port
+
+        00:03.100 --> 00:04.000
+        There is
+
+        00:04.100 --> 00:05.000
+        no other.
+        """,
+        """
+        PARAGRAPH: The old port
+        PARAGRAPH: The new port
+        PARAGRAPH: There is⏎no other.
+        """);
+  }
+
+  @Test
   void everySpeakerHasBlocksOfTheirOwn() {
     blocks(
         """
