@@ -38,7 +38,7 @@ final class Library {
     shelf.open(file, document);
     workspace
         .root(file)
-        .filter(root -> root.folder().lists(file) && !root.has(file))
+        .filter(root -> root.folder().lists(file) && !root.awaited() && !root.has(file))
         .filter(root -> root.request(true))
         .ifPresent(this::list);
     foldersMoved();
@@ -134,7 +134,7 @@ final class Library {
   private void foldersMoved() {
     workspace.open(shelf.open());
     for (Root root : workspace.roots()) {
-      if (root.awaited() && root.request(true)) {
+      if (root.begin()) {
         list(root);
       }
     }

@@ -71,6 +71,11 @@ final class Root {
     return now;
   }
 
+  /** Whether the folder is to be listed now as nothing is known of its files yet. */
+  boolean begin() {
+    return awaited && !listing && request(true);
+  }
+
   /**
    * Takes a list of the files.
    *

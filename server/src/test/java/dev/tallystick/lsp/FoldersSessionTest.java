@@ -1,6 +1,7 @@
 package dev.tallystick.lsp;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertNotNull;
 
 import dev.tallystick.engine.Folder;
 import java.nio.file.Path;
@@ -115,6 +116,25 @@ class FoldersSessionTest {
         buffer.close();
         assertEquals(List.of(), talk.shown(uri));
       }
+    }
+  }
+
+  @Test
+  void whatIsOpenedDuringTheFirstListingWaitsForNoSecondOne() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.silent()) {
+      talk.machine.holdListing();
+      InitializeParams params = Talk.params();
+      params.setWorkspaceFolders(List.of(new WorkspaceFolder(folder.toUri().toString(), "work")));
+      talk.begin(params);
+      Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      talk.open(work.en(), Ferry.EN);
+      var asked = german.ask("Winter");
+      talk.barrier();
+      talk.machine.release();
+      assertNotNull(Talk.answer(asked));
+      talk.settle();
+      assertEquals(1, talk.machine.listings.get());
     }
   }
 }

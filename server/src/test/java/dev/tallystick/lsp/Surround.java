@@ -15,6 +15,7 @@ import dev.tallystick.run.HandAlarm;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.Consumer;
 
 /**
@@ -58,6 +59,9 @@ final class Surround {
     listing.countDown();
   }
 
+  /** How often a folder was listed. */
+  final AtomicInteger listings = new AtomicInteger();
+
   private static void await(CountDownLatch latch) {
     try {
       latch.await();
@@ -82,6 +86,7 @@ final class Surround {
     @Override
     public List<Path> files(Folder folder, Consumer<String> unread) throws Unreadable {
       await(listing);
+      listings.incrementAndGet();
       return disk.files(folder, unread);
     }
   }
