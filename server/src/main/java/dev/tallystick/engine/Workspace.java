@@ -54,9 +54,13 @@ final class Workspace {
     scope.want(
         roots().stream()
             .map(root -> root.folder().path())
-            .filter(path -> folder.isEmpty() || folder.get().startsWith(path))
+            .filter(path -> folder.isEmpty() || meet(folder.get(), path))
             .toList());
     pairs = Optional.empty();
+  }
+
+  private static boolean meet(Path one, Path other) {
+    return one.startsWith(other) || other.startsWith(one);
   }
 
   /** Only the open pairs are wanted from now on. */

@@ -109,6 +109,15 @@ class ScopeSessionTest {
   }
 
   @Test
+  void aCommandChecksTheFoldersInsideTheOneThatItNames() {
+    Work.withoutFog(folder.resolve("job"));
+    try (Talk talk = Talk.in(folder.resolve("job"))) {
+      talk.command("tallystick.checkFolder", folder.toUri().toString());
+      assertEquals(List.of("1 pair checked: 1 finding."), talk.said);
+    }
+  }
+
+  @Test
   void theClientIsShownHowFarItHasCome() {
     manyPairs();
     try (Talk talk = Talk.in(folder, ScopeSessionTest::showsProgress)) {
