@@ -52,8 +52,9 @@ final class MadePairs {
 
   /** Files have other names. */
   void rename(Renaming renaming) {
-    for (FilePair pair : List.copyOf(byTarget.values())) {
-      byTarget.remove(pair.target());
+    List<FilePair> before = List.copyOf(byTarget.values());
+    byTarget.clear();
+    for (FilePair pair : before) {
       put(
           new FilePair(
               renaming.of(pair.source()),

@@ -32,7 +32,9 @@ final class Views {
   void stands(Standing standing) {
     List<Count> now =
         standing.figures().map(one -> List.of(one.onSource(), one.onTarget())).orElse(List.of());
-    if (!now.equals(counts.put(standing.files(), now))) {
+    List<Count> before =
+        now.isEmpty() ? counts.remove(standing.files()) : counts.put(standing.files(), now);
+    if (!now.equals(before)) {
       lenses.changed();
       hints.changed();
     }
