@@ -23,7 +23,12 @@ public record Folder(Path path, int depth) {
   /** Whether a list of its files has a file, if there is such a file. */
   boolean lists(Path file) {
     boolean prose = Format.ofName(String.valueOf(file.getFileName())).isPresent();
-    if (!holds(file) || !prose && !file.equals(path.resolve(ProjectFile.NAME))) {
+    return reaches(file) && (prose || file.equals(path.resolve(ProjectFile.NAME)));
+  }
+
+  /** Whether a list of its files has a file, or those in a folder, whatever they are. */
+  boolean reaches(Path file) {
+    if (!holds(file)) {
       return false;
     }
     for (Path name : path.relativize(file)) {
