@@ -23,8 +23,14 @@ public record Folder(Path path, int depth) {
   /** Whether a list of its files has a file, if there is such a file. */
   boolean lists(Path file) {
     boolean prose = Format.ofName(String.valueOf(file.getFileName())).isPresent();
-    boolean rules = FolderRules.isRules(file);
-    if (!holds(file) || !prose && !rules && !file.equals(path.resolve(ProjectFile.NAME))) {
+    boolean ours =
+        prose || FolderRules.isRules(file) || file.equals(path.resolve(ProjectFile.NAME));
+    return reaches(file) && ours;
+  }
+
+  /** Whether a list of its files has a file, or those in a folder, whatever they are. */
+  boolean reaches(Path file) {
+    if (!holds(file)) {
       return false;
     }
     for (Path name : path.relativize(file)) {

@@ -114,7 +114,7 @@ final class Library {
     List<Path> files = any ? shelf.disk().files() : changed.files();
     files.forEach(shelf.disk()::changed);
     for (Root root : changed.listing() ? workspace.roots() : List.<Root>of()) {
-      boolean concerned = any || files.stream().anyMatch(root.folder()::holds);
+      boolean concerned = any || files.stream().anyMatch(root.folder()::reaches);
       if (concerned && root.request(false)) {
         list(root);
       }

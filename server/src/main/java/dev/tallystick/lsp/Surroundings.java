@@ -31,6 +31,7 @@ import org.eclipse.lsp4j.MessageType;
 import org.eclipse.lsp4j.Registration;
 import org.eclipse.lsp4j.RegistrationParams;
 import org.eclipse.lsp4j.RenameFilesParams;
+import org.eclipse.lsp4j.WatchKind;
 import org.eclipse.lsp4j.WorkspaceDiagnosticParams;
 import org.eclipse.lsp4j.WorkspaceDiagnosticReport;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
@@ -95,12 +96,17 @@ final class Surroundings implements WorkspaceService {
     }
   }
 
+  /**
+   * Where a whole folder is deleted, VS Code tells of that only, not of the files that were in it,
+   * as the documentation of its createFileSystemWatcher says: so all that is deleted is watched.
+   */
   private static DidChangeWatchedFilesRegistrationOptions watchers() {
     return new DidChangeWatchedFilesRegistrationOptions(
         List.of(
             watcher("*.{" + Format.everyExtension() + "}"),
             watcher(ProjectFile.NAME),
-            watcher("*.srx")));
+            watcher("*.srx"),
+            new FileSystemWatcher(Either.forLeft("**"), WatchKind.Delete)));
   }
 
   private static FileSystemWatcher watcher(String name) {

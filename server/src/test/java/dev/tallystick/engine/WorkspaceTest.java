@@ -97,17 +97,4 @@ class WorkspaceTest {
     assertFalse(root.listed(List.of()));
     assertFalse(root.awaited());
   }
-
-  @Test
-  void aChangeDuringAListingIsMadeUpForByAnother() {
-    Root root = new Root(new Folder(JOB, Folder.DEEP));
-    assertTrue(root.request(true));
-    assertFalse(root.request(false));
-    assertTrue(root.listed(List.of()));
-    assertTrue(root.awaited());
-    assertFalse(root.listed(List.of()));
-    assertFalse(root.awaited());
-    assertTrue(root.request(false));
-    assertFalse(root.awaited());
-  }
 }

@@ -271,4 +271,27 @@ class DiskSessionTest {
       assertTrue(asked.contains("**/*.{" + Format.everyExtension() + "}"), asked);
     }
   }
+
+  /** Of a folder that is deleted VS Code tells by its own name only. */
+  @Test
+  void aFolderThatIsDeletedTakesItsTranslationsAlong() {
+    Work work = Work.withoutFog(folder);
+    try (Talk talk = Talk.in(folder)) {
+      talk.open(work.en(), Ferry.EN);
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+      String asked = talk.registered.get(0).getRegistrations().get(0).toString();
+      assertTrue(asked.contains("{\"globPattern\":\"**\",\"kind\":4}"), asked);
+
+      work.delete("de/ferry.md");
+      work.delete("de");
+      talk.wrote(FileChangeType.Deleted, work.file("de"));
+      assertEquals(List.of(), talk.codes(work.en()));
+
+      int listings = talk.machine.listings.get();
+      talk.wrote(FileChangeType.Deleted, work.file("node_modules/some"));
+      talk.wrote(FileChangeType.Deleted, work.file(".git/index.lock"));
+      assertEquals(listings, talk.machine.listings.get());
+    }
+  }
 }
