@@ -25,7 +25,8 @@ final class Announcements {
 
   static String alone(Path file) {
     return file.getFileName()
-        + ": this file is in no pair, so it cannot be marked. Pair it with its source first.";
+        + ": this file is in no pair that is watched, so it cannot be marked."
+        + " Open it, or pair it with its source, then try again.";
   }
 
   static String choice(Ambiguity question) {

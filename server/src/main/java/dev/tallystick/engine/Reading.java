@@ -16,6 +16,7 @@ import java.util.Set;
  * One side of a pair, read: its sentences and verbatim blocks, and what the aligner knows of each.
  *
  * @param text the file
+ * @param format what it was read as
  * @param language its language as a BCP 47 tag, {@code und} if unknown
  * @param segments its sentences and verbatim blocks in order
  * @param units the same as the aligner sees them, one for each segment
@@ -23,7 +24,12 @@ import java.util.Set;
  *     place in the file of rules
  */
 public record Reading(
-    Text text, String language, List<Segment> segments, List<Unit> units, List<Problem> endless) {
+    Text text,
+    Format format,
+    String language,
+    List<Segment> segments,
+    List<Unit> units,
+    List<Problem> endless) {
   /** Keeps the lists unchangeable. */
   public Reading {
     segments = List.copyOf(segments);
@@ -44,6 +50,6 @@ public record Reading(
         Segmenter.of(language, rules)
             .segments(text, format.blocks(text), endless::add, cancellation);
     List<Unit> units = segments.stream().map(segment -> Units.unit(text, segment)).toList();
-    return new Reading(text, language, segments, units, List.copyOf(endless));
+    return new Reading(text, format, language, segments, units, List.copyOf(endless));
   }
 }

@@ -43,9 +43,7 @@ import org.eclipse.lsp4j.TextDocumentPositionParams;
 import org.eclipse.lsp4j.jsonrpc.messages.Either;
 import org.eclipse.lsp4j.services.TextDocumentService;
 
-/**
- * What a client tells and asks about texts. Those without a file are in no pair: nothing is said.
- */
+/** What a client tells and asks about texts, those without a file among them. */
 final class Documents implements TextDocumentService {
   private final Requests requests;
   private final Board board;

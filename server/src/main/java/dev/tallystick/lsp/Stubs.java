@@ -8,7 +8,6 @@ import dev.tallystick.aid.Stub;
 import dev.tallystick.aid.Wanted;
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.OnSide;
-import dev.tallystick.engine.Intake;
 import dev.tallystick.engine.Known;
 import dev.tallystick.engine.Settled;
 import dev.tallystick.text.Span;
@@ -109,7 +108,7 @@ record Stubs(Client client, Board board, String uri) {
       OnSide side = known.side(pair);
       for (Wanted wanted : Wanted.at(pair.result(), side, stretch)) {
         List<LineEdit> edits =
-            Stub.edits(pair.result(), Intake.format(pair.files().target()), wanted.segments());
+            Stub.edits(pair.result(), pair.result().target().format(), wanted.segments());
         if (!edits.isEmpty()) {
           CodeAction action = action(known, pair, wanted);
           offers.add(new Offer(action, pair.files().target(), wanted.segments().get(0), edits));

@@ -9,6 +9,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
 import java.util.concurrent.CompletionException;
 import org.eclipse.lsp4j.CodeAction;
 import org.eclipse.lsp4j.CodeActionCapabilities;
@@ -147,6 +148,21 @@ class StubSessionTest {
         assertEquals(line, edit.getRange());
         assertEquals(cart + Ferry.FOG_EN + "\n", edit.getNewText());
       }
+    }
+  }
+
+  /** The name of a buffer says nothing of its format. */
+  @Test
+  void marksComeAlongIntoABufferWithoutAFile() {
+    String text = Ferry.EN.replace("In thick fog", "In **thick** fog");
+    Path notes = work.write("notes.md", text);
+    try (Talk talk = Talk.in(folder, StubSessionTest::takesActions)) {
+      Buffer english = talk.open(notes, text);
+      Buffer scratch = talk.open("untitled:Untitled-1", Ferry.DE_WITHOUT_FOG);
+      talk.command("tallystick.pair", Map.of("source", english.uri, "target", scratch.uri));
+      CodeAction action = at(talk, english, "fog the bell").get(0);
+      String now = applied(scratch.text, edits(action.getEdit(), scratch.uri));
+      assertTrue(now.contains("\nIn **thick** fog the bell"), now);
     }
   }
 
