@@ -267,7 +267,8 @@ class DiskSessionTest {
       assertEquals(List.of(), talk.machine.watched);
       String asked = talk.registered.get(0).getRegistrations().get(0).toString();
       assertTrue(asked.contains("workspace/didChangeWatchedFiles"));
-      assertTrue(asked.contains("**/*.{txt,text,md,markdown,mkd}"), asked);
+      assertTrue(
+          asked.contains("**/*.{txt,text,md,markdown,mkd,srt,vtt,adoc,asciidoc,asc}"), asked);
     }
   }
 }

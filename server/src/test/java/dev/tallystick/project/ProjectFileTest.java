@@ -203,8 +203,8 @@ class ProjectFileTest {
                       ^^^^^^^^^^^^^ No file can match: names that start with a dot are passed over, and node_modules.
                                                ^^^^^^^^^^^^^^^^^^^^^^^^ No file can match: names that start with a dot are passed over, and node_modules.
           { "source": "a.docx", "target": "Handbuch" },
-                      ^^^^^^^^ No file can match: only files that end in .txt, .text, .md, .markdown, .mkd are read.
-                                          ^^^^^^^^^^ No file can match: only files that end in .txt, .text, .md, .markdown, .mkd are read.
+                      ^^^^^^^^ No file can match: only files that end in .txt, .text, .md, .markdown, .mkd, .srt, .vtt, .adoc, .asciidoc, .asc are read.
+                                          ^^^^^^^^^^ No file can match: only files that end in .txt, .text, .md, .markdown, .mkd, .srt, .vtt, .adoc, .asciidoc, .asc are read.
           { "source": "en/*.md", "target": "de/{name}.md" },
                       ^^^^^^^^^ * and ? mean nothing here. {path} stands for what source and target share.
                                            ^^^^^^^^^^^^^^ "{name}" means nothing here. Allowed are: {path}, {tag}.
