@@ -191,7 +191,7 @@ final class Library {
   /** Whether the editor shows a file, and nothing but its own pairs rests on its text. */
   boolean isText(Path file) {
     return shelf.document(file).isPresent()
-        && projects().noneMatch(project -> project.file().equals(file));
+        && projects().noneMatch(project -> project.files().contains(file));
   }
 
   /** What is known of a file that the editor shows. */

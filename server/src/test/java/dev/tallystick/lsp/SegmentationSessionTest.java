@@ -60,6 +60,24 @@ class SegmentationSessionTest {
   }
 
   @Test
+  void itsRulesAreFollowedWhileTheyAreEdited() {
+    Work work = Work.withoutFog(folder);
+    work.write("tallystick.json", JSON);
+    work.write(SRX, NAMES);
+    try (Talk talk = Talk.in(folder)) {
+      talk.open(work.de(), Ferry.DE_WITHOUT_FOG);
+      Buffer rules = talk.open(work.file(SRX), NAMES);
+      talk.settle();
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+
+      rules.whole(WHOLE);
+      assertTrue(!talk.codes(work.en()).contains("omission"), talk.codes(work.en())::toString);
+      rules.whole(NAMES);
+      assertEquals(List.of("omission"), talk.codes(work.en()));
+    }
+  }
+
+  @Test
   void whatIsWrongIsShownAtItsRuleAndTheRestCounts() {
     Work work = Work.withoutFog(folder);
     work.write("tallystick.json", JSON);
