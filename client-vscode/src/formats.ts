@@ -13,16 +13,21 @@ export const EXTENSIONS = [
   "html",
   "htm",
   "xhtml",
+  "tex",
+  "ltx",
 ] as const;
 
 /** The languages of texts that have no file yet. */
 const LANGUAGES = [
   "asciidoc",
   "html",
+  "latex",
   "markdown",
+  "plaintex",
   "plaintext",
   "srt",
   "subrip",
+  "tex",
   "vtt",
   "webvtt",
 ] as const;

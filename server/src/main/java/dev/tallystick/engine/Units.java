@@ -79,6 +79,7 @@ final class Units {
       case ITEM -> block.level() > 1 ? 8 : 7;
       case CELL -> 9;
       case QUOTATION -> 10;
+      case NOTE -> 11;
     };
   }
 }
