@@ -1,8 +1,10 @@
 package dev.tallystick.segment;
 
 import dev.tallystick.prose.Block;
+import dev.tallystick.prose.Times;
 import dev.tallystick.text.Span;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * One sentence, or one verbatim block.
@@ -26,5 +28,10 @@ public record Segment(Span span, String prose, Block block, boolean opens) {
   /** Whether it is a verbatim block and no sentence. */
   public boolean verbatim() {
     return block.kind() == Block.Kind.VERBATIM;
+  }
+
+  /** When it is on the screen: that of all the cues that it stands in. Empty if nothing tells. */
+  public Optional<Times> shown() {
+    return block.shown(span);
   }
 }
