@@ -26,7 +26,8 @@ public enum Aligner {
     @Override
     Alignment align(Sides sides, Cancellation cancellation) {
       Evidence.Texts texts = Evidence.Texts.of(sides);
-      Fit fit = Fit.start(ratio(sides), sides.target());
+      Fit fit = Fit.start(ratio(sides), sides);
+      boolean timed = fit.clock() != null;
       Scorer coarse = Evidence.coarse(texts, fit);
       Band band =
           Anchors.band(texts.shared().anchors(), sides)
@@ -43,6 +44,10 @@ public enum Aligner {
         if (round > 0) {
           known = texts.with(Lexis.learnt(posteriors, source, target, band));
         }
+        timed |= fit.clock() != null;
+      }
+      if (timed && fit.clock() == null) {
+        return align(sides.untimed(), cancellation); // they misled: as if there were none
       }
       Evidence evidence = Evidence.full(known, fit);
       Weighed weighed = Weighed.of(evidence, band, sides, cancellation);
