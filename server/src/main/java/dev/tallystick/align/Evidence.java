@@ -53,6 +53,7 @@ final class Evidence implements Scorer {
   private final Side source;
   private final Side target;
   private final Background background;
+  private final SharedWords shared;
   private final LinkWords words;
   private final Fit fit;
   private final LengthTable lengths;
@@ -66,6 +67,7 @@ final class Evidence implements Scorer {
     this.source = texts.sides().source();
     this.target = texts.sides().target();
     this.background = texts.background();
+    this.shared = texts.shared();
     this.words = texts.words();
     this.fit = fit;
     this.lengths = new LengthTable(fit.lengths());
@@ -169,12 +171,15 @@ final class Evidence implements Scorer {
     return given - parting - background.logDensity(t, tEnd);
   }
 
-  /** How much likelier two units make each other by their lengths and words alone (nats). */
+  /**
+   * How much likelier two units make each other by their lengths and words alone (nats). A pair too
+   * short to teach its common words may still have a name or a number in both.
+   */
   double alike(int t, int s) {
     if (source.units[s].verbatim() || target.units[t].verbatim()) {
       return Row.NOWHERE;
     }
-    return length(t, t + 1, s, s + 1) + words.alike(s, t);
+    return length(t, t + 1, s, s + 1) + Math.max(shared.alike(s, t), words.alike(s, t));
   }
 
   @Override

@@ -124,7 +124,7 @@ final class Lexis implements LinkWords {
 
   @Override
   public double alike(int s, int t) {
-    return (FORWARD + BACKWARD) * forward(s, s + 1, t, t + 1);
+    return forward(s, s + 1, t, t + 1);
   }
 
   private double forward(int s, int sEnd, int t, int tEnd) {

@@ -3,9 +3,9 @@ package dev.tallystick.align;
 /** The words of one text by the number of their stem, from 0 on. */
 final class Stems {
   private static final double SMOOTHING = 0.5;
-  private static final Unit.Word[] NONE = {};
+  private static final int[] NONE = {};
 
-  /** For each unit the numbers of its words, in order. */
+  /** For each unit the numbers of its words, in order; none for a verbatim one. */
   final int[][] of;
 
   /** For each number one of its words. */
@@ -23,14 +23,14 @@ final class Stems {
     int[] counts = new int[words.length];
     int all = 0;
     for (int i = 0; i < of.length; i++) {
-      Unit.Word[] said = side.units[i].verbatim() ? NONE : side.units[i].words();
-      of[i] = new int[said.length];
+      Unit.Word[] said = side.units[i].words();
+      int[] numbers = new int[said.length];
       for (int k = 0; k < said.length; k++) {
-        int number = vocabulary.number(said[k].stem());
-        of[i][k] = number;
-        words[number] = said[k];
-        counts[number]++;
+        numbers[k] = vocabulary.number(said[k].stem());
+        words[numbers[k]] = said[k];
+        counts[numbers[k]]++;
       }
+      of[i] = side.units[i].verbatim() ? NONE : numbers;
       all += said.length;
     }
     this.general = new double[words.length];
