@@ -138,7 +138,7 @@ final class Blocks {
 
   private boolean needsBlank(Block.Kind one, Block.Kind other) {
     boolean same = one == other && (one == Block.Kind.ITEM || one == Block.Kind.CELL);
-    boolean markup = format == Format.MARKDOWN || format == Format.ASCIIDOC;
+    boolean markup = format == Format.MARKDOWN || format == Format.ASCIIDOC || format == Format.RST;
     return markup ? !same && one != Block.Kind.HEADING : !same && hasBlank();
   }
 

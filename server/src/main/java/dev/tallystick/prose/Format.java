@@ -20,7 +20,9 @@ public enum Format {
   /** HTML, also as XHTML. */
   HTML(List.of("html"), "html", "htm", "xhtml"),
   /** AsciiDoc. */
-  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
+  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
+  /** reStructuredText. */
+  RST(List.of("restructuredtext", "rst"), "rst", "rest");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -70,6 +72,7 @@ public enum Format {
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
+      case RST -> Rst.blocks(text);
     };
   }
 }
