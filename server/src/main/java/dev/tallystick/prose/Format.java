@@ -22,7 +22,9 @@ public enum Format {
   /** AsciiDoc. */
   ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
   /** LaTeX. */
-  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx");
+  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx"),
+  /** reStructuredText. */
+  RST(List.of("restructuredtext", "rst"), "rst", "rest");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -73,6 +75,7 @@ public enum Format {
       case HTML -> Html.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
       case LATEX -> Latex.blocks(text);
+      case RST -> Rst.blocks(text);
     };
   }
 }
