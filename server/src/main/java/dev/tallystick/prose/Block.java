@@ -1,6 +1,7 @@
 package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -12,8 +13,9 @@ import java.util.List;
  * @param extent the whole block in the file, its marks included
  * @param pieces its prose in order: stretches of the file that do not touch, none empty; none at
  *     all if the block is verbatim
+ * @param inlines what is marked in its prose, in the order of the file; none if it is verbatim
  */
-public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
+public record Block(Kind kind, int level, Span extent, List<Span> pieces, List<Inline> inlines) {
   /** What a block is. */
   public enum Kind {
     /** Running text. */
@@ -30,9 +32,26 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
     VERBATIM
   }
 
-  /** Keeps the pieces unchangeable. */
+  /** Keeps the lists unchangeable. */
   public Block {
     pieces = List.copyOf(pieces);
+    inlines = List.copyOf(inlines);
+  }
+
+  /** A block in which nothing is marked. */
+  public Block(Kind kind, int level, Span extent, List<Span> pieces) {
+    this(kind, level, extent, pieces, List.of());
+  }
+
+  /** The same with more inlines, in any order. A verbatim block has none. */
+  Block with(List<Inline> more) {
+    if (more.isEmpty() || kind == Kind.VERBATIM) {
+      return this;
+    }
+    List<Inline> all = new ArrayList<>(inlines);
+    all.addAll(more);
+    all.sort(Inline.ORDER);
+    return new Block(kind, level, extent, pieces, all);
   }
 
   /** The prose as one string: the pieces of {@code file} put together. */

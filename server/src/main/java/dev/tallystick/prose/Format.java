@@ -64,6 +64,11 @@ public enum Format {
    * @param text the file, possibly with a byte-order mark, which is no prose
    */
   public List<Block> blocks(Text text) {
+    return marked(text).stream().map(block -> Placeholders.mark(text.string(), block)).toList();
+  }
+
+  /** The blocks with what the format itself marks in them. */
+  private List<Block> marked(Text text) {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text);

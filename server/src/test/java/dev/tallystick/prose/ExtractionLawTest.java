@@ -162,7 +162,13 @@ class ExtractionLawTest {
           "))",
           " +\n",
           "NOTE: ",
-          "{a}");
+          "{a}",
+          "{{ ",
+          "}}",
+          "%1$s",
+          "</0>",
+          "https://a.b/",
+          "a@b.c");
 
   @ParameterizedTest
   @EnumSource
@@ -218,7 +224,20 @@ class ExtractionLawTest {
       assertTrue(block.extent().end() <= source.length(), source);
       assertEquals(block.kind() == Block.Kind.VERBATIM, block.pieces().isEmpty(), source);
       assertPieces(text, block);
+      assertInlines(text, block);
       end = block.extent().end();
+    }
+  }
+
+  private static void assertInlines(Text text, Block block) {
+    int start = 0;
+    for (Inline inline : block.inlines()) {
+      Span span = inline.span();
+      assertTrue(span.start() >= start && span.overlaps(block.extent()), text::string);
+      assertTrue(span.end() <= text.string().length(), text::string);
+      assertEquals(span.start(), text.outsidePair(span.start()), text::string);
+      assertEquals(span.end(), text.outsidePair(span.end()), text::string);
+      start = span.start();
     }
   }
 
