@@ -3,8 +3,9 @@ package dev.tallystick.align;
 /**
  * What the aligner knows of one sentence, or of one verbatim block.
  *
- * @param length characters (code points) of the sentence
- * @param letters how many of them are letters or digits
+ * @param length how long the sentence reads, in characters; what is copied in it counts for little
+ * @param codePoints its characters as Unicode has them, all of them: what the published model takes
+ * @param letters how many of these are letters or digits
  * @param opens whether it is the first of its block
  * @param kind a small number, equal for blocks that look alike (a heading of level 2, a cell); from
  *     0 to {@value #KINDS} - 1
@@ -13,7 +14,14 @@ package dev.tallystick.align;
  * @param verbatim whether it is no sentence but a block copied as it stands, such as code
  */
 public record Unit(
-    int length, int letters, boolean opens, int kind, int close, Word[] words, boolean verbatim) {
+    int length,
+    int codePoints,
+    int letters,
+    boolean opens,
+    int kind,
+    int close,
+    Word[] words,
+    boolean verbatim) {
 
   /** How many kinds of block there are. */
   public static final int KINDS = 12;

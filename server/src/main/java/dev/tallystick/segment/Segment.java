@@ -1,7 +1,9 @@
 package dev.tallystick.segment;
 
 import dev.tallystick.prose.Block;
+import dev.tallystick.prose.Inline;
 import dev.tallystick.text.Span;
+import java.util.List;
 
 /**
  * One sentence, or one verbatim block.
@@ -11,10 +13,43 @@ import dev.tallystick.text.Span;
  * @param prose what is to be translated, each line break a blank; empty for a verbatim block
  * @param block the block it stands in
  * @param opens whether it is the first of its block
+ * @param inlines what is marked in it, in order; what runs over several sentences is in the first
+ * @param length how long it reads, in characters; see {@link Reach}
  */
-public record Segment(Span span, String prose, Block block, boolean opens) {
+public record Segment(
+    Span span, String prose, Block block, boolean opens, List<Marked> inlines, int length) {
+  /** Keeps the list unchangeable. */
+  public Segment {
+    inlines = List.copyOf(inlines);
+  }
+
+  /**
+   * An inline of a sentence.
+   *
+   * @param inline what it is, and where in the file
+   * @param prose the stretch of the sentence's prose that lies in it; empty if none does
+   */
+  public record Marked(Inline inline, Span prose) {
+    /** The same as the sentence has it that stands there in the prose of its block. */
+    Marked in(Span sentence) {
+      int start = Math.min(Math.max(prose.start(), sentence.start()), sentence.end());
+      int end = Math.max(start, Math.min(prose.end(), sentence.end()));
+      return new Marked(inline, new Span(start - sentence.start(), end - sentence.start()));
+    }
+  }
+
   /** Whether it is a verbatim block and no sentence. */
   public boolean verbatim() {
     return block.kind() == Block.Kind.VERBATIM;
+  }
+
+  /** How it ends. A mark in what is copied closes nothing. */
+  public Closing closing() {
+    int last = Closing.last(prose);
+    boolean copied =
+        inlines.stream()
+            .filter(marked -> marked.inline().kind().isCopied())
+            .anyMatch(marked -> marked.prose().contains(last));
+    return copied ? Closing.OPEN : Closing.of(prose);
   }
 }
