@@ -146,6 +146,32 @@ class EnglishGermanPairsTest {
         """);
   }
 
+  /** Neighbours are one finding; what may stay as it is lies within, and a heading parts them. */
+  @Test
+  void untranslatedNeighboursAreOneFinding() {
+    check(
+        """
+        ¶# The mill
+        | # Die Mühle
+        ¶ The miller listens for the bell of the gate, which rings at half tide.
+        | The miller listens for the bell of the gate, which rings at half tide. !untranslated
+        ¶- Grindel 3
+        | - Grindel 3 !...
+        ¶ Then she lifts the lever by 3 notches and lets the stones run empty.
+        | Then she lifts the lever by 3 notches and lets the stones run empty. !...
+        She waits until the water has come up to the red line on the wall.
+        | Sie wartet, bis das Wasser an der roten Linie an der Mauer steht.
+        The boy sweeps the floor and sets out the 12 empty sacks.
+        | The boy sweeps the floor and sets out the 12 empty sacks. !untranslated
+        ¶# Waltran
+        | # Waltran
+        ¶ The flour is as fine as dust, and it gets into every cup of tea.
+        | The flour is as fine as dust, and it gets into every cup of tea. !untranslated
+        Nobody has complained about it since the year 1874.
+        | Darüber hat sich seit dem Jahr 1874 niemand beschwert.
+        """);
+  }
+
   @Test
   void namesTitlesAndCodeMayStayAsTheyAre() {
     check(
