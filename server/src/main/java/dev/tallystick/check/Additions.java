@@ -14,11 +14,14 @@ final class Additions {
     double[] extra = subject.alignment().targetNull();
     Set<Integer> moved =
         subject.alignment().moves().stream().map(Move::target).collect(Collectors.toSet());
+    Slight slight = new Slight(subject, OnSide.TARGET);
     Neighbours neighbours = new Neighbours(subject, OnSide.TARGET);
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
     for (Run run :
-        Run.of(subject.target(), i -> extra[i] >= Omissions.LEAST && !moved.contains(i))) {
+        Run.of(
+            subject.target(),
+            i -> extra[i] >= Omissions.LEAST && !moved.contains(i) && !slight.is(i))) {
       findings.add(
           new Finding(
               Code.ADDITION,

@@ -50,7 +50,7 @@ public final class Untranslated {
       if (!same || segment.block().kind() == Block.Kind.HEADING) {
         report(run);
       }
-      if (same && isProse(segment.prose())) {
+      if (same && isProse(segment)) {
         run.add(t);
       }
     }
@@ -80,7 +80,7 @@ public final class Untranslated {
   public static int[] copies(List<Segment> source, List<Segment> target, Alignment alignment) {
     int[] copyOf = same(source, target, alignment);
     for (int t = 0; t < copyOf.length; t++) {
-      if (copyOf[t] >= 0 && !isProse(target.get(t).prose())) {
+      if (copyOf[t] >= 0 && !isProse(target.get(t))) {
         copyOf[t] = -1;
       }
     }
@@ -113,13 +113,21 @@ public final class Untranslated {
     return prose.strip().replaceAll("\\s+", " ");
   }
 
-  /** Enough words of letters alone, or enough letters of a script without blanks. */
-  private static boolean isProse(String prose) {
+  /**
+   * Enough words of letters alone, or enough letters of a script without blanks, besides what is
+   * copied in any language; and no list of single words, which are names and keywords.
+   */
+  private static boolean isProse(Segment segment) {
+    String prose = segment.withoutCopied();
     long words =
         Words.of(prose).stream()
             .filter(word -> word.codePoints().allMatch(Character::isLetter))
             .filter(word -> word.length() > 1)
             .count();
-    return words >= FEWEST_WORDS || WordCount.unspaced(prose) >= 2 * FEWEST_WORDS;
+    return words >= FEWEST_WORDS && !isList(prose) || WordCount.unspaced(prose) >= 2 * FEWEST_WORDS;
+  }
+
+  private static boolean isList(String prose) {
+    return Arrays.stream(prose.split("[,;]")).allMatch(item -> item.strip().indexOf(' ') < 0);
   }
 }

@@ -3,6 +3,7 @@ package dev.tallystick.segment;
 import dev.tallystick.prose.Block;
 import dev.tallystick.prose.Inline;
 import dev.tallystick.text.Span;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -41,6 +42,18 @@ public record Segment(
   /** Whether it is a verbatim block and no sentence. */
   public boolean verbatim() {
     return block.kind() == Block.Kind.VERBATIM;
+  }
+
+  /** Its prose with a blank in place of each character of what is copied. */
+  public String withoutCopied() {
+    char[] left = null;
+    for (Marked marked : inlines) {
+      if (marked.inline().kind().isCopied()) {
+        left = left == null ? prose.toCharArray() : left;
+        Arrays.fill(left, marked.prose().start(), marked.prose().end(), ' ');
+      }
+    }
+    return left == null ? prose : new String(left);
   }
 
   /** How it ends. A mark in what is copied closes nothing. */

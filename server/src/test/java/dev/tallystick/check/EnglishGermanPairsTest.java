@@ -172,6 +172,18 @@ class EnglishGermanPairsTest {
         """);
   }
 
+  /** Names, and what is copied anyhow, make no sentence that waits for its translation. */
+  @Test
+  void listsOfNamesAndCodeMayStayAsTheyAre() {
+    check(
+        """
+        ¶ Grindel, Waltran, Sallow, Kestrel, Tessamouth, Brandt
+        | Grindel, Waltran, Sallow, Kestrel, Tessamouth, Brandt
+        ¶ Kestrel: `raise the gate by one notch`, https://kestrel.example/raise/the/gate/now
+        | Kestrel: `raise the gate by one notch`, https://kestrel.example/raise/the/gate/now
+        """);
+  }
+
   @Test
   void namesTitlesAndCodeMayStayAsTheyAre() {
     check(
