@@ -2,6 +2,7 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 
 /**
@@ -50,7 +51,7 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces, List<I
     }
     List<Inline> all = new ArrayList<>(inlines);
     all.addAll(more);
-    all.sort(Inline.ORDER);
+    Collections.sort(all);
     return new Block(kind, level, extent, pieces, all);
   }
 

@@ -64,7 +64,7 @@ public enum Format {
    * @param text the file, possibly with a byte-order mark, which is no prose
    */
   public List<Block> blocks(Text text) {
-    return marked(text).stream().map(block -> Placeholders.mark(text.string(), block)).toList();
+    return Placeholders.mark(text.string(), marked(text));
   }
 
   /** The blocks with what the format itself marks in them. */

@@ -2,7 +2,7 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import java.util.ArrayList;
-import java.util.Comparator;
+import java.util.Collections;
 import java.util.List;
 
 /**
@@ -11,13 +11,7 @@ import java.util.List;
  * @param kind what it is
  * @param span all of it in the file, its marks included; may reach beyond the block it begins in
  */
-public record Inline(Kind kind, Span span) {
-  /** In the order of the file, of those that begin at one place the longest first. */
-  static final Comparator<Inline> ORDER =
-      Comparator.<Inline>comparingInt(inline -> inline.span().start())
-          .thenComparing(inline -> -inline.span().end())
-          .thenComparing(Inline::kind);
-
+public record Inline(Kind kind, Span span) implements Comparable<Inline> {
   /** What an inline is. */
   public enum Kind {
     /** Words that are stressed, usually in italics. */
@@ -47,25 +41,35 @@ public record Inline(Kind kind, Span span) {
    * Hands each inline to the block that it begins in, or else to the first that it reaches into.
    *
    * @param blocks in the order of the file
-   * @param inlines in any order; one that no block has a part in is dropped
+   * @param inlines in any order, some perhaps twice; one that no block has a part in is dropped
    */
   static List<Block> spread(List<Block> blocks, List<Inline> inlines) {
     if (inlines.isEmpty()) {
       return List.copyOf(blocks);
     }
-    List<Inline> sorted = inlines.stream().distinct().sorted(ORDER).toList();
+    List<Inline> sorted = new ArrayList<>(inlines);
+    Collections.sort(sorted);
     List<Block> marked = new ArrayList<>(blocks.size());
     int next = 0;
     for (Block block : blocks) {
       List<Inline> inside = new ArrayList<>();
       while (next < sorted.size() && sorted.get(next).span().start() < block.extent().end()) {
         Inline inline = sorted.get(next++);
-        if (inline.span().end() > block.extent().start()) {
+        boolean again = !inside.isEmpty() && inside.get(inside.size() - 1).equals(inline);
+        if (inline.span().end() > block.extent().start() && !again) {
           inside.add(inline);
         }
       }
       marked.add(block.with(inside));
     }
     return List.copyOf(marked);
+  }
+
+  /** In the order of the file, of those that begin at one place the longest first. */
+  @Override
+  public int compareTo(Inline other) {
+    int byStart = Integer.compare(span.start(), other.span.start());
+    int byEnd = byStart != 0 ? byStart : Integer.compare(other.span.end(), span.end());
+    return byEnd != 0 ? byEnd : kind.compareTo(other.kind);
   }
 }

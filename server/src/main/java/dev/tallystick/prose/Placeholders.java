@@ -12,9 +12,6 @@ import org.jsoup.nodes.Entities;
  * and programs write them, references to characters, addresses. Their syntax is from memory.
  */
 final class Placeholders {
-  /** All of them begin with one of these, but for addresses, which have one of the others. */
-  private static final String SIGNS = "{%$<&" + ":@";
-
   /** {@code {{ x }}}, {@code {% x %}}, {@code ${x}}, {@code {x}}, {@code %{x}}, {@code {}}. */
   private static final String BRACES =
       "\\{\\{[^{}]{0,80}+\\}\\}|\\{%[^{}%]{0,80}+%\\}|\\$\\{[^{}\\s]{1,80}+\\}"
@@ -37,56 +34,77 @@ final class Placeholders {
           + "&&[^\\p{IsHan}\\p{IsHiragana}\\p{IsKatakana}\\p{IsThai}\\p{IsLao}\\p{IsKhmer}"
           + "\\p{IsMyanmar}]]";
 
-  private static final Pattern VALUE =
-      Pattern.compile(BRACES + "|" + PERCENT + "|" + NUMBERED + "|" + REFERENCE);
+  /** Patterns take time to make, and most texts need none. */
+  private static final class Value {
+    static final Pattern PATTERN =
+        Pattern.compile(BRACES + "|" + PERCENT + "|" + NUMBERED + "|" + REFERENCE);
+  }
 
-  private static final Pattern ADDRESS =
-      Pattern.compile(
-          "(?<![\\w.+-])(?:(?:https?|ftps?|file|git|ssh|ircs?)://"
-              + IN_ADDRESS
-              + "++|(?:mailto:)?+[\\w.+-]{1,64}+@[\\p{L}\\d-]{1,63}+(?:\\.[\\p{L}\\d-]{1,63}+)++)");
+  private static final class Address {
+    static final Pattern PATTERN =
+        Pattern.compile(
+            "(?<![\\w.+-])(?:(?:https?|ftps?|file|git|ssh|ircs?)://"
+                + IN_ADDRESS
+                + "++|(?:mailto:)?+[\\w.+-]{1,64}+@[\\p{L}\\d-]{1,63}+"
+                + "(?:\\.[\\p{L}\\d-]{1,63}+)++)");
+  }
 
   /** Marks that rather close the sentence around an address than belong to it. */
   private static final String TRAILING = ".,:;!?'";
 
   private Placeholders() {}
 
-  /** The block with what is copied in its prose, but for what is marked as copied anyhow. */
-  static Block mark(String file, Block block) {
-    if (block.pieces().isEmpty()) {
-      return block;
+  /** The blocks with what is copied in their prose, but for what is marked as copied anyhow. */
+  static List<Block> mark(String file, List<Block> blocks) {
+    if (!mayHaveValues(file) && !mayHaveAddresses(file)) {
+      return blocks;
     }
-    String prose = block.prose(file);
-    if (!maySay(prose)) {
-      return block;
+    List<Block> marked = new ArrayList<>(blocks.size());
+    for (Block block : blocks) {
+      marked.add(block.pieces().isEmpty() ? block : mark(block, block.prose(file)));
     }
-    Offsets offsets = new Offsets(block.pieces());
-    List<Inline> found = new ArrayList<>();
-    int end = 0;
-    Matcher address = ADDRESS.matcher(prose);
-    Matcher value = VALUE.matcher(prose);
-    boolean addresses = prose.contains("://") || prose.indexOf('@') >= 0;
-    while (addresses && address.find()) {
-      addValues(found, offsets, value.region(end, address.start()));
-      end = addressEnd(prose, address.start(), address.end());
-      found.add(new Inline(Inline.Kind.ADDRESS, offsets.inFile(new Span(address.start(), end))));
-    }
-    addValues(found, offsets, value.region(end, prose.length()));
-    return block.with(outside(block.inlines(), found));
+    return List.copyOf(marked);
   }
 
-  /** Whether there is a sign of one at all: nearly all of most texts has none. */
-  private static boolean maySay(String prose) {
-    for (int i = 0; i < prose.length(); i++) {
-      char c = prose.charAt(i);
-      if (c <= '{' && SIGNS.indexOf(c) >= 0) {
-        return true;
+  private static Block mark(Block block, String prose) {
+    boolean addresses = mayHaveAddresses(prose);
+    boolean values = mayHaveValues(prose);
+    if (!addresses && !values) {
+      return block;
+    }
+    List<Inline> found = new ArrayList<>();
+    Offsets offsets = new Offsets(block.pieces());
+    int end = 0;
+    if (addresses) {
+      Matcher address = Address.PATTERN.matcher(prose);
+      while (address.find()) {
+        if (values) {
+          addValues(found, offsets, prose, end, address.start());
+        }
+        end = addressEnd(prose, address.start(), address.end());
+        found.add(new Inline(Inline.Kind.ADDRESS, offsets.inFile(new Span(address.start(), end))));
       }
     }
-    return false;
+    if (values) {
+      addValues(found, offsets, prose, end, prose.length());
+    }
+    return found.isEmpty() ? block : block.with(outside(block.inlines(), found));
   }
 
-  private static void addValues(List<Inline> found, Offsets offsets, Matcher value) {
+  private static boolean mayHaveValues(String text) {
+    return text.indexOf('{') >= 0
+        || text.indexOf('%') >= 0
+        || text.indexOf('<') >= 0
+        || text.indexOf('&') >= 0;
+  }
+
+  private static boolean mayHaveAddresses(String text) {
+    return text.indexOf('@') >= 0 || text.contains("://");
+  }
+
+  private static void addValues(
+      List<Inline> found, Offsets offsets, String prose, int from, int to) {
+    Matcher value = Value.PATTERN.matcher(prose).region(from, to);
     while (value.find()) {
       Span span = offsets.inFile(new Span(value.start(), value.end()));
       found.add(new Inline(kind(value.group()), span));

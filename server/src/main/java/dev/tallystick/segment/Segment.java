@@ -59,10 +59,11 @@ public record Segment(
   /** How it ends. A mark in what is copied closes nothing. */
   public Closing closing() {
     int last = Closing.last(prose);
-    boolean copied =
-        inlines.stream()
-            .filter(marked -> marked.inline().kind().isCopied())
-            .anyMatch(marked -> marked.prose().contains(last));
-    return copied ? Closing.OPEN : Closing.of(prose);
+    for (Marked marked : inlines) {
+      if (marked.inline().kind().isCopied() && marked.prose().contains(last)) {
+        return Closing.OPEN;
+      }
+    }
+    return Closing.of(prose);
   }
 }
