@@ -31,6 +31,9 @@ final class Side {
   /** Number of verbatim units before each unit, and of all at the end. */
   final int[] verbatimBefore;
 
+  /** When the units are on the screen; null if nothing says so, or nothing sensible. */
+  final Timeline timeline;
+
   /** The units, as long as the adaptive model takes them to be. */
   Side(List<Unit> list) {
     this(list, Unit::length);
@@ -43,6 +46,7 @@ final class Side {
     this.opensBefore = new int[units.length + 1];
     this.blockEndingAt = new int[units.length + 1];
     this.blockStartingAt = new int[units.length + 1];
+    this.timeline = Timeline.of(units);
     findBlocks();
     this.verbatimBefore = new int[units.length + 1];
     for (int i = 0; i < units.length; i++) {
@@ -65,6 +69,11 @@ final class Side {
         start = end;
       }
     }
+  }
+
+  /** The same units, but nothing says when they are on the screen. */
+  Side untimed() {
+    return new Side(Arrays.stream(units).map(unit -> unit.shown(0, -1)).toList());
   }
 
   int size() {

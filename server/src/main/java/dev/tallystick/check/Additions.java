@@ -22,9 +22,7 @@ final class Additions {
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
     for (Run run :
-        Run.of(
-            subject.target(),
-            i -> extra[i] >= LEAST && !moved.contains(i) && !slight.is(i))) {
+        Run.of(subject.target(), i -> extra[i] >= LEAST && !moved.contains(i) && !slight.is(i))) {
       findings.add(
           new Finding(
               Code.ADDITION,

@@ -2,9 +2,11 @@ package dev.tallystick.segment;
 
 import dev.tallystick.prose.Block;
 import dev.tallystick.prose.Inline;
+import dev.tallystick.prose.Times;
 import dev.tallystick.text.Span;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * One sentence, or one verbatim block.
@@ -65,5 +67,10 @@ public record Segment(
       }
     }
     return Closing.of(prose);
+  }
+
+  /** When it is on the screen: that of all the cues that it stands in. Empty if nothing tells. */
+  public Optional<Times> shown() {
+    return block.shown(span);
   }
 }
