@@ -68,6 +68,11 @@ public enum Format {
    * @param text the file, possibly with a byte-order mark, which is no prose
    */
   public List<Block> blocks(Text text) {
+    return Placeholders.mark(text.string(), marked(text));
+  }
+
+  /** The blocks with what the format itself marks in them. */
+  private List<Block> marked(Text text) {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text);

@@ -27,6 +27,7 @@ import org.jsoup.select.NodeVisitor;
  */
 final class Html implements NodeVisitor {
   private final List<Event> events = new ArrayList<>();
+  private final List<Inline> inlines = new ArrayList<>();
   private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
   private final Deque<HtmlContext> contexts = new ArrayDeque<>();
 
@@ -56,7 +57,8 @@ final class Html implements NodeVisitor {
     Html html = new Html(document);
     document.traverse(html);
     html.events.sort(Comparator.comparingInt(Event::mark).thenComparing(Event::what));
-    return html.flow(new HtmlFlow(text.string(), html.parents)).finish();
+    List<Block> blocks = html.flow(new HtmlFlow(text.string(), html.parents)).finish();
+    return Inline.spread(blocks, html.inlines);
   }
 
   private HtmlFlow flow(HtmlFlow flow) {
@@ -118,9 +120,24 @@ final class Html implements NodeVisitor {
       events.add(new Event(What.BORDER, tag.start(), new Span(tag.start(), tag.start()), inside));
     } else if (element.normalName().equals("br")) {
       events.add(new Event(What.LINE_END, tag.start(), new Span(tag.start(), tag.start()), inside));
+    } else if (!tag.isEmpty()) {
+      addInline(element, tag, inside.fixed() && !around.fixed());
     }
     if (!inside.fixed() && !tag.isEmpty()) {
       element.attributes().forEach(attribute -> read(attribute, element, tag, inside));
+    }
+  }
+
+  /**
+   * Takes in an element within running text.
+   *
+   * @param fixed whether it is the first around its text that is not to be translated
+   */
+  private void addInline(Element element, Span tag, boolean fixed) {
+    Inline.Kind kind = fixed ? Inline.Kind.CODE : HtmlTags.inline(element.normalName());
+    if (kind != null) {
+      int end = Math.max(tag.end(), span(element.endSourceRange()).end());
+      inlines.add(new Inline(kind, new Span(tag.start(), end)));
     }
   }
 
