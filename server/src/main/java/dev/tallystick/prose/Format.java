@@ -19,6 +19,8 @@ public enum Format {
   WEBVTT(List.of("vtt", "webvtt"), "vtt"),
   /** HTML, also as XHTML. */
   HTML(List.of("html"), "html", "htm", "xhtml"),
+  /** XML: DocBook, DITA, and others by what they say of themselves. */
+  XML(List.of("xml", "docbook", "dita"), "xml", "dbk", "docbook", "dita", "ditamap"),
   /** AsciiDoc. */
   ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
 
@@ -69,6 +71,7 @@ public enum Format {
       case MARKDOWN -> Markdown.blocks(text);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
+      case XML -> Xml.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
     };
   }

@@ -8,21 +8,23 @@ import org.jsoup.nodes.Element;
 import org.jsoup.nodes.Range;
 
 /**
- * Makes blocks of what a page shows, taken in from left to right. White space collapses as it does
- * in a browser; what a browser shows as a space or a new line parts words here too, if need be by
- * the first character of its mark.
+ * Makes blocks of what a marked-up file shows, taken in from left to right. White space collapses
+ * as it does in a browser; what a browser shows as a space or a new line parts words here too, if
+ * need be by the first character of its mark.
  */
-final class HtmlFlow {
+final class MarkupFlow {
   private static final int NONE = -1;
+  private static final int MOST_CLOSING = 4;
 
   /** What browsers drop without a break in the text. */
   private static final String EMPTY_TAG = "</>";
 
   private final String file;
   private final Set<Element> parents;
+  private final Set<String> entities;
   private final List<Block> blocks = new ArrayList<>();
   private final List<Span> waiting = new ArrayList<>();
-  private HtmlContext open;
+  private MarkupContext open;
   private Pieces pieces;
   private int first;
   private int blank = NONE;
@@ -31,15 +33,28 @@ final class HtmlFlow {
   private boolean hasWords;
   private boolean hasCopied;
   private boolean isFixed;
+  private boolean dropsStops;
+
+  /** How a stretch of the file is read. */
+  enum As {
+    /** As text, in which there may be references. */
+    TEXT,
+    /** As the value of an attribute. */
+    ATTRIBUTE,
+    /** As text in which an ampersand is one. */
+    LITERAL
+  }
 
   /**
    * An empty flow.
    *
    * @param parents the elements that have others inside that no sentence crosses
+   * @param entities those that an XML file declares; {@code null} in HTML
    */
-  HtmlFlow(String file, Set<Element> parents) {
+  MarkupFlow(String file, Set<Element> parents, Set<String> entities) {
     this.file = file;
     this.parents = parents;
+    this.entities = entities;
   }
 
   /** All blocks so far. */
@@ -48,28 +63,50 @@ final class HtmlFlow {
     return List.copyOf(blocks);
   }
 
-  /** Takes in a stretch of text, or the value of an attribute that reads as text. */
-  void text(Span text, HtmlContext context, boolean attribute) {
+  /** Takes in a stretch of text. */
+  void text(Span text, MarkupContext context, As as) {
     int at = text.start();
     while (at < text.end()) {
-      char c = file.charAt(at);
-      HtmlReference reference = c == '&' ? HtmlReference.at(file, at, text.end(), attribute) : null;
-      if (reference != null) {
-        add(reference, context);
-        at = reference.end();
-      } else if (!attribute && file.startsWith(EMPTY_TAG, at)) {
-        at += EMPTY_TAG.length();
-      } else {
-        int code = file.codePointAt(at);
-        int end = Math.min(at + Character.charCount(code), text.end());
-        if (Characters.isSpace(code)) {
-          addBlank(at, true);
-        } else if (!isNothing(at, c)) {
-          add(at, end, context, code);
-        }
-        at = end;
+      boolean refers = file.charAt(at) == '&' && as != As.LITERAL;
+      int behind = refers ? reference(at, text.end(), context, as) : at;
+      if (behind == at && as == As.TEXT && file.startsWith(EMPTY_TAG, at)) {
+        behind = at + EMPTY_TAG.length();
       }
+      at = behind > at ? behind : character(at, text.end(), context);
     }
+  }
+
+  /** Takes in a character; the offset behind it. */
+  private int character(int at, int limit, MarkupContext context) {
+    int code = file.codePointAt(at);
+    int end = Math.min(at + Character.charCount(code), limit);
+    if (Characters.isSpace(code)) {
+      addBlank(at, true);
+    } else if (!isNothing(at, file.charAt(at))) {
+      add(at, end, context, code);
+    }
+    return end;
+  }
+
+  /** Takes in a reference; the offset behind it, or that of its ampersand if there is none. */
+  private int reference(int at, int limit, MarkupContext context, As as) {
+    CharacterReference reference;
+    if (entities == null) {
+      reference = CharacterReference.at(file, at, limit, as == As.ATTRIBUTE);
+    } else {
+      int name = CharacterReference.behindEntity(file, at, limit, entities);
+      if (name > at) {
+        // What it stands for is not known; the same name stands for it on both sides.
+        text(new Span(at + 1, name - 1), context.marked(false, true, context.fixed()), As.LITERAL);
+        return name;
+      }
+      reference = CharacterReference.inXml(file, at, limit);
+    }
+    if (reference == null) {
+      return at;
+    }
+    add(reference, context);
+    return reference.end();
   }
 
   /** A byte-order mark, or what browsers drop. */
@@ -77,7 +114,7 @@ final class HtmlFlow {
     return c == 0 || at == 0 && c == '\uFEFF';
   }
 
-  private void add(HtmlReference reference, HtmlContext context) {
+  private void add(CharacterReference reference, MarkupContext context) {
     if (reference.isBlank()) {
       addBlank(reference.start(), false);
     } else if (!reference.isInsideWords() && (!reference.isQuotationMark() || followsWord())) {
@@ -92,7 +129,11 @@ final class HtmlFlow {
         && Character.isLetterOrDigit(file.codePointBefore(pieces.end()));
   }
 
-  private void add(int from, int to, HtmlContext context, int character) {
+  private void add(int from, int to, MarkupContext context, int character) {
+    dropsStops &= Characters.isStop(character) || Characters.isClosing(character);
+    if (dropsStops) {
+      return;
+    }
     if (open != null && open.block() != context.block()) {
       close();
     }
@@ -111,7 +152,7 @@ final class HtmlFlow {
     }
   }
 
-  private void start(int from, HtmlContext context) {
+  private void start(int from, MarkupContext context) {
     open = context;
     pieces = new Pieces(file);
     first = from;
@@ -128,6 +169,7 @@ final class HtmlFlow {
    * @param real whether it is white space, which is the better sign for it
    */
   void addBlank(int at, boolean real) {
+    dropsStops = false;
     if (open != null && (blank == NONE || real && !realBlank)) {
       blank = at;
       realBlank = real;
@@ -155,9 +197,31 @@ final class HtmlFlow {
     }
   }
 
+  /**
+   * Whether the block that a place is in has no words yet, or has come to the end of a sentence.
+   */
+  boolean isBetweenSentences(MarkupContext place) {
+    if (open == null || open.block() != place.block()) {
+      return true;
+    }
+    int at = pieces.end();
+    int least = Math.max(first, at - MOST_CLOSING);
+    while (at > least && Characters.isClosing(file.charAt(at - 1))) {
+      at--;
+    }
+    return at > first && Characters.isStop(file.charAt(at - 1));
+  }
+
+  /** A note has ended: a stop right behind it belongs to the sentence before it. */
+  void resume() {
+    close();
+    dropsStops = true;
+  }
+
   /** Ends the block that is open. */
   void close() {
     int end = 0;
+    dropsStops = false;
     if (open != null) {
       end = pieces.end();
       add(block(new Span(first, end)));
@@ -174,7 +238,7 @@ final class HtmlFlow {
   }
 
   private void addValue(Span value) {
-    text(value, HtmlContext.of(null), true);
+    text(value, MarkupContext.of(null), As.ATTRIBUTE);
     if (open != null) {
       close();
     }
