@@ -13,11 +13,18 @@ export const EXTENSIONS = [
   "html",
   "htm",
   "xhtml",
+  "xml",
+  "dbk",
+  "docbook",
+  "dita",
+  "ditamap",
 ] as const;
 
 /** The languages of texts that have no file yet. */
 const LANGUAGES = [
   "asciidoc",
+  "dita",
+  "docbook",
   "html",
   "markdown",
   "plaintext",
@@ -25,6 +32,7 @@ const LANGUAGES = [
   "subrip",
   "vtt",
   "webvtt",
+  "xml",
 ] as const;
 
 /** The settings of a project. */

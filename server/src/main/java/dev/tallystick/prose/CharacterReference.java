@@ -21,6 +21,12 @@ record CharacterReference(int start, int end, int character) {
   private static final int LONGEST_NUMBER = 8;
   private static final int LONGEST_ENTITY = 200;
   private static final int REPLACEMENT = 0xFFFD;
+
+  /** Double-struck letters, behind which number forms, arrows and common operators come. */
+  private static final int RARE_LETTERS = 0x2145;
+
+  private static final int NUMBER_FORMS = 0x2150;
+  private static final int RARE_SIGNS = 0x2300;
   private static final Charset WINDOWS = Charset.forName("windows-1252");
 
   /**
@@ -81,7 +87,16 @@ record CharacterReference(int start, int end, int character) {
       return start;
     }
     String name = file.substring(start + 1, end);
-    return declared.contains(name) || !Entities.isNamedEntity(name) ? end + 1 : start;
+    return declared.contains(name) || !isCharacter(name) ? end + 1 : start;
+  }
+
+  /**
+   * Whether a name is that of a character that people write in prose. HTML has names such as {@code
+   * eg} and {@code ie} for rare signs, which documents give to abbreviations.
+   */
+  private static boolean isCharacter(String name) {
+    int code = Entities.isNamedEntity(name) ? Entities.getByName(name).codePointAt(0) : RARE_SIGNS;
+    return code < RARE_LETTERS || code >= NUMBER_FORMS && code < RARE_SIGNS;
   }
 
   private static boolean isOfName(char c) {

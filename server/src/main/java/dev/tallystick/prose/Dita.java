@@ -55,6 +55,7 @@ final class Dita {
                sort-as svg svg-container mathml math ditavalref""")
           .with(XmlRole.ASIDE, "fn desc")
           .with(XmlRole.SPACED, "image")
+          .with(XmlRole.CHAIN, "menucascade")
           .roles();
 
   /** What a topic or a map starts with. */

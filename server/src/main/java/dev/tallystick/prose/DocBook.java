@@ -19,8 +19,8 @@ final class DocBook {
           .with(
               XmlRole.TEXT,
               """
-              para simpara refpurpose caption attribution releaseinfo edition keyword contrib\
-               jobtitle revremark label glosssee glossseealso tocentry lotentry""")
+              para simpara refpurpose caption attribution releaseinfo edition keyword\
+               revremark label glosssee glossseealso tocentry lotentry""")
           .with(XmlRole.ITEM, "listitem member term step callout")
           .with(XmlRole.CELL, "entry td th seg segtitle")
           .with(XmlRole.QUOTATION, "blockquote epigraph")
@@ -56,13 +56,14 @@ final class DocBook {
                enumvalue package initializer modifier mathphrase refname refdescriptor\
                refentrytitle manvolnum refmiscinfo personname firstname surname givenname\
                othername honorific lineage orgname corpname corpauthor publishername\
-               authorinitials date pubdate year holder revnumber productname productnumber isbn\
+               authorinitials contrib jobtitle date pubdate year holder revnumber productname productnumber isbn\
                issn biblioid pagenums volumenum issuenum artpagenums invpartnumber pubsnumber""")
           .with(
               XmlRole.SILENT,
               "indexterm remark comment primaryie secondaryie tertiaryie subjectset svg math script")
           .with(XmlRole.ASIDE, "footnote annotation")
           .with(XmlRole.SPACED, "inlinemediaobject")
+          .with(XmlRole.CHAIN, "menuchoice keycombo")
           .roles();
 
   /** What a document or a part of one in a file of its own starts with. */

@@ -115,7 +115,7 @@ final class Xml implements NodeVisitor {
         parents.add(around.context().block());
         events.add(What.ASIDE, tag.start(), around.context());
       }
-      case SPACED -> events.add(What.BLANK, tag.start(), around.context());
+      case SPACED, PARTED -> events.add(What.BLANK, tag.start(), around.context());
       case INLINE -> {}
     }
     if (!inside.context().fixed() && !tag.isEmpty()) {

@@ -17,10 +17,14 @@ final class XmlNesting {
     this.its = its;
   }
 
-  /** Outside of all elements. */
+  /** Outside of all elements; what begins with words is a piece of a document, or of a sentence. */
   XmlPlace start(Element document) {
     MarkupContext context = MarkupContext.of(document);
-    return new XmlPlace(context, Edge.BORDER, false, 0, false, its.start());
+    boolean words =
+        document.childNodeSize() > 0
+            && document.childNode(0) instanceof TextNode text
+            && text.getWholeText().chars().anyMatch(Character::isLetterOrDigit);
+    return new XmlPlace(context, Edge.BORDER, words, 0, false, its.start());
   }
 
   /** Inside an element that stands in a place. */
@@ -29,7 +33,7 @@ final class XmlNesting {
     boolean span = ofIts && element.tag().localName().equals("span");
     XmlRole role = ofIts && !span ? XmlRole.SILENT : vocabulary.role(element);
     Its.Said said = its.in(around.said(), element);
-    Edge edge = span ? Edge.INLINE : edge(around, role, said);
+    Edge edge = span ? Edge.INLINE : edge(around, role, said, element);
     MarkupContext context =
         around
             .context()
@@ -38,14 +42,14 @@ final class XmlNesting {
                 role == XmlRole.CODE || showsItsAddress(element),
                 isFixed(around, element, said));
     int sections = around.sections() + (role == XmlRole.SECTION ? 1 : 0);
-    if (edge == Edge.BORDER || edge == Edge.ASIDE) {
+    if (isBlock(edge)) {
       context = block(context, around, role, element);
     }
-    boolean flows = edge == Edge.INLINE || edge == Edge.SPACED || flows(role, said, element);
+    boolean flows = !isBlock(edge) || flows(role, said, element);
     return new XmlPlace(context, edge, flows, sections, titled(around, role, element), said);
   }
 
-  private Edge edge(XmlPlace around, XmlRole role, Its.Said said) {
+  private Edge edge(XmlPlace around, XmlRole role, Its.Said said, Element element) {
     boolean whole = around.context().kind() == Block.Kind.VERBATIM;
     if (whole || role == XmlRole.SILENT) {
       return Edge.INLINE;
@@ -62,11 +66,24 @@ final class XmlNesting {
       };
     }
     return switch (role) {
-      case CODE, OTHER -> around.flows() ? Edge.INLINE : Edge.BORDER;
+      case CODE, CHAIN, OTHER ->
+          !around.flows() ? Edge.BORDER : isLink(element) ? Edge.PARTED : Edge.INLINE;
       case SPACED -> around.flows() ? Edge.SPACED : Edge.BORDER;
       case ASIDE -> around.flows() ? Edge.ASIDE : Edge.BORDER;
       default -> Edge.BORDER;
     };
+  }
+
+  private static boolean isBlock(Edge edge) {
+    return edge == Edge.BORDER || edge == Edge.ASIDE;
+  }
+
+  /** Whether an element is a part of a chain, but the first. */
+  private boolean isLink(Element element) {
+    Element parent = element.parent();
+    return parent != null
+        && vocabulary.role(parent) == XmlRole.CHAIN
+        && parent.firstElementChild() != element;
   }
 
   private static MarkupContext block(

@@ -17,6 +17,8 @@ record XmlPlace(
   enum Edge {
     /** As a part of a sentence. */
     INLINE,
+    /** As a part of a sentence with white space before it. */
+    PARTED,
     /** As a part of a sentence with white space around it. */
     SPACED,
     /** As a block of its own. */

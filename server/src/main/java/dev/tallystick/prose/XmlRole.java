@@ -31,6 +31,8 @@ enum XmlRole {
   ASIDE,
   /** A part of a sentence that has white space around it. */
   SPACED,
+  /** A part of a sentence whose own parts are shown with something between them. */
+  CHAIN,
   /** Nothing is known of it. */
   OTHER;
 

@@ -382,6 +382,38 @@ class StubTest {
   }
 
   @Test
+  void aParagraphOfDocBookComesWithItsTags() {
+    assertEquals(
+        """
+        <article>
+          <para>Sie legt ab.</para>
+          <para>
+            The <guilabel>bell</guilabel> rings.
+          </para>
+          <para>Niemand schwimmt. Stay &amp; <emphasis>wait</emphasis>. Dort ist es.</para>
+        </article>
+        """,
+        Stubbed.in(
+            Format.XML,
+            """
+            <article>
+              <para>It leaves.</para>
+              <para>
+                The <guilabel>bell</guilabel> rings.
+              </para>
+              <para>Nobody swims. Stay &amp; <emphasis>wait</emphasis>. It is there.</para>
+            </article>
+            """,
+            """
+            <article>
+              <para>Sie legt ab.</para>
+              <para>Niemand schwimmt. Dort ist es.</para>
+            </article>
+            """,
+            "0-0 1- 2-1 3- 4-2"));
+  }
+
+  @Test
   void aSubtitleComesWithItsTimes() {
     String times = "00:00:01,000 --> 00:00:02,000\n";
     String later = "00:00:03,000 --> 00:00:04,000\n";

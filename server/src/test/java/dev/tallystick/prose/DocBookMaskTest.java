@@ -66,6 +66,17 @@ class DocBookMaskTest {
   }
 
   @Test
+  void menusAndKeys() {
+    mask(
+        """
+        <section><para>(<menuchoice><guimenu>File</guimenu><guimenuitem>Open</guimenuitem></menuchoice>,
+        ···············(·····················File··········<············Open···························,
+        <keycombo><keycap>Ctrl</keycap><keycap>O</keycap></keycombo>)</para></section>
+        ··················Ctrl·········<·······O····················)·················
+        """);
+  }
+
+  @Test
   void attributes() {
     mask(
         """

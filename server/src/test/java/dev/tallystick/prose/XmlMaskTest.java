@@ -62,8 +62,8 @@ class XmlMaskTest {
         """
         <!DOCTYPE a [<!ENTITY b "ha"><!ENTITY c "&b;&b;&b;"><!ENTITY d SYSTEM "file:///d">]>
         ····················································································
-        <a>It says &c; and &d;.</a>
-        ···It says ·c· and ·d·.····
+        <a>It says &c; and &d;, &eg; &rarr;.</a>
+        ···It says ·c· and ·d·, ·eg· &·····.····
         """);
   }
 
