@@ -61,6 +61,19 @@ public enum Format {
   }
 
   /**
+   * The language that a file gives for itself: a tag as it stands there, possibly of no language.
+   */
+  public Optional<String> language(Text text) {
+    return switch (this) {
+      case PLAIN, MARKDOWN -> StatedLanguage.inFrontMatter(text);
+      case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
+      case HTML -> StatedLanguage.inHtml(text);
+      case XML -> StatedLanguage.inXml(text);
+      case SUBRIP, WEBVTT -> Optional.empty();
+    };
+  }
+
+  /**
    * The blocks of a file, in its order. Never fails: what cannot be read as markup is prose.
    *
    * @param text the file, possibly with a byte-order mark, which is no prose
