@@ -61,6 +61,9 @@ final class ParagraphMarks {
 
   /** Offset behind the mark that opens a line; 0 if none does. */
   private int end(Span line, Pattern mark) {
+    if (line.isEmpty() || file.charAt(line.start()) != '[') {
+      return 0; // nearly every line
+    }
     Matcher matcher = mark.matcher(file).region(line.start(), line.end());
     return matcher.lookingAt() ? matcher.end() : 0;
   }
