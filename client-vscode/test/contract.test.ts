@@ -33,6 +33,8 @@ test("the server is told of texts, of new texts and of the settings of the proje
   assert.deepEqual(FILTERS, [
     { scheme: "file", pattern: TEXTS },
     { scheme: "untitled", language: "asciidoc" },
+    { scheme: "untitled", language: "dita" },
+    { scheme: "untitled", language: "docbook" },
     { scheme: "untitled", language: "html" },
     { scheme: "untitled", language: "markdown" },
     { scheme: "untitled", language: "plaintext" },
@@ -40,6 +42,7 @@ test("the server is told of texts, of new texts and of the settings of the proje
     { scheme: "untitled", language: "subrip" },
     { scheme: "untitled", language: "vtt" },
     { scheme: "untitled", language: "webvtt" },
+    { scheme: "untitled", language: "xml" },
     { scheme: "file", pattern: "**/tallystick.json" },
   ]);
 });

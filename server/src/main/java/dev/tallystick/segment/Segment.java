@@ -1,7 +1,9 @@
 package dev.tallystick.segment;
 
 import dev.tallystick.prose.Block;
+import dev.tallystick.prose.Times;
 import dev.tallystick.text.Span;
+import java.util.Optional;
 
 /**
  * One sentence, or one verbatim block.
@@ -16,5 +18,10 @@ public record Segment(Span span, String prose, Block block, boolean opens) {
   /** Whether it is a verbatim block and no sentence. */
   public boolean verbatim() {
     return block.kind() == Block.Kind.VERBATIM;
+  }
+
+  /** When it is on the screen: that of all the cues that it stands in. Empty if nothing tells. */
+  public Optional<Times> shown() {
+    return block.shown(span);
   }
 }
