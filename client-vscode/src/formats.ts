@@ -18,6 +18,8 @@ export const EXTENSIONS = [
   "docbook",
   "dita",
   "ditamap",
+  "tex",
+  "ltx",
 ] as const;
 
 /** The languages of texts that have no file yet. */
@@ -26,10 +28,13 @@ const LANGUAGES = [
   "dita",
   "docbook",
   "html",
+  "latex",
   "markdown",
+  "plaintex",
   "plaintext",
   "srt",
   "subrip",
+  "tex",
   "vtt",
   "webvtt",
   "xml",

@@ -29,6 +29,8 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces, List<T
     CELL,
     /** A paragraph in a quotation. */
     QUOTATION,
+    /** A footnote or the like: it may stand inside the block before it, between its pieces. */
+    NOTE,
     /** Code and the like, copied as it stands: a landmark without prose. */
     VERBATIM
   }

@@ -22,7 +22,9 @@ public enum Format {
   /** XML: DocBook, DITA, and others by what they say of themselves. */
   XML(List.of("xml", "docbook", "dita"), "xml", "dbk", "docbook", "dita", "ditamap"),
   /** AsciiDoc. */
-  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
+  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
+  /** LaTeX. */
+  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -69,7 +71,7 @@ public enum Format {
       case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
       case HTML -> StatedLanguage.inHtml(text);
       case XML -> StatedLanguage.inXml(text);
-      case SUBRIP, WEBVTT -> Optional.empty();
+      case SUBRIP, WEBVTT, LATEX -> Optional.empty();
     };
   }
 
@@ -86,6 +88,7 @@ public enum Format {
       case HTML -> Html.blocks(text);
       case XML -> Xml.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
+      case LATEX -> Latex.blocks(text);
     };
   }
 }

@@ -25,21 +25,20 @@ import org.jsoup.select.NodeVisitor;
  * it stands: a browser moves misplaced text about, a translator has it where it was written.
  */
 final class Html implements NodeVisitor {
-  private final MarkupEvents events;
+  private final MarkupEvents events = new MarkupEvents();
   private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
   private final Deque<MarkupContext> contexts = new ArrayDeque<>();
 
-  private Html(String file, Document document) {
-    events = new MarkupEvents(file);
+  private Html(Document document) {
     contexts.push(MarkupContext.of(document));
   }
 
   static List<Block> blocks(Text text) {
     Document document = Parser.htmlParser().setTrackPosition(true).parseInput(text.string(), "");
-    Html html = new Html(text.string(), document);
+    Html html = new Html(document);
     document.traverse(html);
     html.events.sort();
-    return html.events.blocks(new MarkupFlow(text.string(), html.parents, null));
+    return html.events.blocks(() -> new MarkupFlow(text.string(), html.parents, null));
   }
 
   @Override

@@ -14,7 +14,6 @@ import org.jsoup.nodes.Range;
  */
 final class MarkupFlow {
   private static final int NONE = -1;
-  private static final int MOST_CLOSING = 4;
 
   /** What browsers drop without a break in the text. */
   private static final String EMPTY_TAG = "</>";
@@ -23,17 +22,21 @@ final class MarkupFlow {
   private final Set<Element> parents;
   private final Set<String> entities;
   private final List<Block> blocks = new ArrayList<>();
+  private final List<Block> notes = new ArrayList<>();
   private final List<Span> waiting = new ArrayList<>();
   private MarkupContext open;
   private Pieces pieces;
   private int first;
+
+  /** Index of the last block that is no note; -1 if there is none. */
+  private int main = -1;
+
   private int blank = NONE;
   private boolean realBlank;
   private boolean lineEnds;
   private boolean hasWords;
   private boolean hasCopied;
   private boolean isFixed;
-  private boolean dropsStops;
 
   /** How a stretch of the file is read. */
   enum As {
@@ -130,10 +133,6 @@ final class MarkupFlow {
   }
 
   private void add(int from, int to, MarkupContext context, int character) {
-    dropsStops &= Characters.isStop(character) || Characters.isClosing(character);
-    if (dropsStops) {
-      return;
-    }
     if (open != null && open.block() != context.block()) {
       close();
     }
@@ -169,7 +168,6 @@ final class MarkupFlow {
    * @param real whether it is white space, which is the better sign for it
    */
   void addBlank(int at, boolean real) {
-    dropsStops = false;
     if (open != null && (blank == NONE || real && !realBlank)) {
       blank = at;
       realBlank = real;
@@ -198,33 +196,33 @@ final class MarkupFlow {
   }
 
   /**
-   * Whether the block that a place is in has no words yet, or has come to the end of a sentence.
+   * Takes in the blocks of a note; they come behind the block that the note stands in. What is
+   * copied as it stands in a note is left out, as only notes may lie inside another block.
    */
-  boolean isBetweenSentences(MarkupContext place) {
-    if (open == null || open.block() != place.block()) {
-      return true;
+  void addNotes(List<Block> inside, MarkupContext place) {
+    boolean waits = open != null && open.block() == place.block();
+    if (!waits) {
+      close();
     }
-    int at = pieces.end();
-    int least = Math.max(first, at - MOST_CLOSING);
-    while (at > least && Characters.isClosing(file.charAt(at - 1))) {
-      at--;
+    for (Block block : inside) {
+      if (block.kind() != Block.Kind.VERBATIM) {
+        Block note = new Block(Block.Kind.NOTE, 0, block.extent(), block.pieces());
+        (waits ? notes : blocks).add(note);
+      }
     }
-    return at > first && Characters.isStop(file.charAt(at - 1));
-  }
-
-  /** A note has ended: a stop right behind it belongs to the sentence before it. */
-  void resume() {
-    close();
-    dropsStops = true;
   }
 
   /** Ends the block that is open. */
   void close() {
     int end = 0;
-    dropsStops = false;
     if (open != null) {
       end = pieces.end();
       add(block(new Span(first, end)));
+      for (Block note : notes) {
+        blocks.add(note);
+        end = Math.max(end, note.extent().end());
+      }
+      notes.clear();
       open = null;
       lineEnds = false;
     }
@@ -260,6 +258,7 @@ final class MarkupFlow {
       return prose;
     }
     int before = blocks.isEmpty() ? 0 : blocks.get(blocks.size() - 1).extent().end();
+    before = Math.max(before, main < 0 ? 0 : blocks.get(main).extent().end());
     Range tag = element.sourceRange();
     Range endTag = element.endSourceRange();
     boolean opens = tag.endPos() > tag.startPos() && tag.startPos() >= before;
@@ -271,13 +270,13 @@ final class MarkupFlow {
 
   /** Adds a block; if the one before it would reach into it, that one ends with its prose. */
   private void add(Block block) {
-    int last = blocks.size() - 1;
-    if (last >= 0 && blocks.get(last).extent().end() > block.extent().start()) {
-      Block before = blocks.get(last);
+    if (main >= 0 && blocks.get(main).extent().end() > block.extent().start()) {
+      Block before = blocks.get(main);
       int end = before.pieces().get(before.pieces().size() - 1).end();
       Span extent = new Span(before.extent().start(), end);
-      blocks.set(last, new Block(before.kind(), before.level(), extent, before.pieces()));
+      blocks.set(main, new Block(before.kind(), before.level(), extent, before.pieces()));
     }
+    main = blocks.size();
     blocks.add(block);
   }
 }

@@ -30,7 +30,7 @@ final class Xml implements NodeVisitor {
   private final XmlVocabulary vocabulary;
   private final Its its;
   private final XmlNesting nesting;
-  private final MarkupEvents events;
+  private final MarkupEvents events = new MarkupEvents();
   private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
   private final Deque<XmlPlace> places = new ArrayDeque<>();
 
@@ -39,7 +39,6 @@ final class Xml implements NodeVisitor {
     this.vocabulary = vocabulary;
     this.its = Its.of(document, file);
     this.nesting = new XmlNesting(vocabulary, its);
-    this.events = new MarkupEvents(file);
     places.push(nesting.start(document));
   }
 
@@ -52,7 +51,8 @@ final class Xml implements NodeVisitor {
     }
     Xml xml = new Xml(file, vocabulary, document);
     document.traverse(xml);
-    return xml.events.blocks(new MarkupFlow(file, xml.parents, XmlEntities.of(document, file)));
+    Set<String> entities = XmlEntities.of(document, file);
+    return xml.events.blocks(() -> new MarkupFlow(file, xml.parents, entities));
   }
 
   @Override
@@ -111,10 +111,7 @@ final class Xml implements NodeVisitor {
         parents.add(around.context().block());
         events.add(What.BORDER, tag.start(), inside.context());
       }
-      case ASIDE -> {
-        parents.add(around.context().block());
-        events.add(What.ASIDE, tag.start(), around.context());
-      }
+      case ASIDE -> events.add(What.ASIDE, tag.start(), around.context());
       case SPACED, PARTED -> events.add(What.BLANK, tag.start(), around.context());
       case INLINE -> {}
     }

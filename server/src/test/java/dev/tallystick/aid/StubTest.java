@@ -382,38 +382,6 @@ class StubTest {
   }
 
   @Test
-  void aParagraphOfDocBookComesWithItsTags() {
-    assertEquals(
-        """
-        <article>
-          <para>Sie legt ab.</para>
-          <para>
-            The <guilabel>bell</guilabel> rings.
-          </para>
-          <para>Niemand schwimmt. Stay &amp; <emphasis>wait</emphasis>. Dort ist es.</para>
-        </article>
-        """,
-        Stubbed.in(
-            Format.XML,
-            """
-            <article>
-              <para>It leaves.</para>
-              <para>
-                The <guilabel>bell</guilabel> rings.
-              </para>
-              <para>Nobody swims. Stay &amp; <emphasis>wait</emphasis>. It is there.</para>
-            </article>
-            """,
-            """
-            <article>
-              <para>Sie legt ab.</para>
-              <para>Niemand schwimmt. Dort ist es.</para>
-            </article>
-            """,
-            "0-0 1- 2-1 3- 4-2"));
-  }
-
-  @Test
   void aSubtitleComesWithItsTimes() {
     String times = "00:00:01,000 --> 00:00:02,000\n";
     String later = "00:00:03,000 --> 00:00:04,000\n";
@@ -462,5 +430,40 @@ class StubTest {
             "== Gear\n\nRow the *boat*. Take a *rest*.\n\n* Oars\n** of ash\n* Rope\n",
             "== Zeug\n\nRudern Sie *los*.\n\n* Riemen\n* Tau\n",
             "0-0 1-1 2- 3-2 4- 5-3"));
+  }
+
+  @Test
+  void inLatexABlockComesWithItsMarksAndASentenceWithItsNote() {
+    assertEquals(
+        "\\section{Zeug}\n\nRudern Sie los. Take a \\emph{rest}\\footnote{Or not.} at 5\\%.\n\n"
+            + "Nehmen Sie alles mit.\n\n\\item Tau\n\\item Oars\n",
+        Stubbed.in(
+            Format.LATEX,
+            "\\section{Gear}\n\nRow the boat. Take a \\emph{rest}\\footnote{Or not.} at 5\\%.\n\n"
+                + "Take all of it along.\n\n\\item Rope\n\\item Oars\n",
+            "\\section{Zeug}\n\nRudern Sie los.\n\nNehmen Sie alles mit.\n\n\\item Tau\n",
+            "0-0 1-1 2- 3- 4-2 5-3 6-"));
+  }
+
+  @Test
+  void inLatexABlockGoesBehindTheTextThatANoteStandsIn() {
+    assertEquals(
+        "Weit\\footnote{Sehr weit.} draußen.\nNoch weiter.\n\nCome back now.\n\nSchluss.\n",
+        Stubbed.in(
+            Format.LATEX,
+            "Far\\footnote{Very far.} out.\nFarther.\n\nCome back now.\n\nThe end.\n",
+            "Weit\\footnote{Sehr weit.} draußen.\nNoch weiter.\n\nSchluss.\n",
+            "0-0 1-1 2-2 3- 4-3"));
+  }
+
+  @Test
+  void inLatexHalfOfAPairOfBracesIsLeftOut() {
+    assertEquals(
+        "Ja gewiss. Stop here at 5\\%! Go. Rudern Sie los.\n",
+        Stubbed.in(
+            Format.LATEX,
+            "Yes indeed. \\textbf{Stop {\\em here} at 5\\%!} Go. Row the boat.\n",
+            "Ja gewiss. Rudern Sie los.\n",
+            "0-0 1- 2-1"));
   }
 }

@@ -98,13 +98,31 @@ class DocBookBlocksTest {
     Extraction.assertExtents(
         Format.XML,
         "<article><title>Lamp</title><para>\n It <emphasis>is</emphasis> lit.\n</para>"
-            + "<para>On.<footnote><para>Off.</para></footnote> Off.</para></article>",
+            + "<para>On<footnote><para>Off.</para></footnote> is on.</para></article>",
         """
         <title>Lamp</title>
         <para>⏎ It <emphasis>is</emphasis> lit.⏎</para>
-        On.
+        <para>On<footnote><para>Off.</para></footnote> is on.</para>
         <para>Off.</para>
-        Off.
+        """);
+  }
+
+  @Test
+  void aNoteComesBehindItsBlock() {
+    blocks(
+        """
+        <article><para>One<footnote><para>Two.</para><para>Three.</para></footnote> goes<footnote>
+        <para>Four <footnote><para>never</para></footnote></para><screen>no</screen></footnote>.
+        <itemizedlist><listitem><para><footnote><para>Five.</para></footnote>Six.</para></listitem>
+        </itemizedlist></para></article>
+        """,
+        """
+        PARAGRAPH: One goes.
+        NOTE: Two.
+        NOTE: Three.
+        NOTE: Four
+        NOTE: Five.
+        ITEM 1: Six.
         """);
   }
 

@@ -46,9 +46,9 @@ class DocBookMaskTest {
     mask(
         """
         <section><para>It burns.<footnote><para>All night.</para></footnote> It hums.
-        ···············It burns.················All night.···················It hums.
-        A lamp<footnote><para>Not read.</para></footnote> burns<footnote><para>Read.</para></footnote>.
-        A lamp··········································· burns················Read.···················
+        ···············It burns.················All night.·················· It hums.
+        A lamp<footnote><para>Of oil.</para></footnote> burns<footnote><para>Well.</para></footnote>.
+        A lamp················Of oil.·················· burns················Well.··················.
         Wait<footnote><para>At the end.</para></footnote></para></section>
         Wait················At the end.···································
         """);

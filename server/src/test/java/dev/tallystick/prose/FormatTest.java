@@ -16,6 +16,8 @@ class FormatTest {
     assertEquals(Optional.of(Format.ASCIIDOC), Format.ofName("ferry.adoc"));
     assertEquals(Optional.of(Format.XML), Format.ofName("ferry.ditamap"));
     assertEquals(Optional.of(Format.HTML), Format.ofName("ferry.xhtml"));
+    assertEquals(Optional.of(Format.LATEX), Format.ofName("ferry.ltx"));
+    assertEquals(Optional.of(Format.LATEX), Format.ofLanguage("plaintex"));
     assertEquals(Optional.empty(), Format.ofName("docs.md/ferry"));
     assertEquals(Optional.empty(), Format.ofName("md"));
     assertEquals(Optional.of(Format.HTML), Format.ofName("en/ferry.htm"));

@@ -77,9 +77,9 @@ class ItsTest {
             + "<p><b>One</b> <i>two</i> three.<fn>Aside.</fn> Four <fn>no</fn> five.</p>"
             + "<p>Six <u>seven</u> eight</p></log>",
         """
-        PARAGRAPH: One two three.
-        PARAGRAPH: Aside.
-        PARAGRAPH: Four five.
+        PARAGRAPH: One two three. Four five.
+        NOTE: Aside.
+        NOTE: no
         PARAGRAPH: Six
         PARAGRAPH: seven
         PARAGRAPH: eight
@@ -98,7 +98,7 @@ class ItsTest {
         PARAGRAPH: One
         PARAGRAPH: two
         PARAGRAPH: three four.
-        PARAGRAPH: Aside.
+        NOTE: Aside.
         """);
   }
 
