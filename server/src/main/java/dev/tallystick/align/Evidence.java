@@ -53,7 +53,7 @@ final class Evidence implements Scorer {
   private final Side source;
   private final Side target;
   private final Background background;
-  private final SharedWords shared;
+  private final LinkWords shared;
   private final LinkWords words;
   private final Fit fit;
   private final LengthTable lengths;
@@ -63,15 +63,16 @@ final class Evidence implements Scorer {
   private final int[] right;
   private final int[] down;
 
-  private Evidence(Texts texts, Fit fit, List<Shape> shapes) {
+  private Evidence(
+      Texts texts, Fit fit, LengthTable lengths, LengthTable merged, List<Shape> shapes) {
     this.source = texts.sides().source();
     this.target = texts.sides().target();
     this.background = texts.background();
     this.shared = texts.shared();
     this.words = texts.words();
     this.fit = fit;
-    this.lengths = new LengthTable(fit.lengths());
-    this.mergedLengths = new LengthTable(fit.lengths().withFreedom(MERGED_FREEDOM));
+    this.lengths = lengths;
+    this.mergedLengths = merged;
     this.clock = fit.clock();
     this.shapes = shapes;
     this.right = shapes.stream().mapToInt(Shape::sources).toArray();
@@ -80,18 +81,38 @@ final class Evidence implements Scorer {
 
   /** With the common shapes only: enough to find the way through two texts. */
   static Evidence coarse(Texts texts, Fit fit) {
-    return new Evidence(texts, fit, Shape.ADAPTIVE.subList(0, Shape.COMMON));
+    return of(texts, fit, Shape.ADAPTIVE.subList(0, Shape.COMMON));
   }
 
   /** With all shapes. */
   static Evidence full(Texts texts, Fit fit) {
-    return new Evidence(texts, fit, Shape.ADAPTIVE);
+    return of(texts, fit, Shape.ADAPTIVE);
+  }
+
+  private static Evidence of(Texts texts, Fit fit, List<Shape> shapes) {
+    return new Evidence(texts, fit, new LengthTable(fit.lengths()), merged(fit.lengths()), shapes);
+  }
+
+  /** By what two texts have taught, or an earlier state of them. */
+  static Evidence calibrated(Sides sides, Calibration calibration, LinkWords words) {
+    Background background = calibration.background().of(sides.target());
+    Texts texts = new Texts(sides, background, new LateWords(sides), words);
+    return new Evidence(
+        texts, calibration.fit(), calibration.lengths(), calibration.merged(), Shape.ADAPTIVE);
+  }
+
+  /** The lengths of links of several sentences. */
+  static LengthTable merged(LengthModel lengths) {
+    return new LengthTable(lengths.withFreedom(MERGED_FREEDOM));
   }
 
   /** What stays the same while the parameters of a pair are fitted. */
-  record Texts(Sides sides, Background background, SharedWords shared, LinkWords words) {
+  record Texts(Sides sides, Background background, LinkWords shared, LinkWords words) {
     static Texts of(Sides sides) {
-      SharedWords shared = new SharedWords(sides.source(), sides.target());
+      return of(sides, new SharedWords(sides.source(), sides.target()));
+    }
+
+    static Texts of(Sides sides, SharedWords shared) {
       return new Texts(sides, new Background(sides.target()), shared, shared);
     }
 
@@ -111,7 +132,7 @@ final class Evidence implements Scorer {
     boolean inside = s < source.size() && t < target.size();
     double opening = inside ? opening(source.units[s], target.units[t]) : 0;
     if (clock != null && inside) {
-      opening += clock.begins(source.timeline.from(s), target.timeline.from(t));
+      opening += clock.begins(Timeline.begin(source.units[s]), Timeline.begin(target.units[t]));
     }
     for (int shape = 0; shape < right.length; shape++) {
       int sEnd = s + right[shape];
@@ -150,7 +171,8 @@ final class Evidence implements Scorer {
     int close = source.units[sEnd - 1].close();
     worth += CLOSING * fit.closes().logRatio(close, target.units[tEnd - 1].close());
     if (clock != null) {
-      worth += clock.ends(source.timeline.to(sEnd - 1), target.timeline.to(tEnd - 1));
+      worth +=
+          clock.ends(Timeline.end(source.units[sEnd - 1]), Timeline.end(target.units[tEnd - 1]));
     }
     if (source.crossesBlocks(s, sEnd)) {
       worth += BORDER_CROSSED;

@@ -20,6 +20,12 @@ final class Lessons {
    */
   record Lesson(
       int[] source, int[] target, double weight, int[] pairs, float[] forward, float[] backward) {
+    private static final int[] NONE = {};
+
+    /** The same once all is learnt. */
+    Lesson learnt() {
+      return new Lesson(source, target, weight, NONE, forward, backward);
+    }
 
     /** All that it taught of a source word. */
     double ofSource(int word) {

@@ -1,7 +1,5 @@
 package dev.tallystick.align;
 
-import java.util.Arrays;
-
 /**
  * Evidence from the words of a link, by what the links of the pair itself have taught. How likely
  * the words of one side make a word of the other is summed over its words; a word counts as {@code
@@ -9,113 +7,67 @@ import java.util.Arrays;
  * text does.
  *
  * <p>What a link taught is left out wherever one of its sentences is judged: else a word pair seen
- * in one wrong link only would make that very link look certain.
+ * in one wrong link only would make that very link look certain. A sentence is known by its words
+ * and length ({@link Lexicon}), so that this holds for texts that were edited since.
  */
 final class Lexis implements LinkWords {
   private static final double FLOOR = 0.1;
   private static final double FORWARD = 0.45;
   private static final double BACKWARD = 0.15;
 
-  /** A pair of words that is worth less than this in both directions is let go. */
-  private static final double LEAST = 0.02;
-
   private static final int KEPT = 8;
   private static final double HUGE = 1e250;
   private static final double TINY = 1e-250;
 
-  private final Stems source;
-  private final Stems target;
-  private final Band band;
-  private final WordPairs pairs;
-  private final Lessons lessons;
+  private final Lexicon lexicon;
+  private final Lexicon.Entries entries;
   private final Translations forward;
   private final Translations backward;
 
-  private final Entries entries;
-  private final double[][] sourceScale;
-  private final double[] sourcePlain;
-  private final double[][] targetScale;
+  /** The units of either text as the lexicon knows them, once they were asked for. */
+  private Said[] source;
+
+  private Said[] target;
+  private Unit[] sourceUnits;
+  private Unit[] targetUnits;
+  private Band band;
+
   private final double[] dense;
   private final double[] made;
   private final double[] inSource;
   private final double[] inTarget;
   private final Row[] rows = new Row[KEPT];
 
-  private Lexis(Stems source, Stems target, WordPairs pairs, Lessons lessons, Band band) {
-    this.source = source;
-    this.target = target;
-    this.band = band;
-    this.pairs = pairs;
-    this.lessons = lessons;
-    this.forward = new Translations(pairs, source, target, true);
-    this.backward = new Translations(pairs, target, source, false);
-    forward.learn(lessons);
-    backward.learn(lessons);
-    this.entries = entries();
-    this.sourceScale = new double[source.of.length][];
-    this.sourcePlain = new double[source.of.length];
-    this.targetScale = new double[target.of.length][];
-    this.dense = new double[source.size()];
-    this.made = new double[source.size()];
-    this.inSource = new double[source.size()];
-    this.inTarget = new double[target.size()];
-  }
-
   /**
-   * Learns from the links that a look has found probable.
+   * Judges two texts by what the links of these, or of an earlier state of them, have taught.
    *
    * @param band where links will be judged
    */
-  static Lexis learnt(Posteriors posteriors, Stems source, Stems target, Band band) {
-    WordPairs pairs = new WordPairs(source, target);
-    Lessons lessons = new Lessons(posteriors, source, target, pairs);
-    return new Lexis(source, target, pairs, lessons, band);
+  Lexis(Lexicon lexicon, Sides sides, Band band) {
+    this.lexicon = lexicon;
+    this.entries = lexicon.entries;
+    this.forward = lexicon.forward;
+    this.backward = lexicon.backward;
+    this.sourceUnits = sides.source().units;
+    this.targetUnits = sides.target().units;
+    this.source = new Said[sourceUnits.length];
+    this.target = new Said[targetUnits.length];
+    this.band = band;
+    this.dense = new double[lexicon.source.size() + 1];
+    this.made = new double[lexicon.source.size() + 1];
+    this.inSource = new double[lexicon.source.size() + 1];
+    this.inTarget = new double[lexicon.target.size() + 1];
   }
 
   /**
-   * What each target word has to do with source words: for the word {@code f} the entries from
-   * {@code first[f]} on.
+   * A unit as the lexicon knows it.
    *
-   * @param source the source word of each
-   * @param forward how much that makes the target word, by its general share
-   * @param backward the same the other way
+   * @param words the numbers of its words
+   * @param taught what was learnt from sentences of the same content
+   * @param scale for each word one over all its counts, less the unit's own lessons
+   * @param plain what its words make of any word of the other text
    */
-  private record Entries(int[] first, int[] source, float[] forward, float[] backward) {
-    static Entries room(int words, int entries) {
-      return new Entries(
-          new int[words + 1], new int[entries], new float[entries], new float[entries]);
-    }
-  }
-
-  private Entries entries() {
-    int[] counts = new int[target.size() + 1];
-    int all = 0;
-    for (int pair = 0; pair < pairs.size(); pair++) {
-      if (matters(pair)) {
-        counts[pairs.target(pair) + 1]++;
-        all++;
-      }
-    }
-    Entries room = Entries.room(target.size(), all);
-    for (int f = 0; f < target.size(); f++) {
-      room.first[f + 1] = room.first[f] + counts[f + 1];
-    }
-    int[] next = Arrays.copyOf(room.first, target.size());
-    for (int pair = 0; pair < pairs.size(); pair++) {
-      if (matters(pair)) {
-        int at = next[pairs.target(pair)]++;
-        room.source[at] = pairs.source(pair);
-        room.forward[at] = (float) forward.gain(pair);
-        room.backward[at] = (float) backward.gain(pair);
-      }
-    }
-    return room;
-  }
-
-  private boolean matters(int pair) {
-    return forward.gain(pair) >= LEAST * forward.total(pairs.source(pair))
-        || backward.gain(pair) >= LEAST * backward.total(pairs.target(pair));
-  }
+  private record Said(int[] words, Lexicon.Taught taught, double[] scale, double plain) {}
 
   @Override
   public double worth(int s, int sEnd, int t, int tEnd) {
@@ -128,12 +80,12 @@ final class Lexis implements LinkWords {
   }
 
   private double forward(int s, int sEnd, int t, int tEnd) {
-    double scale = (1 - FLOOR) / (1 + count(source, s, sEnd));
+    double scale = (1 - FLOOR) / (1 + sourceWords(s, sEnd));
     double log = 0;
     double product = 1;
     for (int j = t; j < tEnd; j++) {
       Row row = row(j, s, sEnd);
-      for (int b = 0; b < target.of[j].length; b++) {
+      for (int b = 0; b < target(j).words.length; b++) {
         double sum = 1;
         for (int i = s; i < sEnd; i++) {
           sum += row.forward[i - row.first][b];
@@ -149,11 +101,11 @@ final class Lexis implements LinkWords {
   }
 
   private double backward(int s, int sEnd, int t, int tEnd) {
-    double scale = (1 - FLOOR) / (1 + count(target, t, tEnd));
+    double scale = (1 - FLOOR) / (1 + targetWords(t, tEnd));
     double log = 0;
     double product = 1;
     for (int i = s; i < sEnd; i++) {
-      for (int a = 0; a < source.of[i].length; a++) {
+      for (int a = 0; a < source(i).words.length; a++) {
         double sum = 1;
         for (int j = t; j < tEnd; j++) {
           Row row = row(j, s, sEnd);
@@ -169,10 +121,18 @@ final class Lexis implements LinkWords {
     return log + Math.log(product);
   }
 
-  private static int count(Stems stems, int from, int to) {
+  private int sourceWords(int from, int to) {
     int count = 0;
     for (int i = from; i < to; i++) {
-      count += stems.of[i].length;
+      count += source(i).words.length;
+    }
+    return count;
+  }
+
+  private int targetWords(int from, int to) {
+    int count = 0;
+    for (int j = from; j < to; j++) {
+      count += target(j).words.length;
     }
     return count;
   }
@@ -201,7 +161,7 @@ final class Lexis implements LinkWords {
         first = Math.min(first, band.first()[t]);
         end = Math.max(end, band.last()[t] + Shape.MOST);
       }
-      row = new Row(j, first, Math.min(end, source.of.length));
+      row = new Row(j, first, Math.min(end, source.length));
       fill(row);
       rows[j % KEPT] = row;
     }
@@ -209,27 +169,26 @@ final class Lexis implements LinkWords {
   }
 
   private void fill(Row row) {
-    int j = row.target;
-    int[] said = target.of[j];
-    double[] scale = targetScale(j);
-    double plain = 0;
+    Said target = target(row.target);
+    int[] said = target.words;
+    double[] scale = target.scale;
+    double plain = target.plain;
     for (int b = 0; b < said.length; b++) {
-      plain += backward.plain(said[b]) * scale[b];
       inTarget[said[b]] += scale[b];
     }
     for (int i = 0; i < row.forward.length; i++) {
       row.forward[i] = new float[said.length];
-      sourceScale(row.first + i);
     }
     for (int b = 0; b < said.length; b++) {
-      spread(j, said[b], scale[b]);
+      spread(target.taught, said[b], scale[b]);
       for (int i = 0; i < row.forward.length; i++) {
-        row.forward[i][b] = (float) (sourcePlain[row.first + i] + sum(row.first + i));
+        Said source = source(row.first + i);
+        row.forward[i][b] = (float) (source.plain + sum(source));
       }
-      clear(j, said[b]);
+      clear(target.taught, said[b]);
     }
     for (int i = 0; i < row.backward.length; i++) {
-      int[] words = source.of[row.first + i];
+      int[] words = source(row.first + i).words;
       row.backward[i] = new float[words.length];
       for (int a = 0; a < words.length; a++) {
         row.backward[i][a] = (float) (plain + made[words[a]]);
@@ -237,60 +196,58 @@ final class Lexis implements LinkWords {
       leaveOut(row, i, (float) plain);
     }
     for (int f : said) {
-      forget(j, f);
+      forget(target.taught, f);
       inTarget[f] = 0;
     }
   }
 
   /** Lays out what makes a target word, and adds what it makes, less the lessons of its unit. */
-  private void spread(int j, int f, double scale) {
-    for (int at = entries.first[f]; at < entries.first[f + 1]; at++) {
-      int e = entries.source[at];
-      dense[e] = entries.forward[at];
-      made[e] += entries.backward[at] * scale;
+  private void spread(Lexicon.Taught taught, int f, double scale) {
+    for (int at = entries.first()[f]; at < entries.first()[f + 1]; at++) {
+      int e = entries.source()[at];
+      dense[e] = entries.forward()[at];
+      made[e] += entries.backward()[at] * scale;
     }
-    for (int x : lessons.ofTarget[j]) {
-      Lessons.Lesson lesson = lessons.all.get(x);
+    for (Lessons.Lesson lesson : taught.lessons()) {
       int width = lesson.source().length;
       for (int b = 0; b < lesson.target().length; b++) {
         if (lesson.target()[b] == f) {
           for (int a = 0; a < width; a++) {
             int e = lesson.source()[a];
-            dense[e] -= lesson.forward()[b * width + a] / forward.general(f);
-            made[e] -= lesson.backward()[b * width + a] / backward.general(e) * scale;
+            double share = taught.share();
+            dense[e] -= share * lesson.forward()[b * width + a] / forward.general(f);
+            made[e] -= share * lesson.backward()[b * width + a] / backward.general(e) * scale;
           }
         }
       }
     }
   }
 
-  private double sum(int i) {
-    int[] words = source.of[i];
-    double[] scale = sourceScale[i];
+  private double sum(Said source) {
     double sum = 0;
-    for (int a = 0; a < words.length; a++) {
-      sum += Math.max(0, dense[words[a]]) * scale[a];
+    for (int a = 0; a < source.words.length; a++) {
+      sum += Math.max(0, dense[source.words[a]]) * source.scale[a];
     }
     return sum;
   }
 
-  private void clear(int j, int f) {
-    for (int at = entries.first[f]; at < entries.first[f + 1]; at++) {
-      dense[entries.source[at]] = 0;
+  private void clear(Lexicon.Taught taught, int f) {
+    for (int at = entries.first()[f]; at < entries.first()[f + 1]; at++) {
+      dense[entries.source()[at]] = 0;
     }
-    for (int x : lessons.ofTarget[j]) {
-      for (int e : lessons.all.get(x).source()) {
+    for (Lessons.Lesson lesson : taught.lessons()) {
+      for (int e : lesson.source()) {
         dense[e] = 0;
       }
     }
   }
 
-  private void forget(int j, int f) {
-    for (int at = entries.first[f]; at < entries.first[f + 1]; at++) {
-      made[entries.source[at]] = 0;
+  private void forget(Lexicon.Taught taught, int f) {
+    for (int at = entries.first()[f]; at < entries.first()[f + 1]; at++) {
+      made[entries.source()[at]] = 0;
     }
-    for (int x : lessons.ofTarget[j]) {
-      for (int e : lessons.all.get(x).source()) {
+    for (Lessons.Lesson lesson : taught.lessons()) {
+      for (int e : lesson.source()) {
         made[e] = 0;
       }
     }
@@ -298,15 +255,14 @@ final class Lexis implements LinkWords {
 
   /** Takes away what the other lessons of a source unit taught of its words and the row's. */
   private void leaveOut(Row row, int at, float plain) {
-    int i = row.first + at;
-    int[] words = source.of[i];
-    double[] scale = sourceScale[i];
+    Said source = source(row.first + at);
+    int[] words = source.words;
     for (int a = 0; a < words.length; a++) {
-      inSource[words[a]] += scale[a];
+      inSource[words[a]] += source.scale[a];
     }
-    for (int x : lessons.ofSource[i]) {
-      if (!isIn(lessons.ofTarget[row.target], x)) {
-        leaveOut(row, at, lessons.all.get(x));
+    for (Lessons.Lesson lesson : source.taught.lessons()) {
+      if (!target(row.target).taught.has(lesson)) {
+        leaveOut(row, at, lesson, source.taught.share());
       }
     }
     for (int a = 0; a < words.length; a++) {
@@ -314,20 +270,20 @@ final class Lexis implements LinkWords {
       row.backward[at][a] = Math.max(plain, row.backward[at][a]);
     }
     for (int b = 0; b < row.forward[at].length; b++) {
-      row.forward[at][b] = (float) Math.max(sourcePlain[i], row.forward[at][b]);
+      row.forward[at][b] = (float) Math.max(source.plain, row.forward[at][b]);
     }
   }
 
-  private void leaveOut(Row row, int at, Lessons.Lesson lesson) {
-    int[] said = target.of[row.target];
-    int[] words = source.of[row.first + at];
+  private void leaveOut(Row row, int at, Lessons.Lesson lesson, double share) {
+    int[] said = target(row.target).words;
+    int[] words = source(row.first + at).words;
     int width = lesson.source().length;
     for (int b = 0; b < lesson.target().length; b++) {
       int f = lesson.target()[b];
       if (inTarget[f] > 0) {
         double mass = 0;
         for (int a = 0; a < width; a++) {
-          mass += lesson.forward()[b * width + a] * inSource[lesson.source()[a]];
+          mass += share * lesson.forward()[b * width + a] * inSource[lesson.source()[a]];
         }
         for (int k = 0; k < said.length; k++) {
           row.forward[at][k] -= said[k] == f ? (float) (mass / forward.general(f)) : 0;
@@ -336,7 +292,8 @@ final class Lexis implements LinkWords {
           int e = lesson.source()[a];
           if (inSource[e] > 0) {
             float less =
-                (float) (lesson.backward()[b * width + a] / backward.general(e) * inTarget[f]);
+                (float)
+                    (share * lesson.backward()[b * width + a] / backward.general(e) * inTarget[f]);
             for (int k = 0; k < words.length; k++) {
               row.backward[at][k] -= words[k] == e ? less : 0;
             }
@@ -346,46 +303,36 @@ final class Lexis implements LinkWords {
     }
   }
 
-  private static boolean isIn(int[] list, int value) {
-    for (int one : list) {
-      if (one == value) {
-        return true;
-      }
+  private Said source(int i) {
+    if (source[i] == null) {
+      int[] words = lexicon.source.numbers(sourceUnits[i]);
+      Lexicon.Taught taught = lexicon.bySource(Stems.content(sourceUnits[i]));
+      source[i] = said(words, taught, forward, true);
     }
-    return false;
+    return source[i];
   }
 
-  /** For each word of a source unit one over all its counts, less its own lessons. */
-  private double[] sourceScale(int i) {
-    if (sourceScale[i] == null) {
-      int[] words = source.of[i];
-      double[] scale = new double[words.length];
-      for (int a = 0; a < words.length; a++) {
-        double own = 0;
-        for (int x : lessons.ofSource[i]) {
-          own += lessons.all.get(x).ofSource(words[a]);
-        }
-        scale[a] = 1 / Math.max(Translations.PRIOR, forward.total(words[a]) - own);
-        sourcePlain[i] += forward.plain(words[a]) * scale[a];
-      }
-      sourceScale[i] = scale;
+  private Said target(int j) {
+    if (target[j] == null) {
+      int[] words = lexicon.target.numbers(targetUnits[j]);
+      Lexicon.Taught taught = lexicon.byTarget(Stems.content(targetUnits[j]));
+      target[j] = said(words, taught, backward, false);
     }
-    return sourceScale[i];
+    return target[j];
   }
 
-  private double[] targetScale(int j) {
-    if (targetScale[j] == null) {
-      int[] words = target.of[j];
-      double[] scale = new double[words.length];
-      for (int b = 0; b < words.length; b++) {
-        double own = 0;
-        for (int x : lessons.ofTarget[j]) {
-          own += lessons.all.get(x).ofTarget(words[b]);
-        }
-        scale[b] = 1 / Math.max(Translations.PRIOR, backward.total(words[b]) - own);
+  private static Said said(int[] words, Lexicon.Taught taught, Translations by, boolean ofSource) {
+    double[] scale = new double[words.length];
+    double plain = 0;
+    for (int a = 0; a < words.length; a++) {
+      double own = 0;
+      for (Lessons.Lesson lesson : taught.lessons()) {
+        own += ofSource ? lesson.ofSource(words[a]) : lesson.ofTarget(words[a]);
       }
-      targetScale[j] = scale;
+      double total = by.total(words[a]) - taught.share() * own;
+      scale[a] = 1 / Math.max(Translations.PRIOR, total);
+      plain += by.plain(words[a]) * scale[a];
     }
-    return targetScale[j];
+    return new Said(words, taught, scale, plain);
   }
 }

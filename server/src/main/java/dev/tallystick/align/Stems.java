@@ -11,19 +11,24 @@ final class Stems {
   /** For each number one of its words. */
   final Unit.Word[] words;
 
-  /** For each number its share among all words of the text, smoothed. */
+  /** For each number its share among all words of the text, smoothed; last that of any other. */
   final double[] general;
+
+  /** For each unit what tells it from others ({@link #content(Unit)}). */
+  final long[] content;
 
   private final Vocabulary vocabulary;
 
   Stems(Side side) {
     this.vocabulary = Vocabulary.of(side, Unit.Word::stem);
     this.of = new int[side.size()][];
+    this.content = new long[side.size()];
     this.words = new Unit.Word[vocabulary.size()];
     int[] counts = new int[words.length];
     int all = 0;
     for (int i = 0; i < of.length; i++) {
       Unit.Word[] said = side.units[i].words();
+      content[i] = content(side.units[i]);
       int[] numbers = new int[said.length];
       for (int k = 0; k < said.length; k++) {
         numbers[k] = vocabulary.number(said[k].stem());
@@ -33,10 +38,37 @@ final class Stems {
       of[i] = side.units[i].verbatim() ? NONE : numbers;
       all += said.length;
     }
-    this.general = new double[words.length];
-    for (int number = 0; number < words.length; number++) {
-      general[number] = (counts[number] + SMOOTHING) / (all + SMOOTHING * words.length);
+    this.general = new double[words.length + 1];
+    for (int number = 0; number <= words.length; number++) {
+      int count = number < words.length ? counts[number] : 0;
+      general[number] = (count + SMOOTHING) / (all + SMOOTHING * words.length);
     }
+  }
+
+  /** Equal for units with the same words and of the same length. */
+  static long content(Unit unit) {
+    long content = unit.length() * 2L + (unit.verbatim() ? 1 : 0);
+    for (Unit.Word word : unit.words()) {
+      content = (content ^ word.stem()) * 0x9E3779B97F4A7C15L;
+      content ^= content >>> 32;
+    }
+    return content;
+  }
+
+  /**
+   * The numbers of a unit's words, {@link #size()} for any that is not known; as in {@link #of}.
+   */
+  int[] numbers(Unit unit) {
+    if (unit.verbatim()) {
+      return NONE;
+    }
+    Unit.Word[] said = unit.words();
+    int[] numbers = new int[said.length];
+    for (int k = 0; k < said.length; k++) {
+      int number = vocabulary.number(said[k].stem());
+      numbers[k] = number < 0 ? size() : number;
+    }
+    return numbers;
   }
 
   int size() {

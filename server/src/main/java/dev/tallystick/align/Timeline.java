@@ -22,11 +22,21 @@ final class Timeline {
     this.from = new double[units.length];
     this.to = new double[units.length];
     for (int i = 0; i < units.length; i++) {
-      from[i] = units[i].timed() ? units[i].from() / 1000.0 : Double.NaN;
-      to[i] = units[i].timed() ? units[i].to() / 1000.0 : Double.NaN;
+      from[i] = begin(units[i]);
+      to[i] = end(units[i]);
     }
     this.step = median(steps(begins));
     this.stay = Math.max(FASTEST, median(stays));
+  }
+
+  /** When a unit comes on the screen, in seconds. */
+  static double begin(Unit unit) {
+    return unit.timed() ? unit.from() / 1000.0 : Double.NaN;
+  }
+
+  /** When a unit goes from the screen, in seconds. */
+  static double end(Unit unit) {
+    return unit.timed() ? unit.to() / 1000.0 : Double.NaN;
   }
 
   /** The times of a text; null if it has too few, or if they make no sense. */

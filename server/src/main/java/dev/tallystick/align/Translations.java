@@ -21,7 +21,9 @@ final class Translations {
   private static final double HARDLY = 0.05;
   private static final double ENOUGH = 0.25;
 
-  private final WordPairs pairs;
+  /** Null once nothing more is asked about pairs; so are the counts. */
+  private WordPairs pairs;
+
   private final boolean forward;
   private final double[] general;
 
@@ -29,7 +31,7 @@ final class Translations {
   private final double[] faithful;
 
   /** For the first pairs the share of the made word in that. */
-  private final double[] alike;
+  private double[] alike;
 
   private double[] counts;
 
@@ -40,9 +42,9 @@ final class Translations {
     this.pairs = pairs;
     this.forward = forward;
     this.general = made.general;
-    this.faithful = new double[given.size()];
+    this.faithful = new double[given.size() + 1]; // the last for words not known
     this.alike = new double[pairs.alike()];
-    this.totals = new double[given.size()];
+    this.totals = new double[given.size() + 1];
     double[] sums = new double[given.size()];
     boolean[] same = new boolean[given.size()];
     for (int pair = 0; pair < alike.length; pair++) {
@@ -122,6 +124,13 @@ final class Translations {
    */
   double gain(int pair) {
     return (counts[pair] + PRIOR * likeness(pair)) / general[made(pair)];
+  }
+
+  /** Nothing more will be asked about pairs. */
+  void forget() {
+    pairs = null;
+    counts = null;
+    alike = null;
   }
 
   /** How often a made word stands in general, as a share. */

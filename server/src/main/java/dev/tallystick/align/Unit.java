@@ -1,5 +1,7 @@
 package dev.tallystick.align;
 
+import java.util.Arrays;
+
 /**
  * What the aligner knows of one sentence, or of one verbatim block.
  *
@@ -49,6 +51,20 @@ public record Unit(
   /** The same, shown at this time. */
   public Unit shown(long start, long end) {
     return new Unit(length, codePoints, letters, opens, kind, close, words, verbatim, start, end);
+  }
+
+  /** Whether another unit is equal to this one; records with arrays are not by themselves. */
+  boolean same(Unit other) {
+    return length == other.length
+        && codePoints == other.codePoints
+        && letters == other.letters
+        && opens == other.opens
+        && kind == other.kind
+        && close == other.close
+        && verbatim == other.verbatim
+        && from == other.from
+        && to == other.to
+        && Arrays.equals(words, other.words);
   }
 
   boolean timed() {

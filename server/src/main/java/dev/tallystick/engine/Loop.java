@@ -244,7 +244,7 @@ public final class Loop implements AutoCloseable {
     }
     concerned.ifPresentOrElse(pairs::stir, pairs::stirAll);
     pairs.applyMarks(library, file -> audience.say(Announcements.alone(file)));
-    pairs.take(library, workers, questions.awaited(pairs.pairs()));
+    pairs.take(library, workers, questions.awaited(pairs.pairs()), caret.last());
     pass.left(pairs.unsettledAside(library));
     pairs.show(caret.last());
     concerned.ifPresentOrElse(display::updateOnly, display::update);

@@ -2,6 +2,7 @@ package dev.tallystick.engine;
 
 import dev.tallystick.align.Aligner;
 import dev.tallystick.align.Alignment;
+import dev.tallystick.align.Judgement;
 import dev.tallystick.check.Checks;
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.Levels;
@@ -12,6 +13,7 @@ import dev.tallystick.check.Subject;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.run.Cancellation;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * All that is known of a pair of texts.
@@ -22,6 +24,8 @@ import java.util.List;
  * @param findings what is worth telling, the source's first
  * @param pending which source sentences nobody has got to yet
  * @param progress how far the translation has come
+ * @param judgement what the alignment was judged by, to judge later states of the texts by; empty
+ *     if nobody will ask
  */
 public record PairResult(
     Reading source,
@@ -29,7 +33,8 @@ public record PairResult(
     Alignment alignment,
     List<Finding> findings,
     Pending pending,
-    Progress progress) {
+    Progress progress,
+    Optional<Judgement> judgement) {
   /** The language that the text on a side was read in. */
   public Language language(OnSide side) {
     return new Language(reading(side).language());
@@ -43,16 +48,42 @@ public record PairResult(
   public static PairResult of(
       Reading source, Reading target, Aligner aligner, boolean draft, Cancellation cancellation) {
     Alignment alignment = aligner.align(source.units(), target.units(), cancellation);
+    return of(source, target, alignment, draft, Optional.empty());
+  }
+
+  /** Checks what was aligned. */
+  static PairResult of(Reading source, Reading target, Judgement judgement, boolean draft) {
+    return of(source, target, judgement.alignment(), draft, Optional.of(judgement));
+  }
+
+  private static PairResult of(
+      Reading source,
+      Reading target,
+      Alignment alignment,
+      boolean draft,
+      Optional<Judgement> judgement) {
     Subject subject =
         new Subject(source.segments(), target.segments(), target.language(), alignment, draft);
     Pending pending = Pending.of(subject);
     List<Finding> findings = Checks.findings(subject, pending);
-    return new PairResult(source, target, alignment, findings, pending, Progress.of(subject));
+    Progress progress = Progress.of(subject);
+    return new PairResult(source, target, alignment, findings, pending, progress, judgement);
   }
 
   /** The same with the findings that a project wants to hear of, as loudly as it wants. */
   public PairResult at(Levels levels) {
-    return new PairResult(source, target, alignment, levels.apply(findings), pending, progress);
+    List<Finding> told = levels.apply(findings);
+    return new PairResult(source, target, alignment, told, pending, progress, judgement);
+  }
+
+  /** Whether it was judged by what an earlier state of the texts has taught. */
+  boolean provisional() {
+    return judgement.filter(one -> !one.learntFromItself()).isPresent();
+  }
+
+  /** The same, where no later states will be judged by it. */
+  PairResult last() {
+    return new PairResult(source, target, alignment, findings, pending, progress, Optional.empty());
   }
 
   /** One of the two texts, read. */

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.align.Judgement;
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
@@ -16,6 +17,11 @@ import java.util.Optional;
 final class PairState {
   private final FilePair files;
   private Task task;
+
+  /** The same texts, being learnt from while what was found in them is shown already. */
+  private Optional<Task> learning = Optional.empty();
+
+  private Optional<Judgement> known = Optional.empty();
   private boolean running;
   private boolean waiting;
   private boolean stirred = true;
@@ -78,9 +84,11 @@ final class PairState {
    * Takes the current texts; whatever was found in others, or is being looked for, is dropped.
    *
    * @param draft whether the translation is still being written
+   * @param edited whether somebody writes in it, so that a quick answer is wanted
    * @return work to be done, if the texts are new and both there
    */
-  Optional<Task> take(Optional<Sheet> source, Optional<Sheet> target, boolean draft) {
+  Optional<Task> take(
+      Optional<Sheet> source, Optional<Sheet> target, boolean draft, boolean edited) {
     waiting = false;
     if (current(source, target, draft)) {
       return Optional.empty();
@@ -89,9 +97,33 @@ final class PairState {
     if (source.isEmpty() || target.isEmpty()) {
       return Optional.empty();
     }
-    task = new Task(files, source.get(), target.get(), draft);
+    Optional<Judgement> basis = edited ? known : Optional.empty();
+    task = new Task(files, source.get(), target.get(), draft, basis);
     running = true;
     return Optional.of(task);
+  }
+
+  /**
+   * Nobody writes in it any more: what was judged by what an earlier state has taught is to be
+   * judged by what this one teaches.
+   *
+   * @return that work, if it has not been begun
+   */
+  Optional<Task> rest() {
+    boolean due =
+        !running && learning.isEmpty() && found.filter(PairResult::provisional).isPresent();
+    if (due) {
+      learning = Optional.of(task.learning());
+    }
+    return due ? learning : Optional.empty();
+  }
+
+  /** Nobody can write in it: what later states would be judged by is forgotten. */
+  void forget() {
+    known = Optional.empty();
+    if (found.filter(one -> one.judgement().isPresent() && !one.provisional()).isPresent()) {
+      take(found.map(PairResult::last));
+    }
   }
 
   /** The pair is no longer wanted, or its texts are no longer these. */
@@ -99,6 +131,8 @@ final class PairState {
     if (task != null) {
       task.drop();
     }
+    learning.ifPresent(Task::drop);
+    learning = Optional.empty();
     task = null;
     running = false;
     take(Optional.empty());
@@ -108,6 +142,9 @@ final class PairState {
   void finish(Task done, Optional<PairResult> now) {
     if (task == done) {
       running = false;
+      stir();
+      take(now);
+    } else if (learning.filter(one -> one == done).isPresent() && now.isPresent()) {
       stir();
       take(now);
     }
@@ -124,6 +161,7 @@ final class PairState {
   private void take(Optional<PairResult> now) {
     found = now;
     result = now.map(one -> one.at(levels));
+    known = now.flatMap(PairResult::judgement).or(() -> known);
   }
 
   /** The pair's translation was edited; the turn tells which pair was edited last. */

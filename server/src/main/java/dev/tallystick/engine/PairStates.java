@@ -75,8 +75,10 @@ final class PairStates {
    * before.
    *
    * @param awaited pairs that take no turns, though they may not be open
+   * @param caret where the translator writes; in all other pairs what is shown has to rest on what
+   *     the current texts teach
    */
-  void take(Library library, Workers workers, Set<FilePair> awaited) {
+  void take(Library library, Workers workers, Set<FilePair> awaited, Optional<Caret.Edited> caret) {
     int free = workers.aside() - (int) states.values().stream().filter(PairState::running).count();
     for (PairState pair : states.values()) {
       boolean now = free > 0 || awaited.contains(pair.files());
@@ -87,22 +89,29 @@ final class PairStates {
       pair.at(library.levels(pair.files()));
       boolean open = library.shows(pair.files()) || awaited.contains(pair.files());
       if (open || free > 0 || library.knows(pair.files())) {
-        Optional<Task> task = take(library, pair, open || free > 0);
+        boolean edited = caret.filter(at -> pair.files().has(at.file())).isPresent();
+        Optional<Task> task = take(library, pair, open || free > 0, edited);
         task.ifPresent(work -> workers.examine(work, open));
         free -= task.isPresent() ? 1 : 0;
+        if (!edited) {
+          pair.rest().ifPresent(workers::learn);
+        }
+        if (!library.shows(pair.files())) {
+          pair.forget();
+        }
       } else {
         pair.await();
       }
     }
   }
 
-  private Optional<Task> take(Library library, PairState pair, boolean now) {
+  private Optional<Task> take(Library library, PairState pair, boolean now, boolean edited) {
     FilePair files = pair.files();
     Optional<Sheet> source = library.sheet(files, OnSide.SOURCE);
     Optional<Sheet> target = library.sheet(files, OnSide.TARGET);
     boolean draft = !finished.contains(files.target());
     if (now || pair.current(source, target, draft)) {
-      return pair.take(source, target, draft);
+      return pair.take(source, target, draft, edited);
     }
     pair.await();
     return Optional.empty();

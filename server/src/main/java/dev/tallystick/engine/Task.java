@@ -1,6 +1,8 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.align.Judgement;
 import dev.tallystick.run.Cancellation;
+import java.util.Optional;
 
 /** One state of one pair, for a worker to examine. */
 public final class Task implements Cancellation {
@@ -8,13 +10,20 @@ public final class Task implements Cancellation {
   private final Sheet source;
   private final Sheet target;
   private final boolean draft;
+  private final Optional<Judgement> known;
   private volatile boolean dropped;
 
-  Task(FilePair files, Sheet source, Sheet target, boolean draft) {
+  Task(FilePair files, Sheet source, Sheet target, boolean draft, Optional<Judgement> known) {
     this.files = files;
     this.source = source;
     this.target = target;
     this.draft = draft;
+    this.known = known;
+  }
+
+  /** The same, to be learnt from. */
+  Task learning() {
+    return new Task(files, source, target, draft, Optional.empty());
   }
 
   FilePair files() {
@@ -32,6 +41,11 @@ public final class Task implements Cancellation {
   /** Whether the translation is still being written. */
   boolean draft() {
     return draft;
+  }
+
+  /** What an earlier state of the texts has taught; empty if these are to be learnt from. */
+  Optional<Judgement> known() {
+    return known;
   }
 
   /** Whether it is about these texts, in this state. */

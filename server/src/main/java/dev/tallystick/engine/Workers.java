@@ -41,6 +41,11 @@ final class Workers {
     run(open ? pool : aside, () -> examined(task));
   }
 
+  /** Learns from the texts of a pair of which there is a result already. Nobody waits for it. */
+  void learn(Task task) {
+    run(aside, () -> examined(task));
+  }
+
   /** How many pairs that are not open can be examined at once. */
   int aside() {
     return machine.workers();
@@ -78,7 +83,12 @@ final class Workers {
       PairResult result =
           machine
               .examiner()
-              .examine(task.source().reading(), task.target().reading(), task.draft(), task);
+              .examine(
+                  task.source().reading(),
+                  task.target().reading(),
+                  task.draft(),
+                  task.known(),
+                  task);
       return new Event.Examined(task, Optional.of(result), Optional.empty());
     } catch (Cancellation.Cancelled e) {
       return new Event.Examined(task, Optional.empty(), Optional.empty());

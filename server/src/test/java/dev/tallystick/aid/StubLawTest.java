@@ -17,6 +17,7 @@ import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
@@ -55,6 +56,7 @@ class StubLawTest {
         Reading.of(new Text(source), layout.format, "en", Cancellation.NONE),
         Reading.of(new Text(target), layout.format, "de", Cancellation.NONE),
         true,
+        Optional.empty(),
         Cancellation.NONE);
   }
 

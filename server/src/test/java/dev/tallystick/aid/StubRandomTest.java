@@ -13,6 +13,7 @@ import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Random;
 import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -82,7 +83,11 @@ class StubRandomTest {
     for (int round = 0; round < ROUNDS; round++) {
       PairResult pair =
           Examiner.ADAPTIVE.examine(
-              read(random, format, "en"), read(random, format, "de"), true, Cancellation.NONE);
+              read(random, format, "en"),
+              read(random, format, "de"),
+              true,
+              Optional.empty(),
+              Cancellation.NONE);
       Places places = new Places(pair);
       List<Integer> missing =
           IntStream.range(0, pair.source().segments().size())

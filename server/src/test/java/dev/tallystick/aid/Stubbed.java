@@ -12,6 +12,7 @@ import dev.tallystick.run.Cancellation;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** A pair whose matches are given, and its translation with what is missing put in. */
 final class Stubbed {
@@ -49,7 +50,13 @@ final class Stubbed {
     Alignment alignment = new Alignment(chain, sourceNull, targetNull, List.of(), null);
     Subject subject = new Subject(one.segments(), other.segments(), "de", alignment, true);
     return new PairResult(
-        one, other, alignment, List.of(), Pending.of(subject), Progress.of(subject));
+        one,
+        other,
+        alignment,
+        List.of(),
+        Pending.of(subject),
+        Progress.of(subject),
+        Optional.empty());
   }
 
   private static int count(String indices) {

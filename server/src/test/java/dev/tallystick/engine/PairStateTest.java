@@ -28,13 +28,17 @@ class PairStateTest {
   }
 
   private Task take(Sheet target) {
-    return pair.take(Optional.of(source), Optional.of(target), true).orElseThrow();
+    return pair.take(Optional.of(source), Optional.of(target), true, false).orElseThrow();
   }
 
   private static Optional<PairResult> result(Task task) {
     return Optional.of(
         Examiner.ADAPTIVE.examine(
-            task.source().reading(), task.target().reading(), task.draft(), Cancellation.NONE));
+            task.source().reading(),
+            task.target().reading(),
+            task.draft(),
+            task.known(),
+            Cancellation.NONE));
   }
 
   @Test
@@ -57,13 +61,14 @@ class PairStateTest {
   void theSameTextsMakeNoNewWork() {
     Sheet target = sheet("Die Glocke läutet.", "de");
     take(target);
-    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.of(target), true));
+    assertEquals(
+        Optional.empty(), pair.take(Optional.of(source), Optional.of(target), true, false));
   }
 
   @Test
   void withoutOneTextNothingMoreIsToCome() {
     Task task = take(sheet("Die Glocke läutet.", "de"));
-    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.empty(), true));
+    assertEquals(Optional.empty(), pair.take(Optional.of(source), Optional.empty(), true, false));
     assertTrue(pair.settled());
     assertTrue(task.cancelled());
   }

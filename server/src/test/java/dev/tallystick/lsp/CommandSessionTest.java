@@ -79,9 +79,9 @@ class CommandSessionTest {
     try (Talk talk = Talk.in(folder)) {
       AtomicInteger runs = new AtomicInteger();
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             runs.incrementAndGet();
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       talk.open(work.en(), Ferry.EN);
       talk.settle();

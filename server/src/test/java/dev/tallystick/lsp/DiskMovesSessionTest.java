@@ -37,9 +37,9 @@ class DiskMovesSessionTest {
       Counting counting = new Counting();
       talk.machine.disk = counting;
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             counting.runs.incrementAndGet();
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       return counting;
     }

@@ -57,7 +57,7 @@ class FaultSessionTest {
     Work work = Work.withoutFog(folder);
     try (Talk talk = Talk.in(folder)) {
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             throw new LinkageError("text of a file");
           };
       Buffer german = talk.open(work.de(), Ferry.DE_WITHOUT_FOG);

@@ -234,11 +234,11 @@ class FindingsSessionTest {
     work.write("fr/ferry.md", Ferry.FR_WITHOUT_FOG);
     try (Talk talk = Talk.in(folder)) {
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             if (target.language().equals("fr")) {
               throw new IllegalStateException(target.text().string());
             }
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       Buffer english = talk.open(work.en(), Ferry.EN);
       talk.settle();

@@ -65,7 +65,7 @@ class ProgressSessionTest {
       assertEquals(1, talk.progress.size(), "the same figures");
       String more = Ferry.DE.substring(half.length(), Ferry.DE.indexOf("Eine Laterne"));
       german.type(half.length(), half.length(), more);
-      talk.settle();
+      talk.pass(1500);
       int lantern = WordCount.of(Ferry.line(Ferry.EN, "A lantern"));
       assertEquals(german(ALL - lantern, lantern, Map.of()), last(talk));
     }

@@ -246,9 +246,9 @@ class ProjectSessionTest {
     try (Talk talk = Talk.in(folder)) {
       AtomicInteger runs = new AtomicInteger();
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             runs.incrementAndGet();
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       talk.open(work.de(), german);
       Buffer project = talk.open(work.file(NAME), "{ \"checks\": {} }");

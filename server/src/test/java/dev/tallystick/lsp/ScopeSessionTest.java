@@ -207,11 +207,11 @@ class ScopeSessionTest {
     CountDownLatch others = new CountDownLatch(1);
     try (Talk talk = Talk.in(folder)) {
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             if (!target.text().string().contains("Frost")) {
               await(others);
             }
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       scope(talk, "folder");
       Path open = work.file("de/ferry7.md");
@@ -234,11 +234,11 @@ class ScopeSessionTest {
     CountDownLatch others = new CountDownLatch(1);
     try (Talk talk = Talk.in(folder)) {
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             if (target.text().string().equals(Ferry.DE_WITHOUT_FOG)) {
               await(others);
             }
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       scope(talk, "folder");
       Buffer german = talk.open(work.file("de/ferry7.md"), Ferry.DE);
@@ -258,9 +258,9 @@ class ScopeSessionTest {
       talk.settle();
       talk.machine.disk = reading(read);
       talk.machine.examiner =
-          (source, target, draft, cancellation) -> {
+          (source, target, draft, known, cancellation) -> {
             await(gate);
-            return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+            return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
           };
       scope(talk, "folder");
       Buffer notes = talk.open(folder.resolve("notes.md"), "Nothing.");

@@ -1,5 +1,6 @@
 package dev.tallystick.lsp;
 
+import dev.tallystick.align.Judgement;
 import dev.tallystick.engine.Disk;
 import dev.tallystick.engine.Event;
 import dev.tallystick.engine.Examiner;
@@ -14,6 +15,7 @@ import dev.tallystick.run.Cancellation;
 import dev.tallystick.run.HandAlarm;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.Consumer;
@@ -97,10 +99,14 @@ final class Surround {
   }
 
   private PairResult examine(
-      Reading source, Reading target, boolean draft, Cancellation cancellation) {
+      Reading source,
+      Reading target,
+      boolean draft,
+      Optional<Judgement> known,
+      Cancellation cancellation) {
     await(gate);
     cancellation.check();
-    return examiner.examine(source, target, draft, cancellation);
+    return examiner.examine(source, target, draft, known, cancellation);
   }
 
   private Watch watch(Consumer<Event> to) {

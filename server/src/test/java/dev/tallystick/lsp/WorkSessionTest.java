@@ -23,9 +23,9 @@ class WorkSessionTest {
   private static List<Seen> watch(Talk talk) {
     List<Seen> seen = new CopyOnWriteArrayList<>();
     talk.machine.examiner =
-        (source, target, draft, cancellation) -> {
+        (source, target, draft, known, cancellation) -> {
           seen.add(new Seen(source, target));
-          return Examiner.ADAPTIVE.examine(source, target, draft, cancellation);
+          return Examiner.ADAPTIVE.examine(source, target, draft, known, cancellation);
         };
     return seen;
   }
