@@ -1,5 +1,7 @@
 package dev.tallystick.align;
 
+import java.util.Arrays;
+
 /**
  * Evidence from the words of a link, by what the links of the pair itself have taught. How likely
  * the words of one side make a word of the other is summed over its words; a word counts as {@code
@@ -57,6 +59,24 @@ final class Lexis implements LinkWords {
     this.made = new double[lexicon.source.size() + 1];
     this.inSource = new double[lexicon.source.size() + 1];
     this.inTarget = new double[lexicon.target.size() + 1];
+  }
+
+  /** The texts are these now. */
+  void replace(Change inSource, Change inTarget, Sides sides, Band judgedIn) {
+    source = replaced(source, inSource);
+    target = replaced(target, inTarget);
+    sourceUnits = sides.source().units;
+    targetUnits = sides.target().units;
+    band = judgedIn;
+    Arrays.fill(rows, null);
+  }
+
+  private static Said[] replaced(Said[] said, Change change) {
+    Said[] all = new Said[said.length + change.shift()];
+    int behind = change.from() + change.removed();
+    System.arraycopy(said, 0, all, 0, change.from());
+    System.arraycopy(said, behind, all, change.from() + change.added(), said.length - behind);
+    return all;
   }
 
   /**

@@ -71,6 +71,22 @@ final class Side {
     }
   }
 
+  /** Whether blocks begin and end at a node as they did at a node of another text. */
+  boolean sameBlocks(int node, Side other, int otherNode) {
+    int ending = blockEndingAt[node] < 0 ? 0 : node - blockEndingAt[node];
+    int starting = blockStartingAt[node] < 0 ? 0 : blockStartingAt[node] - node;
+    int otherEnding =
+        other.blockEndingAt[otherNode] < 0 ? 0 : otherNode - other.blockEndingAt[otherNode];
+    int otherStarting =
+        other.blockStartingAt[otherNode] < 0 ? 0 : other.blockStartingAt[otherNode] - otherNode;
+    return ending == otherEnding && starting == otherStarting;
+  }
+
+  /** The text after a change; nothing says any more when its units are on the screen. */
+  Side replaced(Change change, List<Unit> now) {
+    return change.isNone() ? this : new Side(now);
+  }
+
   /** The same units, but nothing says when they are on the screen. */
   Side untimed() {
     return new Side(Arrays.stream(units).map(unit -> unit.shown(0, -1)).toList());

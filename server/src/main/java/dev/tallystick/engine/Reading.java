@@ -4,6 +4,7 @@ import dev.tallystick.align.Unit;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
+import dev.tallystick.segment.KnownSentences;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Segmenter;
 import dev.tallystick.segment.Srx;
@@ -40,18 +41,53 @@ public record Reading(
 
   /** Reads a file in a language, a BCP 47 tag. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
-    return of(text, format, Tongue.of(new Language(language)), Srx.NONE, cancellation);
+    Tongue tongue = Tongue.of(new Language(language));
+    return of(text, format, tongue, Srx.NONE, Earlier.nothing(), cancellation);
   }
 
   /** Reads a file by the rules for sentence borders that its project has. */
   public static Reading of(
       Text text, Format format, Tongue tongue, Srx rules, Cancellation cancellation) {
+    return of(text, format, tongue, rules, Earlier.nothing(), cancellation);
+  }
+
+  /**
+   * What was found in an earlier state of a file, in the same language and by the same rules.
+   *
+   * @param sentences where the sentences of its blocks are
+   * @param units what the aligner knows of them
+   */
+  record Earlier(KnownSentences sentences, Units units) {
+    static Earlier nothing() {
+      return new Earlier(KnownSentences.none(), new Units());
+    }
+
+    /** The same again: whoever had it may still be at work. */
+    Earlier again() {
+      return new Earlier(sentences.again(), units.again());
+    }
+
+    /** For the next state of the file, once this one is read. */
+    Earlier next() {
+      return new Earlier(sentences.next(), units.next());
+    }
+  }
+
+  /** The same; {@code earlier} makes it quicker and no other, and takes in what is found. */
+  static Reading of(
+      Text text,
+      Format format,
+      Tongue tongue,
+      Srx rules,
+      Earlier earlier,
+      Cancellation cancellation) {
     String language = tongue.in(text, format).tag();
     Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
         Segmenter.of(language, rules)
-            .segments(text, format.blocks(text), endless::add, cancellation);
-    List<Unit> units = segments.stream().map(segment -> Units.unit(text, segment)).toList();
+            .segments(text, format.blocks(text), endless::add, earlier.sentences(), cancellation);
+    List<Unit> units =
+        segments.stream().map(segment -> earlier.units().unit(text, segment)).toList();
     return new Reading(text, format, language, segments, units, List.copyOf(endless));
   }
 }

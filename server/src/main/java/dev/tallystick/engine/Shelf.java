@@ -73,8 +73,9 @@ final class Shelf {
     Optional<Text> text = text(file);
     Format format = format(file);
     Map<Tongue, Sheet> known = sheets.computeIfAbsent(file, path -> new LinkedHashMap<>());
+    Sheet before = known.getOrDefault(tongue, new Sheet(new Text(""), format, tongue, rules));
     known.values().removeIf(sheet -> outdate(sheet, text, format, rules));
-    text.ifPresent(now -> known.computeIfAbsent(tongue, in -> new Sheet(now, format, in, rules)));
+    text.ifPresent(now -> known.computeIfAbsent(tongue, in -> before.next(now, format, rules)));
     return Optional.ofNullable(known.get(tongue));
   }
 

@@ -2,11 +2,16 @@ package dev.tallystick.engine;
 
 import dev.tallystick.align.Unit;
 import dev.tallystick.prose.Block;
+import dev.tallystick.prose.Times;
+import dev.tallystick.segment.Closing;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Words;
 import dev.tallystick.text.Scripts;
 import dev.tallystick.text.Text;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 
 /** What the aligner, which sees no text, is told of each segment. */
 final class Units {
@@ -25,9 +30,51 @@ final class Units {
   /** Words with so many letters in common at the start may be related (Simard et al. 1992). */
   private static final int ROOT = 4;
 
-  private Units() {}
+  private final Map<Content, Unit> before;
+  private final Map<Content, Unit> now = new HashMap<>();
 
-  static Unit unit(Text text, Segment segment) {
+  /** With what is known of an earlier state of the text. */
+  private Units(Map<Content, Unit> before) {
+    this.before = before;
+  }
+
+  /** Of a text of which nothing is known. */
+  Units() {
+    this(Map.of());
+  }
+
+  /** For the next state of the text, once this one is read. */
+  Units next() {
+    return new Units(now);
+  }
+
+  /** The same again, where this was given up. */
+  Units again() {
+    return new Units(before);
+  }
+
+  /** All that a unit is made of. */
+  private record Content(
+      String text, int length, boolean opens, int kind, Closing closing, Optional<Times> shown) {}
+
+  /** Of a segment that has not changed the same object as in the earlier state. */
+  Unit unit(Text text, Segment segment) {
+    boolean verbatim = segment.verbatim();
+    Content content =
+        new Content(
+            verbatim ? segment.span().of(text.string()) : segment.prose(),
+            segment.length(),
+            segment.opens(),
+            verbatim ? -1 : kind(segment.block()),
+            verbatim ? Closing.OPEN : segment.closing(),
+            segment.shown());
+    Unit known = before.get(content);
+    Unit unit = known == null ? made(text, segment) : known;
+    now.put(content, unit);
+    return unit;
+  }
+
+  private static Unit made(Text text, Segment segment) {
     if (segment.verbatim()) {
       String content = segment.span().of(text.string()).strip().replaceAll("\\R", "\n");
       Unit.Word[] words = {new Unit.Word(key(content), NUMBER)};

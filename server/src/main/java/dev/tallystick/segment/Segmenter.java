@@ -48,7 +48,7 @@ public final class Segmenter {
 
   /** The sentences and verbatim blocks of a file, in its order. */
   public List<Segment> segments(Text text, List<Block> blocks, Cancellation cancellation) {
-    return segments(text, blocks, problem -> {}, cancellation);
+    return segments(text, blocks, problem -> {}, KnownSentences.none(), cancellation);
   }
 
   /**
@@ -56,9 +56,14 @@ public final class Segmenter {
    *
    * @param endless takes each rule of the project that does not come to an end in the text, by its
    *     place in the file of rules
+   * @param known what is known of an earlier state of the text; takes in this one
    */
   public List<Segment> segments(
-      Text text, List<Block> blocks, Consumer<Problem> endless, Cancellation cancellation) {
+      Text text,
+      List<Block> blocks,
+      Consumer<Problem> endless,
+      KnownSentences known,
+      Cancellation cancellation) {
     TextBorders inText = new TextBorders(borders, rules, endless);
     Reach reach = new Reach();
     List<Segment> segments = new ArrayList<>();
@@ -67,16 +72,16 @@ public final class Segmenter {
       if (block.kind() == Block.Kind.VERBATIM) {
         segments.add(new Segment(block.extent(), "", block, true, List.of(), 0));
       } else {
-        addSentences(segments, inText, reach, block, new BlockProse(text, block));
+        BlockProse prose = new BlockProse(text, block);
+        addSentences(segments, known.of(prose, inText), reach, block, prose);
       }
     }
     return segments;
   }
 
   private static void addSentences(
-      List<Segment> segments, TextBorders borders, Reach reach, Block block, BlockProse prose) {
+      List<Segment> segments, List<Span> sentences, Reach reach, Block block, BlockProse prose) {
     List<Segment.Marked> inlines = prose.inlines();
-    List<Span> sentences = sentences(borders, prose);
     int next = 0;
     for (int i = 0; i < sentences.size(); i++) {
       Span sentence = sentences.get(i);
@@ -93,7 +98,7 @@ public final class Segmenter {
   }
 
   /** The sentences of a block, white space trimmed; fragments join. */
-  private static List<Span> sentences(TextBorders borders, BlockProse block) {
+  static List<Span> sentences(TextBorders borders, BlockProse block) {
     String prose = block.string();
     List<Span> spans = new ArrayList<>();
     BitSet ends = borders.of(block);

@@ -23,9 +23,22 @@ final class TextBorders {
     this.rules = rules.isEmpty() ? null : new SrxBorders(rules, endless);
   }
 
+  /** Our own rules: the same object for the same language. */
+  Borders own() {
+    return own;
+  }
+
   /** Whether only the rules of the project count. */
   boolean replaced() {
     return rules != null && rules.replaces();
+  }
+
+  /**
+   * Whether a block of the same prose has the same borders, whatever came before it. With rules of
+   * a project it may not: one that does not come to an end is left out from there on.
+   */
+  boolean independent() {
+    return rules == null;
   }
 
   /** The places where a sentence ends in the next block, its end left out or not. */

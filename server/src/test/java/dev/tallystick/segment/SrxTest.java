@@ -183,7 +183,12 @@ class SrxTest {
     List<Problem> endless = new ArrayList<>();
     List<Segment> segments =
         Segmenter.of("en", file.rules())
-            .segments(text, Format.PLAIN.blocks(text), endless::add, Cancellation.NONE);
+            .segments(
+                text,
+                Format.PLAIN.blocks(text),
+                endless::add,
+                KnownSentences.none(),
+                Cancellation.NONE);
     assertEquals(3, segments.size());
     assertEquals(1, endless.size());
     assertTrue(endless.get(0).message().contains("too many steps"));
