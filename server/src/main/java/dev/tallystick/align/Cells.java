@@ -9,8 +9,11 @@ import java.util.Arrays;
  * in the text it stands, and comes out the same wherever that is.
  */
 final class Cells {
-  /** For each cell the worth of each shape's link; {@link #UNKNOWN} first if nobody has looked. */
+  /** For each cell the worth of each shape's link; {@link #UNKNOWN} if nobody has looked. */
   int[] links = {};
+
+  /** Whether all of them are known. */
+  boolean complete;
 
   /** Chains from the start of the texts to each cell. */
   final Half before = new Half();
@@ -73,27 +76,30 @@ final class Cells {
   }
 
   /** The row has other columns now: what is known of their links is kept. */
-  void reshape(int oldLow, int newLow, int width, int shapes, Columns moved) {
+  void reshape(int oldLow, int newLow, int width, int[] right, Columns moved) {
+    int shapes = right.length;
     int[] kept = new int[width * shapes];
     int cells = links.length / shapes;
     for (int cell = 0; cell < width; cell++) {
-      int old = moved.before(newLow + cell) - oldLow;
-      if (old >= 0 && old < cells) {
-        System.arraycopy(links, old * shapes, kept, cell * shapes, shapes);
-      } else {
-        kept[cell * shapes] = UNKNOWN;
+      int column = newLow + cell;
+      int old = moved.before(column) - oldLow;
+      for (int shape = 0; shape < shapes; shape++) {
+        boolean known = old >= 0 && old < cells && moved.keeps(column, right[shape]);
+        kept[cell * shapes + shape] = known ? links[old * shapes + shape] : UNKNOWN;
       }
     }
     links = kept;
+    complete = false;
     before.filled = false;
     behind.filled = false;
   }
 
-  /** Nothing is known any more of the links from here. */
-  void forgetLinks(int shapes) {
-    for (int at = 0; at < links.length; at += shapes) {
-      links[at] = UNKNOWN;
+  /** Nothing is known any more of the links that lead farther down than so many rows. */
+  void forgetLinks(int[] down, int most) {
+    for (int at = 0; at < links.length; at++) {
+      links[at] = down[at % down.length] > most ? UNKNOWN : links[at];
     }
+    complete = false;
   }
 
   /**
@@ -106,12 +112,13 @@ final class Cells {
   record Columns(int at, int added, int shift) {
     static final Columns SAME = new Columns(Integer.MAX_VALUE, 0, 0);
 
-    /** Less than 0 if a link from there may hold a new unit. */
     int before(int column) {
-      if (column + Shape.MOST <= at || at == Integer.MAX_VALUE) {
-        return column;
-      }
-      return column >= at + added ? column - shift : -1;
+      return column < at ? column : column - shift;
+    }
+
+    /** Whether a link from a column holds no new unit, nor lies where one is gone. */
+    boolean keeps(int column, int units) {
+      return at == Integer.MAX_VALUE || column + units <= at || column >= at + added;
     }
   }
 
@@ -125,6 +132,9 @@ final class Cells {
 
     /** All chains. */
     double all = 1;
+
+    /** Posterior of the link of the best chain from here, if there is one. */
+    double link;
 
     /** Posterior that the unit behind the row stands for nothing, by itself. */
     double added;

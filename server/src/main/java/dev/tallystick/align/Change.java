@@ -37,6 +37,16 @@ record Change(int from, int removed, int added) {
     return removed == 0 && added == 0;
   }
 
+  /** Whether some units are as they were. */
+  boolean keeps(int start, int end) {
+    return end <= from || start >= from + removed;
+  }
+
+  /** Where a unit is now that is as it was. */
+  int moved(int unit) {
+    return unit < from + removed ? unit : unit + shift();
+  }
+
   /** Where a node was; less than 0 if it is one between new units. */
   int before(int node) {
     if (node <= from) {

@@ -129,20 +129,30 @@ final class Evidence implements Scorer {
 
   @Override
   public void links(int t, int s, double[] into, int at) {
-    boolean inside = s < source.size() && t < target.size();
-    double opening = inside ? opening(source.units[s], target.units[t]) : 0;
-    if (clock != null && inside) {
-      opening += clock.begins(Timeline.begin(source.units[s]), Timeline.begin(target.units[t]));
-    }
+    double opening = opening(t, s);
     for (int shape = 0; shape < right.length; shape++) {
-      int sEnd = s + right[shape];
-      int tEnd = t + down[shape];
-      if (sEnd > source.size() || tEnd > target.size()) {
-        into[at + shape] = Row.NOWHERE;
-      } else if (source.hasVerbatim(s, sEnd) || target.hasVerbatim(t, tEnd)) {
-        into[at + shape] = verbatim(shape, t, s);
-      } else {
-        into[at + shape] = opening + prose(shape, t, tEnd, s, sEnd);
+      into[at + shape] = link(shape, t, s, opening);
+    }
+  }
+
+  private double link(int shape, int t, int s, double opening) {
+    int sEnd = s + right[shape];
+    int tEnd = t + down[shape];
+    if (sEnd > source.size() || tEnd > target.size()) {
+      return Row.NOWHERE;
+    }
+    if (source.hasVerbatim(s, sEnd) || target.hasVerbatim(t, tEnd)) {
+      return verbatim(shape, t, s);
+    }
+    return opening + prose(shape, t, tEnd, s, sEnd);
+  }
+
+  /** Puts in the worth, in parts, of those shapes' links that are not known ({@link Fixed}). */
+  void complete(int t, int s, int[] links, int at) {
+    double opening = opening(t, s);
+    for (int shape = 0; shape < right.length; shape++) {
+      if (links[at + shape] == Cells.UNKNOWN) {
+        links[at + shape] = Fixed.of(link(shape, t, s, opening));
       }
     }
   }
@@ -154,6 +164,18 @@ final class Evidence implements Scorer {
       return Row.NOWHERE;
     }
     return one.words()[0].key() == other.words()[0].key() ? SAME_VERBATIM : OTHER_VERBATIM;
+  }
+
+  private double opening(int t, int s) {
+    if (s >= source.size() || t >= target.size()) {
+      return 0;
+    }
+    Unit one = source.units[s];
+    Unit other = target.units[t];
+    double opening = opening(one, other);
+    return clock == null
+        ? opening
+        : opening + clock.begins(Timeline.begin(one), Timeline.begin(other));
   }
 
   /** What the first units say, whatever the shape. */

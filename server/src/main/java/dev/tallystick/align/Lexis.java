@@ -17,7 +17,9 @@ final class Lexis implements LinkWords {
   private static final double FORWARD = 0.45;
   private static final double BACKWARD = 0.15;
 
-  private static final int KEPT = 8;
+  /** Rows are kept, as most of them outlast an edit. */
+  private static final int KEPT = 64;
+
   private static final double HUGE = 1e250;
   private static final double TINY = 1e-250;
 
@@ -68,7 +70,13 @@ final class Lexis implements LinkWords {
     sourceUnits = sides.source().units;
     targetUnits = sides.target().units;
     band = judgedIn;
+    Row[] before = rows.clone();
     Arrays.fill(rows, null);
+    for (Row row : before) {
+      if (row != null && row.outlasts(inSource, inTarget)) {
+        rows[row.target % KEPT] = row;
+      }
+    }
   }
 
   private static Said[] replaced(Said[] said, Change change) {
@@ -159,8 +167,8 @@ final class Lexis implements LinkWords {
 
   /** What one target unit and some source units make of each other's words. */
   private static final class Row {
-    final int target;
-    final int first;
+    int target;
+    int first;
     final float[][] forward;
     final float[][] backward;
 
@@ -169,6 +177,15 @@ final class Lexis implements LinkWords {
       this.first = first;
       this.forward = new float[end - first][];
       this.backward = new float[end - first][];
+    }
+
+    /** Moves the row along with its units; whether these are all as they were. */
+    boolean outlasts(Change inSource, Change inTarget) {
+      boolean same =
+          inTarget.keeps(target, target + 1) && inSource.keeps(first, first + forward.length);
+      target = inTarget.moved(target);
+      first = inSource.moved(first);
+      return same;
     }
   }
 

@@ -17,6 +17,7 @@ final class Live {
   private List<Unit> target = List.of();
   private Table table;
   private Weights weights;
+  private Matches matches;
 
   Live(Calibration calibration) {
     this.calibration = calibration;
@@ -46,7 +47,7 @@ final class Live {
     edited.settle(Cancellation.NONE);
     weights.replace(inSource, inTarget);
     weights.update(inSource.isNone() ? Integer.MAX_VALUE : inSource.from());
-    return take(edited, newSource, newTarget);
+    return take(edited, newSource, newTarget, inSource, inTarget);
   }
 
   private Band first(Sides sides, Cancellation cancellation) {
@@ -65,17 +66,20 @@ final class Live {
     made.settle(cancellation);
     weights = new Weights(made);
     weights.update(0);
-    return take(made, List.of(sides.source().units), List.of(sides.target().units));
+    matches = new Matches(made, weights);
+    Change none = new Change(0, 0, 0);
+    return take(made, List.of(sides.source().units), List.of(sides.target().units), none, none);
   }
 
-  private Alignment take(Table settled, List<Unit> newSource, List<Unit> newTarget) {
+  private Alignment take(
+      Table settled, List<Unit> newSource, List<Unit> newTarget, Change inSource, Change inTarget) {
     table = settled;
     source = newSource;
     target = newTarget;
-    List<Match> matches = weights.matches();
+    List<Match> chain = matches.update(inSource, inTarget);
     double[] sourceNull = weights.sourceNull();
     double[] targetNull = weights.targetNull();
-    List<Move> moves = Moves.find(settled.evidence, sourceNull, targetNull, matches);
-    return new Alignment(matches, sourceNull, targetNull, moves, calibration.fit().lengths());
+    List<Move> moves = Moves.find(settled.evidence, sourceNull, targetNull, chain);
+    return new Alignment(chain, sourceNull, targetNull, moves, calibration.fit().lengths());
   }
 }

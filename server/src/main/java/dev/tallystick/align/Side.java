@@ -47,13 +47,11 @@ final class Side {
     this.blockEndingAt = new int[units.length + 1];
     this.blockStartingAt = new int[units.length + 1];
     this.timeline = Timeline.of(units);
-    findBlocks();
     this.verbatimBefore = new int[units.length + 1];
     for (int i = 0; i < units.length; i++) {
-      lengthBefore[i + 1] = lengthBefore[i] + length.applyAsInt(units[i]);
-      opensBefore[i + 1] = opensBefore[i] + (units[i].opens() ? 1 : 0);
-      verbatimBefore[i + 1] = verbatimBefore[i] + (units[i].verbatim() ? 1 : 0);
+      count(i, length.applyAsInt(units[i]));
     }
+    findBlocks();
   }
 
   private void findBlocks() {
@@ -61,7 +59,7 @@ final class Side {
     Arrays.fill(blockStartingAt, -1);
     int start = 0;
     for (int end = 1; end <= units.length; end++) {
-      if (end == units.length || units[end].opens()) {
+      if (end == units.length || opensBefore[end + 1] > opensBefore[end]) {
         if (end - start > 1 && end - start <= LONGEST_BLOCK) {
           blockEndingAt[end] = start;
           blockStartingAt[start] = end;
@@ -84,7 +82,40 @@ final class Side {
 
   /** The text after a change; nothing says any more when its units are on the screen. */
   Side replaced(Change change, List<Unit> now) {
-    return change.isNone() ? this : new Side(now);
+    return change.isNone() ? this : new Side(this, change, now);
+  }
+
+  private Side(Side before, Change change, List<Unit> now) {
+    int size = now.size();
+    this.units = now.toArray(Unit[]::new);
+    this.lengthBefore = Arrays.copyOf(before.lengthBefore, size + 1);
+    this.opensBefore = Arrays.copyOf(before.opensBefore, size + 1);
+    this.verbatimBefore = Arrays.copyOf(before.verbatimBefore, size + 1);
+    this.blockEndingAt = new int[size + 1];
+    this.blockStartingAt = new int[size + 1];
+    this.timeline = null;
+    int end = change.from() + change.added();
+    for (int i = change.from(); i < end; i++) {
+      count(i, units[i].length());
+    }
+    shift(lengthBefore, before.lengthBefore, end, change.shift());
+    shift(opensBefore, before.opensBefore, end, change.shift());
+    shift(verbatimBefore, before.verbatimBefore, end, change.shift());
+    findBlocks();
+  }
+
+  /** What lies behind a change, from a node on, of which the value is known. */
+  private static void shift(int[] sums, int[] before, int from, int shift) {
+    int more = sums[from] - before[from - shift];
+    for (int i = from + 1; i < sums.length; i++) {
+      sums[i] = before[i - shift] + more;
+    }
+  }
+
+  private void count(int unit, int length) {
+    lengthBefore[unit + 1] = lengthBefore[unit] + length;
+    opensBefore[unit + 1] = opensBefore[unit] + (units[unit].opens() ? 1 : 0);
+    verbatimBefore[unit + 1] = verbatimBefore[unit] + (units[unit].verbatim() ? 1 : 0);
   }
 
   /** The same units, but nothing says when they are on the screen. */

@@ -44,7 +44,6 @@ final class Table {
   private final Stretch forward = new Stretch();
   private final Stretch backward = new Stretch();
   private final Stretch stale = new Stretch();
-  private final double[] judged = new double[shapes];
 
   /** A table along a guessed way; to be settled. */
   Table(Calibration calibration, Sides sides, List<Match> guess) {
@@ -136,7 +135,7 @@ final class Table {
       int low = way.low(row, radii[row - first]);
       int high = way.high(row, radii[row - first]);
       if (moved != Cells.Columns.SAME || low != way.low[row] || high != way.high[row]) {
-        rows[row].reshape(way.low[row], low, high - low + 1, shapes, moved);
+        rows[row].reshape(way.low[row], low, high - low + 1, right, moved);
         way.low[row] = low;
         way.high[row] = high;
         dirty(row, row);
@@ -180,14 +179,12 @@ final class Table {
 
   /** Judges the links from a row that nobody has looked at. */
   private void judge(int row) {
-    int[] links = rows[row].links;
-    for (int at = 0; at < links.length; at += shapes) {
-      if (links[at] == Cells.UNKNOWN) {
-        evidence.links(row, way.low[row] + at / shapes, judged, 0);
-        for (int shape = 0; shape < shapes; shape++) {
-          links[at + shape] = Fixed.of(judged[shape]);
-        }
+    Cells cells = rows[row];
+    if (!cells.complete) {
+      for (int at = 0; at < cells.links.length; at += shapes) {
+        evidence.complete(row, way.low[row] + at / shapes, cells.links, at);
       }
+      cells.complete = true;
     }
   }
 

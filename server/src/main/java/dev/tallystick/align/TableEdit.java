@@ -42,7 +42,7 @@ final class TableEdit {
     }
     int last = Math.max(at, at + change.added() - 1);
     for (int row = Math.max(0, at - Shape.MOST + 1); row <= Math.min(last, way.targets); row++) {
-      table.rows[row].forgetLinks(table.shapes);
+      table.rows[row].forgetLinks(table.down, Math.max(0, at - row));
     }
     table.dirty(at - Shape.MOST, at + change.added() + Shape.MOST);
   }

@@ -17,7 +17,7 @@ final class Way {
   private static final int NEAR = 5;
 
   /** The same where there is trouble, and how much more for each. */
-  private static final int FAR = 10;
+  private static final int FAR = 6;
 
   private static final int MORE = 2;
 
@@ -146,6 +146,15 @@ final class Way {
     int node = Math.max(0, Math.min(row, targets));
     while (!this.node[node]) {
       node--;
+    }
+    return node;
+  }
+
+  /** The next node of the way below a row; the row itself if it is the last. */
+  int nodeBelow(int row) {
+    int node = Math.min(row + 1, targets);
+    while (!this.node[node]) {
+      node++;
     }
     return node;
   }

@@ -1,8 +1,6 @@
 package dev.tallystick.align;
 
-import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.List;
 
 /**
  * The posteriors of a settled table. The share of a move is its worth among all moves that cover
@@ -15,6 +13,10 @@ final class Weights {
 
   private final Table table;
   private final Way way;
+
+  /** Rows whose matches may be others since somebody cleared this. */
+  final Table.Stretch changed = new Table.Stretch();
+
   private double[] sourceNull;
   private double[] targetNull;
 
@@ -53,7 +55,9 @@ final class Weights {
       for (int row = first; row < last; row++) {
         table.rows[row].shares.all = all(row);
       }
+      links(first, last);
       targets(first, last);
+      changed.add(first, last);
       sources(first, last, seam);
     } else if (seam < way.sources) {
       sources(way.targets, way.targets, seam);
@@ -222,6 +226,7 @@ final class Weights {
       from = Math.min(from, way.low[row]);
       to = Math.max(to, way.high[row]);
     }
+    changed.add(way.firstRowReaching(from), way.lastRowReaching(to));
     Arrays.fill(sourceNull, Math.min(from, to), to, 0);
     int end = Math.min(way.targets - 1, way.lastRowReaching(to));
     for (int row = way.firstRowReaching(from); row <= end; row++) {
@@ -267,37 +272,6 @@ final class Weights {
     return capped;
   }
 
-  /** The best chain with its posteriors. */
-  List<Match> matches() {
-    List<Match> matches = new ArrayList<>(way.targets + way.sources / 8);
-    int row = 0;
-    while (row < way.targets) {
-      leaveOut(matches, row, way.first[row], way.last[row]);
-      int next = row + 1;
-      while (!way.node[next]) {
-        next++;
-      }
-      int column = way.last[row];
-      if (way.first[next] > column) {
-        matches.add(new Match(column, way.first[next], row, next, posterior(row, next)));
-      } else {
-        for (int unit = row; unit < next; unit++) {
-          double posterior = Math.min(1, targetNull[unit]);
-          matches.add(new Match(column, column, unit, unit + 1, posterior));
-        }
-      }
-      row = next;
-    }
-    leaveOut(matches, row, way.first[row], way.sources);
-    return matches;
-  }
-
-  private void leaveOut(List<Match> matches, int row, int from, int to) {
-    for (int unit = from; unit < to; unit++) {
-      matches.add(new Match(unit, unit + 1, row, row, Math.min(1, sourceNull[unit])));
-    }
-  }
-
   /** The posterior of a link of the best chain. */
   private double posterior(int row, int next) {
     int shape = 0;
@@ -310,5 +284,30 @@ final class Weights {
     int best = cells.before.best[cell] + cells.behind.best[cell];
     table.filling.face(row);
     return Math.min(1, link(row, cell, shape, best) / cells.shares.all);
+  }
+
+  /** The posteriors of the links of the best chain. */
+  private void links(int first, int last) {
+    for (int row = first; row < last; row++) {
+      int next = way.node[row] ? way.nodeBelow(row) : row;
+      if (next > row && way.first[next] > way.last[row]) {
+        table.rows[row].shares.link = posterior(row, next);
+      }
+    }
+  }
+
+  /** Posterior of the link of the best chain from a row. */
+  double link(int row) {
+    return table.rows[row].shares.link;
+  }
+
+  /** Posterior that a source unit is left out. */
+  double omitted(int unit) {
+    return Math.min(1, sourceNull[unit]);
+  }
+
+  /** Posterior that a target unit stands for nothing. */
+  double added(int unit) {
+    return Math.min(1, targetNull[unit]);
   }
 }
