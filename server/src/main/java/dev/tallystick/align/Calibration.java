@@ -29,8 +29,8 @@ record Calibration(
   /** Texts that grew or shrank by more than one in so many units, and one, are others by now. */
   private static final int SHARE = 5;
 
-  /** What was learnt, and the band in which the way through both texts lies. */
-  record Learnt(Calibration calibration, Band band) {}
+  /** What was learnt, and the best chain while it was. */
+  record Learnt(Calibration calibration, List<Match> chain) {}
 
   /** Learns from two texts: a pure function of them. */
   static Learnt learnt(Sides sides, Cancellation cancellation) {
@@ -43,12 +43,14 @@ record Calibration(
     Stems source = new Stems(sides.source());
     Stems target = new Stems(sides.target());
     Lexicon lexicon = null;
+    List<Match> chain = List.of();
     for (int round = 0; round < ROUNDS; round++) {
       Scorer scorer = round == 0 ? coarse : Evidence.full(known, fit);
       Lattice lattice = Lattice.banded(scorer, sides, band, cancellation);
       Posteriors posteriors = new Posteriors(lattice, cancellation);
       fit = Refit.from(posteriors, lattice, fit);
       band = posteriors.band();
+      chain = round == ROUNDS - 1 ? lattice.chain() : chain;
       if (round > 0) {
         cancellation.check();
         lexicon = Lexicon.learnt(posteriors, source, target);
@@ -58,7 +60,7 @@ record Calibration(
     }
     return timed && fit.clock() == null
         ? learnt(sides.untimed(), cancellation) // they misled: as if there were none
-        : new Learnt(of(fit, known.background(), lexicon, sides), band);
+        : new Learnt(of(fit, known.background(), lexicon, sides), chain);
   }
 
   private static Calibration of(Fit fit, Background background, Lexicon lexicon, Sides sides) {

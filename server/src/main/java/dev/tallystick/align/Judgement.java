@@ -36,7 +36,7 @@ public final class Judgement {
         live,
         List.of(sides.source().units),
         List.of(sides.target().units),
-        live.judge(sides, learnt.band(), cancellation),
+        live.judge(sides, learnt.chain(), cancellation),
         true);
   }
 

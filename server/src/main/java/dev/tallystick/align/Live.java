@@ -50,18 +50,19 @@ final class Live {
     return take(edited, newSource, newTarget, inSource, inTarget);
   }
 
-  private Band first(Sides sides, Cancellation cancellation) {
+  /** The way through texts of which nothing is known but the calibration. */
+  private List<Match> first(Sides sides, Cancellation cancellation) {
     SharedWords shared = new SharedWords(sides.source(), sides.target());
     Evidence coarse = Evidence.coarse(Evidence.Texts.of(sides, shared), calibration.fit());
-    return Looks.first(coarse, shared, sides, cancellation);
-  }
-
-  /** Judges texts through which the way lies in a band. */
-  synchronized Alignment judge(Sides sides, Band band, Cancellation cancellation) {
-    table = null;
+    Band band = Looks.first(coarse, shared, sides, cancellation);
     Lexis lexis = new Lexis(calibration.lexicon(), sides, band);
     Evidence evidence = Evidence.calibrated(sides, calibration, lexis);
-    List<Match> guess = Lattice.banded(evidence, sides, band, cancellation).chain();
+    return Lattice.banded(evidence, sides, band, cancellation).chain();
+  }
+
+  /** Judges texts through which the way may lead along a chain. */
+  synchronized Alignment judge(Sides sides, List<Match> guess, Cancellation cancellation) {
+    table = null;
     Table made = new Table(calibration, sides, guess);
     made.settle(cancellation);
     weights = new Weights(made);

@@ -14,7 +14,7 @@ import java.util.List;
  */
 final class Way {
   /** How far a band reaches around the way where nothing is in doubt: columns, and rows too. */
-  private static final int NEAR = 5;
+  private static final int NEAR = 4;
 
   /** The same where there is trouble, and how much more for each. */
   private static final int FAR = 6;

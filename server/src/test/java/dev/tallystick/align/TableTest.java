@@ -22,7 +22,7 @@ class TableTest {
       Lexis lexis = new Lexis(calibration.lexicon(), sides, all);
       Evidence evidence = Evidence.calibrated(sides, calibration, lexis);
       AllChains chains = new AllChains(evidence, sides);
-      Alignment judged = new Live(calibration).judge(sides, all, Cancellation.NONE);
+      Alignment judged = new Live(calibration).judge(sides, List.of(), Cancellation.NONE);
       String told = "pair " + seed;
       assertEquals(chains.best, chains.worth(certain(judged.matches())), 2e-3, told);
       Posteriors posteriors =
