@@ -46,7 +46,21 @@ class LinearTimeTest {
 
   @ParameterizedTest
   @ValueSource(
-      strings = {"a", "a\n", "- ", "- a\n", "1. a\n", " ", "\n", "...", "漢", "A B\n===\n", "\t"})
+      strings = {
+        "a",
+        "a\n",
+        "- ",
+        "- a\n",
+        "1. a\n",
+        " ",
+        "\n",
+        "...",
+        "漢",
+        "A B\n===\n",
+        "\t",
+        ">",
+        "> a\n"
+      })
   void plainTextEnds(String fragment) {
     assertEnds(Format.PLAIN, fragment);
   }
