@@ -2,7 +2,6 @@ package dev.tallystick.engine;
 
 import dev.tallystick.check.Levels;
 import dev.tallystick.pairing.Ambiguity;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -239,7 +238,7 @@ final class Library {
    * The sheet of the current text; the same one as long as the text and the rules stay the same.
    */
   Optional<Sheet> sheet(Path file, String language) {
-    Srx rules = project(file).map(FolderProject::rules).map(FolderRules::srx).orElse(Srx.NONE);
+    TextRules rules = project(file).map(FolderProject::texts).orElse(TextRules.USUAL);
     return shelf.sheet(file, language, rules);
   }
 

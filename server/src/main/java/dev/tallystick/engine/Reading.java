@@ -5,7 +5,6 @@ import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Segmenter;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.util.LinkedHashSet;
@@ -39,16 +38,16 @@ public record Reading(
 
   /** Reads a file. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
-    return of(text, format, language, Srx.NONE, cancellation);
+    return of(text, format, language, TextRules.USUAL, cancellation);
   }
 
-  /** Reads a file by the rules for sentence borders that its project has. */
+  /** Reads a file as its project wants it. */
   public static Reading of(
-      Text text, Format format, String language, Srx rules, Cancellation cancellation) {
+      Text text, Format format, String language, TextRules rules, Cancellation cancellation) {
     Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
-        Segmenter.of(language, rules)
-            .segments(text, format.blocks(text), endless::add, cancellation);
+        Segmenter.of(language, rules.borders())
+            .segments(text, format.blocks(text, rules.frontMatter()), endless::add, cancellation);
     List<Unit> units = segments.stream().map(segment -> Units.unit(text, segment)).toList();
     return new Reading(text, format, language, segments, units, List.copyOf(endless));
   }

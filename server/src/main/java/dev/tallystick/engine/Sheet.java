@@ -1,7 +1,6 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.prose.Format;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Text;
 
 /**
@@ -12,7 +11,7 @@ final class Sheet {
   private final Text text;
   private final Format format;
   private final String language;
-  private final Srx rules;
+  private final TextRules rules;
   private Reading reading;
   private volatile boolean outdated;
 
@@ -20,9 +19,9 @@ final class Sheet {
    * A text in a language.
    *
    * @param language a BCP 47 tag
-   * @param rules for its sentence borders
+   * @param rules by which it is read
    */
-  Sheet(Text text, Format format, String language, Srx rules) {
+  Sheet(Text text, Format format, String language, TextRules rules) {
     this.text = text;
     this.format = format;
     this.language = language;
@@ -34,8 +33,8 @@ final class Sheet {
   }
 
   /** Whether this is still the sheet of a text that has come anew. */
-  boolean shows(Text current, Format inFormat, Srx byRules) {
-    return format == inFormat && rules == byRules && text.equals(current);
+  boolean shows(Text current, Format inFormat, TextRules byRules) {
+    return format == inFormat && rules.equals(byRules) && text.equals(current);
   }
 
   /** The text has moved on: whoever still works on this sheet may stop. */

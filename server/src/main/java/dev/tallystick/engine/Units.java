@@ -79,6 +79,8 @@ final class Units {
       case ITEM -> block.level() > 1 ? 8 : 7;
       case CELL -> 9;
       case QUOTATION -> 10;
+      // One stands at the start of a file, the other never does: nobody takes one for the other.
+      case FOOTNOTE, METADATA -> 11;
     };
   }
 }

@@ -26,6 +26,10 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
     CELL,
     /** A paragraph in a quotation. */
     QUOTATION,
+    /** The text of a note that stands apart: a footnote. */
+    FOOTNOTE,
+    /** A value of the front matter. */
+    METADATA,
     /** Code and the like, copied as it stands: a landmark without prose. */
     VERBATIM
   }

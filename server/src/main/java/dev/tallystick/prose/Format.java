@@ -64,12 +64,21 @@ public enum Format {
    * @param text the file, possibly with a byte-order mark, which is no prose
    */
   public List<Block> blocks(Text text) {
+    return blocks(text, FrontMatterKeys.USUAL);
+  }
+
+  /**
+   * The same.
+   *
+   * @param keys whose values are prose, if the file has front matter
+   */
+  public List<Block> blocks(Text text, FrontMatterKeys keys) {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
-      case MARKDOWN -> Markdown.blocks(text);
+      case MARKDOWN -> Markdown.blocks(text, keys);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
-      case ASCIIDOC -> AsciiDoc.blocks(text);
+      case ASCIIDOC -> AsciiDoc.blocks(text, keys);
     };
   }
 }

@@ -19,7 +19,7 @@ import org.commonmark.node.SourceSpan;
 import org.commonmark.parser.IncludeSourceSpans;
 import org.commonmark.parser.Parser;
 
-/** CommonMark with tables; footnotes, task lists and front matter are known by their marks. */
+/** CommonMark with tables; footnotes and task lists are known by their marks. */
 final class Markdown {
   /** Deeper nesting than any writer uses is read as text, lest it costs time or stack. */
   private static final int DEEPEST = 100;
@@ -41,8 +41,10 @@ final class Markdown {
     this.base = base;
   }
 
-  static List<Block> blocks(Text text) {
-    Markdown markdown = new Markdown(text.string(), FrontMatter.end(text));
+  static List<Block> blocks(Text text, FrontMatterKeys keys) {
+    FrontMatter data = FrontMatter.of(text);
+    Markdown markdown = new Markdown(text.string(), data.end());
+    markdown.blocks.addAll(data.blocks(keys));
     Node document = PARSER.parse(markdown.file.substring(markdown.base));
     Node node = document.getFirstChild();
     while (node != null) {

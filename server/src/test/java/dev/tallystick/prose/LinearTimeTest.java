@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
 
 import dev.tallystick.text.Text;
 import java.time.Duration;
+import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -210,6 +211,27 @@ class LinearTimeTest {
   @ValueSource(strings = {"- ", "| a ", "\\|"})
   void rowsOfATableEnd(String fragment) {
     assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "title: a\n",
+        "title: \"a\n",
+        "title: >\n  a\n",
+        " title:\n",
+        "title: a #",
+        "title = '''",
+        "title = \"\"\"\n",
+        "title = '''\ntitle = \"\"\"\n",
+        "a.",
+        "- "
+      })
+  void frontMatterEnds(String fragment) {
+    for (String fence : List.of("---\n", "+++\n")) {
+      String key = fence.startsWith("-") ? "key: a\n" : "";
+      assertEnds(Format.MARKDOWN, fence + key + fragment.repeat(TIMES) + "\n" + fence, 1);
+    }
   }
 
   private static void assertEnds(Format format, String fragment) {
