@@ -11,8 +11,10 @@ import java.util.stream.Collectors;
 public enum Format {
   /** Text without markup. */
   PLAIN(List.of("plaintext", "text"), "txt", "text"),
-  /** CommonMark with tables. */
+  /** CommonMark with tables, footnotes and what writers of documentation add. */
   MARKDOWN(List.of("markdown"), "md", "markdown", "mkd"),
+  /** Markdown with tags and expressions of JavaScript. */
+  MDX(List.of("mdx"), "mdx"),
   /** Subtitles as SubRip writes them. */
   SUBRIP(List.of("srt", "subrip"), "srt"),
   /** Subtitles as WebVTT has them. */
@@ -76,6 +78,7 @@ public enum Format {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text, keys);
+      case MDX -> Markdown.ofMdx(text, keys);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text, keys);

@@ -2,7 +2,6 @@ package dev.tallystick.prose;
 
 import org.commonmark.node.Code;
 import org.commonmark.node.HardLineBreak;
-import org.commonmark.node.Link;
 import org.commonmark.node.Node;
 import org.commonmark.node.SoftLineBreak;
 import org.commonmark.node.SourceSpan;
@@ -48,8 +47,6 @@ final class Inlines {
       addCode(node);
     } else if (node instanceof SoftLineBreak || node instanceof HardLineBreak) {
       pieces.addLineBreak(origin.of(inputBefore(node)), limit);
-    } else if (node instanceof Link) {
-      return !isFootnoteReference(node);
     }
     return true;
   }
@@ -79,17 +76,6 @@ final class Inlines {
       at++;
     }
     return at > label && at < end && charAt(at) == ']' ? at + 1 : 0;
-  }
-
-  private boolean isFootnoteReference(Node link) {
-    if (link.getSourceSpans().size() != 1) {
-      return false;
-    }
-    SourceSpan span = link.getSourceSpans().get(0);
-    int label = span.getInputIndex() + 2;
-    return charAt(label - 2) == '['
-        && charAt(label - 1) == '^'
-        && referenceEnd(label, Nodes.end(span)) == Nodes.end(span);
   }
 
   /** Adds what is between the backticks; a line break inside is prose like any other. */

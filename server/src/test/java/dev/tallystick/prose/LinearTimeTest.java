@@ -39,10 +39,52 @@ class LinearTimeTest {
         "a\\\n",
         "a  \n",
         "&",
-        "[[]]()"
+        "[[]]()",
+        "[^a]: ",
+        "[^a]: b\n\n    ",
+        ":::a\n",
+        ":::",
+        "!!! a\n",
+        "!!! a \"\n    ",
+        "=== \"",
+        "> [!A]\n",
+        "{{<",
+        "{{% {{<",
+        "{%",
+        "{#a",
+        "{{< a >}}\n",
+        "{#a} "
       })
   void markdownEnds(String fragment) {
     assertEnds(Format.MARKDOWN, fragment);
+    assertEnds(Format.MDX, fragment);
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "<a ",
+        "<a",
+        "<a>",
+        "<a>\n",
+        "<a\n",
+        "<a\n\n",
+        "</",
+        "<a b={",
+        "<a b=\"",
+        "{",
+        "{a",
+        "{\n",
+        "{}",
+        "{'",
+        "{/*",
+        "import a\n",
+        "import a\n\n",
+        "export {\n\n",
+        "export }\n\n "
+      })
+  void mdxEnds(String fragment) {
+    assertEnds(Format.MDX, fragment);
   }
 
   @ParameterizedTest

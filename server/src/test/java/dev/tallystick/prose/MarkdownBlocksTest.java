@@ -163,10 +163,10 @@ class MarkdownBlocksTest {
         "here"
         """,
         """
-        PARAGRAPH: Word
-        PARAGRAPH: Two words⏎go on
-        PARAGRAPH: Three more words
-        QUOTATION 1: Quoted⏎"here"
+        FOOTNOTE: Word
+        FOOTNOTE: Two words⏎go on
+        FOOTNOTE: Three more words
+        FOOTNOTE: Quoted⏎"here"
         """);
   }
 
