@@ -2,6 +2,7 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -23,18 +24,25 @@ final class AsciiDocMarks {
   private final boolean[] marks;
   private final AsciiDocBrackets brackets;
   private final AsciiDocQuotes quotes;
+  private final List<AsciiDocNote> notes;
   private int at;
 
-  private AsciiDocMarks(String prose) {
+  private AsciiDocMarks(String prose, List<AsciiDocNote> notes) {
     this.prose = prose;
+    this.notes = notes;
     this.marks = new boolean[prose.length()];
     this.brackets = new AsciiDocBrackets(prose);
     this.quotes = new AsciiDocQuotes(prose, marks, brackets);
   }
 
-  /** Which characters of a block are marks; its lines end in LF. */
-  static boolean[] of(String prose) {
-    AsciiDocMarks read = new AsciiDocMarks(prose);
+  /**
+   * Which characters of a block are marks.
+   *
+   * @param prose its lines, each with an LF
+   * @param notes takes its footnotes
+   */
+  static boolean[] of(String prose, List<AsciiDocNote> notes) {
+    AsciiDocMarks read = new AsciiDocMarks(prose, notes);
     while (read.at < prose.length()) {
       read.step();
     }
@@ -53,7 +61,7 @@ final class AsciiDocMarks {
           default ->
               FORMATS.indexOf(c) >= 0 || c == '^' || c == '~'
                   ? quote()
-                  : startsWord() && (macro() || address());
+                  : startsWord() ? macro() || address() : note();
         };
     if (!taken) {
       at++;
@@ -172,6 +180,11 @@ final class AsciiDocMarks {
     return true;
   }
 
+  /** A footnote, which may touch the word before it. */
+  private boolean note() {
+    return prose.startsWith("footnote", at) && macro();
+  }
+
   private boolean macro() {
     Matcher macro = MACRO.matcher(prose).region(at, prose.length());
     if (!macro.lookingAt()) {
@@ -188,6 +201,9 @@ final class AsciiDocMarks {
       at = target;
       return true;
     }
+    if (name.startsWith("footnote")) {
+      addNote(name, new Span(at, close + 1), open + 1);
+    }
     mark(at, target);
     at = target;
     if (SILENT.contains(name) || name.equals("xref") && close == open + 1) {
@@ -197,6 +213,16 @@ final class AsciiDocMarks {
       readMacro(name, target, new Span(open + 1, close));
     }
     return true;
+  }
+
+  /** Takes in a footnote that has a text; in the old form of the macro a comma stands before it. */
+  private void addNote(String name, Span whole, int from) {
+    int close = whole.end() - 1;
+    int comma = name.endsWith("ref") ? prose.substring(from, close).indexOf(',') : -1;
+    int start = name.endsWith("ref") ? (comma < 0 ? close : from + comma + 1) : from;
+    if (!prose.substring(start, close).isBlank()) {
+      notes.add(new AsciiDocNote(whole, new Span(start, close)));
+    }
   }
 
   private void readMacro(String name, int target, Span text) {

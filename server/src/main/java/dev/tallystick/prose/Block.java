@@ -4,7 +4,8 @@ import dev.tallystick.text.Span;
 import java.util.List;
 
 /**
- * A unit of layout that no sentence crosses.
+ * A unit of layout that no sentence crosses. A footnote may lie inside of another block, behind
+ * which it comes; all others lie behind each other. No two have prose in common.
  *
  * @param kind what it is
  * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0

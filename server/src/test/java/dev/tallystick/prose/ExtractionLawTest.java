@@ -6,6 +6,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
+import java.util.BitSet;
 import java.util.List;
 import java.util.Random;
 import org.junit.jupiter.api.Test;
@@ -236,7 +237,16 @@ class ExtractionLawTest {
   private static void assertLaw(String source, List<Block> blocks) {
     Text text = new Text(source);
     int end = source.startsWith("\uFEFF") ? 1 : 0;
+    BitSet prose = new BitSet();
     for (Block block : blocks) {
+      for (Span piece : block.pieces()) {
+        assertTrue(prose.get(piece.start(), piece.end()).isEmpty(), source);
+        prose.set(piece.start(), piece.end());
+      }
+      if (block.kind() == Block.Kind.FOOTNOTE && block.extent().end() <= end) {
+        assertPieces(text, block); // inside of the block before it
+        continue;
+      }
       assertTrue(block.extent().start() >= end, source);
       assertTrue(block.extent().end() <= source.length(), source);
       assertEquals(block.kind() == Block.Kind.VERBATIM, block.pieces().isEmpty(), source);
