@@ -46,7 +46,7 @@ final class Additions {
   }
 
   private boolean isFootnote(int index) {
-    return subject.target().get(index).block().kind() == Block.Kind.FOOTNOTE;
+    return subject.target().get(index).block().kind() == Block.Kind.NOTE;
   }
 
   private Finding finding(Run run, Span gap, String message) {

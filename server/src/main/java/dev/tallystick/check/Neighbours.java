@@ -1,7 +1,6 @@
 package dev.tallystick.check;
 
 import dev.tallystick.align.Match;
-import dev.tallystick.prose.Block;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.text.Span;
 import java.util.Arrays;
@@ -30,10 +29,6 @@ final class Neighbours {
   Span gap(Run run) {
     int index = before[run.from()];
     int at = index < 0 ? 0 : other.get(index).span().end();
-    // A note that stands in the midst of a sentence ends before the sentence does.
-    for (int i = index; i > 0 && other.get(i).block().kind() == Block.Kind.FOOTNOTE; i--) {
-      at = Math.max(at, other.get(i - 1).span().end());
-    }
     return new Span(at, at);
   }
 

@@ -80,7 +80,7 @@ final class Units {
       case CELL -> 9;
       case QUOTATION -> 10;
       // One stands at the start of a file, the other never does: nobody takes one for the other.
-      case FOOTNOTE, METADATA -> 11;
+      case NOTE, METADATA -> 11;
     };
   }
 }

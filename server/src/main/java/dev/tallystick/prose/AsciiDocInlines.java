@@ -38,7 +38,7 @@ final class AsciiDocInlines {
       Span whole = inlines.inFile(note.whole());
       AsciiDocInlines text = new AsciiDocInlines(file, inlines.lines(note.text()));
       // A note in a note has no place where it could be shown.
-      add(blocks, new Block(Block.Kind.FOOTNOTE, 0, whole, text.read(new ArrayList<>())));
+      add(blocks, new Block(Block.Kind.NOTE, 0, whole, text.read(new ArrayList<>())));
     }
     return blocks;
   }

@@ -27,8 +27,8 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
     CELL,
     /** A paragraph in a quotation. */
     QUOTATION,
-    /** The text of a note that stands apart: a footnote. */
-    FOOTNOTE,
+    /** A footnote or the like: it may stand inside the block before it, between its pieces. */
+    NOTE,
     /** A value of the front matter. */
     METADATA,
     /** Code and the like, copied as it stands: a landmark without prose. */

@@ -153,7 +153,7 @@ final class Markdown {
   private static Block.Kind kind(Node paragraph) {
     Node parent = paragraph.getParent();
     if (parent instanceof FootnoteParser.Footnote) {
-      return Block.Kind.FOOTNOTE;
+      return Block.Kind.NOTE;
     }
     return parent instanceof ListItem
         ? Block.Kind.ITEM

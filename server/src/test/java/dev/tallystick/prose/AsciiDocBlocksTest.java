@@ -213,10 +213,10 @@ class AsciiDocBlocksTest {
         file,
         """
         HEADING 2: Oil
-        FOOTNOTE: Of whales.
+        NOTE: Of whales.
         PARAGRAPH: A  B.⏎C.
-        FOOTNOTE: One.
-        FOOTNOTE: Two⏎lines.
+        NOTE: One.
+        NOTE: Two⏎lines.
         """);
     Extraction.assertExtents(
         Format.ASCIIDOC,

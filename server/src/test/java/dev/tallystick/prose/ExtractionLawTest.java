@@ -243,7 +243,7 @@ class ExtractionLawTest {
         assertTrue(prose.get(piece.start(), piece.end()).isEmpty(), source);
         prose.set(piece.start(), piece.end());
       }
-      if (block.kind() == Block.Kind.FOOTNOTE && block.extent().end() <= end) {
+      if (block.kind() == Block.Kind.NOTE && block.extent().end() <= end) {
         assertPieces(text, block); // inside of the block before it
         continue;
       }

@@ -163,10 +163,10 @@ class MarkdownBlocksTest {
         "here"
         """,
         """
-        FOOTNOTE: Word
-        FOOTNOTE: Two words⏎go on
-        FOOTNOTE: Three more words
-        FOOTNOTE: Quoted⏎"here"
+        NOTE: Word
+        NOTE: Two words⏎go on
+        NOTE: Three more words
+        NOTE: Quoted⏎"here"
         """);
   }
 

@@ -126,7 +126,7 @@ class MdxMaskTest {
         PARAGRAPH: Two.
         PARAGRAPH: Oil
         PARAGRAPH: Three.
-        FOOTNOTE: Four.
+        NOTE: Four.
         """);
   }
 
