@@ -14,17 +14,22 @@ export const EXTENSIONS = [
   "html",
   "htm",
   "xhtml",
+  "tex",
+  "ltx",
 ] as const;
 
 /** The languages of texts that have no file yet. */
 const LANGUAGES = [
   "asciidoc",
   "html",
+  "latex",
   "markdown",
   "mdx",
+  "plaintex",
   "plaintext",
   "srt",
   "subrip",
+  "tex",
   "vtt",
   "webvtt",
 ] as const;

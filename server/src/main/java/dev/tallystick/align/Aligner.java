@@ -26,7 +26,8 @@ public enum Aligner {
     @Override
     Alignment align(Sides sides, Cancellation cancellation) {
       Evidence.Texts texts = Evidence.Texts.of(sides);
-      Fit fit = Fit.start(ratio(sides), sides.target());
+      Fit fit = Fit.start(ratio(sides), sides);
+      boolean timed = fit.clock() != null;
       Scorer coarse = Evidence.coarse(texts, fit);
       Band band =
           Anchors.band(texts.shared().anchors(), sides)
@@ -37,6 +38,10 @@ public enum Aligner {
         Posteriors posteriors = new Posteriors(lattice, cancellation);
         fit = Refit.from(posteriors, lattice, fit);
         band = posteriors.band();
+        timed |= fit.clock() != null;
+      }
+      if (timed && fit.clock() == null) {
+        return align(sides.untimed(), cancellation); // they misled: as if there were none
       }
       Evidence evidence = Evidence.full(texts, fit);
       Weighed weighed = Weighed.of(evidence, band, sides, cancellation);

@@ -5,9 +5,10 @@ import java.util.List;
 /**
  * What the adaptive model makes of a link: the share of its shape, what the source says about the
  * target's length beyond the general run of lengths, the words both sides have, how the last
- * sentences close, what blocks they stand in, and whether block borders agree. A null move has its
- * share only: a dropped sentence is not charged for its length, which is what keeps the published
- * model from ever finding one. A block left out whole costs less than its sentences one by one.
+ * sentences close, what blocks they stand in, whether block borders agree, and in subtitles whether
+ * both are on the screen at the same time ({@link Clock}). A null move has its share only: a
+ * dropped sentence is not charged for its length, which is what keeps the published model from ever
+ * finding one. A block left out whole costs less than its sentences one by one.
  *
  * <p>The weights were chosen by hand on published translations; words count less than their
  * likelihood ratio says since they are not independent.
@@ -57,6 +58,7 @@ final class Evidence implements Scorer {
   private final Fit fit;
   private final LengthTable lengths;
   private final LengthTable mergedLengths;
+  private final Clock clock;
   private final List<Shape> shapes;
   private final int[] right;
   private final int[] down;
@@ -69,6 +71,7 @@ final class Evidence implements Scorer {
     this.fit = fit;
     this.lengths = new LengthTable(fit.lengths());
     this.mergedLengths = new LengthTable(fit.lengths().withFreedom(MERGED_FREEDOM));
+    this.clock = fit.clock();
     this.shapes = shapes;
     this.right = shapes.stream().mapToInt(Shape::sources).toArray();
     this.down = shapes.stream().mapToInt(Shape::targets).toArray();
@@ -99,8 +102,11 @@ final class Evidence implements Scorer {
 
   @Override
   public void links(int t, int s, double[] into, int at) {
-    double opening =
-        s < source.size() && t < target.size() ? opening(source.units[s], target.units[t]) : 0;
+    boolean inside = s < source.size() && t < target.size();
+    double opening = inside ? opening(source.units[s], target.units[t]) : 0;
+    if (clock != null && inside) {
+      opening += clock.begins(source.timeline.from(s), target.timeline.from(t));
+    }
     for (int shape = 0; shape < right.length; shape++) {
       int sEnd = s + right[shape];
       int tEnd = t + down[shape];
@@ -137,6 +143,9 @@ final class Evidence implements Scorer {
     worth += WORDS * shared.logRatio(s, sEnd, t, tEnd);
     int close = source.units[sEnd - 1].close();
     worth += CLOSING * fit.closes().logRatio(close, target.units[tEnd - 1].close());
+    if (clock != null) {
+      worth += clock.ends(source.timeline.to(sEnd - 1), target.timeline.to(tEnd - 1));
+    }
     if (source.crossesBlocks(s, sEnd)) {
       worth += BORDER_CROSSED;
     }

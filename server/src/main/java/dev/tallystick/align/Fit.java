@@ -7,15 +7,18 @@ package dev.tallystick.align;
  * @param logShares natural log of the share of each two-sided shape, as in {@link Shape#ADAPTIVE}
  * @param closes how the closing marks of both sides go together
  * @param kinds how the kinds of block of both sides go together
+ * @param clock when a translation is on the screen; null where the times say nothing
  */
-record Fit(LengthModel lengths, double[] logShares, Affinity closes, Affinity kinds) {
+record Fit(LengthModel lengths, double[] logShares, Affinity closes, Affinity kinds, Clock clock) {
   /** What is assumed before anything is known but the ratio of lengths. */
-  static Fit start(double ratio, Side target) {
+  static Fit start(double ratio, Sides sides) {
+    Side target = sides.target();
     return new Fit(
         LengthModel.start(ratio),
         Shape.ADAPTIVE.stream().mapToDouble(shape -> Math.log(shape.share())).toArray(),
         Affinity.of(new double[Unit.CLOSES][Unit.CLOSES], closes(target)),
-        Affinity.of(new double[Unit.KINDS][Unit.KINDS], kinds(target)));
+        Affinity.of(new double[Unit.KINDS][Unit.KINDS], kinds(target)),
+        sides.timed() ? ClockSearch.byTimes(sides) : null);
   }
 
   double logShare(int shape) {

@@ -15,19 +15,22 @@ final class Refit {
   private final double[][] closes = new double[Unit.CLOSES][Unit.CLOSES];
   private final double[][] kinds = new double[Unit.KINDS][Unit.KINDS];
   private final LengthFit lengths;
+  private final ClockFit clock;
 
   private Refit(Lattice lattice, double ratio) {
     this.source = lattice.source();
     this.target = lattice.target();
     this.looked = lattice.scorer().shapes().size();
     this.lengths = new LengthFit(source.size() + target.size(), ratio);
+    Sides sides = new Sides(source, target);
+    this.clock = sides.timed() ? new ClockFit(sides) : null;
   }
 
   /** What a lattice teaches. Shapes that it did not look for keep their general share. */
   static Fit from(Posteriors posteriors, Lattice lattice, Fit before) {
     Refit refit = new Refit(lattice, before.lengths().ratio());
     posteriors.links(LEAST, refit::learn);
-    return refit.fit();
+    return refit.fit(before);
   }
 
   private void learn(int shape, int t, int s, double posterior) {
@@ -40,12 +43,15 @@ final class Refit {
     shapes[shape] += posterior;
     closes[source.units[sEnd - 1].close()][target.units[tEnd - 1].close()] += posterior;
     kinds[source.units[s].kind()][target.units[t].kind()] += posterior;
+    if (clock != null) {
+      clock.add(s, sEnd, t, tEnd, posterior);
+    }
     if (posterior > 0.5) {
       lengths.add(source.length(s, sEnd), target.length(t, tEnd), posterior);
     }
   }
 
-  private Fit fit() {
+  private Fit fit(Fit before) {
     double all = PRIOR;
     for (double count : shapes) {
       all += count;
@@ -60,6 +66,7 @@ final class Refit {
         lengths.fit(),
         logShares,
         Affinity.of(closes, Fit.closes(target)),
-        Affinity.of(kinds, Fit.kinds(target)));
+        Affinity.of(kinds, Fit.kinds(target)),
+        clock == null ? null : clock.fit(before.clock()));
   }
 }

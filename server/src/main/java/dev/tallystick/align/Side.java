@@ -30,12 +30,16 @@ final class Side {
   /** Number of verbatim units before each unit, and of all at the end. */
   final int[] verbatimBefore;
 
+  /** When the units are on the screen; null if nothing says so, or nothing sensible. */
+  final Timeline timeline;
+
   Side(List<Unit> list) {
     this.units = list.toArray(Unit[]::new);
     this.lengthBefore = new int[units.length + 1];
     this.opensBefore = new int[units.length + 1];
     this.blockEndingAt = new int[units.length + 1];
     this.blockStartingAt = new int[units.length + 1];
+    this.timeline = Timeline.of(units);
     findBlocks();
     this.verbatimBefore = new int[units.length + 1];
     for (int i = 0; i < units.length; i++) {
@@ -58,6 +62,11 @@ final class Side {
         start = end;
       }
     }
+  }
+
+  /** The same units, but nothing says when they are on the screen. */
+  Side untimed() {
+    return new Side(Arrays.stream(units).map(unit -> unit.shown(0, -1)).toList());
   }
 
   int size() {

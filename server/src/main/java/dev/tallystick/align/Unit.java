@@ -11,15 +11,40 @@ package dev.tallystick.align;
  * @param close how it ends: a number from 0 to {@value #CLOSES} - 1
  * @param words the keys of its words in order; equal words have equal keys
  * @param verbatim whether it is no sentence but a block copied as it stands, such as code
+ * @param from when it comes on the screen, in milliseconds from the start of the film
+ * @param to when it goes; before {@code from} if either is unknown
  */
 public record Unit(
-    int length, int letters, boolean opens, int kind, int close, Word[] words, boolean verbatim) {
+    int length,
+    int letters,
+    boolean opens,
+    int kind,
+    int close,
+    Word[] words,
+    boolean verbatim,
+    long from,
+    long to) {
 
   /** How many kinds of block there are. */
   public static final int KINDS = 12;
 
   /** How many ways there are to close a sentence. */
   public static final int CLOSES = 5;
+
+  /** One of which nothing says when it is on the screen. */
+  public Unit(
+      int length, int letters, boolean opens, int kind, int close, Word[] words, boolean verbatim) {
+    this(length, letters, opens, kind, close, words, verbatim, 0, -1);
+  }
+
+  /** The same, shown at this time. */
+  public Unit shown(long start, long end) {
+    return new Unit(length, letters, opens, kind, close, words, verbatim, start, end);
+  }
+
+  boolean timed() {
+    return from <= to;
+  }
 
   /**
    * One word.

@@ -24,6 +24,11 @@ final class Units {
       Unit.Word[] words = {new Unit.Word(key(content), NUMBER)};
       return new Unit(content.length(), 0, true, 0, 0, words, true);
     }
+    Unit unit = sentence(segment);
+    return segment.shown().map(times -> unit.shown(times.from(), times.to())).orElse(unit);
+  }
+
+  private static Unit sentence(Segment segment) {
     String prose = segment.prose();
     return new Unit(
         prose.codePointCount(0, prose.length()),

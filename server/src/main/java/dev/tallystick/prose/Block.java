@@ -2,10 +2,10 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import java.util.List;
+import java.util.Optional;
 
 /**
- * A unit of layout that no sentence crosses. A footnote may lie inside of another block, behind
- * which it comes; all others lie behind each other. No two have prose in common.
+ * A unit of layout that no sentence crosses. No two have prose in common.
  *
  * @param kind what it is
  * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0
@@ -13,8 +13,10 @@ import java.util.List;
  * @param extent the whole block in the file, its marks included
  * @param pieces its prose in order: stretches of the file that do not touch, none empty; none at
  *     all if the block is verbatim
+ * @param timed where the format says when text is on the screen: stretches that hold all of the
+ *     prose of which it is known, in order; else none
  */
-public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
+public record Block(Kind kind, int level, Span extent, List<Span> pieces, List<Timed> timed) {
   /** What a block is. */
   public enum Kind {
     /** Running text. */
@@ -35,9 +37,46 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces) {
     VERBATIM
   }
 
-  /** Keeps the pieces unchangeable. */
+  /** Keeps the lists unchangeable. */
   public Block {
     pieces = List.copyOf(pieces);
+    timed = List.copyOf(timed);
+  }
+
+  /** A block of a format that knows no times. */
+  public Block(Kind kind, int level, Span extent, List<Span> pieces) {
+    this(kind, level, extent, pieces, List.of());
+  }
+
+  /**
+   * When a stretch of the block is on the screen: from the first cue that it stands in to the last.
+   * Empty where the file does not say.
+   */
+  public Optional<Times> shown(Span stretch) {
+    Times shown = null;
+    for (int i = firstBehind(stretch.start()); i < timed.size(); i++) {
+      Timed next = timed.get(i);
+      if (next.span().start() >= stretch.end()) {
+        break;
+      }
+      shown = shown == null ? next.times() : shown.cover(next.times());
+    }
+    return Optional.ofNullable(shown);
+  }
+
+  /** Index of the first timed stretch that ends behind an offset; how many there are if none. */
+  private int firstBehind(int offset) {
+    int low = 0;
+    int high = timed.size();
+    while (low < high) {
+      int middle = (low + high) >>> 1;
+      if (timed.get(middle).span().end() <= offset) {
+        low = middle + 1;
+      } else {
+        high = middle;
+      }
+    }
+    return low;
   }
 
   /** The prose as one string: the pieces of {@code file} put together. */

@@ -29,19 +29,4 @@ record Cue(int start, int end, Times times, String place, List<Span> lines) {
         && times.leadsTo(other.times)
         && place.equals(other.place);
   }
-
-  /**
-   * When a cue is shown.
-   *
-   * @param from milliseconds from the start of the film
-   * @param to the same for its end
-   */
-  record Times(long from, long to) {
-    /** Longer silence than this parts sentences. Common practice, no source. */
-    private static final long LONGEST_PAUSE = 4_000;
-
-    private boolean leadsTo(Times other) {
-      return other.from >= from && other.from - to <= LONGEST_PAUSE;
-    }
-  }
 }

@@ -12,7 +12,7 @@ import java.util.regex.Pattern;
  * both: a file with the marks of the other, or with broken ones, loses no text.
  */
 final class CueReader {
-  private static final String TIME = "(?:(\\d{1,9}):)?(\\d{1,2}):(\\d{1,2})[.,](\\d{1,3})";
+  private static final String TIME = "(-?)(?:(\\d{1,9}):)?(\\d{1,2}):(\\d{1,2})[.,](\\d{1,3})";
   private static final Pattern TIMES = Pattern.compile(TIME + "[ \\t]*+-->[ \\t]*+" + TIME);
   private static final Pattern NUMBER = Pattern.compile("\\d{1,9}");
   private static final Pattern HEADER = Pattern.compile("WEBVTT(?:[ \\t]|$)");
@@ -66,7 +66,7 @@ final class CueReader {
 
   private void addCue(Span start, int times, int from, int to) {
     if (from < to) {
-      Cue.Times shown = times < 0 ? null : times(lines.get(times));
+      Times shown = times < 0 ? null : times(lines.get(times));
       String place = place(lines.get(times < 0 ? from : times)) + place(lines.get(from));
       int end = lines.get(to - 1).end();
       cues.add(new Cue(start.start(), end, shown, place, lines.subList(from, to)));
@@ -95,16 +95,20 @@ final class CueReader {
     return end;
   }
 
-  private Cue.Times times(Span line) {
+  private Times times(Span line) {
     Matcher matcher = TIMES.matcher(file).region(line.start(), line.end());
-    return matcher.lookingAt() ? new Cue.Times(millis(matcher, 1), millis(matcher, 5)) : null;
+    return matcher.lookingAt() ? new Times(millis(matcher, 1), millis(matcher, 6)) : null;
   }
 
-  private static long millis(Matcher matcher, int group) {
+  /** A time below zero, as tools write it that move all cues to an earlier time, is one too. */
+  private static long millis(Matcher matcher, int sign) {
+    int group = sign + 1;
     long hours = matcher.group(group) == null ? 0 : Long.parseLong(matcher.group(group));
     long minutes = hours * 60 + Long.parseLong(matcher.group(group + 1));
     long seconds = minutes * 60 + Long.parseLong(matcher.group(group + 2));
-    return seconds * 1000 + Long.parseLong((matcher.group(group + 3) + "00").substring(0, 3));
+    String fraction = (matcher.group(group + 3) + "00").substring(0, 3);
+    long millis = seconds * 1000 + Long.parseLong(fraction);
+    return matcher.group(sign).isEmpty() ? millis : -millis;
   }
 
   private boolean isBlank(int line) {

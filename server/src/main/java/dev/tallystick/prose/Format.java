@@ -22,7 +22,9 @@ public enum Format {
   /** HTML, also as XHTML. */
   HTML(List.of("html"), "html", "htm", "xhtml"),
   /** AsciiDoc. */
-  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
+  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
+  /** LaTeX. */
+  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -82,6 +84,7 @@ public enum Format {
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text, keys);
+      case LATEX -> Latex.blocks(text);
     };
   }
 }

@@ -41,8 +41,8 @@ final class Inlines {
 
   /** Reads a node; whether its children are to be read as well. */
   private boolean enter(Node node) {
-    if (node instanceof Text) {
-      node.getSourceSpans().forEach(this::addText);
+    if (node instanceof Text text) {
+      addText(text);
     } else if (node instanceof Code) {
       addCode(node);
     } else if (node instanceof SoftLineBreak || node instanceof HardLineBreak) {
@@ -51,8 +51,24 @@ final class Inlines {
     return true;
   }
 
+  /** Adds text; what reads as it is written and has no marks goes in whole, as nearly all does. */
+  private void addText(Text text) {
+    String literal = text.getLiteral();
+    for (SourceSpan span : text.getSourceSpans()) {
+      if (span.getLength() == literal.length()
+          && literal.indexOf('\\') < 0
+          && literal.indexOf('[') < 0
+          && literal.indexOf('|') < 0) {
+        int start = span.getInputIndex();
+        pieces.add(origin.of(start), origin.of(Nodes.end(span) - 1) + 1);
+      } else {
+        addMarked(span);
+      }
+    }
+  }
+
   /** Adds text without the backslashes that escape and without references to footnotes. */
-  private void addText(SourceSpan span) {
+  private void addMarked(SourceSpan span) {
     int end = Nodes.end(span);
     int at = span.getInputIndex();
     while (at < end) {

@@ -137,12 +137,16 @@ record Line(
     boolean prose = false;
     int upper = 0;
     boolean lower = false;
-    for (int at = start; at < end; at += Character.charCount(file.codePointAt(at))) {
-      int c = file.codePointAt(at);
-      width = Characters.columnAfter(width, c);
-      if (lower && prose) {
+    for (int at = start; at < end; ) {
+      char unit = file.charAt(at);
+      if (lower && unit >= ' ' && unit < 0x7F) {
+        width++; // nearly all of most texts
+        at++;
         continue;
       }
+      int c = file.codePointAt(at);
+      at += Character.charCount(c);
+      width = Characters.columnAfter(width, c);
       prose |= Character.isLetterOrDigit(c);
       upper += Character.isUpperCase(c) ? 1 : 0;
       lower |= Character.isLowerCase(c);

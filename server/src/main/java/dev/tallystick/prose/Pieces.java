@@ -55,7 +55,7 @@ final class Pieces {
   List<Span> spans() {
     close();
     start = end;
-    return closed.stream().allMatch(this::isBlank) ? List.of() : List.copyOf(closed);
+    return isBlank() ? List.of() : List.copyOf(closed);
   }
 
   private void trimBlanks() {
@@ -70,7 +70,14 @@ final class Pieces {
     }
   }
 
-  private boolean isBlank(Span piece) {
-    return piece.of(file).chars().allMatch(Characters::isSpace);
+  private boolean isBlank() {
+    for (Span piece : closed) {
+      for (int at = piece.start(); at < piece.end(); at++) {
+        if (!Characters.isSpace(file.charAt(at))) {
+          return false;
+        }
+      }
+    }
+    return true;
   }
 }

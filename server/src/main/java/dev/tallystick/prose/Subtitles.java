@@ -19,10 +19,14 @@ final class Subtitles {
   private final List<Block> blocks = new ArrayList<>();
   private boolean joins;
 
-  /** The block that is being read: its start, its prose, its last line, and who speaks in it. */
+  /**
+   * The block that is being read: its start, its prose, its times, its last line, and who speaks in
+   * it.
+   */
   private int start;
 
   private Pieces pieces;
+  private List<Timed> timed;
   private CueLine last;
   private String voice;
 
@@ -68,9 +72,13 @@ final class Subtitles {
       close();
       start = begin >= 0 ? begin : line.span().start();
       pieces = new Pieces(file);
+      timed = new ArrayList<>();
       voice = "";
     }
     line.pieces().forEach(piece -> pieces.add(piece.start(), piece.end()));
+    if (line.cue().times() != null) {
+      timed.add(new Timed(line.span(), line.cue().times()));
+    }
     voice = line.voice().isEmpty() ? voice : line.voice();
     last = line;
   }
@@ -89,7 +97,7 @@ final class Subtitles {
   private void close() {
     if (last != null) {
       Span extent = new Span(start, last.span().end());
-      blocks.add(new Block(Block.Kind.PARAGRAPH, 0, extent, pieces.spans()));
+      blocks.add(new Block(Block.Kind.PARAGRAPH, 0, extent, pieces.spans(), timed));
       last = null;
     }
   }

@@ -47,14 +47,11 @@ final class BlockProse {
   }
 
   private static String oneLine(String prose) {
-    char[] line = null;
-    for (int i = 0; i < prose.length(); i++) {
-      char c = prose.charAt(i);
-      if (c == '\n' || c == '\r' || c == '\u2028' || c == '\u2029' || c == '\u0085') {
-        line = line == null ? prose.toCharArray() : line;
-        line[i] = ' ';
-      }
-    }
-    return line == null ? prose : new String(line);
+    return prose
+        .replace('\n', ' ')
+        .replace('\r', ' ')
+        .replace('\u0085', ' ')
+        .replace('\u2028', ' ')
+        .replace('\u2029', ' ');
   }
 }

@@ -44,10 +44,11 @@ final class Borders {
    */
   BitSet of(BreakIterator iterator, String prose, String raw) {
     Marks marks = new Marks(prose);
-    BitSet borders = own.of(prose, raw, marks);
-    iterator.setText(prose);
-    for (int at = iterator.next(); at != BreakIterator.DONE; at = iterator.next()) {
-      borders.set(marks.close(marks.stopBefore(at)));
+    NearStops near = new NearStops(prose);
+    BitSet borders = own.of(prose, raw, marks, near);
+    iterator.setText(near.string());
+    for (int at = iterator.next(); at < near.length() && at > 0; at = iterator.next()) {
+      borders.set(marks.close(marks.stopBefore(near.inProse(at))));
     }
     for (int at = borders.nextSetBit(0); at >= 0; at = borders.nextSetBit(at + 1)) {
       if (marks.skip(at) == prose.length() || goesOn(prose, marks, at)) {

@@ -76,9 +76,13 @@ final class Fragments {
   }
 
   private static boolean startsDense(String text) {
-    return text.codePoints()
-        .filter(Character::isLetter)
-        .limit(1)
-        .anyMatch(c -> Scripts.isUnspaced(c) || UnicodeScript.of(c) == UnicodeScript.HANGUL);
+    for (int i = 0; i < text.length(); ) {
+      int c = text.codePointAt(i);
+      if (Character.isLetter(c)) {
+        return c >= 0x80 && (Scripts.isUnspaced(c) || UnicodeScript.of(c) == UnicodeScript.HANGUL);
+      }
+      i += Character.charCount(c);
+    }
+    return false;
   }
 }

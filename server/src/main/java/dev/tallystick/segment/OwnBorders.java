@@ -17,22 +17,21 @@ final class OwnBorders {
   }
 
   /** The places in a block of prose, {@code raw} with its line ends. */
-  BitSet of(String prose, String raw, Marks marks) {
+  BitSet of(String prose, String raw, Marks marks, NearStops near) {
     BitSet borders = new BitSet(prose.length());
-    for (int i = 0; i < prose.length(); i++) {
-      char c = prose.charAt(i);
-      if (c < 0x80 && c != '.') {
-        continue; // nearly all of most texts
-      }
+    for (int i = 0; i < near.count(); i++) {
+      int at = near.place(i);
+      char c = prose.charAt(at);
       if (c == '.') {
-        addNumberInQuotes(borders, prose, marks, i + 1);
+        addNumberInQuotes(borders, prose, marks, at + 1);
       } else if (c == '…') {
-        addEllipsis(borders, prose, marks, i + 1);
-      } else if (isThai(c) && i + 1 < prose.length() && Blank.is(prose.charAt(i + 1))) {
-        addThai(borders, prose, raw, marks, i + 1);
+        addEllipsis(borders, prose, marks, at + 1);
       } else if (Marks.isDenseStop(c)) {
-        addDense(borders, prose, marks, i + 1);
+        addDense(borders, prose, marks, at + 1);
       }
+    }
+    if (near.thai()) {
+      addThai(borders, prose, raw, marks);
     }
     return borders;
   }
@@ -87,20 +86,19 @@ final class OwnBorders {
    * blank is a border only where it is a long one, behind a word of courtesy, which closes a
    * sentence, or before a word that opens one. The end of a line is a blank.
    */
-  private void addThai(BitSet borders, String prose, String raw, Marks marks, int end) {
-    int next = marks.skip(end);
-    if (next == prose.length()) {
-      return;
-    }
-    boolean line = raw.substring(end, next).chars().anyMatch(c -> c != ' ');
-    if (next - end > 1 && !line
-        || closers.stream().anyMatch(word -> prose.startsWith(word, end - word.length()))
-        || starters.stream().anyMatch(word -> prose.startsWith(word, next))) {
-      borders.set(end);
+  private void addThai(BitSet borders, String prose, String raw, Marks marks) {
+    for (int end = 1; end < prose.length(); end++) {
+      if (NearStops.isThai(prose.charAt(end - 1)) && Blank.is(prose.charAt(end))) {
+        int next = marks.skip(end);
+        borders.set(end, next < prose.length() && partsThai(prose, raw, end, next));
+      }
     }
   }
 
-  private static boolean isThai(char c) {
-    return c >= '\u0E00' && c < '\u0F00'; // Lao included
+  private boolean partsThai(String prose, String raw, int end, int next) {
+    boolean line = raw.substring(end, next).chars().anyMatch(c -> c != ' ');
+    return next - end > 1 && !line
+        || closers.stream().anyMatch(word -> prose.startsWith(word, end - word.length()))
+        || starters.stream().anyMatch(word -> prose.startsWith(word, next));
   }
 }

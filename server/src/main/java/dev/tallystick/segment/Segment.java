@@ -1,7 +1,10 @@
 package dev.tallystick.segment;
 
 import dev.tallystick.prose.Block;
+import dev.tallystick.prose.Times;
 import dev.tallystick.text.Span;
+import java.util.List;
+import java.util.Optional;
 
 /**
  * One sentence, or one verbatim block.
@@ -13,8 +16,22 @@ import dev.tallystick.text.Span;
  * @param opens whether it is the first of its block
  */
 public record Segment(Span span, String prose, Block block, boolean opens) {
+  /** Offset behind a segment; behind a note, the end of the text that it stands in if later. */
+  public static int end(List<Segment> all, int index) {
+    int end = all.get(index).span().end();
+    for (int i = index; i > 0 && all.get(i).block().kind() == Block.Kind.NOTE; i--) {
+      end = Math.max(end, all.get(i - 1).span().end());
+    }
+    return end;
+  }
+
   /** Whether it is a verbatim block and no sentence. */
   public boolean verbatim() {
     return block.kind() == Block.Kind.VERBATIM;
+  }
+
+  /** When it is on the screen: that of all the cues that it stands in. Empty if nothing tells. */
+  public Optional<Times> shown() {
+    return block.shown(span);
   }
 }

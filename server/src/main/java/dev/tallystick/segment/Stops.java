@@ -156,11 +156,17 @@ final class Stops {
   }
 
   private static boolean isDigits(String prose, int from, int to) {
-    return from < to && prose.substring(from, to).chars().allMatch(Character::isDigit);
+    int at = from;
+    while (at < to && Character.isDigit(prose.charAt(at))) {
+      at++;
+    }
+    return from < to && at == to;
   }
 
   private static boolean isRoman(String prose, int from, int to) {
-    return ROMAN.matcher(prose).region(from, to).matches();
+    return from < to
+        && "IVX".indexOf(prose.charAt(from)) >= 0
+        && ROMAN.matcher(prose).region(from, to).matches();
   }
 
   /** Where the letters and digits before a place start. */

@@ -18,7 +18,7 @@ class LatticeTest {
     for (int seed = 0; seed < PAIRS; seed++) {
       Sides sides = Sample.unrelated(seed, 4).sides();
       Evidence.Texts texts = Evidence.Texts.of(sides);
-      assertAllChains(Evidence.full(texts, Fit.start(1.1, sides.target())), sides, seed);
+      assertAllChains(Evidence.full(texts, Fit.start(1.1, sides)), sides, seed);
     }
   }
 
@@ -62,7 +62,7 @@ class LatticeTest {
     for (int seed = 0; seed < 40; seed++) {
       Sides sides = Sample.unrelated(2_000 + seed, 30).sides();
       Evidence.Texts texts = Evidence.Texts.of(sides);
-      Scorer adaptive = Evidence.full(texts, Fit.start(0.9, sides.target()));
+      Scorer adaptive = Evidence.full(texts, Fit.start(0.9, sides));
       for (Scorer scorer : List.of(adaptive, published(sides))) {
         Lattice lattice = Lattice.banded(scorer, sides, everything(sides), Cancellation.NONE);
         assertAddUp(new Posteriors(lattice, Cancellation.NONE), scorer, sides);
@@ -120,7 +120,7 @@ class LatticeTest {
     for (int seed = 0; seed < 25; seed++) {
       Sides sides = Sample.faithful(seed, 35).sides();
       Evidence.Texts texts = Evidence.Texts.of(sides);
-      Scorer scorer = Evidence.full(texts, Fit.start(1.1, sides.target()));
+      Scorer scorer = Evidence.full(texts, Fit.start(1.1, sides));
       Lattice whole = Lattice.banded(scorer, sides, everything(sides), Cancellation.NONE);
       Posteriors inAll = new Posteriors(whole, Cancellation.NONE);
       List<Match> way = Lattice.wide(scorer, sides, 60, Cancellation.NONE).chain();
@@ -140,7 +140,7 @@ class LatticeTest {
     Sample sample = Sample.faithful(3, 60);
     sample.target.subList(25, 35).clear();
     Sides sides = sample.sides();
-    Scorer scorer = Evidence.full(Evidence.Texts.of(sides), Fit.start(1.1, sides.target()));
+    Scorer scorer = Evidence.full(Evidence.Texts.of(sides), Fit.start(1.1, sides));
     Lattice whole = Lattice.banded(scorer, sides, everything(sides), Cancellation.NONE);
     Band band = new Posteriors(whole, Cancellation.NONE).band();
     assertTrue(width(band, 10) <= 6, () -> "width " + width(band, 10));

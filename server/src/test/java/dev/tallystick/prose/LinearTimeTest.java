@@ -253,6 +253,81 @@ class LinearTimeTest {
   }
 
   @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "a",
+        "a\n",
+        "\n\n",
+        "{",
+        "}",
+        "{}",
+        "{a\n\n",
+        "[",
+        "\\[",
+        "\\(",
+        "$",
+        "$$",
+        "$ ",
+        "$$ $",
+        "\\a{",
+        "\\a{a",
+        "\\a[",
+        "\\a{b}{c}",
+        "\\a{b c}",
+        "\\emph{",
+        "\\emph{a ",
+        "\\label{",
+        "\\label{a}",
+        "\\footnote{",
+        "\\footnote{a",
+        "a\\footnote{b}",
+        "\\section{",
+        "\\section{a}",
+        "\\epigraph{a}",
+        "\\title{\\footnote{",
+        "\\texorpdfstring{",
+        "\\enquote{a",
+        "\\item",
+        "\\item[",
+        "\\item[a]",
+        "\\begin{a}",
+        "\\begin{a}\\end{b}",
+        "\\end{a}",
+        "\\begin{itemize}",
+        "\\begin{itemize}\\item a",
+        "\\begin{verbatim}",
+        "\\begin{verbatim}\\end{verbatim}",
+        "\\begin{align}",
+        "\\begin{tabular}{l}",
+        "\\begin{document}",
+        "\\begin{lemma}[",
+        "\\begin{frame}{",
+        "\\begin",
+        "\\verb|",
+        "\\lstinline{",
+        "\\mintinline[",
+        "\\verb",
+        "\\newcommand",
+        "\\newcommand{",
+        "\\iffalse",
+        "\\iffalse \\fi",
+        "%",
+        "%\n",
+        "\\",
+        "\\\\[",
+        "&",
+        "~",
+        "\\\"{",
+        "\\par "
+      })
+  void latexEnds(String fragment) {
+    assertEnds(Format.LATEX, fragment);
+    assertEnds(Format.LATEX, "\\begin{tabular}" + fragment.repeat(TIMES) + "\\end{tabular}", 1);
+    assertEnds(Format.LATEX, fragment.repeat(TIMES) + "\\begin{document}a", 1);
+    assertEnds(Format.LATEX, fragment.repeat(TIMES) + "}".repeat(TIMES), 1);
+  }
+
+  @ParameterizedTest
   @ValueSource(strings = {"- ", "| a ", "\\|"})
   void rowsOfATableEnd(String fragment) {
     assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
