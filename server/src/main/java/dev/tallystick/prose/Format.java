@@ -4,6 +4,7 @@ import dev.tallystick.text.Text;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 
@@ -86,5 +87,18 @@ public enum Format {
       case ASCIIDOC -> AsciiDoc.blocks(text, keys);
       case LATEX -> Latex.blocks(text);
     };
+  }
+
+  /**
+   * How whole the marks of a file are: equal before and after a change that breaks none. Formats
+   * whose marks cannot be left open have none.
+   */
+  public Map<String, Integer> marks(Text text) {
+    return this == HTML ? HtmlMarks.of(text) : Map.of();
+  }
+
+  /** Whether it is a format of subtitles, whose text has no place outside of a cue. */
+  public boolean hasCues() {
+    return this == SUBRIP || this == WEBVTT;
   }
 }
