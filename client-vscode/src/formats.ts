@@ -8,21 +8,30 @@ export const EXTENSIONS = [
   "adoc",
   "asciidoc",
   "asc",
+  "rst",
+  "rest",
   "srt",
   "vtt",
   "html",
   "htm",
   "xhtml",
+  "tex",
+  "ltx",
 ] as const;
 
 /** The languages of texts that have no file yet. */
 const LANGUAGES = [
   "asciidoc",
   "html",
+  "latex",
   "markdown",
+  "plaintex",
   "plaintext",
+  "restructuredtext",
+  "rst",
   "srt",
   "subrip",
+  "tex",
   "vtt",
   "webvtt",
 ] as const;

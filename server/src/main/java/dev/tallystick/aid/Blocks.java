@@ -8,11 +8,17 @@ import dev.tallystick.text.Edit;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Set;
 
 /** Puts blocks between the blocks of the translation, parted as the format and the source ask. */
 final class Blocks {
   private static final String DELIMITERS = "[ \\t|:>-]*-[ \\t|:-]*";
+
+  /** Formats in which a blank line parts paragraphs. */
+  private static final Set<Format> MARKUP =
+      EnumSet.of(Format.MARKDOWN, Format.ASCIIDOC, Format.RST, Format.LATEX);
 
   private final Reading source;
   private final Reading target;
@@ -138,7 +144,7 @@ final class Blocks {
 
   private boolean needsBlank(Block.Kind one, Block.Kind other) {
     boolean same = one == other && (one == Block.Kind.ITEM || one == Block.Kind.CELL);
-    boolean markup = format == Format.MARKDOWN || format == Format.ASCIIDOC;
+    boolean markup = MARKUP.contains(format);
     return markup ? !same && one != Block.Kind.HEADING : !same && hasBlank();
   }
 

@@ -80,10 +80,21 @@ record Chunk(String lines, int first, int last) {
     return reading.text().place(reading.segments().get(segment).block().extent().start()).line();
   }
 
-  /** The line that the block of a segment ends on. */
+  /** The line that the block of a segment ends on; for a note, the block that it stands in. */
   static int lastLine(Reading reading, int segment) {
-    Block block = reading.segments().get(segment).block();
+    int line = lastLine(reading, reading.segments().get(segment).block());
+    for (int i = segment; i > 0 && isNote(reading, i); i--) {
+      line = Math.max(line, lastLine(reading, reading.segments().get(i - 1).block()));
+    }
+    return line;
+  }
+
+  private static int lastLine(Reading reading, Block block) {
     int behind = block.extent().end();
     return reading.text().place(Math.max(block.extent().start(), behind - 1)).line();
+  }
+
+  private static boolean isNote(Reading reading, int segment) {
+    return reading.segments().get(segment).block().kind() == Block.Kind.NOTE;
   }
 }

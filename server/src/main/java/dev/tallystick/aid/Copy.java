@@ -30,6 +30,9 @@ record Copy(Reading source, Format format) {
   /** What could be read as a mark anywhere, and what could at the start of a line. */
   private static final Pattern MARKS = Pattern.compile("[\\\\`*_\\[\\]<>|&~]");
 
+  /** Where they stand in prose of LaTeX, they had a backslash; formulas have others. */
+  private static final Pattern LATEX_MARKS = Pattern.compile("[%&#]");
+
   private static final Pattern FIRST_MARK = Pattern.compile("^(?:([#+=-])|(\\d{1,9})([.)]))");
 
   /** The sentence with this index. */
@@ -42,7 +45,7 @@ record Copy(Reading source, Format format) {
     return Stream.concat(raw, Stream.of(prose))
         .filter(copy -> reads(copy, prose))
         .findFirst()
-        .orElseGet(() -> format == Format.MARKDOWN ? escaped(prose) : prose);
+        .orElseGet(() -> escaped(prose));
   }
 
   private static String oneLine(Block block, String raw) {
@@ -50,17 +53,38 @@ record Copy(Reading source, Format format) {
     return (quoted ? QUOTED_BREAK : BREAK).matcher(raw).replaceAll(" ");
   }
 
-  /** Whether a copy, alone on a line, is read as this prose. */
+  /** Whether a copy, alone on a line, is read as this prose, whatever notes stand in it. */
   private boolean reads(String copy, String prose) {
     List<Block> blocks = format.blocks(new Text(copy));
-    return blocks.size() == 1 && dense(blocks.get(0).prose(copy)).equals(dense(prose));
+    return !blocks.isEmpty()
+        && blocks.stream().skip(1).allMatch(block -> block.kind() == Block.Kind.NOTE)
+        && dense(blocks.get(0).prose(copy)).equals(dense(prose))
+        && (format != Format.LATEX || isBalanced(copy));
+  }
+
+  /** Whether each brace has its counterpart; those with a backslash are characters. */
+  private static boolean isBalanced(String copy) {
+    int depth = 0;
+    for (int i = 0; i < copy.length() && depth >= 0; i++) {
+      char c = copy.charAt(i);
+      i += c == '\\' ? 1 : 0;
+      depth += c == '{' ? 1 : c == '}' ? -1 : 0;
+    }
+    return depth == 0;
   }
 
   private static String dense(String prose) {
     return prose.replaceAll("\\s+", "");
   }
 
-  private static String escaped(String prose) {
+  private String escaped(String prose) {
+    if (format == Format.LATEX) {
+      return LATEX_MARKS.matcher(prose).replaceAll("\\\\$0");
+    }
+    return format == Format.MARKDOWN ? escapedInMarkdown(prose) : prose;
+  }
+
+  private static String escapedInMarkdown(String prose) {
     String escaped = MARKS.matcher(prose).replaceAll("\\\\$0");
     return FIRST_MARK
         .matcher(escaped)

@@ -20,7 +20,7 @@ import java.util.TreeMap;
  * right beside it: behind what stands for the sentence before, else before what stands for the
  * sentence behind. Where the translation has put blocks together it goes between them. All others
  * become blocks of their own, with the marks and blank lines of the source. A cell of a row that
- * has a counterpart cannot be put in, nor can the head of a table.
+ * has a counterpart cannot be put in, nor can the head of a table, nor a note without its sentence.
  */
 public final class Stub {
   private final Reading source;
@@ -51,6 +51,9 @@ public final class Stub {
     Map<Inline.Point, List<Integer>> inline = new LinkedHashMap<>();
     Map<Integer, List<Group>> blocks = new TreeMap<>();
     for (Group group : Group.of(source, segments)) {
+      if (group.kind() == Block.Kind.NOTE) {
+        continue; // it comes along with the sentence that it stands in
+      }
       Optional<Inline.Point> point = point(group);
       if (point.isPresent()) {
         inline.computeIfAbsent(point.get(), key -> new ArrayList<>()).addAll(group.segments());

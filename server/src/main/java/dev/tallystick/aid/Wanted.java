@@ -5,6 +5,7 @@ import dev.tallystick.check.Finding;
 import dev.tallystick.check.OnSide;
 import dev.tallystick.engine.Gap;
 import dev.tallystick.engine.PairResult;
+import dev.tallystick.prose.Block;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
@@ -82,11 +83,21 @@ public record Wanted(List<Integer> segments, Reason reason, Optional<Finding> fi
     private Wanted missing(Finding finding) {
       List<Integer> run =
           IntStream.range(0, source().size())
-              .filter(i -> source().get(i).span().overlaps(finding.span()))
-              .filter(i -> !source().get(i).verbatim() || !places.matched(i))
+              .filter(i -> belongs(source().get(i), finding.span()))
+              .filter(i -> !comesAlong(source().get(i)) || !places.matched(i))
               .boxed()
               .toList();
       return new Wanted(run, Reason.MISSING, Optional.of(finding));
+    }
+
+    /** Whether a segment is of a missing run, and not only around a note that is. */
+    private static boolean belongs(Segment segment, Span run) {
+      Span span = segment.span();
+      return span.overlaps(run) && (span.equals(run) || !span.cover(run).equals(span));
+    }
+
+    private static boolean comesAlong(Segment segment) {
+      return segment.verbatim() || segment.block().kind() == Block.Kind.NOTE;
     }
 
     /** Sentences that nobody has got to and nothing stands for, not even a copy. */
@@ -100,7 +111,7 @@ public record Wanted(List<Integer> segments, Reason reason, Optional<Finding> fi
     }
 
     private int gap(int before) {
-      return before < 0 ? 0 : result.target().segments().get(before).span().end();
+      return before < 0 ? 0 : Segment.end(result.target().segments(), before);
     }
 
     /** Around a gap: from the word before it to the sentence behind. */

@@ -59,8 +59,29 @@ public record Unit(
    * One word.
    *
    * @param key equal for equal words, and for them only (up to a collision in 64 bits)
+   * @param stem equal for words that begin with the same letters, and so may be forms of one
+   * @param root equal for words that begin alike, and so may be related in two languages; 0 if the
+   *     word is too short for that, or no word
    * @param trust how likely the word is, from 0 to 1, to stand unchanged in a translation, given
    *     that it stands somewhere in the other text
    */
-  public record Word(long key, double trust) {}
+  public record Word(long key, long stem, long root, double trust) {
+    private static final double NUMBER = 0.9;
+    private static final double WHOLE = 0.5;
+
+    /** A word that has no other forms. */
+    public Word(long key, double trust) {
+      this(key, key, 0, trust);
+    }
+
+    /** Whether it has a digit. */
+    boolean number() {
+      return trust >= NUMBER;
+    }
+
+    /** What the same word on the other side is worth as its translation, from 0 to 1. */
+    double likeness() {
+      return trust >= WHOLE ? 1 : 2 * trust;
+    }
+  }
 }

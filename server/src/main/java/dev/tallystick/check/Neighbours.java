@@ -28,7 +28,7 @@ final class Neighbours {
   /** The empty stretch on the other side where the counterpart of a run would stand. */
   Span gap(Run run) {
     int index = before[run.from()];
-    int at = index < 0 ? 0 : other.get(index).span().end();
+    int at = index < 0 ? 0 : Segment.end(other, index);
     return new Span(at, at);
   }
 

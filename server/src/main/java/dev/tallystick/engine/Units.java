@@ -4,6 +4,7 @@ import dev.tallystick.align.Unit;
 import dev.tallystick.prose.Block;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Words;
+import dev.tallystick.text.Scripts;
 import dev.tallystick.text.Text;
 import java.util.List;
 
@@ -14,6 +15,15 @@ final class Units {
 
   private static final double WORD = 0.5;
   private static final double SHORT = 0.1;
+
+  /** In a script without blanks, where nearly all words are short. */
+  private static final double DENSE = 0.25;
+
+  /** Words with the same beginning of so many characters may be forms of one word. */
+  private static final int STEM = 5;
+
+  /** Words with so many letters in common at the start may be related (Simard et al. 1992). */
+  private static final int ROOT = 4;
 
   private Units() {}
 
@@ -44,9 +54,20 @@ final class Units {
     List<String> words = Words.of(prose);
     Unit.Word[] keyed = new Unit.Word[words.size()];
     for (int i = 0; i < keyed.length; i++) {
-      keyed[i] = new Unit.Word(key(words.get(i)), trust(words.get(i)));
+      keyed[i] = word(words.get(i));
     }
     return keyed;
+  }
+
+  private static Unit.Word word(String word) {
+    double trust = trust(word);
+    if (trust >= NUMBER || !Character.isLetter(word.codePointAt(0)) || trust == DENSE) {
+      return new Unit.Word(key(word), trust);
+    }
+    int letters = word.codePointCount(0, word.length());
+    String stem = letters <= STEM ? word : word.substring(0, word.offsetByCodePoints(0, STEM));
+    long root = letters < ROOT ? 0 : key(word.substring(0, word.offsetByCodePoints(0, ROOT)));
+    return new Unit.Word(key(word), key(stem), root, trust);
   }
 
   private static int letters(String prose) {
@@ -64,6 +85,9 @@ final class Units {
       if (word.charAt(i) >= '0' && word.charAt(i) <= '9') {
         return NUMBER;
       }
+    }
+    if (Scripts.isUnspaced(word.codePointAt(0))) {
+      return DENSE;
     }
     return word.length() > 2 ? WORD : SHORT;
   }
@@ -84,6 +108,7 @@ final class Units {
       case ITEM -> block.level() > 1 ? 8 : 7;
       case CELL -> 9;
       case QUOTATION -> 10;
+      case NOTE -> 11;
     };
   }
 }

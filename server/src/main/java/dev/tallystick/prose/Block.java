@@ -12,7 +12,8 @@ import java.util.Optional;
  * @param kind what it is
  * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0
  *     otherwise
- * @param extent the whole block in the file, its marks included
+ * @param extent the whole block in the file, its marks included; only cells of a table side by side
+ *     overlap
  * @param pieces its prose in order: stretches of the file that do not touch, none empty; none at
  *     all if the block is verbatim
  * @param timed where the format says when text is on the screen: stretches that hold all of the
@@ -33,6 +34,8 @@ public record Block(
     CELL,
     /** A paragraph in a quotation. */
     QUOTATION,
+    /** A footnote or the like: it may stand inside the block before it, between its pieces. */
+    NOTE,
     /** Code and the like, copied as it stands: a landmark without prose. */
     VERBATIM
   }

@@ -20,7 +20,11 @@ public enum Format {
   /** HTML, also as XHTML. */
   HTML(List.of("html"), "html", "htm", "xhtml"),
   /** AsciiDoc. */
-  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc");
+  ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
+  /** LaTeX. */
+  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx"),
+  /** reStructuredText. */
+  RST(List.of("restructuredtext", "rst"), "rst", "rest");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -75,6 +79,8 @@ public enum Format {
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
+      case LATEX -> Latex.blocks(text);
+      case RST -> Rst.blocks(text);
     };
   }
 }

@@ -41,6 +41,15 @@ public record Segment(
     }
   }
 
+  /** Offset behind a segment; behind a note, the end of the text that it stands in if later. */
+  public static int end(List<Segment> all, int index) {
+    int end = all.get(index).span().end();
+    for (int i = index; i > 0 && all.get(i).block().kind() == Block.Kind.NOTE; i--) {
+      end = Math.max(end, all.get(i - 1).span().end());
+    }
+    return end;
+  }
+
   /** Whether it is a verbatim block and no sentence. */
   public boolean verbatim() {
     return block.kind() == Block.Kind.VERBATIM;

@@ -431,4 +431,50 @@ class StubTest {
             "== Zeug\n\nRudern Sie *los*.\n\n* Riemen\n* Tau\n",
             "0-0 1-1 2- 3-2 4- 5-3"));
   }
+
+  @Test
+  void inLatexABlockComesWithItsMarksAndASentenceWithItsNote() {
+    assertEquals(
+        "\\section{Zeug}\n\nRudern Sie los. Take a \\emph{rest}\\footnote{Or not.} at 5\\%.\n\n"
+            + "Nehmen Sie alles mit.\n\n\\item Tau\n\\item Oars\n",
+        Stubbed.in(
+            Format.LATEX,
+            "\\section{Gear}\n\nRow the boat. Take a \\emph{rest}\\footnote{Or not.} at 5\\%.\n\n"
+                + "Take all of it along.\n\n\\item Rope\n\\item Oars\n",
+            "\\section{Zeug}\n\nRudern Sie los.\n\nNehmen Sie alles mit.\n\n\\item Tau\n",
+            "0-0 1-1 2- 3- 4-2 5-3 6-"));
+  }
+
+  @Test
+  void inLatexABlockGoesBehindTheTextThatANoteStandsIn() {
+    assertEquals(
+        "Weit\\footnote{Sehr weit.} draußen.\nNoch weiter.\n\nCome back now.\n\nSchluss.\n",
+        Stubbed.in(
+            Format.LATEX,
+            "Far\\footnote{Very far.} out.\nFarther.\n\nCome back now.\n\nThe end.\n",
+            "Weit\\footnote{Sehr weit.} draußen.\nNoch weiter.\n\nSchluss.\n",
+            "0-0 1-1 2-2 3- 4-3"));
+  }
+
+  @Test
+  void inLatexHalfOfAPairOfBracesIsLeftOut() {
+    assertEquals(
+        "Ja gewiss. Stop here at 5\\%! Go. Rudern Sie los.\n",
+        Stubbed.in(
+            Format.LATEX,
+            "Yes indeed. \\textbf{Stop {\\em here} at 5\\%!} Go. Row the boat.\n",
+            "Ja gewiss. Rudern Sie los.\n",
+            "0-0 1- 2-1"));
+  }
+
+  @Test
+  void inRestructuredTextABlockComesWithItsMarks() {
+    assertEquals(
+        "Zeug\n----\n\nRudern Sie *los*. Take a *rest*.\n\n- Riemen\n\n  - of ash\n\n- Tau\n",
+        Stubbed.in(
+            Format.RST,
+            "Gear\n----\n\nRow the *boat*. Take a *rest*.\n\n- Oars\n\n  - of ash\n\n- Rope\n",
+            "Zeug\n----\n\nRudern Sie *los*.\n\n- Riemen\n\n- Tau\n",
+            "0-0 1-1 2- 3-2 4- 5-3"));
+  }
 }
