@@ -15,6 +15,11 @@ export const EXTENSIONS = [
   "html",
   "htm",
   "xhtml",
+  "xml",
+  "dbk",
+  "docbook",
+  "dita",
+  "ditamap",
   "tex",
   "ltx",
 ] as const;
@@ -22,6 +27,8 @@ export const EXTENSIONS = [
 /** The languages of texts that have no file yet. */
 const LANGUAGES = [
   "asciidoc",
+  "dita",
+  "docbook",
   "html",
   "latex",
   "markdown",
@@ -34,6 +41,7 @@ const LANGUAGES = [
   "tex",
   "vtt",
   "webvtt",
+  "xml",
 ] as const;
 
 /** The settings of a project. */

@@ -33,6 +33,8 @@ test("the server is told of texts, of new texts and of the settings of the proje
   assert.deepEqual(FILTERS, [
     { scheme: "file", pattern: TEXTS },
     { scheme: "untitled", language: "asciidoc" },
+    { scheme: "untitled", language: "dita" },
+    { scheme: "untitled", language: "docbook" },
     { scheme: "untitled", language: "html" },
     { scheme: "untitled", language: "latex" },
     { scheme: "untitled", language: "markdown" },
@@ -45,6 +47,7 @@ test("the server is told of texts, of new texts and of the settings of the proje
     { scheme: "untitled", language: "tex" },
     { scheme: "untitled", language: "vtt" },
     { scheme: "untitled", language: "webvtt" },
+    { scheme: "untitled", language: "xml" },
     { scheme: "file", pattern: "**/tallystick.json" },
   ]);
 });

@@ -7,6 +7,7 @@ import dev.tallystick.engine.Intake;
 import dev.tallystick.engine.Listing;
 import dev.tallystick.engine.PairResult;
 import dev.tallystick.engine.Reading;
+import dev.tallystick.engine.Tongue;
 import dev.tallystick.engine.Unreadable;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Pair;
@@ -128,7 +129,11 @@ final class Job {
     complete &= !Malformed.tell(console, file, decoded);
     Reading read =
         Reading.of(
-            decoded.text(), Intake.format(path), language.tag(), borders.srx(), Cancellation.NONE);
+            decoded.text(),
+            Intake.format(path),
+            Tongue.of(language),
+            borders.srx(),
+            Cancellation.NONE);
     borders.tell(console, read.endless());
     complete &= read.endless().isEmpty();
     return read;

@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.align.Unit;
+import dev.tallystick.pairing.Language;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.Segment;
@@ -37,14 +38,15 @@ public record Reading(
     endless = List.copyOf(endless);
   }
 
-  /** Reads a file. */
+  /** Reads a file in a language, a BCP 47 tag. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
-    return of(text, format, language, Srx.NONE, cancellation);
+    return of(text, format, Tongue.of(new Language(language)), Srx.NONE, cancellation);
   }
 
   /** Reads a file by the rules for sentence borders that its project has. */
   public static Reading of(
-      Text text, Format format, String language, Srx rules, Cancellation cancellation) {
+      Text text, Format format, Tongue tongue, Srx rules, Cancellation cancellation) {
+    String language = tongue.in(text, format).tag();
     Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
         Segmenter.of(language, rules)

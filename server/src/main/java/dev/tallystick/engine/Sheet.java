@@ -11,7 +11,7 @@ import dev.tallystick.text.Text;
 final class Sheet {
   private final Text text;
   private final Format format;
-  private final String language;
+  private final Tongue tongue;
   private final Srx rules;
   private Reading reading;
   private volatile boolean outdated;
@@ -19,13 +19,12 @@ final class Sheet {
   /**
    * A text in a language.
    *
-   * @param language a BCP 47 tag
    * @param rules for its sentence borders
    */
-  Sheet(Text text, Format format, String language, Srx rules) {
+  Sheet(Text text, Format format, Tongue tongue, Srx rules) {
     this.text = text;
     this.format = format;
-    this.language = language;
+    this.tongue = tongue;
     this.rules = rules;
   }
 
@@ -54,7 +53,7 @@ final class Sheet {
    */
   synchronized Reading reading() {
     if (reading == null) {
-      reading = Reading.of(text, format, language, rules, this::outdated);
+      reading = Reading.of(text, format, tongue, rules, this::outdated);
     }
     return reading;
   }

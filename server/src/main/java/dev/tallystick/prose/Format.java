@@ -19,6 +19,8 @@ public enum Format {
   WEBVTT(List.of("vtt", "webvtt"), "vtt"),
   /** HTML, also as XHTML. */
   HTML(List.of("html"), "html", "htm", "xhtml"),
+  /** XML: DocBook, DITA, and others by what they say of themselves. */
+  XML(List.of("xml", "docbook", "dita"), "xml", "dbk", "docbook", "dita", "ditamap"),
   /** AsciiDoc. */
   ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
   /** LaTeX. */
@@ -63,6 +65,19 @@ public enum Format {
   }
 
   /**
+   * The language that a file gives for itself: a tag as it stands there, possibly of no language.
+   */
+  public Optional<String> language(Text text) {
+    return switch (this) {
+      case PLAIN, MARKDOWN -> StatedLanguage.inFrontMatter(text);
+      case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
+      case HTML -> StatedLanguage.inHtml(text);
+      case XML -> StatedLanguage.inXml(text);
+      case SUBRIP, WEBVTT, LATEX, RST -> Optional.empty();
+    };
+  }
+
+  /**
    * The blocks of a file, in its order. Never fails: what cannot be read as markup is prose.
    *
    * @param text the file, possibly with a byte-order mark, which is no prose
@@ -78,6 +93,7 @@ public enum Format {
       case MARKDOWN -> Markdown.blocks(text);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
+      case XML -> Xml.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
       case LATEX -> Latex.blocks(text);
       case RST -> Rst.blocks(text);

@@ -11,6 +11,7 @@ import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
 import java.util.stream.IntStream;
@@ -51,16 +52,26 @@ class StubRandomTest {
           "\\",
           "`x`");
 
-  private static String text(Random random) {
+  /** In XML a line end parts nothing, so that without these a text would be one paragraph. */
+  private static final List<String> TAGS =
+      List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n");
+
+  private static List<String> pieces(Format format) {
+    List<String> pieces = new ArrayList<>(PIECES);
+    pieces.addAll(format == Format.XML ? TAGS : List.of());
+    return pieces;
+  }
+
+  private static String text(Random random, List<String> pieces) {
     StringBuilder text = new StringBuilder();
     for (int i = random.nextInt(30); i > 0; i--) {
-      text.append(PIECES.get(random.nextInt(PIECES.size())));
+      text.append(pieces.get(random.nextInt(pieces.size())));
     }
     return text.toString();
   }
 
   private static Reading read(Random random, Format format, String language) {
-    return Reading.of(new Text(text(random)), format, language, Cancellation.NONE);
+    return Reading.of(new Text(text(random, pieces(format))), format, language, Cancellation.NONE);
   }
 
   @ParameterizedTest

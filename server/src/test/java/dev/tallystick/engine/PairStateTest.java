@@ -24,7 +24,7 @@ class PairStateTest {
   private final Sheet source = sheet("The bell rings.", "en");
 
   private static Sheet sheet(String text, String language) {
-    return new Sheet(new Text(text), Format.MARKDOWN, language, Srx.NONE);
+    return new Sheet(new Text(text), Format.MARKDOWN, Tongue.of(new Language(language)), Srx.NONE);
   }
 
   private Task take(Sheet target) {

@@ -153,6 +153,54 @@ class LinearTimeTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
+        "<a>",
+        "<a>a",
+        "a<a/>",
+        "</a>",
+        "<a></b>",
+        "<para>a",
+        "a.<footnote>a",
+        "a<footnote/>",
+        "a<footnote>a</footnote>)",
+        "<section><title>a",
+        "<listitem>",
+        "<indexterm>a",
+        "<screen>a",
+        "<inlinemediaobject>",
+        "<a its:translate='no'>a",
+        "<its:rules><its:translateRule selector='//a:a' translate='no'/>",
+        "<its:withinTextRule selector='//a//b//c' withinText='nested'/>a",
+        "<its:withinTextRule selector='//a[(' withinText='yes'/></its:rules>",
+        "<a xmlns='u'>",
+        "<a b='",
+        "<a b",
+        "<",
+        "<!--",
+        "<?",
+        "<![CDATA[",
+        "<![CDATA[a]]>",
+        "]]>",
+        "<!DOCTYPE a [",
+        "<!ENTITY a 'b'>",
+        "&a;",
+        "&a",
+        "&amp;",
+        "&#1"
+      })
+  void xmlEnds(String fragment) {
+    assertEnds(Format.XML, fragment);
+    assertEnds(
+        Format.XML,
+        "<section xmlns:its='http://www.w3.org/2005/11/its'><its:rules><its:withinTextRule"
+            + " selector='//b//a | //a//para' withinText='nested'/></its:rules><para>"
+            + fragment.repeat(TIMES),
+        1);
+    assertEnds(Format.XML, "<!DOCTYPE a [" + fragment.repeat(TIMES), 1);
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
         "a",
         "a\n",
         "*",
