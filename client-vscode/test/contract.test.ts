@@ -40,6 +40,8 @@ test("the server is told of texts, of new texts and of the settings of the proje
     { scheme: "untitled", language: "markdown" },
     { scheme: "untitled", language: "plaintex" },
     { scheme: "untitled", language: "plaintext" },
+    { scheme: "untitled", language: "restructuredtext" },
+    { scheme: "untitled", language: "rst" },
     { scheme: "untitled", language: "srt" },
     { scheme: "untitled", language: "subrip" },
     { scheme: "untitled", language: "tex" },

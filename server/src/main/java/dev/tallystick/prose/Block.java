@@ -10,7 +10,8 @@ import java.util.Optional;
  * @param kind what it is
  * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0
  *     otherwise
- * @param extent the whole block in the file, its marks included
+ * @param extent the whole block in the file, its marks included; only cells of a table side by side
+ *     overlap
  * @param pieces its prose in order: stretches of the file that do not touch, none empty; none at
  *     all if the block is verbatim
  * @param timed where the format says when text is on the screen: stretches that hold all of the

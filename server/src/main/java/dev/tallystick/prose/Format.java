@@ -24,7 +24,9 @@ public enum Format {
   /** AsciiDoc. */
   ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
   /** LaTeX. */
-  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx");
+  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx"),
+  /** reStructuredText. */
+  RST(List.of("restructuredtext", "rst"), "rst", "rest");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -71,7 +73,7 @@ public enum Format {
       case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
       case HTML -> StatedLanguage.inHtml(text);
       case XML -> StatedLanguage.inXml(text);
-      case SUBRIP, WEBVTT, LATEX -> Optional.empty();
+      default -> Optional.empty();
     };
   }
 
@@ -89,6 +91,7 @@ public enum Format {
       case XML -> Xml.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text);
       case LATEX -> Latex.blocks(text);
+      case RST -> Rst.blocks(text);
     };
   }
 }

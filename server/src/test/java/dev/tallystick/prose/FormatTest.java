@@ -18,6 +18,7 @@ class FormatTest {
     assertEquals(Optional.of(Format.HTML), Format.ofName("ferry.xhtml"));
     assertEquals(Optional.of(Format.LATEX), Format.ofName("ferry.ltx"));
     assertEquals(Optional.of(Format.LATEX), Format.ofLanguage("plaintex"));
+    assertEquals(Optional.of(Format.RST), Format.ofName("ferry.rst"));
     assertEquals(Optional.empty(), Format.ofName("docs.md/ferry"));
     assertEquals(Optional.empty(), Format.ofName("md"));
     assertEquals(Optional.of(Format.HTML), Format.ofName("en/ferry.htm"));

@@ -316,6 +316,94 @@ class LinearTimeTest {
   }
 
   @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "a \n",
+        "*",
+        "*a ",
+        "**a",
+        " a*",
+        "`",
+        "`a ",
+        "``a",
+        "```",
+        "`a`",
+        "`a <",
+        "`a>`",
+        "`:a",
+        "_`a",
+        "_",
+        "a_ ",
+        "a-",
+        "-a",
+        "a:",
+        "|",
+        "|a",
+        "||\n",
+        "| a\n",
+        "[",
+        "[a",
+        "[a]_",
+        ":",
+        ":a",
+        ":a:",
+        ":a:`",
+        ":a: ",
+        ":a: b\n",
+        "\\",
+        "\\ ",
+        "- ",
+        "- a\n",
+        "-\n",
+        "1. ",
+        "1. a\n",
+        "(a) ",
+        "-a, ",
+        "-a  b\n",
+        ".. ",
+        ".. a\n",
+        ".. [1] ",
+        ".. _a\n",
+        ".. a:: ",
+        ".. a::\n",
+        ".. |a|",
+        "..\n\n",
+        ".. code::\n\n",
+        "::\n",
+        "::\n\n",
+        "a::\n\n b\n",
+        "=",
+        "==\n",
+        "====\n",
+        "==== ",
+        "== ==\n",
+        "== ==\n\n",
+        "== ==\na b\n",
+        "-- --\n",
+        "+-+\n",
+        "+-",
+        "+-+\n|a|\n",
+        "|a|",
+        "+\n",
+        ">>> \n",
+        " a\n",
+        " a\n\n",
+        "a\n b\n",
+        "\t",
+        "a\n=\n",
+        "=\na\n=\n",
+        "\"a,",
+        "\""
+      })
+  void restructuredTextEnds(String fragment) {
+    String many = fragment.repeat(TIMES);
+    assertEnds(Format.RST, fragment);
+    assertEnds(Format.RST, "+" + "-+".repeat(TIMES) + "\n|" + many, 1);
+    assertEnds(Format.RST, "== ".repeat(TIMES) + "\n" + many + "\n== ==\n", 1);
+    assertEnds(Format.RST, ".. csv-table::\n\n   " + many, 1);
+  }
+
+  @ParameterizedTest
   @ValueSource(strings = {"- ", "| a ", "\\|"})
   void rowsOfATableEnd(String fragment) {
     assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
