@@ -8,6 +8,11 @@ public enum Aligner {
   /** Gale and Church (1993), with their parameters. */
   PUBLISHED {
     @Override
+    Side side(List<Unit> units) {
+      return new Side(units, Unit::codePoints);
+    }
+
+    @Override
     Alignment align(Sides sides, Cancellation cancellation) {
       Scorer scorer = new Published(sides.source().lengthBefore, sides.target().lengthBefore);
       Band band = steadyLook(scorer, sides, cancellation);
@@ -71,7 +76,11 @@ public enum Aligner {
 
   /** Aligns two texts. Either may be empty. */
   public Alignment align(List<Unit> source, List<Unit> target, Cancellation cancellation) {
-    return align(new Sides(new Side(source), new Side(target)), cancellation);
+    return align(new Sides(side(source), side(target)), cancellation);
+  }
+
+  Side side(List<Unit> units) {
+    return new Side(units);
   }
 
   abstract Alignment align(Sides sides, Cancellation cancellation);

@@ -12,13 +12,13 @@ import java.util.List;
  */
 final class Moves {
   /** Units less probably without a counterpart are not looked at. */
-  private static final double LEAST_NULL = 0.35;
+  private static final double LEAST_NULL = 0.2;
 
   /** How far apart they may stand, in units. */
   private static final int FARTHEST = 60;
 
   /** Suiting each other less than this is chance (nats). */
-  private static final double LEAST_WORTH = 4;
+  private static final double LEAST_WORTH = 1.5;
 
   private record Candidate(Move move, double worth) {}
 

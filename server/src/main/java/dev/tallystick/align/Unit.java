@@ -3,8 +3,9 @@ package dev.tallystick.align;
 /**
  * What the aligner knows of one sentence, or of one verbatim block.
  *
- * @param length characters (code points) of the sentence
- * @param letters how many of them are letters or digits
+ * @param length how long the sentence reads, in characters; what is copied in it counts for little
+ * @param codePoints its characters as Unicode has them, all of them: what the published model takes
+ * @param letters how many of these are letters or digits
  * @param opens whether it is the first of its block
  * @param kind a small number, equal for blocks that look alike (a heading of level 2, a cell); from
  *     0 to {@value #KINDS} - 1
@@ -16,6 +17,7 @@ package dev.tallystick.align;
  */
 public record Unit(
     int length,
+    int codePoints,
     int letters,
     boolean opens,
     int kind,
@@ -33,13 +35,20 @@ public record Unit(
 
   /** One of which nothing says when it is on the screen. */
   public Unit(
-      int length, int letters, boolean opens, int kind, int close, Word[] words, boolean verbatim) {
-    this(length, letters, opens, kind, close, words, verbatim, 0, -1);
+      int length,
+      int codePoints,
+      int letters,
+      boolean opens,
+      int kind,
+      int close,
+      Word[] words,
+      boolean verbatim) {
+    this(length, codePoints, letters, opens, kind, close, words, verbatim, 0, -1);
   }
 
   /** The same, shown at this time. */
   public Unit shown(long start, long end) {
-    return new Unit(length, letters, opens, kind, close, words, verbatim, start, end);
+    return new Unit(length, codePoints, letters, opens, kind, close, words, verbatim, start, end);
   }
 
   boolean timed() {

@@ -8,17 +8,21 @@ import java.util.stream.Collectors;
 
 /** Sentences of the translation that nothing in the source stands for; a run is one finding. */
 final class Additions {
+  /** A hair more than for omissions: a free translation that parts a sentence looks much alike. */
+  private static final double LEAST = 0.52;
+
   private Additions() {}
 
   static List<Finding> find(Subject subject) {
     double[] extra = subject.alignment().targetNull();
     Set<Integer> moved =
         subject.alignment().moves().stream().map(Move::target).collect(Collectors.toSet());
+    Slight slight = new Slight(subject, OnSide.TARGET);
     Neighbours neighbours = new Neighbours(subject, OnSide.TARGET);
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
     for (Run run :
-        Run.of(subject.target(), i -> extra[i] >= Omissions.LEAST && !moved.contains(i))) {
+        Run.of(subject.target(), i -> extra[i] >= LEAST && !moved.contains(i) && !slight.is(i))) {
       findings.add(
           new Finding(
               Code.ADDITION,

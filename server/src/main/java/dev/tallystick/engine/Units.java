@@ -2,7 +2,6 @@ package dev.tallystick.engine;
 
 import dev.tallystick.align.Unit;
 import dev.tallystick.prose.Block;
-import dev.tallystick.segment.Closing;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Words;
 import dev.tallystick.text.Scripts;
@@ -32,7 +31,7 @@ final class Units {
     if (segment.verbatim()) {
       String content = segment.span().of(text.string()).strip().replaceAll("\\R", "\n");
       Unit.Word[] words = {new Unit.Word(key(content), NUMBER)};
-      return new Unit(content.length(), 0, true, 0, 0, words, true);
+      return new Unit(content.length(), content.length(), 0, true, 0, 0, words, true);
     }
     Unit unit = sentence(segment);
     return segment.shown().map(times -> unit.shown(times.from(), times.to())).orElse(unit);
@@ -41,11 +40,12 @@ final class Units {
   private static Unit sentence(Segment segment) {
     String prose = segment.prose();
     return new Unit(
+        segment.length(),
         prose.codePointCount(0, prose.length()),
         letters(prose),
         segment.opens(),
         kind(segment.block()),
-        Closing.of(prose).ordinal(),
+        segment.closing().ordinal(),
         words(prose),
         false);
   }

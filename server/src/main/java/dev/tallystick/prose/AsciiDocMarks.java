@@ -2,6 +2,7 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -18,23 +19,31 @@ final class AsciiDocMarks {
   private static final Pattern REFERENCE = Pattern.compile("<<(?=[\\p{L}\\d_:#./{])");
   private static final Set<String> SILENT =
       Set.of("icon", "footnote", "footnoteref", "indexterm", "anchor");
+  private static final Set<String> CODE = Set.of("kbd", "pass", "stem", "latexmath", "asciimath");
 
   private final String prose;
   private final boolean[] marks;
+  private final List<Inline> marked;
   private final AsciiDocBrackets brackets;
   private final AsciiDocQuotes quotes;
   private int at;
 
-  private AsciiDocMarks(String prose) {
+  private AsciiDocMarks(String prose, List<Inline> marked) {
     this.prose = prose;
     this.marks = new boolean[prose.length()];
+    this.marked = marked;
     this.brackets = new AsciiDocBrackets(prose);
-    this.quotes = new AsciiDocQuotes(prose, marks, brackets);
+    this.quotes = new AsciiDocQuotes(prose, marks, brackets, marked);
   }
 
-  /** Which characters of a block are marks; its lines end in LF. */
-  static boolean[] of(String prose) {
-    AsciiDocMarks read = new AsciiDocMarks(prose);
+  /**
+   * Which characters of a block are marks.
+   *
+   * @param prose its lines, each with an LF
+   * @param marked takes what is marked, by offsets into {@code prose}
+   */
+  static boolean[] of(String prose, List<Inline> marked) {
+    AsciiDocMarks read = new AsciiDocMarks(prose, marked);
     while (read.at < prose.length()) {
       read.step();
     }
@@ -109,6 +118,7 @@ final class AsciiDocMarks {
     }
     mark(at, at + count);
     mark(close, close + count);
+    add(Inline.Kind.CODE, at, close + count);
     at = close + count;
     return true;
   }
@@ -133,6 +143,7 @@ final class AsciiDocMarks {
     }
     int comma = brackets.next(",", at);
     boolean text = comma >= 0 && comma < close;
+    add(Inline.Kind.LINK, at, close + 2);
     mark(at, text ? comma + 1 : close + 2);
     mark(close, close + 2);
     at = text ? comma + 1 : close + 2;
@@ -188,6 +199,7 @@ final class AsciiDocMarks {
       at = target;
       return true;
     }
+    addMacro(name, close);
     mark(at, target);
     at = target;
     if (SILENT.contains(name) || name.equals("xref") && close == open + 1) {
@@ -199,9 +211,23 @@ final class AsciiDocMarks {
     return true;
   }
 
+  private void addMacro(String name, int close) {
+    if (isLink(name)) {
+      add(Inline.Kind.LINK, at, close + 1);
+    } else if (name.equals("image")) {
+      add(Inline.Kind.IMAGE, at, close + 1);
+    } else if (CODE.contains(name)) {
+      add(Inline.Kind.CODE, at, close + 1);
+    }
+  }
+
+  private static boolean isLink(String macro) {
+    return macro.equals("link") || macro.equals("mailto") || macro.equals("xref");
+  }
+
   private void readMacro(String name, int target, Span text) {
     int open = text.start() - 1;
-    boolean link = name.equals("link") || name.equals("mailto") || name.equals("xref");
+    boolean link = isLink(name);
     boolean shown = name.equals("menu") || link && text.isEmpty();
     if (!shown) {
       mark(target, open);
@@ -227,6 +253,7 @@ final class AsciiDocMarks {
       at = end;
     } else {
       Span words = AsciiDocMacro.linkText(prose, new Span(end + 1, close));
+      add(Inline.Kind.LINK, at, close + 1);
       mark(words.isEmpty() ? end : at, words.start());
       mark(words.end(), close + 1);
       at = words.isEmpty() ? close + 1 : words.start();
@@ -241,6 +268,10 @@ final class AsciiDocMarks {
 
   private boolean finds(Pattern pattern, int from) {
     return from < prose.length() && pattern.matcher(prose).region(from, prose.length()).lookingAt();
+  }
+
+  private void add(Inline.Kind kind, int from, int to) {
+    marked.add(new Inline(kind, new Span(from, to)));
   }
 
   private void mark(int from, int to) {

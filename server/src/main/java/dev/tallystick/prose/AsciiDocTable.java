@@ -149,7 +149,7 @@ final class AsciiDocTable {
       blocks.add(
           style == 'l'
               ? new Block(Block.Kind.VERBATIM, 0, extent, List.of())
-              : new Block(Block.Kind.CELL, 0, extent, AsciiDocInlines.of(file, cell)));
+              : AsciiDocInlines.block(Block.Kind.CELL, 0, extent, file, cell));
       cell.clear();
     }
   }

@@ -73,7 +73,7 @@ public enum Format {
       case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
       case HTML -> StatedLanguage.inHtml(text);
       case XML -> StatedLanguage.inXml(text);
-      default -> Optional.empty();
+      case SUBRIP, WEBVTT, LATEX, RST -> Optional.empty();
     };
   }
 
@@ -83,6 +83,11 @@ public enum Format {
    * @param text the file, possibly with a byte-order mark, which is no prose
    */
   public List<Block> blocks(Text text) {
+    return Placeholders.mark(text.string(), marked(text));
+  }
+
+  /** The blocks with what the format itself marks in them. */
+  private List<Block> marked(Text text) {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text);

@@ -4,6 +4,7 @@ import dev.tallystick.prose.MarkupEvents.What;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayDeque;
+import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Deque;
 import java.util.IdentityHashMap;
@@ -26,6 +27,7 @@ import org.jsoup.select.NodeVisitor;
  */
 final class Html implements NodeVisitor {
   private final MarkupEvents events = new MarkupEvents();
+  private final List<Inline> inlines = new ArrayList<>();
   private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
   private final Deque<MarkupContext> contexts = new ArrayDeque<>();
 
@@ -38,7 +40,9 @@ final class Html implements NodeVisitor {
     Html html = new Html(document);
     document.traverse(html);
     html.events.sort();
-    return html.events.blocks(() -> new MarkupFlow(text.string(), html.parents, null));
+    List<Block> blocks =
+        html.events.blocks(() -> new MarkupFlow(text.string(), html.parents, null));
+    return Inline.spread(blocks, html.inlines);
   }
 
   @Override
@@ -73,9 +77,24 @@ final class Html implements NodeVisitor {
       events.add(What.BORDER, tag.start(), inside);
     } else if (element.normalName().equals("br")) {
       events.add(What.LINE_END, tag.start(), inside);
+    } else if (!tag.isEmpty()) {
+      addInline(element, tag, inside.fixed() && !around.fixed());
     }
     if (!inside.fixed() && !tag.isEmpty()) {
       element.attributes().forEach(attribute -> read(attribute, element, tag, inside));
+    }
+  }
+
+  /**
+   * Takes in an element within running text.
+   *
+   * @param fixed whether it is the first around its text that is not to be translated
+   */
+  private void addInline(Element element, Span tag, boolean fixed) {
+    Inline.Kind kind = fixed ? Inline.Kind.CODE : HtmlTags.inline(element.normalName());
+    if (kind != null) {
+      int end = Math.max(tag.end(), span(element.endSourceRange()).end());
+      inlines.add(new Inline(kind, new Span(tag.start(), end)));
     }
   }
 

@@ -35,6 +35,7 @@ final class Markdown {
   private final String file;
   private final int base;
   private final List<Block> blocks = new ArrayList<>();
+  private final List<Inline> inlines = new ArrayList<>();
 
   private Markdown(String file, int base) {
     this.file = file;
@@ -48,7 +49,7 @@ final class Markdown {
     while (node != null) {
       node = Nodes.next(node, markdown.enter(node), document);
     }
-    return List.copyOf(markdown.blocks);
+    return Inline.spread(markdown.blocks, markdown.inlines);
   }
 
   /** Reads a node; whether its children are to be read as well. */
@@ -78,7 +79,7 @@ final class Markdown {
   }
 
   private List<Span> prose(Node node) {
-    return Inlines.of(file, node, this::offset, extent(node).end()).spans();
+    return Inlines.of(file, node, this::offset, extent(node).end(), inlines).spans();
   }
 
   /** A paragraph; footnotes that follow each other without a blank line are one each. */
@@ -112,7 +113,7 @@ final class Markdown {
     for (Origin.CellOrigin origin : Origin.ofRow(file, start, extent.end())) {
       if (cell != null && !cell.getSourceSpans().isEmpty()) {
         Origin places = origin.countedFrom(cell.getSourceSpans().get(0));
-        List<Span> pieces = Inlines.of(file, cell, places, origin.end()).spans();
+        List<Span> pieces = Inlines.of(file, cell, places, origin.end(), inlines).spans();
         addProse(Block.Kind.CELL, 0, trim(origin.start(), origin.end()), pieces);
       }
       cell = cell == null ? null : cell.getNext();

@@ -266,7 +266,13 @@ class ExtractionLawTest {
           "(b) ",
           "#. ",
           ">>> ",
-          "=====\nTitle\n=====\n");
+          "=====\nTitle\n=====\n",
+          "{{ ",
+          "}}",
+          "%1$s",
+          "</0>",
+          "https://a.b/",
+          "a@b.c");
 
   @ParameterizedTest
   @EnumSource
@@ -331,6 +337,7 @@ class ExtractionLawTest {
       assertEquals(block.kind() == Block.Kind.VERBATIM, block.pieces().isEmpty(), source);
       assertPieces(text, block);
       assertOnce(source, block, taken);
+      assertInlines(text, block);
       if (extent.end() >= farthest.end()) {
         farthest = extent;
         cell = block.kind() == Block.Kind.CELL;
@@ -345,6 +352,18 @@ class ExtractionLawTest {
         assertFalse(taken.get(at) && !Characters.isSpace(source.charAt(at)), source);
       }
       taken.set(piece.start(), piece.end());
+    }
+  }
+
+  private static void assertInlines(Text text, Block block) {
+    int start = 0;
+    for (Inline inline : block.inlines()) {
+      Span span = inline.span();
+      assertTrue(span.start() >= start && span.overlaps(block.extent()), text::string);
+      assertTrue(span.end() <= text.string().length(), text::string);
+      assertEquals(span.start(), text.outsidePair(span.start()), text::string);
+      assertEquals(span.end(), text.outsidePair(span.end()), text::string);
+      start = span.start();
     }
   }
 

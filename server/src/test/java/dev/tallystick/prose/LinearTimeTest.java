@@ -46,7 +46,35 @@ class LinearTimeTest {
 
   @ParameterizedTest
   @ValueSource(
-      strings = {"a", "a\n", "- ", "- a\n", "1. a\n", " ", "\n", "...", "漢", "A B\n===\n", "\t"})
+      strings = {
+        "a",
+        "a\n",
+        "- ",
+        "- a\n",
+        "1. a\n",
+        " ",
+        "\n",
+        "...",
+        "漢",
+        "A B\n===\n",
+        "\t",
+        "{",
+        "{{ ",
+        "{a}",
+        "%",
+        "%(a",
+        "%0",
+        "${",
+        "<1",
+        "&a",
+        "&#",
+        "http://",
+        "http://a(",
+        "http://a)",
+        "a@",
+        "a@b.",
+        "@"
+      })
   void plainTextEnds(String fragment) {
     assertEnds(Format.PLAIN, fragment);
   }
