@@ -9,11 +9,18 @@ export const EXTENSIONS = [
   "adoc",
   "asciidoc",
   "asc",
+  "rst",
+  "rest",
   "srt",
   "vtt",
   "html",
   "htm",
   "xhtml",
+  "xml",
+  "dbk",
+  "docbook",
+  "dita",
+  "ditamap",
   "tex",
   "ltx",
 ] as const;
@@ -21,17 +28,22 @@ export const EXTENSIONS = [
 /** The languages of texts that have no file yet. */
 const LANGUAGES = [
   "asciidoc",
+  "dita",
+  "docbook",
   "html",
   "latex",
   "markdown",
   "mdx",
   "plaintex",
   "plaintext",
+  "restructuredtext",
+  "rst",
   "srt",
   "subrip",
   "tex",
   "vtt",
   "webvtt",
+  "xml",
 ] as const;
 
 /** The settings of a project. */

@@ -33,16 +33,21 @@ test("the server is told of texts, of new texts and of the settings of the proje
   assert.deepEqual(FILTERS, [
     { scheme: "file", pattern: TEXTS },
     { scheme: "untitled", language: "asciidoc" },
+    { scheme: "untitled", language: "dita" },
+    { scheme: "untitled", language: "docbook" },
     { scheme: "untitled", language: "html" },
     { scheme: "untitled", language: "latex" },
     { scheme: "untitled", language: "markdown" },
     { scheme: "untitled", language: "plaintex" },
     { scheme: "untitled", language: "plaintext" },
+    { scheme: "untitled", language: "restructuredtext" },
+    { scheme: "untitled", language: "rst" },
     { scheme: "untitled", language: "srt" },
     { scheme: "untitled", language: "subrip" },
     { scheme: "untitled", language: "tex" },
     { scheme: "untitled", language: "vtt" },
     { scheme: "untitled", language: "webvtt" },
+    { scheme: "untitled", language: "xml" },
     { scheme: "file", pattern: "**/tallystick.json" },
   ]);
 });

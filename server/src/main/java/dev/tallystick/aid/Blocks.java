@@ -21,7 +21,7 @@ final class Blocks {
 
   /** Formats in which a blank line parts paragraphs. */
   private static final Set<Format> MARKUP =
-      EnumSet.of(Format.MARKDOWN, Format.MDX, Format.ASCIIDOC, Format.LATEX);
+      EnumSet.of(Format.MARKDOWN, Format.MDX, Format.ASCIIDOC, Format.RST, Format.LATEX);
 
   private final Reading source;
   private final Reading target;

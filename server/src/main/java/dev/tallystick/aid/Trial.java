@@ -60,8 +60,9 @@ record Trial(PairResult result, Format format) {
         .collect(Collectors.joining());
   }
 
+  /** Its letters and digits: marks between blocks may come along, and no sentence has only such. */
   private static String dense(String prose) {
-    return prose.replaceAll("\\s+", "");
+    return prose.replaceAll("[^\\p{L}\\p{N}]+", "");
   }
 
   /** Whether all characters of a text come in another one, in their order. */

@@ -8,6 +8,11 @@ public enum Aligner {
   /** Gale and Church (1993), with their parameters. */
   PUBLISHED {
     @Override
+    Side side(List<Unit> units) {
+      return new Side(units, Unit::codePoints);
+    }
+
+    @Override
     Alignment align(Sides sides, Cancellation cancellation) {
       Scorer scorer = new Published(sides.source().lengthBefore, sides.target().lengthBefore);
       Band band = steadyLook(scorer, sides, cancellation);
@@ -32,24 +37,31 @@ public enum Aligner {
       Band band =
           Anchors.band(texts.shared().anchors(), sides)
               .orElseGet(() -> firstLook(coarse, sides, cancellation));
+      Stems source = new Stems(sides.source());
+      Stems target = new Stems(sides.target());
+      Evidence.Texts known = texts;
       for (int round = 0; round < ROUNDS; round++) {
-        Scorer scorer = round == 0 ? Evidence.coarse(texts, fit) : Evidence.full(texts, fit);
+        Scorer scorer = round == 0 ? coarse : Evidence.full(known, fit);
         Lattice lattice = Lattice.banded(scorer, sides, band, cancellation);
         Posteriors posteriors = new Posteriors(lattice, cancellation);
         fit = Refit.from(posteriors, lattice, fit);
         band = posteriors.band();
+        if (round > 0) {
+          known = texts.with(Lexis.learnt(posteriors, source, target, band));
+        }
         timed |= fit.clock() != null;
       }
       if (timed && fit.clock() == null) {
         return align(sides.untimed(), cancellation); // they misled: as if there were none
       }
-      Evidence evidence = Evidence.full(texts, fit);
+      Evidence evidence = Evidence.full(known, fit);
       Weighed weighed = Weighed.of(evidence, band, sides, cancellation);
       return weighed.alignment(weighed.moves(evidence), fit.lengths());
     }
   };
 
-  private static final int ROUNDS = 2;
+  /** The first knows the common shapes only, the second the words that both texts have. */
+  private static final int ROUNDS = 3;
 
   /** How far below its row's best a cell may lie in the first look, and in the last (nats). */
   private static final double NEAR = 60;
@@ -64,7 +76,11 @@ public enum Aligner {
 
   /** Aligns two texts. Either may be empty. */
   public Alignment align(List<Unit> source, List<Unit> target, Cancellation cancellation) {
-    return align(new Sides(new Side(source), new Side(target)), cancellation);
+    return align(new Sides(side(source), side(target)), cancellation);
+  }
+
+  Side side(List<Unit> units) {
+    return new Side(units);
   }
 
   abstract Alignment align(Sides sides, Cancellation cancellation);

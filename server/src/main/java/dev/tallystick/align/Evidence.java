@@ -23,7 +23,6 @@ final class Evidence implements Scorer {
   /** A link that its shape and lengths make so unlikely is not looked at any closer (nats). */
   private static final double HOPELESS = -20;
 
-  private static final double WORDS = 0.5;
   private static final double CLOSING = 0.5;
 
   /** A link over the border of a block (nats). */
@@ -55,6 +54,7 @@ final class Evidence implements Scorer {
   private final Side target;
   private final Background background;
   private final SharedWords shared;
+  private final LinkWords words;
   private final Fit fit;
   private final LengthTable lengths;
   private final LengthTable mergedLengths;
@@ -68,6 +68,7 @@ final class Evidence implements Scorer {
     this.target = texts.sides().target();
     this.background = texts.background();
     this.shared = texts.shared();
+    this.words = texts.words();
     this.fit = fit;
     this.lengths = new LengthTable(fit.lengths());
     this.mergedLengths = new LengthTable(fit.lengths().withFreedom(MERGED_FREEDOM));
@@ -88,10 +89,15 @@ final class Evidence implements Scorer {
   }
 
   /** What stays the same while the parameters of a pair are fitted. */
-  record Texts(Sides sides, Background background, SharedWords shared) {
+  record Texts(Sides sides, Background background, SharedWords shared, LinkWords words) {
     static Texts of(Sides sides) {
-      return new Texts(
-          sides, new Background(sides.target()), new SharedWords(sides.source(), sides.target()));
+      SharedWords shared = new SharedWords(sides.source(), sides.target());
+      return new Texts(sides, new Background(sides.target()), shared, shared);
+    }
+
+    /** The same with words that were learnt. */
+    Texts with(LinkWords learnt) {
+      return new Texts(sides, background, shared, learnt);
     }
   }
 
@@ -140,7 +146,7 @@ final class Evidence implements Scorer {
     if (worth < HOPELESS) {
       return Row.NOWHERE;
     }
-    worth += WORDS * shared.logRatio(s, sEnd, t, tEnd);
+    worth += words.worth(s, sEnd, t, tEnd);
     int close = source.units[sEnd - 1].close();
     worth += CLOSING * fit.closes().logRatio(close, target.units[tEnd - 1].close());
     if (clock != null) {
@@ -165,12 +171,15 @@ final class Evidence implements Scorer {
     return given - parting - background.logDensity(t, tEnd);
   }
 
-  /** How much likelier two units make each other by their lengths and words alone (nats). */
+  /**
+   * How much likelier two units make each other by their lengths and words alone (nats). A pair too
+   * short to teach its common words may still have a name or a number in both.
+   */
   double alike(int t, int s) {
     if (source.units[s].verbatim() || target.units[t].verbatim()) {
       return Row.NOWHERE;
     }
-    return length(t, t + 1, s, s + 1) + shared.logRatio(s, s + 1, t, t + 1);
+    return length(t, t + 1, s, s + 1) + Math.max(shared.alike(s, t), words.alike(s, t));
   }
 
   @Override

@@ -14,7 +14,10 @@ import java.util.List;
  * <p>Nearly all words of a link stand on one side only, and those all have the same R. So for each
  * made unit the places of its shared words near the band are looked up once ({@link Near}).
  */
-final class SharedWords {
+final class SharedWords implements LinkWords {
+  /** Words count less than their likelihood ratio says, since they are not independent. */
+  private static final double WEIGHT = 0.5;
+
   private static final double FLOOR = 0.1;
 
   /** A word that makes up more than one in so many says nothing about place. */
@@ -61,7 +64,7 @@ final class SharedWords {
   /** Evidence for the words of {@code madeSide}, given those of {@code givenSide}. */
   SharedWords(Side givenSide, Side madeSide) {
     this.given = givenSide;
-    this.vocabulary = Vocabulary.of(givenSide);
+    this.vocabulary = Vocabulary.of(givenSide, Unit.Word::key);
     this.madeBefore = new int[madeSide.size() + 1];
     this.made = new int[madeSide.size()][];
     this.counts = new int[vocabulary.size()];
@@ -97,7 +100,7 @@ final class SharedWords {
       int[] shared = new int[words.length];
       int n = 0;
       for (Unit.Word word : words) {
-        int number = vocabulary.number(word);
+        int number = vocabulary.number(word.key());
         if (number >= 0) {
           shared[n++] = number;
           counts[number]++;
@@ -132,7 +135,7 @@ final class SharedWords {
       Unit.Word[] words = given.units[i].words();
       double general = words.length;
       for (Unit.Word word : words) {
-        int number = vocabulary.number(word);
+        int number = vocabulary.number(word.key());
         if (rarity[number] > 0) {
           general -= word.trust();
         }
@@ -172,6 +175,16 @@ final class SharedWords {
       }
     }
     return worth;
+  }
+
+  @Override
+  public double worth(int s, int sEnd, int t, int tEnd) {
+    return WEIGHT * logRatio(s, sEnd, t, tEnd);
+  }
+
+  @Override
+  public double alike(int s, int t) {
+    return logRatio(s, s + 1, t, t + 1);
   }
 
   /** Natural log of the likelihood ratio of the words of made units, given those of given units. */

@@ -2,6 +2,7 @@ package dev.tallystick.align;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.function.ToIntFunction;
 
 /** The units of one text as plain arrays with running sums, for the inner loop. */
 final class Side {
@@ -33,7 +34,13 @@ final class Side {
   /** When the units are on the screen; null if nothing says so, or nothing sensible. */
   final Timeline timeline;
 
+  /** The units, as long as the adaptive model takes them to be. */
   Side(List<Unit> list) {
+    this(list, Unit::length);
+  }
+
+  /** The units, each as long as {@code length} says. */
+  Side(List<Unit> list, ToIntFunction<Unit> length) {
     this.units = list.toArray(Unit[]::new);
     this.lengthBefore = new int[units.length + 1];
     this.opensBefore = new int[units.length + 1];
@@ -43,7 +50,7 @@ final class Side {
     findBlocks();
     this.verbatimBefore = new int[units.length + 1];
     for (int i = 0; i < units.length; i++) {
-      lengthBefore[i + 1] = lengthBefore[i] + units[i].length();
+      lengthBefore[i + 1] = lengthBefore[i] + length.applyAsInt(units[i]);
       opensBefore[i + 1] = opensBefore[i] + (units[i].opens() ? 1 : 0);
       verbatimBefore[i + 1] = verbatimBefore[i] + (units[i].verbatim() ? 1 : 0);
     }

@@ -3,8 +3,9 @@ package dev.tallystick.align;
 /**
  * What the aligner knows of one sentence, or of one verbatim block.
  *
- * @param length characters (code points) of the sentence
- * @param letters how many of them are letters or digits
+ * @param length how long the sentence reads, in characters; what is copied in it counts for little
+ * @param codePoints its characters as Unicode has them, all of them: what the published model takes
+ * @param letters how many of these are letters or digits
  * @param opens whether it is the first of its block
  * @param kind a small number, equal for blocks that look alike (a heading of level 2, a cell); from
  *     0 to {@value #KINDS} - 1
@@ -16,6 +17,7 @@ package dev.tallystick.align;
  */
 public record Unit(
     int length,
+    int codePoints,
     int letters,
     boolean opens,
     int kind,
@@ -33,13 +35,20 @@ public record Unit(
 
   /** One of which nothing says when it is on the screen. */
   public Unit(
-      int length, int letters, boolean opens, int kind, int close, Word[] words, boolean verbatim) {
-    this(length, letters, opens, kind, close, words, verbatim, 0, -1);
+      int length,
+      int codePoints,
+      int letters,
+      boolean opens,
+      int kind,
+      int close,
+      Word[] words,
+      boolean verbatim) {
+    this(length, codePoints, letters, opens, kind, close, words, verbatim, 0, -1);
   }
 
   /** The same, shown at this time. */
   public Unit shown(long start, long end) {
-    return new Unit(length, letters, opens, kind, close, words, verbatim, start, end);
+    return new Unit(length, codePoints, letters, opens, kind, close, words, verbatim, start, end);
   }
 
   boolean timed() {
@@ -50,8 +59,29 @@ public record Unit(
    * One word.
    *
    * @param key equal for equal words, and for them only (up to a collision in 64 bits)
+   * @param stem equal for words that begin with the same letters, and so may be forms of one
+   * @param root equal for words that begin alike, and so may be related in two languages; 0 if the
+   *     word is too short for that, or no word
    * @param trust how likely the word is, from 0 to 1, to stand unchanged in a translation, given
    *     that it stands somewhere in the other text
    */
-  public record Word(long key, double trust) {}
+  public record Word(long key, long stem, long root, double trust) {
+    private static final double NUMBER = 0.9;
+    private static final double WHOLE = 0.5;
+
+    /** A word that has no other forms. */
+    public Word(long key, double trust) {
+      this(key, key, 0, trust);
+    }
+
+    /** Whether it has a digit. */
+    boolean number() {
+      return trust >= NUMBER;
+    }
+
+    /** What the same word on the other side is worth as its translation, from 0 to 1. */
+    double likeness() {
+      return trust >= WHOLE ? 1 : 2 * trust;
+    }
+  }
 }

@@ -1,6 +1,7 @@
 package dev.tallystick.align;
 
 import java.util.Arrays;
+import java.util.function.ToLongFunction;
 
 /** The words of a text, numbered from 0 in the order in which they first stand there. */
 final class Vocabulary {
@@ -19,7 +20,8 @@ final class Vocabulary {
     Arrays.fill(numbers, -1);
   }
 
-  static Vocabulary of(Side side) {
+  /** The words of a text, told apart by {@code key}. */
+  static Vocabulary of(Side side, ToLongFunction<Unit.Word> key) {
     int words = 0;
     for (Unit unit : side.units) {
       words += unit.words().length;
@@ -27,16 +29,16 @@ final class Vocabulary {
     Vocabulary vocabulary = new Vocabulary(words);
     for (Unit unit : side.units) {
       for (Unit.Word word : unit.words()) {
-        vocabulary.add(word);
+        vocabulary.add(key.applyAsLong(word));
       }
     }
     return vocabulary;
   }
 
-  private void add(Unit.Word word) {
-    int place = place(word.key());
+  private void add(long key) {
+    int place = place(key);
     if (numbers[place] < 0) {
-      keys[place] = word.key();
+      keys[place] = key;
       numbers[place] = size++;
     }
   }
@@ -54,7 +56,7 @@ final class Vocabulary {
   }
 
   /** The number of a word, or less than 0 if the text does not have it. */
-  int number(Unit.Word word) {
-    return numbers[place(word.key())];
+  int number(long key) {
+    return numbers[place(key)];
   }
 }

@@ -16,11 +16,13 @@ final class Additions {
   private final Subject subject;
   private final double[] extra;
   private final Set<Integer> moved;
+  private final Slight slight;
 
   private Additions(Subject subject) {
     this.subject = subject;
     this.extra = subject.alignment().targetNull();
     this.moved = subject.alignment().moves().stream().map(Move::target).collect(Collectors.toSet());
+    this.slight = new Slight(subject, OnSide.TARGET);
   }
 
   static List<Finding> find(Subject subject) {
@@ -42,7 +44,11 @@ final class Additions {
   private List<Run> runs(boolean footnotes) {
     return Run.of(
         subject.target(),
-        i -> extra[i] >= Omissions.LEAST && !moved.contains(i) && isFootnote(i) == footnotes);
+        i ->
+            extra[i] >= Omissions.LEAST
+                && !moved.contains(i)
+                && !slight.is(i)
+                && isFootnote(i) == footnotes);
   }
 
   private boolean isFootnote(int index) {

@@ -113,7 +113,7 @@ final class Lengths {
   private static int characters(List<Segment> segments, int from, int to) {
     int sum = 0;
     for (Segment segment : segments.subList(from, to)) {
-      sum += segment.prose().codePointCount(0, segment.prose().length());
+      sum += segment.length();
     }
     return sum;
   }

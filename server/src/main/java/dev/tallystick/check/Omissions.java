@@ -18,13 +18,15 @@ final class Omissions {
     double[] missing = subject.alignment().sourceNull();
     Set<Integer> moved =
         subject.alignment().moves().stream().map(Move::source).collect(Collectors.toSet());
+    Slight slight = new Slight(subject, OnSide.SOURCE);
     Neighbours neighbours = new Neighbours(subject, OnSide.SOURCE);
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
     for (Run run :
         Run.of(
             subject.source(),
-            i -> missing[i] >= LEAST && !moved.contains(i) && !pending.source(i))) {
+            i ->
+                missing[i] >= LEAST && !moved.contains(i) && !pending.source(i) && !slight.is(i))) {
       Span span = run.span(subject.source());
       int sentences = run.sentences(subject.source());
       String message =

@@ -44,7 +44,7 @@ public final class Pending {
   private static boolean[] open(Subject subject) {
     boolean[] open = new boolean[subject.source().size()];
     Arrays.fill(open, true);
-    int[] copyOf = Untranslated.copies(subject);
+    int[] copyOf = Untranslated.copies(subject.source(), subject.target(), subject.alignment());
     for (Match match : subject.alignment().matches()) {
       if (match.twoSided()) {
         Arrays.fill(open, match.sourceFrom(), match.sourceTo(), false);

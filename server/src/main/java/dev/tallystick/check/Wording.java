@@ -64,8 +64,10 @@ final class Wording {
         : "These " + sentences + " sentences stand at another place in the source.";
   }
 
-  String untranslated() {
-    return "Still the same as the source.";
+  String untranslated(int sentences) {
+    return sentences == 1
+        ? "Still the same as the source."
+        : "These " + sentences + " sentences are still the same as the source.";
   }
 
   String length(int source, int target, int low, int high) {

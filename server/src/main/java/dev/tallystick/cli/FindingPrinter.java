@@ -113,7 +113,7 @@ abstract class FindingPrinter {
             .put("end", finding.span().end())
             .put("line", at.line())
             .put("column", at.column())
-            .put("language", pair.targetLanguage().tag())
+            .put("language", result.language(OnSide.TARGET).tag())
             .open("counterpart")
             .put("file", file(pair, finding.side().other()))
             .put("start", finding.counterpart().start())

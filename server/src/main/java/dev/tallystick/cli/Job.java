@@ -7,6 +7,7 @@ import dev.tallystick.engine.Listing;
 import dev.tallystick.engine.PairResult;
 import dev.tallystick.engine.Reading;
 import dev.tallystick.engine.TextRules;
+import dev.tallystick.engine.Tongue;
 import dev.tallystick.engine.Unreadable;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.Pair;
@@ -134,7 +135,8 @@ final class Job {
     Decoded decoded = Intake.load(Disk.REAL, path);
     complete &= !Malformed.tell(console, file, decoded);
     Reading read =
-        Reading.of(decoded.text(), Intake.format(path), language.tag(), texts, Cancellation.NONE);
+        Reading.of(
+            decoded.text(), Intake.format(path), Tongue.of(language), texts, Cancellation.NONE);
     borders.tell(console, read.endless());
     complete &= read.endless().isEmpty();
     return read;

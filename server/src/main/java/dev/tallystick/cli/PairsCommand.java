@@ -3,6 +3,7 @@ package dev.tallystick.cli;
 import dev.tallystick.align.Aligner;
 import dev.tallystick.check.Code;
 import dev.tallystick.check.Finding;
+import dev.tallystick.check.OnSide;
 import dev.tallystick.engine.PairResult;
 import dev.tallystick.pairing.Alone;
 import dev.tallystick.pairing.Ambiguity;
@@ -77,7 +78,7 @@ final class PairsCommand implements Callable<Integer> {
     int pending = result.progress().pending();
     long share = done + pending == 0 ? 100 : 100L * done / (done + pending);
     String files = pair.source() + " -> " + pair.target();
-    String languages = pair.sourceLanguage().tag() + " to " + pair.targetLanguage().tag();
+    String languages = language(result, OnSide.SOURCE) + " to " + language(result, OnSide.TARGET);
     String progress =
         String.format(Locale.ROOT, "%d words done, %d pending (%d %%)", done, pending, share);
     int findings = result.findings().size();
@@ -97,8 +98,8 @@ final class PairsCommand implements Callable<Integer> {
         new JsonLine(console.out())
             .put("source", pair.source())
             .put("target", pair.target())
-            .put("sourceLanguage", pair.sourceLanguage().tag())
-            .put("targetLanguage", pair.targetLanguage().tag())
+            .put("sourceLanguage", language(result, OnSide.SOURCE))
+            .put("targetLanguage", language(result, OnSide.TARGET))
             .put("why", pair.why().word())
             .put("done", result.progress().done())
             .put("pending", result.progress().pending())
@@ -107,6 +108,10 @@ final class PairsCommand implements Callable<Integer> {
       line.put(count.getKey().word(), count.getValue());
     }
     line.close().end();
+  }
+
+  private static String language(PairResult result, OnSide side) {
+    return result.language(side).tag();
   }
 
   private static Map<Code, Integer> counts(PairResult result) {

@@ -50,6 +50,12 @@ public record FilePair(
     return side == OnSide.SOURCE ? sourceLanguage : targetLanguage;
   }
 
+  /** The same two in the languages that their texts were read in. */
+  FilePair as(PairResult read) {
+    return new FilePair(
+        source, target, read.language(OnSide.SOURCE), read.language(OnSide.TARGET), why);
+  }
+
   /** Whether a file is one of the two. */
   public boolean has(Path file) {
     return source.equals(file) || target.equals(file);

@@ -1,7 +1,9 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.check.Levels;
+import dev.tallystick.check.OnSide;
 import dev.tallystick.pairing.Ambiguity;
+import dev.tallystick.pairing.Language;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -25,6 +27,7 @@ final class Library {
   private final Workers workers;
   private final Watch watch;
   private final boolean editorWatches;
+  private Language assumed = Language.UNKNOWN;
 
   Library(Shelf shelf, Workers workers, Watch watch, boolean editorWatches) {
     this.shelf = shelf;
@@ -58,6 +61,7 @@ final class Library {
 
   /** What the user has set counts from now on. */
   void rules(Settings settings) {
+    assumed = settings.sourceLanguage().orElse(Language.UNKNOWN);
     workspace.rules(settings.rules());
     workspace.scope(settings.folders());
   }
@@ -235,11 +239,14 @@ final class Library {
   }
 
   /**
-   * The sheet of the current text; the same one as long as the text and the rules stay the same.
+   * The sheet of the current text on a side of a pair; the same one as long as the text and the
+   * rules stay the same.
    */
-  Optional<Sheet> sheet(Path file, String language) {
+  Optional<Sheet> sheet(FilePair pair, OnSide side) {
+    Path file = pair.file(side);
+    Language otherwise = side == OnSide.SOURCE ? assumed : Language.UNKNOWN;
     TextRules rules = project(file).map(FolderProject::texts).orElse(TextRules.USUAL);
-    return shelf.sheet(file, language, rules);
+    return shelf.sheet(file, new Tongue(pair.language(side), otherwise), rules);
   }
 
   /** The file with the rules for sentence borders that hold for a file. */

@@ -9,6 +9,7 @@ import dev.tallystick.check.OnSide;
 import dev.tallystick.check.Pending;
 import dev.tallystick.check.Progress;
 import dev.tallystick.check.Subject;
+import dev.tallystick.pairing.Language;
 import dev.tallystick.run.Cancellation;
 import java.util.List;
 
@@ -29,6 +30,11 @@ public record PairResult(
     List<Finding> findings,
     Pending pending,
     Progress progress) {
+  /** The language that the text on a side was read in. */
+  public Language language(OnSide side) {
+    return new Language(reading(side).language());
+  }
+
   /**
    * Aligns and checks: a pure function of its arguments.
    *

@@ -1,5 +1,6 @@
 package dev.tallystick.engine;
 
+import dev.tallystick.check.OnSide;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Collection;
@@ -97,8 +98,8 @@ final class PairStates {
 
   private Optional<Task> take(Library library, PairState pair, boolean now) {
     FilePair files = pair.files();
-    Optional<Sheet> source = library.sheet(files.source(), files.sourceLanguage().tag());
-    Optional<Sheet> target = library.sheet(files.target(), files.targetLanguage().tag());
+    Optional<Sheet> source = library.sheet(files, OnSide.SOURCE);
+    Optional<Sheet> target = library.sheet(files, OnSide.TARGET);
     boolean draft = !finished.contains(files.target());
     if (now || pair.current(source, target, draft)) {
       return pair.take(source, target, draft);

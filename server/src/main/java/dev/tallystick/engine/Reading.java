@@ -1,6 +1,7 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.align.Unit;
+import dev.tallystick.pairing.Language;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.Segment;
@@ -36,14 +37,15 @@ public record Reading(
     endless = List.copyOf(endless);
   }
 
-  /** Reads a file. */
+  /** Reads a file in a language, a BCP 47 tag. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
-    return of(text, format, language, TextRules.USUAL, cancellation);
+    return of(text, format, Tongue.of(new Language(language)), TextRules.USUAL, cancellation);
   }
 
   /** Reads a file as its project wants it. */
   public static Reading of(
-      Text text, Format format, String language, TextRules rules, Cancellation cancellation) {
+      Text text, Format format, Tongue tongue, TextRules rules, Cancellation cancellation) {
+    String language = tongue.in(text, format).tag();
     Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
         Segmenter.of(language, rules.borders())

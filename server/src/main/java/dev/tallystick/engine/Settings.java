@@ -16,6 +16,6 @@ public record Settings(long restMillis, Optional<Language> sourceLanguage, boole
   public static final Settings DEFAULT = new Settings(1500, Optional.empty(), false);
 
   Rules rules() {
-    return new Rules(sourceLanguage, Optional.empty());
+    return Rules.assuming(sourceLanguage);
   }
 }

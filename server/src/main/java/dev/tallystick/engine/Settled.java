@@ -11,20 +11,25 @@ import java.nio.file.Path;
  * @param editedAt the turn of the last edit of the translation; 0 if there was none
  */
 public record Settled(FilePair files, PairResult result, long editedAt) {
+  /** The pair in the languages that its texts were read in. */
+  public FilePair spoken() {
+    return files.as(result);
+  }
+
   /** What stands for the sentence at a place of a file, a UTF-16 offset. */
   Counterpart counterpart(Path file, int offset) {
-    return Counterpart.at(files, result, files.side(file), offset);
+    return Counterpart.at(spoken(), result, files.side(file), offset);
   }
 
   /** The sentences of a file. */
   Count count(Path file) {
     OnSide side = files.side(file);
-    return States.of(result).count(side, files.language(side.other()).name());
+    return States.of(result).count(side, result.language(side.other()).name());
   }
 
   /** The sentences in the sections of a file. */
   Tally tally(Path file) {
-    return Tally.of(files, result, files.side(file));
+    return Tally.of(spoken(), result, files.side(file));
   }
 
   /** One of the two texts, read. */

@@ -10,7 +10,7 @@ import dev.tallystick.text.Text;
 final class Sheet {
   private final Text text;
   private final Format format;
-  private final String language;
+  private final Tongue tongue;
   private final TextRules rules;
   private Reading reading;
   private volatile boolean outdated;
@@ -18,13 +18,12 @@ final class Sheet {
   /**
    * A text in a language.
    *
-   * @param language a BCP 47 tag
    * @param rules by which it is read
    */
-  Sheet(Text text, Format format, String language, TextRules rules) {
+  Sheet(Text text, Format format, Tongue tongue, TextRules rules) {
     this.text = text;
     this.format = format;
-    this.language = language;
+    this.tongue = tongue;
     this.rules = rules;
   }
 
@@ -53,7 +52,7 @@ final class Sheet {
    */
   synchronized Reading reading() {
     if (reading == null) {
-      reading = Reading.of(text, format, language, rules, this::outdated);
+      reading = Reading.of(text, format, tongue, rules, this::outdated);
     }
     return reading;
   }

@@ -6,6 +6,7 @@ import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Collection;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -17,7 +18,7 @@ import java.util.TreeMap;
  */
 final class Shelf {
   private final Map<Path, Document> open = new TreeMap<>();
-  private final Map<Path, Map<String, Sheet>> sheets = new TreeMap<>();
+  private final Map<Path, Map<Tongue, Sheet>> sheets = new TreeMap<>();
   private final DiskTexts disk;
 
   Shelf(DiskTexts disk) {
@@ -67,14 +68,13 @@ final class Shelf {
    * The sheet of the current text; the same one as long as the text stays the same. A file that is
    * taken for two languages, in a pair made by hand and in another, has one for each.
    */
-  Optional<Sheet> sheet(Path file, String language, TextRules rules) {
+  Optional<Sheet> sheet(Path file, Tongue tongue, TextRules rules) {
     Optional<Text> text = text(file);
     Format format = format(file);
-    Map<String, Sheet> known = sheets.computeIfAbsent(file, path -> new TreeMap<>());
+    Map<Tongue, Sheet> known = sheets.computeIfAbsent(file, path -> new LinkedHashMap<>());
     known.values().removeIf(sheet -> outdate(sheet, text, format, rules));
-    text.ifPresent(
-        now -> known.computeIfAbsent(language, tag -> new Sheet(now, format, tag, rules)));
-    return Optional.ofNullable(known.get(language));
+    text.ifPresent(now -> known.computeIfAbsent(tongue, in -> new Sheet(now, format, in, rules)));
+    return Optional.ofNullable(known.get(tongue));
   }
 
   /** Tells whoever works on a sheet to stop if the text has moved on; whether it has. */

@@ -35,9 +35,9 @@ public record Standing(FilePair files, String source, String target, Optional<Fi
         new Figures(
             result.progress(),
             findings,
-            states.count(OnSide.SOURCE, pair.files().targetLanguage().name()),
-            states.count(OnSide.TARGET, pair.files().sourceLanguage().name()));
-    return of(pair.files(), Optional.of(figures), uris);
+            states.count(OnSide.SOURCE, pair.spoken().targetLanguage().name()),
+            states.count(OnSide.TARGET, pair.spoken().sourceLanguage().name()));
+    return of(pair.spoken(), Optional.of(figures), uris);
   }
 
   /** Nothing is known of a pair any more. */

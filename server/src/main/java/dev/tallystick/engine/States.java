@@ -5,12 +5,11 @@ import dev.tallystick.align.Move;
 import dev.tallystick.check.Code;
 import dev.tallystick.check.Finding;
 import dev.tallystick.check.OnSide;
+import dev.tallystick.check.Untranslated;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.text.Span;
 import java.util.Arrays;
-import java.util.HashSet;
 import java.util.List;
-import java.util.Set;
 
 /** How it stands with each sentence, and verbatim block, of a pair. */
 final class States {
@@ -58,23 +57,21 @@ final class States {
   }
 
   private void takeUntranslated() {
-    Set<Span> here = new HashSet<>();
-    Set<Span> there = new HashSet<>();
-    for (Finding finding : result.findings()) {
-      if (finding.code() == Code.UNTRANSLATED) {
-        here.add(finding.span());
-        there.add(finding.counterpart());
-      }
+    List<Finding> runs =
+        result.findings().stream().filter(finding -> finding.code() == Code.UNTRANSLATED).toList();
+    if (runs.isEmpty()) {
+      return;
     }
-    mark(target, result.target().segments(), here);
-    mark(source, result.source().segments(), there);
-  }
-
-  private static void mark(State[] states, List<Segment> segments, Set<Span> untranslated) {
-    for (int i = 0; i < states.length && !untranslated.isEmpty(); i++) {
-      if (untranslated.contains(segments.get(i).span())) {
-        states[i] = State.UNTRANSLATED;
+    List<Segment> segments = result.target().segments();
+    int[] copyOf = Untranslated.copies(result.source().segments(), segments, result.alignment());
+    int next = 0;
+    for (int t = 0; t < copyOf.length && next < runs.size(); t++) {
+      Span span = segments.get(t).span();
+      if (copyOf[t] >= 0 && span.overlaps(runs.get(next).span())) {
+        target[t] = State.UNTRANSLATED;
+        source[copyOf[t]] = State.UNTRANSLATED;
       }
+      next += span.end() >= runs.get(next).span().end() ? 1 : 0;
     }
   }
 

@@ -2,9 +2,9 @@ package dev.tallystick.engine;
 
 import dev.tallystick.align.Unit;
 import dev.tallystick.prose.Block;
-import dev.tallystick.segment.Closing;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Words;
+import dev.tallystick.text.Scripts;
 import dev.tallystick.text.Text;
 import java.util.List;
 
@@ -16,13 +16,22 @@ final class Units {
   private static final double WORD = 0.5;
   private static final double SHORT = 0.1;
 
+  /** In a script without blanks, where nearly all words are short. */
+  private static final double DENSE = 0.25;
+
+  /** Words with the same beginning of so many characters may be forms of one word. */
+  private static final int STEM = 5;
+
+  /** Words with so many letters in common at the start may be related (Simard et al. 1992). */
+  private static final int ROOT = 4;
+
   private Units() {}
 
   static Unit unit(Text text, Segment segment) {
     if (segment.verbatim()) {
       String content = segment.span().of(text.string()).strip().replaceAll("\\R", "\n");
       Unit.Word[] words = {new Unit.Word(key(content), NUMBER)};
-      return new Unit(content.length(), 0, true, 0, 0, words, true);
+      return new Unit(content.length(), content.length(), 0, true, 0, 0, words, true);
     }
     Unit unit = sentence(segment);
     return segment.shown().map(times -> unit.shown(times.from(), times.to())).orElse(unit);
@@ -31,11 +40,12 @@ final class Units {
   private static Unit sentence(Segment segment) {
     String prose = segment.prose();
     return new Unit(
+        segment.length(),
         prose.codePointCount(0, prose.length()),
         letters(prose),
         segment.opens(),
         kind(segment.block()),
-        Closing.of(prose).ordinal(),
+        segment.closing().ordinal(),
         words(prose),
         false);
   }
@@ -44,9 +54,20 @@ final class Units {
     List<String> words = Words.of(prose);
     Unit.Word[] keyed = new Unit.Word[words.size()];
     for (int i = 0; i < keyed.length; i++) {
-      keyed[i] = new Unit.Word(key(words.get(i)), trust(words.get(i)));
+      keyed[i] = word(words.get(i));
     }
     return keyed;
+  }
+
+  private static Unit.Word word(String word) {
+    double trust = trust(word);
+    if (trust >= NUMBER || !Character.isLetter(word.codePointAt(0)) || trust == DENSE) {
+      return new Unit.Word(key(word), trust);
+    }
+    int letters = word.codePointCount(0, word.length());
+    String stem = letters <= STEM ? word : word.substring(0, word.offsetByCodePoints(0, STEM));
+    long root = letters < ROOT ? 0 : key(word.substring(0, word.offsetByCodePoints(0, ROOT)));
+    return new Unit.Word(key(word), key(stem), root, trust);
   }
 
   private static int letters(String prose) {
@@ -64,6 +85,9 @@ final class Units {
       if (word.charAt(i) >= '0' && word.charAt(i) <= '9') {
         return NUMBER;
       }
+    }
+    if (Scripts.isUnspaced(word.codePointAt(0))) {
+      return DENSE;
     }
     return word.length() > 2 ? WORD : SHORT;
   }

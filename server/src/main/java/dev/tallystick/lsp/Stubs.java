@@ -146,7 +146,7 @@ record Stubs(Client client, Board board, String uri) {
           case PENDING -> number == 1 ? "this sentence" : "these " + number + " sentences";
           case NEXT -> "the next sentence";
         };
-    String language = known.own().size() == 1 ? "" : pair.files().targetLanguage().name() + " ";
+    String language = known.own().size() == 1 ? "" : pair.spoken().targetLanguage().name() + " ";
     return "Put " + what + " into the " + language + "translation, to be translated";
   }
 }

@@ -84,7 +84,7 @@ final class GroupPairs {
     return new Pair(
         source.path(),
         target.path(),
-        source.isPlain() ? rules.sourceLanguage().orElse(Language.UNKNOWN) : source.language(),
+        source.isPlain() ? rules.statedSource().orElse(Language.UNKNOWN) : source.language(),
         languageOf(target),
         target.isPlain() ? source.why() : target.why());
   }

@@ -64,9 +64,30 @@ public record Language(String tag) implements Comparable<Language> {
     return hyphen < 0 ? tag : tag.substring(0, hyphen);
   }
 
-  /** Whether {@code other} is this language or says it more narrowly: de and de-AT. */
+  /**
+   * Whether {@code other} is this language or says it more narrowly: de and de-AT. A script that is
+   * not written is the likeliest one by CLDR: zh-Hant covers zh-TW.
+   */
   public boolean covers(Language other) {
-    return other.tag.equals(tag) || other.tag.startsWith(tag + "-");
+    if (other.tag.equals(tag) || other.tag.startsWith(tag + "-")) {
+      return true;
+    }
+    if (!other.primary().equals(primary())) {
+      return false;
+    }
+    ULocale own = ULocale.forLanguageTag(tag);
+    boolean anywhere = own.getCountry().isEmpty();
+    return (anywhere || own.getCountry().equals(ULocale.forLanguageTag(other.tag).getCountry()))
+        && (own.getScript().isEmpty() || own.getScript().equals(other.script()));
+  }
+
+  /** Whether {@code other} is the same language in the same script: zh-TW and zh-Hant-HK. */
+  boolean isWrittenLike(Language other) {
+    return primary().equals(other.primary()) && script().equals(other.script());
+  }
+
+  private String script() {
+    return ULocale.addLikelySubtags(ULocale.forLanguageTag(tag)).getScript();
   }
 
   @Override

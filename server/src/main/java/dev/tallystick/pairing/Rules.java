@@ -11,12 +11,15 @@ import java.util.Optional;
  * @param pairs the files that are stated to belong together; of two that name the same translation
  *     the first counts
  * @param ignored the files that do not count at all
+ * @param assumed whether the language of the sources is only what they are in where they do not say
+ *     it themselves
  */
 public record Rules(
     Optional<Language> sourceLanguage,
     Optional<Language> targetLanguage,
     List<PairRule> pairs,
-    List<Glob> ignored) {
+    List<Glob> ignored,
+    boolean assumed) {
   /** Nothing is set. */
   public static final Rules NONE = new Rules(Optional.empty(), Optional.empty());
 
@@ -26,9 +29,28 @@ public record Rules(
     ignored = List.copyOf(ignored);
   }
 
+  /** All that is set is stated. */
+  public Rules(
+      Optional<Language> sourceLanguage,
+      Optional<Language> targetLanguage,
+      List<PairRule> pairs,
+      List<Glob> ignored) {
+    this(sourceLanguage, targetLanguage, pairs, ignored, false);
+  }
+
   /** Of languages only. */
   public Rules(Optional<Language> sourceLanguage, Optional<Language> targetLanguage) {
     this(sourceLanguage, targetLanguage, List.of(), List.of());
+  }
+
+  /** Sources that do not say their language are in this one, if it is given. */
+  public static Rules assuming(Optional<Language> sourceLanguage) {
+    return new Rules(sourceLanguage, Optional.empty(), List.of(), List.of(), true);
+  }
+
+  /** The language of the sources, if it is not for themselves to say. */
+  Optional<Language> statedSource() {
+    return assumed ? Optional.empty() : sourceLanguage;
   }
 
   /**
@@ -42,7 +64,8 @@ public record Rules(
         source.or(() -> sourceLanguage),
         options.targetLanguage.or(() -> targetLanguage),
         source.isEmpty() ? pairs : pairs.stream().map(rule -> in(rule, source)).toList(),
-        ignored);
+        ignored,
+        source.isEmpty() ? assumed : options.assumed);
   }
 
   private static PairRule in(PairRule rule, Optional<Language> source) {

@@ -68,9 +68,14 @@ final class Sides {
     }
     // pt-BR beside an untagged file is its translation, though the source were set to pt-PT.
     boolean plain = group.plain().isPresent();
-    return languages.stream()
-        .filter(language -> plain ? set.covers(language) : isAkin(set, language))
-        .findFirst();
+    List<Language> akin =
+        languages.stream()
+            .filter(language -> plain ? set.covers(language) : isAkin(set, language))
+            .toList();
+    Optional<Language> first = akin.stream().findFirst();
+    return akin.size() < 2
+        ? first
+        : akin.stream().filter(set::isWrittenLike).findFirst().or(() -> first);
   }
 
   private static boolean isAkin(Language a, Language b) {

@@ -155,7 +155,7 @@ final class StatedPairs {
   }
 
   private void pair(PairRule rule, Side source, Side target) {
-    Language from = language(source, rule.sourceLanguage(), rules.sourceLanguage());
+    Language from = language(source, rule.sourceLanguage(), rules.statedSource());
     Language into = language(target, rule.targetLanguage(), rules.targetLanguage());
     byTarget.put(target.path(), new Pair(source.path(), target.path(), from, into, Why.PROJECT));
     sources.add(source.path());

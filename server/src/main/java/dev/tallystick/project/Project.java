@@ -48,6 +48,11 @@ public record Project(
    * @param set by the user
    */
   public Rules rules(Rules set) {
-    return new Rules(sourceLanguage.or(set::sourceLanguage), set.targetLanguage(), pairs, ignored);
+    return new Rules(
+        sourceLanguage.or(set::sourceLanguage),
+        set.targetLanguage(),
+        pairs,
+        ignored,
+        sourceLanguage.isEmpty() && set.assumed());
   }
 }

@@ -19,30 +19,34 @@ final class AsciiDocMarks {
   private static final Pattern REFERENCE = Pattern.compile("<<(?=[\\p{L}\\d_:#./{])");
   private static final Set<String> SILENT =
       Set.of("icon", "footnote", "footnoteref", "indexterm", "anchor");
+  private static final Set<String> CODE = Set.of("kbd", "pass", "stem", "latexmath", "asciimath");
 
   private final String prose;
   private final boolean[] marks;
+  private final List<Inline> marked;
   private final AsciiDocBrackets brackets;
   private final AsciiDocQuotes quotes;
   private final List<AsciiDocNote> notes;
   private int at;
 
-  private AsciiDocMarks(String prose, List<AsciiDocNote> notes) {
+  private AsciiDocMarks(String prose, List<Inline> marked, List<AsciiDocNote> notes) {
     this.prose = prose;
     this.notes = notes;
     this.marks = new boolean[prose.length()];
+    this.marked = marked;
     this.brackets = new AsciiDocBrackets(prose);
-    this.quotes = new AsciiDocQuotes(prose, marks, brackets);
+    this.quotes = new AsciiDocQuotes(prose, marks, brackets, marked);
   }
 
   /**
    * Which characters of a block are marks.
    *
    * @param prose its lines, each with an LF
-   * @param notes takes its footnotes
+   * @param marked takes what is marked, by offsets into {@code prose}
+   * @param notes takes its footnotes, the same way
    */
-  static boolean[] of(String prose, List<AsciiDocNote> notes) {
-    AsciiDocMarks read = new AsciiDocMarks(prose, notes);
+  static boolean[] of(String prose, List<Inline> marked, List<AsciiDocNote> notes) {
+    AsciiDocMarks read = new AsciiDocMarks(prose, marked, notes);
     while (read.at < prose.length()) {
       read.step();
     }
@@ -117,6 +121,7 @@ final class AsciiDocMarks {
     }
     mark(at, at + count);
     mark(close, close + count);
+    add(Inline.Kind.CODE, at, close + count);
     at = close + count;
     return true;
   }
@@ -141,6 +146,7 @@ final class AsciiDocMarks {
     }
     int comma = brackets.next(",", at);
     boolean text = comma >= 0 && comma < close;
+    add(Inline.Kind.LINK, at, close + 2);
     mark(at, text ? comma + 1 : close + 2);
     mark(close, close + 2);
     at = text ? comma + 1 : close + 2;
@@ -204,6 +210,7 @@ final class AsciiDocMarks {
     if (name.startsWith("footnote")) {
       addNote(name, new Span(at, close + 1), open + 1);
     }
+    addMacro(name, close);
     mark(at, target);
     at = target;
     if (SILENT.contains(name) || name.equals("xref") && close == open + 1) {
@@ -225,9 +232,23 @@ final class AsciiDocMarks {
     }
   }
 
+  private void addMacro(String name, int close) {
+    if (isLink(name)) {
+      add(Inline.Kind.LINK, at, close + 1);
+    } else if (name.equals("image")) {
+      add(Inline.Kind.IMAGE, at, close + 1);
+    } else if (CODE.contains(name)) {
+      add(Inline.Kind.CODE, at, close + 1);
+    }
+  }
+
+  private static boolean isLink(String macro) {
+    return macro.equals("link") || macro.equals("mailto") || macro.equals("xref");
+  }
+
   private void readMacro(String name, int target, Span text) {
     int open = text.start() - 1;
-    boolean link = name.equals("link") || name.equals("mailto") || name.equals("xref");
+    boolean link = isLink(name);
     boolean shown = name.equals("menu") || link && text.isEmpty();
     if (!shown) {
       mark(target, open);
@@ -253,6 +274,7 @@ final class AsciiDocMarks {
       at = end;
     } else {
       Span words = AsciiDocMacro.linkText(prose, new Span(end + 1, close));
+      add(Inline.Kind.LINK, at, close + 1);
       mark(words.isEmpty() ? end : at, words.start());
       mark(words.end(), close + 1);
       at = words.isEmpty() ? close + 1 : words.start();
@@ -267,6 +289,10 @@ final class AsciiDocMarks {
 
   private boolean finds(Pattern pattern, int from) {
     return from < prose.length() && pattern.matcher(prose).region(from, prose.length()).lookingAt();
+  }
+
+  private void add(Inline.Kind kind, int from, int to) {
+    marked.add(new Inline(kind, new Span(from, to)));
   }
 
   private void mark(int from, int to) {

@@ -1,6 +1,8 @@
 package dev.tallystick.prose;
 
+import dev.tallystick.text.Span;
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * Marks of bold, italic and the like: one on either side of whole words, two anywhere, and those of
@@ -13,13 +15,15 @@ final class AsciiDocQuotes {
   private final String prose;
   private final boolean[] marks;
   private final AsciiDocBrackets brackets;
+  private final List<Inline> marked;
   private final int[] open = new int[KINDS.length()];
   private final int[] openTwice = new int[KINDS.length()];
 
-  AsciiDocQuotes(String prose, boolean[] marks, AsciiDocBrackets brackets) {
+  AsciiDocQuotes(String prose, boolean[] marks, AsciiDocBrackets brackets, List<Inline> marked) {
     this.prose = prose;
     this.marks = marks;
     this.brackets = brackets;
+    this.marked = marked;
     Arrays.fill(open, NONE);
     Arrays.fill(openTwice, NONE);
   }
@@ -78,6 +82,7 @@ final class AsciiDocQuotes {
   private void close(int[] opened, int kind, int at, int count) {
     int from = opened[kind];
     opened[kind] = NONE;
+    addMarked(KINDS.charAt(kind), new Span(from, at + count));
     for (int i = 0; i < count; i++) {
       marks[from + i] = true;
       marks[at + i] = true;
@@ -85,6 +90,17 @@ final class AsciiDocQuotes {
     int role = from > 0 && prose.charAt(from - 1) == ']' ? brackets.balanced(from - 1) : NONE;
     for (int i = from - 1; role >= 0 && i >= role; i--) {
       marks[i] = true;
+    }
+  }
+
+  private void addMarked(char mark, Span span) {
+    switch (mark) {
+      case '*' -> marked.add(new Inline(Inline.Kind.STRONG, span));
+      case '_' -> marked.add(new Inline(Inline.Kind.EMPHASIS, span));
+      case '`' -> marked.add(new Inline(Inline.Kind.CODE, span));
+      default -> {
+        // Highlighted, or higher or lower than the line: nothing that a translation has to keep.
+      }
     }
   }
 

@@ -1,6 +1,8 @@
 package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 
@@ -10,13 +12,16 @@ import java.util.Optional;
  * @param kind what it is
  * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0
  *     otherwise
- * @param extent the whole block in the file, its marks included
+ * @param extent the whole block in the file, its marks included; only cells of a table side by side
+ *     overlap
  * @param pieces its prose in order: stretches of the file that do not touch, none empty; none at
  *     all if the block is verbatim
  * @param timed where the format says when text is on the screen: stretches that hold all of the
  *     prose of which it is known, in order; else none
+ * @param inlines what is marked in its prose, in the order of the file; none if it is verbatim
  */
-public record Block(Kind kind, int level, Span extent, List<Span> pieces, List<Timed> timed) {
+public record Block(
+    Kind kind, int level, Span extent, List<Span> pieces, List<Timed> timed, List<Inline> inlines) {
   /** What a block is. */
   public enum Kind {
     /** Running text. */
@@ -41,11 +46,28 @@ public record Block(Kind kind, int level, Span extent, List<Span> pieces, List<T
   public Block {
     pieces = List.copyOf(pieces);
     timed = List.copyOf(timed);
+    inlines = List.copyOf(inlines);
   }
 
-  /** A block of a format that knows no times. */
+  /** A block in which nothing is marked. */
+  public Block(Kind kind, int level, Span extent, List<Span> pieces, List<Timed> timed) {
+    this(kind, level, extent, pieces, timed, List.of());
+  }
+
+  /** The same of a format that knows no times. */
   public Block(Kind kind, int level, Span extent, List<Span> pieces) {
     this(kind, level, extent, pieces, List.of());
+  }
+
+  /** The same with more inlines, in any order. A verbatim block has none. */
+  Block with(List<Inline> more) {
+    if (more.isEmpty() || kind == Kind.VERBATIM) {
+      return this;
+    }
+    List<Inline> all = new ArrayList<>(inlines);
+    all.addAll(more);
+    Collections.sort(all);
+    return new Block(kind, level, extent, pieces, timed, all);
   }
 
   /**

@@ -22,10 +22,14 @@ public enum Format {
   WEBVTT(List.of("vtt", "webvtt"), "vtt"),
   /** HTML, also as XHTML. */
   HTML(List.of("html"), "html", "htm", "xhtml"),
+  /** XML: DocBook, DITA, and others by what they say of themselves. */
+  XML(List.of("xml", "docbook", "dita"), "xml", "dbk", "docbook", "dita", "ditamap"),
   /** AsciiDoc. */
   ASCIIDOC(List.of("asciidoc"), "adoc", "asciidoc", "asc"),
   /** LaTeX. */
-  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx");
+  LATEX(List.of("latex", "tex", "plaintex"), "tex", "ltx"),
+  /** reStructuredText. */
+  RST(List.of("restructuredtext", "rst"), "rst", "rest");
 
   private final List<String> languages;
   private final List<String> extensions;
@@ -64,6 +68,19 @@ public enum Format {
   }
 
   /**
+   * The language that a file gives for itself: a tag as it stands there, possibly of no language.
+   */
+  public Optional<String> language(Text text) {
+    return switch (this) {
+      case PLAIN, MARKDOWN, MDX -> StatedLanguage.inFrontMatter(text);
+      case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
+      case HTML -> StatedLanguage.inHtml(text);
+      case XML -> StatedLanguage.inXml(text);
+      case SUBRIP, WEBVTT, LATEX, RST -> Optional.empty();
+    };
+  }
+
+  /**
    * The blocks of a file, in its order. Never fails: what cannot be read as markup is prose.
    *
    * @param text the file, possibly with a byte-order mark, which is no prose
@@ -78,14 +95,21 @@ public enum Format {
    * @param keys whose values are prose, if the file has front matter
    */
   public List<Block> blocks(Text text, FrontMatterKeys keys) {
+    return Placeholders.mark(text.string(), marked(text, keys));
+  }
+
+  /** The blocks with what the format itself marks in them. */
+  private List<Block> marked(Text text, FrontMatterKeys keys) {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
       case MARKDOWN -> Markdown.blocks(text, keys);
       case MDX -> Markdown.ofMdx(text, keys);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
+      case XML -> Xml.blocks(text);
       case ASCIIDOC -> AsciiDoc.blocks(text, keys);
       case LATEX -> Latex.blocks(text);
+      case RST -> Rst.blocks(text);
     };
   }
 

@@ -1,11 +1,11 @@
 package dev.tallystick.prose;
 
+import dev.tallystick.prose.MarkupEvents.What;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Collections;
-import java.util.Comparator;
 import java.util.Deque;
 import java.util.IdentityHashMap;
 import java.util.List;
@@ -26,64 +26,23 @@ import org.jsoup.select.NodeVisitor;
  * it stands: a browser moves misplaced text about, a translator has it where it was written.
  */
 final class Html implements NodeVisitor {
-  private final List<Event> events = new ArrayList<>();
+  private final MarkupEvents events = new MarkupEvents();
+  private final List<Inline> inlines = new ArrayList<>();
   private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
-  private final Deque<HtmlContext> contexts = new ArrayDeque<>();
+  private final Deque<MarkupContext> contexts = new ArrayDeque<>();
 
   private Html(Document document) {
-    contexts.push(HtmlContext.of(document));
+    contexts.push(MarkupContext.of(document));
   }
-
-  /** What can happen at a place of the file; of several at the same place the first here. */
-  private enum What {
-    BORDER,
-    LINE_END,
-    ATTRIBUTE,
-    IMAGE,
-    TEXT
-  }
-
-  /**
-   * Something that matters to the prose.
-   *
-   * @param mark offset where it starts in the file
-   * @param value its text, if it has one
-   */
-  private record Event(What what, int mark, Span value, HtmlContext context) {}
 
   static List<Block> blocks(Text text) {
     Document document = Parser.htmlParser().setTrackPosition(true).parseInput(text.string(), "");
     Html html = new Html(document);
     document.traverse(html);
-    html.events.sort(Comparator.comparingInt(Event::mark).thenComparing(Event::what));
-    return html.flow(new HtmlFlow(text.string(), html.parents)).finish();
-  }
-
-  private HtmlFlow flow(HtmlFlow flow) {
-    int end = 0;
-    for (Event event : events) {
-      // A parser that repairs may put a copy of an element elsewhere, with its place in the file.
-      boolean repeated = !event.value().isEmpty() && event.value().start() < end;
-      if (!repeated) {
-        take(flow, event);
-        end = Math.max(end, event.value().end());
-      }
-    }
-    return flow;
-  }
-
-  private static void take(HtmlFlow flow, Event event) {
-    switch (event.what()) {
-      case BORDER -> flow.close();
-      case LINE_END -> flow.addLineEnd(event.mark());
-      case ATTRIBUTE -> flow.attribute(event.value());
-      case IMAGE -> {
-        flow.addBlank(event.mark(), false);
-        flow.text(event.value(), event.context(), true);
-        flow.addBlank(event.value().end(), false);
-      }
-      case TEXT -> flow.text(event.value(), event.context(), false);
-    }
+    html.events.sort();
+    List<Block> blocks =
+        html.events.blocks(() -> new MarkupFlow(text.string(), html.parents, null));
+    return Inline.spread(blocks, html.inlines);
   }
 
   @Override
@@ -93,7 +52,7 @@ final class Html implements NodeVisitor {
     } else if (node instanceof TextNode && !(node instanceof CDataNode)) {
       if (!contexts.element().silent()) {
         Span span = span(node.sourceRange());
-        events.add(new Event(What.TEXT, span.start(), span, contexts.element()));
+        events.add(What.TEXT, span.start(), span, contexts.element());
       }
     }
   }
@@ -106,8 +65,8 @@ final class Html implements NodeVisitor {
   }
 
   private void enter(Element element) {
-    HtmlContext around = contexts.element();
-    HtmlContext inside = around.in(element);
+    MarkupContext around = contexts.element();
+    MarkupContext inside = HtmlNesting.in(around, element);
     contexts.push(inside);
     Span tag = span(element.sourceRange());
     if (around.silent()) {
@@ -115,23 +74,38 @@ final class Html implements NodeVisitor {
     }
     if (inside.block() == element) {
       parents.add(around.block());
-      events.add(new Event(What.BORDER, tag.start(), new Span(tag.start(), tag.start()), inside));
+      events.add(What.BORDER, tag.start(), inside);
     } else if (element.normalName().equals("br")) {
-      events.add(new Event(What.LINE_END, tag.start(), new Span(tag.start(), tag.start()), inside));
+      events.add(What.LINE_END, tag.start(), inside);
+    } else if (!tag.isEmpty()) {
+      addInline(element, tag, inside.fixed() && !around.fixed());
     }
     if (!inside.fixed() && !tag.isEmpty()) {
       element.attributes().forEach(attribute -> read(attribute, element, tag, inside));
     }
   }
 
-  private void read(Attribute attribute, Element element, Span tag, HtmlContext context) {
+  /**
+   * Takes in an element within running text.
+   *
+   * @param fixed whether it is the first around its text that is not to be translated
+   */
+  private void addInline(Element element, Span tag, boolean fixed) {
+    Inline.Kind kind = fixed ? Inline.Kind.CODE : HtmlTags.inline(element.normalName());
+    if (kind != null) {
+      int end = Math.max(tag.end(), span(element.endSourceRange()).end());
+      inlines.add(new Inline(kind, new Span(tag.start(), end)));
+    }
+  }
+
+  private void read(Attribute attribute, Element element, Span tag, MarkupContext context) {
     String name = attribute.getKey().toLowerCase(Locale.ROOT);
     boolean image = name.equals("alt") && element.normalName().equals("img");
     if (image || isProse(element, name)) {
       Span value = span(element.attributes().sourceRange(attribute.getKey()).valueRange());
       int mark = image ? tag.start() : value.start();
       if (!value.isEmpty()) {
-        events.add(new Event(image ? What.IMAGE : What.ATTRIBUTE, mark, value, context));
+        events.add(image ? What.IMAGE : What.ATTRIBUTE, mark, value, context);
       }
     }
   }
@@ -142,7 +116,8 @@ final class Html implements NodeVisitor {
     return HtmlTags.isProse(element.normalName(), attribute, type, name);
   }
 
-  private static Span span(Range range) {
+  /** The place of something in the file; empty if it is not in it. */
+  static Span span(Range range) {
     return range.isTracked() ? new Span(range.startPos(), range.endPos()) : new Span(0, 0);
   }
 }

@@ -63,6 +63,17 @@ final class HtmlTags {
     return CODE.contains(tag);
   }
 
+  /** What an element within running text marks; {@code null} if nothing of interest. */
+  static Inline.Kind inline(String tag) {
+    return switch (tag) {
+      case "em", "i", "cite", "dfn" -> Inline.Kind.EMPHASIS;
+      case "strong", "b" -> Inline.Kind.STRONG;
+      case "a" -> Inline.Kind.LINK;
+      case "img" -> Inline.Kind.IMAGE;
+      default -> isCode(tag) ? Inline.Kind.CODE : null;
+    };
+  }
+
   /** The kind of the blocks in an element; {@code null} if that is up to what it is in. */
   static Block.Kind kind(String tag) {
     return isHeading(tag) ? Block.Kind.HEADING : KINDS.get(tag);

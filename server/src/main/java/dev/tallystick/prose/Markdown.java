@@ -25,6 +25,7 @@ final class Markdown {
   private final String file;
   private final int base;
   private final List<Block> blocks = new ArrayList<>();
+  private final List<Inline> inlines = new ArrayList<>();
 
   private Markdown(String file, int base) {
     this.file = file;
@@ -36,7 +37,7 @@ final class Markdown {
     Markdown markdown = new Markdown(text.string(), data.end());
     markdown.blocks.addAll(data.blocks(keys));
     markdown.read(MarkdownSyntax.MARKDOWN, markdown.file.substring(data.end()));
-    return List.copyOf(markdown.blocks);
+    return Inline.spread(markdown.blocks, markdown.inlines);
   }
 
   /** The same for MDX, where imports and exports are verbatim. */
@@ -53,7 +54,7 @@ final class Markdown {
     }
     markdown.read(MarkdownSyntax.MDX, input.substring(data.end()));
     markdown.blocks.sort(Comparator.comparing(Block::extent));
-    return List.copyOf(markdown.blocks);
+    return Inline.spread(markdown.blocks, markdown.inlines);
   }
 
   private void read(Parser parser, String input) {
@@ -91,7 +92,7 @@ final class Markdown {
   }
 
   private List<Span> prose(Node node) {
-    return Inlines.of(file, node, this::offset, extent(node).end()).spans();
+    return Inlines.of(file, node, this::offset, extent(node).end(), inlines).spans();
   }
 
   /** A paragraph; in a box for tasks, or below the mark of an alert, that is no prose. */
@@ -117,7 +118,7 @@ final class Markdown {
     for (Origin.CellOrigin origin : Origin.ofRow(file, start, extent.end())) {
       if (cell != null && !cell.getSourceSpans().isEmpty()) {
         Origin places = origin.countedFrom(cell.getSourceSpans().get(0));
-        List<Span> pieces = Inlines.of(file, cell, places, origin.end()).spans();
+        List<Span> pieces = Inlines.of(file, cell, places, origin.end(), inlines).spans();
         addProse(Block.Kind.CELL, 0, trim(origin.start(), origin.end()), pieces);
       }
       cell = cell == null ? null : cell.getNext();

@@ -36,8 +36,11 @@ final class Subtitles {
 
   static List<Block> blocks(Text text) {
     Subtitles subtitles = new Subtitles(text.string());
-    subtitles.read(CueReader.cues(text));
-    return List.copyOf(subtitles.blocks);
+    List<Cue> cues = CueReader.cues(text);
+    subtitles.read(cues);
+    List<Inline> inlines = new ArrayList<>();
+    cues.forEach(cue -> CueTags.addTo(inlines, text.string(), cue));
+    return Inline.spread(subtitles.blocks, inlines);
   }
 
   private void read(List<Cue> cues) {

@@ -20,25 +20,30 @@ public enum Closing {
 
   /** The closing of a sentence. */
   public static Closing of(String sentence) {
-    for (int i = sentence.length() - 1; i >= 0; i--) {
-      char c = sentence.charAt(i);
-      if (STOPS.indexOf(c) >= 0) {
-        return STOP;
-      }
-      if (QUESTIONS.indexOf(c) >= 0) {
-        return QUESTION;
-      }
-      if (EXCLAMATIONS.indexOf(c) >= 0) {
-        return EXCLAMATION;
-      }
-      if (COLONS.indexOf(c) >= 0) {
-        return COLON;
-      }
-      if (!closes(c)) {
-        return OPEN;
-      }
+    int last = last(sentence);
+    return last < 0 ? OPEN : of(sentence.charAt(last));
+  }
+
+  /** The place of the last character that is no closing mark; -1 if there is none. */
+  static int last(String sentence) {
+    int at = sentence.length() - 1;
+    while (at >= 0 && of(sentence.charAt(at)) == OPEN && closes(sentence.charAt(at))) {
+      at--;
     }
-    return OPEN;
+    return at;
+  }
+
+  private static Closing of(char c) {
+    if (STOPS.indexOf(c) >= 0) {
+      return STOP;
+    }
+    if (QUESTIONS.indexOf(c) >= 0) {
+      return QUESTION;
+    }
+    if (EXCLAMATIONS.indexOf(c) >= 0) {
+      return EXCLAMATION;
+    }
+    return COLONS.indexOf(c) >= 0 ? COLON : OPEN;
   }
 
   private static boolean closes(char c) {

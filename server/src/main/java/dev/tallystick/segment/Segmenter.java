@@ -60,25 +60,35 @@ public final class Segmenter {
   public List<Segment> segments(
       Text text, List<Block> blocks, Consumer<Problem> endless, Cancellation cancellation) {
     TextBorders inText = new TextBorders(borders, rules, endless);
+    Reach reach = new Reach();
     List<Segment> segments = new ArrayList<>();
     for (Block block : blocks) {
       cancellation.check();
       if (block.kind() == Block.Kind.VERBATIM) {
-        segments.add(new Segment(block.extent(), "", block, true));
+        segments.add(new Segment(block.extent(), "", block, true, List.of(), 0));
       } else {
-        addSentences(segments, inText, block, new BlockProse(text, block));
+        addSentences(segments, inText, reach, block, new BlockProse(text, block));
       }
     }
     return segments;
   }
 
   private static void addSentences(
-      List<Segment> segments, TextBorders borders, Block block, BlockProse prose) {
-    boolean opens = true;
-    for (Span sentence : sentences(borders, prose)) {
+      List<Segment> segments, TextBorders borders, Reach reach, Block block, BlockProse prose) {
+    List<Segment.Marked> inlines = prose.inlines();
+    List<Span> sentences = sentences(borders, prose);
+    int next = 0;
+    for (int i = 0; i < sentences.size(); i++) {
+      Span sentence = sentences.get(i);
       String words = sentence.of(prose.string());
-      segments.add(new Segment(prose.inFile(sentence), words, block, opens));
-      opens = false;
+      boolean last = i == sentences.size() - 1;
+      List<Segment.Marked> inside = new ArrayList<>();
+      while (next < inlines.size()
+          && (last || inlines.get(next).prose().start() < sentences.get(i + 1).start())) {
+        inside.add(inlines.get(next++).in(sentence));
+      }
+      Span span = prose.inFile(sentence);
+      segments.add(new Segment(span, words, block, i == 0, inside, reach.of(words, inside)));
     }
   }
 

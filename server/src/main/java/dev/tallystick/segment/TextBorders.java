@@ -38,6 +38,6 @@ final class TextBorders {
     if (iterator == null) {
       iterator = own.iterator();
     }
-    return own.of(iterator, block.string(), block.raw());
+    return own.of(iterator, block.plain(), block.raw());
   }
 }

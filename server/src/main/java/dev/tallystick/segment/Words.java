@@ -1,16 +1,19 @@
 package dev.tallystick.segment;
 
+import com.ibm.icu.text.BreakIterator;
+import com.ibm.icu.util.ULocale;
 import dev.tallystick.text.Scripts;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 
 /**
- * The words of a sentence by which it can be recognised in a translation: runs of letters and
- * digits, in lower case, digits of any script as ASCII. Text of scripts that write no blanks
- * between words is passed over.
+ * The words of a sentence: runs of letters and digits, in lower case, digits of any script as
+ * ASCII. Where a script writes no blanks between words, they are told apart by ICU's dictionaries.
  */
 public final class Words {
+  private static final BreakIterator DENSE = BreakIterator.getWordInstance(ULocale.ROOT);
+
   private Words() {}
 
   /** The words in order, repeated ones as often as they stand there. */
@@ -19,15 +22,42 @@ public final class Words {
     StringBuilder word = new StringBuilder();
     for (int i = 0; i < sentence.length(); ) {
       int c = sentence.codePointAt(i);
-      i += Character.charCount(c);
-      if (belongs(c)) {
+      int next = i + Character.charCount(c);
+      if (Scripts.isUnspaced(c)) {
+        end(words, word);
+        next = denseEnd(sentence, next);
+        addDense(words, sentence.substring(i, next));
+      } else if (belongs(c)) {
         append(word, c);
       } else {
         end(words, word);
       }
+      i = next;
     }
     end(words, word);
     return words;
+  }
+
+  private static int denseEnd(String sentence, int from) {
+    int at = from;
+    while (at < sentence.length()
+        && (Scripts.isUnspaced(sentence.codePointAt(at))
+            || Character.getType(sentence.codePointAt(at)) == Character.MODIFIER_LETTER)) {
+      at += Character.charCount(sentence.codePointAt(at));
+    }
+    return at;
+  }
+
+  private static void addDense(List<String> words, String run) {
+    BreakIterator iterator = DENSE.clone();
+    iterator.setText(run);
+    int start = 0;
+    for (int end = iterator.next(); end != BreakIterator.DONE; end = iterator.next()) {
+      if (Character.isLetterOrDigit(run.codePointAt(start))) {
+        words.add(run.substring(start, end));
+      }
+      start = end;
+    }
   }
 
   private static void append(StringBuilder word, int c) {
@@ -50,8 +80,6 @@ public final class Words {
     if (c < 0x80) {
       return c >= 'a' && c <= 'z' || c >= 'A' && c <= 'Z' || c >= '0' && c <= '9';
     }
-    boolean inWord =
-        Character.isLetterOrDigit(c) || Character.getType(c) == Character.NON_SPACING_MARK;
-    return inWord && !Scripts.isUnspaced(c);
+    return Character.isLetterOrDigit(c) || Character.getType(c) == Character.NON_SPACING_MARK;
   }
 }

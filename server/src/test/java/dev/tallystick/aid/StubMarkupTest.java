@@ -20,8 +20,7 @@ class StubMarkupTest {
             "0-0 1- 2- 3-1"));
     String inside = "<p>\nRow.\n</p>\n<p>\nWait.\n</p>\n";
     String german = "<p>\nRudern.\n</p>\n";
-    assertEquals(
-        german + "<p>\nWait.\n</p>\n", Stubbed.in(Format.HTML, inside, german, "0-0 1-"));
+    assertEquals(german + "<p>\nWait.\n</p>\n", Stubbed.in(Format.HTML, inside, german, "0-0 1-"));
     String line = "<p>Rudern.</p>\n";
     assertEquals(line, Stubbed.in(Format.HTML, "<p>Row.</p><p>Wait.</p>\n", line, "0-0 1-"));
   }

@@ -61,7 +61,9 @@ class StubRandomTest {
           Format.WEBVTT,
           List.of("\n\n00:01.000 --> 00:02.000\n", "\n\n00:02.000 --> 00:04.000 line:0\n- "),
           Format.HTML,
-          List.of("\n<p>The gate is <b>shut</b>.</p>\n", "\n<p>Bring 2 ropes &amp; an oar.</p>\n"));
+          List.of("\n<p>The gate is <b>shut</b>.</p>\n", "\n<p>Bring 2 ropes &amp; an oar.</p>\n"),
+          Format.XML,
+          List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n"));
 
   private static String text(Random random, Format format) {
     List<String> more = MORE.getOrDefault(format, List.of());

@@ -466,4 +466,15 @@ class StubTest {
             "Ja gewiss. Rudern Sie los.\n",
             "0-0 1- 2-1"));
   }
+
+  @Test
+  void inRestructuredTextABlockComesWithItsMarks() {
+    assertEquals(
+        "Zeug\n----\n\nRudern Sie *los*. Take a *rest*.\n\n- Riemen\n\n  - of ash\n\n- Tau\n",
+        Stubbed.in(
+            Format.RST,
+            "Gear\n----\n\nRow the *boat*. Take a *rest*.\n\n- Oars\n\n  - of ash\n\n- Rope\n",
+            "Zeug\n----\n\nRudern Sie *los*.\n\n- Riemen\n\n- Tau\n",
+            "0-0 1-1 2- 3-2 4- 5-3"));
+  }
 }

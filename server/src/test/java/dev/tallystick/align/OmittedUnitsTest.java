@@ -82,7 +82,14 @@ class OmittedUnitsTest {
     units.set(
         at,
         new Unit(
-            unit.length(), unit.letters(), true, unit.kind(), unit.close(), unit.words(), false));
+            unit.length(),
+            unit.codePoints(),
+            unit.letters(),
+            true,
+            unit.kind(),
+            unit.close(),
+            unit.words(),
+            false));
   }
 
   @Test

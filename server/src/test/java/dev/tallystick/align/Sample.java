@@ -22,7 +22,7 @@ final class Sample {
   }
 
   static Unit unit(int length, boolean opens) {
-    return new Unit(length, length, opens, 0, 1, NO_WORDS, false);
+    return new Unit(length, length, length, opens, 0, 1, NO_WORDS, false);
   }
 
   static Unit unit(int length, boolean opens, long... keys) {
@@ -30,12 +30,12 @@ final class Sample {
     for (int i = 0; i < keys.length; i++) {
       words[i] = new Unit.Word(keys[i], 0.5);
     }
-    return new Unit(length, length, opens, 0, 1, words, false);
+    return new Unit(length, length, length, opens, 0, 1, words, false);
   }
 
   static Unit verbatim(long content) {
     Unit.Word[] words = {new Unit.Word(content, 0.9)};
-    return new Unit(30, 0, true, 0, 0, words, true);
+    return new Unit(30, 30, 0, true, 0, 0, words, true);
   }
 
   static List<Unit> units(int... lengths) {
@@ -71,7 +71,7 @@ final class Sample {
         int kind = random.nextInt(Unit.KINDS);
         int close = random.nextInt(Unit.CLOSES);
         boolean opens = i == 0 || random.nextInt(4) == 0;
-        units.add(new Unit(length, length / 2 + 1, opens, kind, close, words, false));
+        units.add(new Unit(length, length, length / 2 + 1, opens, kind, close, words, false));
       }
     }
   }

@@ -150,7 +150,7 @@ class DraftPairsTest {
         ¶ When the porter has counted 46 heads, he blows the whistle twice.
         | When the porter has counted 46 heads, he blows the whistle twice. !untranslated
         Write down how long it took, and hang the sheet on the board in the canteen.
-        | Write down how long it took, and hang the sheet on the board in the canteen. !untranslated
+        | Write down how long it took, and hang the sheet on the board in the canteen. !...
         """);
   }
 

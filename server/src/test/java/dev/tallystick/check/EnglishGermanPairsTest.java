@@ -146,6 +146,44 @@ class EnglishGermanPairsTest {
         """);
   }
 
+  /** Neighbours are one finding; what may stay as it is lies within, and a heading parts them. */
+  @Test
+  void untranslatedNeighboursAreOneFinding() {
+    check(
+        """
+        ¶# The mill
+        | # Die Mühle
+        ¶ The miller listens for the bell of the gate, which rings at half tide.
+        | The miller listens for the bell of the gate, which rings at half tide. !untranslated
+        ¶- Grindel 3
+        | - Grindel 3 !...
+        ¶ Then she lifts the lever by 3 notches and lets the stones run empty.
+        | Then she lifts the lever by 3 notches and lets the stones run empty. !...
+        She waits until the water has come up to the red line on the wall.
+        | Sie wartet, bis das Wasser an der roten Linie an der Mauer steht.
+        The boy sweeps the floor and sets out the 12 empty sacks.
+        | The boy sweeps the floor and sets out the 12 empty sacks. !untranslated
+        ¶# Waltran
+        | # Waltran
+        ¶ The flour is as fine as dust, and it gets into every cup of tea.
+        | The flour is as fine as dust, and it gets into every cup of tea. !untranslated
+        Nobody has complained about it since the year 1874.
+        | Darüber hat sich seit dem Jahr 1874 niemand beschwert.
+        """);
+  }
+
+  /** Names, and what is copied anyhow, make no sentence that waits for its translation. */
+  @Test
+  void listsOfNamesAndCodeMayStayAsTheyAre() {
+    check(
+        """
+        ¶ Grindel, Waltran, Sallow, Kestrel, Tessamouth, Brandt
+        | Grindel, Waltran, Sallow, Kestrel, Tessamouth, Brandt
+        ¶ Kestrel: `raise the gate by one notch`, https://kestrel.example/raise/the/gate/now
+        | Kestrel: `raise the gate by one notch`, https://kestrel.example/raise/the/gate/now
+        """);
+  }
+
   @Test
   void namesTitlesAndCodeMayStayAsTheyAre() {
     check(

@@ -54,6 +54,12 @@ class WordingTest {
   }
 
   @Test
+  void sentencesLeftAsTheyAreAreCounted() {
+    assertEquals("Still the same as the source.", german.untranslated(1));
+    assertEquals("These 4 sentences are still the same as the source.", german.untranslated(4));
+  }
+
+  @Test
   void additionsAreCounted() {
     assertEquals("Nothing in the source stands for this sentence.", german.addition(1));
     assertEquals("Nothing in the source stands for these 2 sentences.", german.addition(2));
@@ -72,11 +78,6 @@ class WordingTest {
   void movedSentencesAreCounted() {
     assertEquals("This sentence stands at another place in the source.", german.order(1));
     assertEquals("These 2 sentences stand at another place in the source.", german.order(2));
-  }
-
-  @Test
-  void aCopyIsCalledStillTheSame() {
-    assertEquals("Still the same as the source.", german.untranslated());
   }
 
   @Test

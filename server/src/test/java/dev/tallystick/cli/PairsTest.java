@@ -37,6 +37,50 @@ class PairsTest {
   }
 
   @Test
+  void theFileItselfSaysItsLanguageWhereNothingElseDoes() {
+    CableCar.write(folder.resolve("guide.md"), "---\nlang: en\n---\n" + CableCar.ENGLISH);
+    CableCar.write(folder.resolve("guide.de.md"), "---\nlang: fr\n---\n" + CableCar.GERMAN);
+    JsonObject pair = only();
+    assertEquals("en", Fields.string(pair, "sourceLanguage"));
+    assertEquals("de", Fields.string(pair, "targetLanguage"));
+    assertEquals("{}", pair.get("findings").toString());
+
+    Outcome stated = Outcome.of("pairs", "--format", "jsonl", "--source-language", "en-GB", folder);
+    assertEquals("en-GB", Fields.string(stated.json().get(0), "sourceLanguage"));
+
+    CableCar.write(folder.resolve("tallystick.json"), "{ \"sourceLanguage\": \"en-US\" }");
+    assertEquals("en-US", Fields.string(only(), "sourceLanguage"));
+  }
+
+  @Test
+  void aFileThatSaysNoLanguageIsInAnUnknownOne() {
+    CableCar.write(folder.resolve("guide.md"), "---\nlang: elvish\n---\n" + CableCar.ENGLISH);
+    CableCar.write(folder.resolve("guide.de.md"), CableCar.GERMAN);
+    assertEquals("und", Fields.string(only(), "sourceLanguage"));
+  }
+
+  @Test
+  void scriptsAndRegionsTellFilesApart() {
+    for (String tag : List.of("pt", "pt_BR", "sr_Latn", "sr-Cyrl", "zh_TW", "zh-Hans")) {
+      CableCar.write(folder.resolve(tag + "/guide.md"), CableCar.GERMAN);
+      CableCar.write(folder.resolve("notes." + tag + ".md"), CableCar.GERMAN);
+    }
+    CableCar.write(folder.resolve("en/guide.md"), CableCar.ENGLISH);
+    CableCar.write(folder.resolve("notes.md"), CableCar.ENGLISH);
+    List<String> expected = List.of("pt", "pt-BR", "sr-Cyrl", "sr-Latn", "zh-Hans", "zh-TW");
+    for (String source : List.of("en/guide.md", "notes.md")) {
+      String file = Outcome.shown(folder.resolve(source));
+      assertEquals(
+          expected,
+          json().stream()
+              .filter(pair -> Fields.string(pair, "source").equals(file))
+              .map(pair -> Fields.string(pair, "targetLanguage"))
+              .sorted()
+              .toList());
+    }
+  }
+
+  @Test
   void whatNobodyHasGotToIsPendingAndAllOfItIsCounted() {
     CableCar.pair(folder, CableCar.GERMAN);
     int all = Fields.number(only(), "done", 1);

@@ -54,6 +54,17 @@ class SegmentsTest {
   }
 
   @Test
+  void theFileMaySayItsLanguage() {
+    String german = "Fragen Sie am 3. Mai nach dem Schlüssel.";
+    Path page = CableCar.write(folder.resolve("kiosk.html"), "<html lang=de><p>" + german);
+    assertEquals(List.of("paragraph\t" + german), Outcome.of("segments", page).lines());
+    Path log =
+        CableCar.write(folder.resolve("kiosk.xml"), "<log xml:lang='de'>" + german + "</log>");
+    assertEquals(List.of("paragraph\t" + german), Outcome.of("segments", log).lines());
+    assertEquals(2, Outcome.of("segments", "--language", "en", log).lines().size());
+  }
+
+  @Test
   void peopleSeeTheBlockAndTheProse() {
     Path file = CableCar.write(folder.resolve("kiosk.txt"), "It snows. We open.\n");
     assertEquals(

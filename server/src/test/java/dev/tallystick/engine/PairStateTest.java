@@ -23,7 +23,8 @@ class PairStateTest {
   private final Sheet source = sheet("The bell rings.", "en");
 
   private static Sheet sheet(String text, String language) {
-    return new Sheet(new Text(text), Format.MARKDOWN, language, TextRules.USUAL);
+    Tongue tongue = Tongue.of(new Language(language));
+    return new Sheet(new Text(text), Format.MARKDOWN, tongue, TextRules.USUAL);
   }
 
   private Task take(Sheet target) {

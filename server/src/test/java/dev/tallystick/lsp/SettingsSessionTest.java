@@ -10,6 +10,8 @@ import java.util.Optional;
 import java.util.concurrent.CompletableFuture;
 import org.eclipse.lsp4j.DidChangeConfigurationParams;
 import org.eclipse.lsp4j.InitializeParams;
+import org.eclipse.lsp4j.TextDocumentIdentifier;
+import org.eclipse.lsp4j.TextDocumentPositionParams;
 import org.eclipse.lsp4j.WorkspaceFolder;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -74,6 +76,50 @@ class SettingsSessionTest {
       push(talk, Map.of("sourceLanguage", "de"));
       assertEquals(List.of("addition"), talk.codes(work.en()));
       assertEquals(List.of(), talk.codes(work.de()));
+    }
+  }
+
+  private static List<String> languages(Talk talk, Buffer buffer, String words) {
+    return Talk.answer(
+            talk.server.counterpart(
+                new TextDocumentPositionParams(
+                    new TextDocumentIdentifier(buffer.uri),
+                    buffer.position(buffer.text.indexOf(words)))))
+        .stream()
+        .map(Placed::language)
+        .toList();
+  }
+
+  /** A tag in a name would count before all this. */
+  @Test
+  void whatATextSaysOfItsLanguageBeatsTheSettingButNotTheProject() {
+    Work work = new Work(folder);
+    Path english = work.write("ferry.md", Ferry.EN);
+    Path german = work.write("ferry.de.md", Ferry.DE);
+    try (Talk talk = Talk.in(folder)) {
+      push(talk, Map.of("sourceLanguage", "en-GB"));
+      Buffer target = talk.open(german, Ferry.DE);
+      Buffer source = talk.open(english, Ferry.EN);
+      talk.settle();
+      assertEquals(List.of("en-GB"), languages(talk, target, "410 Gliedern"));
+
+      source.whole("---\nlang: en_IE\n---\n" + Ferry.EN);
+      talk.pass(1500);
+      assertEquals(List.of("en-IE"), languages(talk, target, "410 Gliedern"));
+      assertEquals(List.of("de"), languages(talk, source, "410 links"));
+
+      push(talk, Map.of("sourceLanguage", "en-ZA"));
+      assertEquals(List.of("en-IE"), languages(talk, target, "410 Gliedern"));
+      source.replace("lang: en_IE", "lang: none");
+      talk.pass(1500);
+      assertEquals(List.of("en-ZA"), languages(talk, target, "410 Gliedern"));
+      push(talk, Map.of("sourceLanguage", "en-AU"));
+      assertEquals(List.of("en-AU"), languages(talk, target, "410 Gliedern"));
+
+      source.replace("lang: none", "lang: en_IE");
+      talk.open(work.file("tallystick.json"), "{ \"sourceLanguage\": \"en-US\" }");
+      talk.pass(1500);
+      assertEquals(List.of("en-US"), languages(talk, target, "410 Gliedern"));
     }
   }
 

@@ -80,7 +80,7 @@ record Nltk(JsonObject constants, List<String> links, List<String> exact) {
   private static List<Unit> units(int[] lengths) {
     List<Unit> units = new ArrayList<>();
     for (int length : lengths) {
-      units.add(new Unit(length, length, units.isEmpty(), 0, 1, new Unit.Word[0], false));
+      units.add(new Unit(length, length, length, units.isEmpty(), 0, 1, new Unit.Word[0], false));
     }
     return units;
   }

@@ -98,6 +98,21 @@ class LanguageTest {
   }
 
   @Test
+  void aScriptThatIsNotWrittenIsTheLikeliest() {
+    assertTrue(new Language("zh-Hant").covers(new Language("zh-TW")));
+    assertTrue(new Language("zh-Hant").covers(new Language("zh-HK")));
+    assertTrue(new Language("zh-Hans").covers(new Language("zh")));
+    assertTrue(new Language("zh").covers(new Language("zh-TW")));
+    assertTrue(new Language("zh-TW").covers(new Language("zh-Hant-TW")));
+    assertTrue(new Language("sr").covers(new Language("sr-Latn")));
+    assertFalse(new Language("zh-Hant").covers(new Language("zh")));
+    assertFalse(new Language("zh-Hans").covers(new Language("zh-TW")));
+    assertFalse(new Language("zh-TW").covers(new Language("zh-Hant")));
+    assertFalse(new Language("sr-Latn").covers(new Language("sr-RS")));
+    assertFalse(new Language("pt-BR").covers(new Language("pt-PT")));
+  }
+
+  @Test
   void wordsOfWhyAreLowerCase() {
     assertEquals("name", Why.NAME.word());
     assertEquals("folder", Why.FOLDER.word());

@@ -66,6 +66,37 @@ class SidesTest {
   }
 
   @Test
+  void settingPrefersItsScript() {
+    check(
+        """
+        a.zh-Hans.md
+        a.zh-Hant.md
+        a.de.md
+        b.zh_CN.md
+        b.zh_HK.md
+        source: zh-TW
+        =>
+        a.zh-Hant.md -> a.de.md (zh-Hant>de, name)
+        a.zh-Hant.md -> a.zh-Hans.md (zh-Hant>zh-Hans, name)
+        b.zh_HK.md -> b.zh_CN.md (zh-HK>zh-CN, name)
+        """);
+  }
+
+  @Test
+  void targetMayBeNamedByItsScript() {
+    check(
+        """
+        a.md
+        a.zh_TW.md
+        a.zh_CN.md
+        target: zh-Hant
+        =>
+        a.md -> a.zh_TW.md (und>zh-TW, name)
+        a.zh_CN.md alone: It is in Chinese (China), but only translations into Chinese (Traditional) are asked for.
+        """);
+  }
+
+  @Test
   void untaggedFileIsTheOnlyTranslationOfATaggedSource() {
     check(
         """

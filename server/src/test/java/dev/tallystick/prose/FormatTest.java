@@ -14,8 +14,11 @@ class FormatTest {
     assertEquals(Optional.of(Format.SUBRIP), Format.ofName("ferry.de.srt"));
     assertEquals(Optional.of(Format.WEBVTT), Format.ofName("ferry.vtt"));
     assertEquals(Optional.of(Format.ASCIIDOC), Format.ofName("ferry.adoc"));
+    assertEquals(Optional.of(Format.XML), Format.ofName("ferry.ditamap"));
+    assertEquals(Optional.of(Format.HTML), Format.ofName("ferry.xhtml"));
     assertEquals(Optional.of(Format.LATEX), Format.ofName("ferry.ltx"));
     assertEquals(Optional.of(Format.LATEX), Format.ofLanguage("plaintex"));
+    assertEquals(Optional.of(Format.RST), Format.ofName("ferry.rst"));
     assertEquals(Optional.empty(), Format.ofName("docs.md/ferry"));
     assertEquals(Optional.empty(), Format.ofName("md"));
     assertEquals(Optional.of(Format.HTML), Format.ofName("en/ferry.htm"));

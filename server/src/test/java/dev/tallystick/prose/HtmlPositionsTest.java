@@ -230,8 +230,8 @@ class HtmlPositionsTest {
     StringBuilder decoded = new StringBuilder();
     int at = start;
     while (at < end) {
-      HtmlReference reference =
-          source.charAt(at) == '&' ? HtmlReference.at(source, at, end, attribute) : null;
+      CharacterReference reference =
+          source.charAt(at) == '&' ? CharacterReference.at(source, at, end, attribute) : null;
       if (reference == null) {
         decoded.append(source.charAt(at++));
       } else {

@@ -5,7 +5,6 @@ import static org.junit.jupiter.api.Assertions.assertTimeoutPreemptively;
 
 import dev.tallystick.text.Text;
 import java.time.Duration;
-import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -63,33 +62,6 @@ class LinearTimeTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "<a ",
-        "<a",
-        "<a>",
-        "<a>\n",
-        "<a\n",
-        "<a\n\n",
-        "</",
-        "<a b={",
-        "<a b=\"",
-        "{",
-        "{a",
-        "{\n",
-        "{}",
-        "{'",
-        "{/*",
-        "import a\n",
-        "import a\n\n",
-        "export {\n\n",
-        "export }\n\n "
-      })
-  void mdxEnds(String fragment) {
-    assertEnds(Format.MDX, fragment);
-  }
-
-  @ParameterizedTest
-  @ValueSource(
-      strings = {
         "a",
         "a\n",
         "- ",
@@ -102,7 +74,23 @@ class LinearTimeTest {
         "A B\n===\n",
         "\t",
         ">",
-        "> a\n"
+        "> a\n",
+        "{",
+        "{{ ",
+        "{a}",
+        "%",
+        "%(a",
+        "%0",
+        "${",
+        "<1",
+        "&a",
+        "&#",
+        "http://",
+        "http://a(",
+        "http://a)",
+        "a@",
+        "a@b.",
+        "@"
       })
   void plainTextEnds(String fragment) {
     assertEnds(Format.PLAIN, fragment);
@@ -177,6 +165,54 @@ class LinearTimeTest {
       })
   void htmlEnds(String fragment) {
     assertEnds(Format.HTML, fragment);
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "<a>",
+        "<a>a",
+        "a<a/>",
+        "</a>",
+        "<a></b>",
+        "<para>a",
+        "a.<footnote>a",
+        "a<footnote/>",
+        "a<footnote>a</footnote>)",
+        "<section><title>a",
+        "<listitem>",
+        "<indexterm>a",
+        "<screen>a",
+        "<inlinemediaobject>",
+        "<a its:translate='no'>a",
+        "<its:rules><its:translateRule selector='//a:a' translate='no'/>",
+        "<its:withinTextRule selector='//a//b//c' withinText='nested'/>a",
+        "<its:withinTextRule selector='//a[(' withinText='yes'/></its:rules>",
+        "<a xmlns='u'>",
+        "<a b='",
+        "<a b",
+        "<",
+        "<!--",
+        "<?",
+        "<![CDATA[",
+        "<![CDATA[a]]>",
+        "]]>",
+        "<!DOCTYPE a [",
+        "<!ENTITY a 'b'>",
+        "&a;",
+        "&a",
+        "&amp;",
+        "&#1"
+      })
+  void xmlEnds(String fragment) {
+    assertEnds(Format.XML, fragment);
+    assertEnds(
+        Format.XML,
+        "<section xmlns:its='http://www.w3.org/2005/11/its'><its:rules><its:withinTextRule"
+            + " selector='//b//a | //a//para' withinText='nested'/></its:rules><para>"
+            + fragment.repeat(TIMES),
+        1);
+    assertEnds(Format.XML, "<!DOCTYPE a [" + fragment.repeat(TIMES), 1);
   }
 
   @ParameterizedTest
@@ -328,30 +364,97 @@ class LinearTimeTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"- ", "| a ", "\\|"})
-  void rowsOfATableEnd(String fragment) {
-    assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
+  @ValueSource(
+      strings = {
+        "a \n",
+        "*",
+        "*a ",
+        "**a",
+        " a*",
+        "`",
+        "`a ",
+        "``a",
+        "```",
+        "`a`",
+        "`a <",
+        "`a>`",
+        "`:a",
+        "_`a",
+        "_",
+        "a_ ",
+        "a-",
+        "-a",
+        "a:",
+        "|",
+        "|a",
+        "||\n",
+        "| a\n",
+        "[",
+        "[a",
+        "[a]_",
+        ":",
+        ":a",
+        ":a:",
+        ":a:`",
+        ":a: ",
+        ":a: b\n",
+        "\\",
+        "\\ ",
+        "- ",
+        "- a\n",
+        "-\n",
+        "1. ",
+        "1. a\n",
+        "(a) ",
+        "-a, ",
+        "-a  b\n",
+        ".. ",
+        ".. a\n",
+        ".. [1] ",
+        ".. _a\n",
+        ".. a:: ",
+        ".. a::\n",
+        ".. |a|",
+        "..\n\n",
+        ".. code::\n\n",
+        "::\n",
+        "::\n\n",
+        "a::\n\n b\n",
+        "=",
+        "==\n",
+        "====\n",
+        "==== ",
+        "== ==\n",
+        "== ==\n\n",
+        "== ==\na b\n",
+        "-- --\n",
+        "+-+\n",
+        "+-",
+        "+-+\n|a|\n",
+        "|a|",
+        "+\n",
+        ">>> \n",
+        " a\n",
+        " a\n\n",
+        "a\n b\n",
+        "\t",
+        "a\n=\n",
+        "=\na\n=\n",
+        "\"a,",
+        "\""
+      })
+  void restructuredTextEnds(String fragment) {
+    String many = fragment.repeat(TIMES);
+    assertEnds(Format.RST, fragment);
+    assertEnds(Format.RST, "+" + "-+".repeat(TIMES) + "\n|" + many, 1);
+    assertEnds(Format.RST, "== ".repeat(TIMES) + "\n" + many + "\n== ==\n", 1);
+    assertEnds(Format.RST, ".. csv-table::\n\n   " + many, 1);
   }
 
   @ParameterizedTest
-  @ValueSource(
-      strings = {
-        "title: a\n",
-        "title: \"a\n",
-        "title: >\n  a\n",
-        " title:\n",
-        "title: a #",
-        "title = '''",
-        "title = \"\"\"\n",
-        "title = '''\ntitle = \"\"\"\n",
-        "a.",
-        "- "
-      })
-  void frontMatterEnds(String fragment) {
-    for (String fence : List.of("---\n", "+++\n")) {
-      String key = fence.startsWith("-") ? "key: a\n" : "";
-      assertEnds(Format.MARKDOWN, fence + key + fragment.repeat(TIMES) + "\n" + fence, 1);
-    }
+  @ValueSource(strings = {"- ", "| a ", "\\|"})
+  void rowsOfATableEnd(String fragment) {
+    assertEnds(Format.MARKDOWN, "| a |\n|---|\n| " + fragment.repeat(TIMES), 1);
   }
 
   private static void assertEnds(Format format, String fragment) {

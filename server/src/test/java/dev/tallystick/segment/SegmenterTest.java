@@ -47,6 +47,14 @@ class SegmenterTest {
         of("ja", "水車は川にあります。| 朝に回ります。| 見に来てください！"),
         of("zh", "水磨在河边。| 它早上转动！| 谁来看？"),
         of("hi", "चक्की नदी पर है। | वह सुबह चलती है।"),
+        of("zh-Hant", "水磨在河邊。| 它早上轉動！| 誰來看？"),
+        of("zh-TW", "水磨在河邊。| 它早上轉動！| 誰來看？"),
+        of("pt-BR", "O Sr. Alves e a Dra. Lima têm a chave. | Moram aqui."),
+        of("de-CH", "Fragen Sie Dr. Ahlers am 3. Mai. | Er hilft gern."),
+        of("en-GB", "Mr. Smith met Prof. Alder. | They talked."),
+        of("nn-NO", "Ta med verktøy, f.eks. ein hammar. | Det er alt."),
+        of("sr-Latn", "Mlin stoji na reci. | Ko čuva ključ?"),
+        of("sr-Cyrl-RS", "Млин стоји на реци. | Ко чува кључ?"),
         of("my", "တံခါး၊ ပြတင်းပေါက်၊ မီးတို့ကို ပိတ်ပါ။ | သော့ကို ယူပါ။"),
         of("und", "One here. | Another there."));
   }

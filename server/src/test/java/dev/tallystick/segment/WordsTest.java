@@ -33,12 +33,14 @@ class WordsTest {
     assertEquals(List.of(ascii), Words.of(digits));
   }
 
-  /** Single letters of these say little, and without a dictionary there are no words. */
+  /** Where they are parted is what ICU's dictionaries say. */
   @Test
-  void scriptsWithoutBlanksArePassedOver() {
-    assertEquals(List.of("1874", "3km"), Words.of("水車は1874年に、川から3kmで。"));
-    assertEquals(List.of(), Words.of("กังหันน้ำ"));
-    assertEquals(List.of("odile"), Words.of("管理人Odileさん"));
+  void scriptsWithoutBlanksArePartedByDictionary() {
+    assertEquals(
+        List.of("水車", "は", "1874", "年", "に", "川", "から", "3km", "で"),
+        Words.of("水車は1874年に、川から3kmで。"));
+    assertEquals(List.of("กังหัน", "น้ำ"), Words.of("กังหันน้ำ"));
+    assertEquals(List.of("管理人", "odile", "さん"), Words.of("管理人Odileさん"));
   }
 
   @Test

@@ -8,11 +8,11 @@ import org.jsoup.nodes.Element;
 import org.jsoup.nodes.Range;
 
 /**
- * Makes blocks of what a page shows, taken in from left to right. White space collapses as it does
- * in a browser; what a browser shows as a space or a new line parts words here too, if need be by
- * the first character of its mark.
+ * Makes blocks of what a marked-up file shows, taken in from left to right. White space collapses
+ * as it does in a browser; what a browser shows as a space or a new line parts words here too, if
+ * need be by the first character of its mark.
  */
-final class HtmlFlow {
+final class MarkupFlow {
   private static final int NONE = -1;
 
   /** What browsers drop without a break in the text. */
@@ -20,11 +20,17 @@ final class HtmlFlow {
 
   private final String file;
   private final Set<Element> parents;
+  private final Set<String> entities;
   private final List<Block> blocks = new ArrayList<>();
+  private final List<Block> notes = new ArrayList<>();
   private final List<Span> waiting = new ArrayList<>();
-  private HtmlContext open;
+  private MarkupContext open;
   private Pieces pieces;
   private int first;
+
+  /** Index of the last block that is no note; -1 if there is none. */
+  private int main = -1;
+
   private int blank = NONE;
   private boolean realBlank;
   private boolean lineEnds;
@@ -32,14 +38,26 @@ final class HtmlFlow {
   private boolean hasCopied;
   private boolean isFixed;
 
+  /** How a stretch of the file is read. */
+  enum As {
+    /** As text, in which there may be references. */
+    TEXT,
+    /** As the value of an attribute. */
+    ATTRIBUTE,
+    /** As text in which an ampersand is one. */
+    LITERAL
+  }
+
   /**
    * An empty flow.
    *
    * @param parents the elements that have others inside that no sentence crosses
+   * @param entities those that an XML file declares; {@code null} in HTML
    */
-  HtmlFlow(String file, Set<Element> parents) {
+  MarkupFlow(String file, Set<Element> parents, Set<String> entities) {
     this.file = file;
     this.parents = parents;
+    this.entities = entities;
   }
 
   /** All blocks so far. */
@@ -48,28 +66,50 @@ final class HtmlFlow {
     return List.copyOf(blocks);
   }
 
-  /** Takes in a stretch of text, or the value of an attribute that reads as text. */
-  void text(Span text, HtmlContext context, boolean attribute) {
+  /** Takes in a stretch of text. */
+  void text(Span text, MarkupContext context, As as) {
     int at = text.start();
     while (at < text.end()) {
-      char c = file.charAt(at);
-      HtmlReference reference = c == '&' ? HtmlReference.at(file, at, text.end(), attribute) : null;
-      if (reference != null) {
-        add(reference, context);
-        at = reference.end();
-      } else if (!attribute && file.startsWith(EMPTY_TAG, at)) {
-        at += EMPTY_TAG.length();
-      } else {
-        int code = file.codePointAt(at);
-        int end = Math.min(at + Character.charCount(code), text.end());
-        if (Characters.isSpace(code)) {
-          addBlank(at, true);
-        } else if (!isNothing(at, c)) {
-          add(at, end, context, code);
-        }
-        at = end;
+      boolean refers = file.charAt(at) == '&' && as != As.LITERAL;
+      int behind = refers ? reference(at, text.end(), context, as) : at;
+      if (behind == at && as == As.TEXT && file.startsWith(EMPTY_TAG, at)) {
+        behind = at + EMPTY_TAG.length();
       }
+      at = behind > at ? behind : character(at, text.end(), context);
     }
+  }
+
+  /** Takes in a character; the offset behind it. */
+  private int character(int at, int limit, MarkupContext context) {
+    int code = file.codePointAt(at);
+    int end = Math.min(at + Character.charCount(code), limit);
+    if (Characters.isSpace(code)) {
+      addBlank(at, true);
+    } else if (!isNothing(at, file.charAt(at))) {
+      add(at, end, context, code);
+    }
+    return end;
+  }
+
+  /** Takes in a reference; the offset behind it, or that of its ampersand if there is none. */
+  private int reference(int at, int limit, MarkupContext context, As as) {
+    CharacterReference reference;
+    if (entities == null) {
+      reference = CharacterReference.at(file, at, limit, as == As.ATTRIBUTE);
+    } else {
+      int name = CharacterReference.behindEntity(file, at, limit, entities);
+      if (name > at) {
+        // What it stands for is not known; the same name stands for it on both sides.
+        text(new Span(at + 1, name - 1), context.marked(false, true, context.fixed()), As.LITERAL);
+        return name;
+      }
+      reference = CharacterReference.inXml(file, at, limit);
+    }
+    if (reference == null) {
+      return at;
+    }
+    add(reference, context);
+    return reference.end();
   }
 
   /** A byte-order mark, or what browsers drop. */
@@ -77,7 +117,7 @@ final class HtmlFlow {
     return c == 0 || at == 0 && c == '\uFEFF';
   }
 
-  private void add(HtmlReference reference, HtmlContext context) {
+  private void add(CharacterReference reference, MarkupContext context) {
     if (reference.isBlank()) {
       addBlank(reference.start(), false);
     } else if (!reference.isInsideWords() && (!reference.isQuotationMark() || followsWord())) {
@@ -92,7 +132,7 @@ final class HtmlFlow {
         && Character.isLetterOrDigit(file.codePointBefore(pieces.end()));
   }
 
-  private void add(int from, int to, HtmlContext context, int character) {
+  private void add(int from, int to, MarkupContext context, int character) {
     if (open != null && open.block() != context.block()) {
       close();
     }
@@ -111,7 +151,7 @@ final class HtmlFlow {
     }
   }
 
-  private void start(int from, HtmlContext context) {
+  private void start(int from, MarkupContext context) {
     open = context;
     pieces = new Pieces(file);
     first = from;
@@ -155,12 +195,34 @@ final class HtmlFlow {
     }
   }
 
+  /**
+   * Takes in the blocks of a note; they come behind the block that the note stands in. What is
+   * copied as it stands in a note is left out, as only notes may lie inside another block.
+   */
+  void addNotes(List<Block> inside, MarkupContext place) {
+    boolean waits = open != null && open.block() == place.block();
+    if (!waits) {
+      close();
+    }
+    for (Block block : inside) {
+      if (block.kind() != Block.Kind.VERBATIM) {
+        Block note = new Block(Block.Kind.NOTE, 0, block.extent(), block.pieces());
+        (waits ? notes : blocks).add(note);
+      }
+    }
+  }
+
   /** Ends the block that is open. */
   void close() {
     int end = 0;
     if (open != null) {
       end = pieces.end();
       add(block(new Span(first, end)));
+      for (Block note : notes) {
+        blocks.add(note);
+        end = Math.max(end, note.extent().end());
+      }
+      notes.clear();
       open = null;
       lineEnds = false;
     }
@@ -174,7 +236,7 @@ final class HtmlFlow {
   }
 
   private void addValue(Span value) {
-    text(value, HtmlContext.of(null), true);
+    text(value, MarkupContext.of(null), As.ATTRIBUTE);
     if (open != null) {
       close();
     }
@@ -196,6 +258,7 @@ final class HtmlFlow {
       return prose;
     }
     int before = blocks.isEmpty() ? 0 : blocks.get(blocks.size() - 1).extent().end();
+    before = Math.max(before, main < 0 ? 0 : blocks.get(main).extent().end());
     Range tag = element.sourceRange();
     Range endTag = element.endSourceRange();
     boolean opens = tag.endPos() > tag.startPos() && tag.startPos() >= before;
@@ -207,13 +270,13 @@ final class HtmlFlow {
 
   /** Adds a block; if the one before it would reach into it, that one ends with its prose. */
   private void add(Block block) {
-    int last = blocks.size() - 1;
-    if (last >= 0 && blocks.get(last).extent().end() > block.extent().start()) {
-      Block before = blocks.get(last);
+    if (main >= 0 && blocks.get(main).extent().end() > block.extent().start()) {
+      Block before = blocks.get(main);
       int end = before.pieces().get(before.pieces().size() - 1).end();
       Span extent = new Span(before.extent().start(), end);
-      blocks.set(last, new Block(before.kind(), before.level(), extent, before.pieces()));
+      blocks.set(main, new Block(before.kind(), before.level(), extent, before.pieces()));
     }
+    main = blocks.size();
     blocks.add(block);
   }
 }
