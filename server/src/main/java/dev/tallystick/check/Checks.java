@@ -19,7 +19,7 @@ public final class Checks {
     findings.addAll(Omissions.find(subject, pending));
     findings.addAll(Additions.find(subject));
     findings.addAll(Untranslated.find(subject, pending));
-    findings.addAll(Lengths.find(subject));
+    findings.addAll(Lengths.find(subject, pending));
     findings.addAll(Orders.find(subject));
     Collections.sort(findings);
     return List.copyOf(findings);
