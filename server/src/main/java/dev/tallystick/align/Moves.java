@@ -13,13 +13,13 @@ import java.util.List;
  */
 final class Moves {
   /** Units less probably without a counterpart are not looked at. */
-  private static final double LEAST_NULL = 0.2;
+  private static final double LEAST_NULL = 0.35;
 
   /** How far apart they may stand, in units. */
   private static final int FARTHEST = 60;
 
   /** Suiting each other less than this is chance (nats). */
-  private static final double LEAST_WORTH = 2;
+  private static final double LEAST_WORTH = 4;
 
   /** Each of two sentences in one match must suit the place of the other so well (nats). */
   private static final double LEAST_SWAPPED = 6;

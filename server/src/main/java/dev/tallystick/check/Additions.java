@@ -8,9 +8,6 @@ import java.util.stream.Collectors;
 
 /** Sentences of the translation that nothing in the source stands for; a run is one finding. */
 final class Additions {
-  /** A hair more than for omissions: a free translation that parts a sentence looks much alike. */
-  private static final double LEAST = 0.52;
-
   private Additions() {}
 
   static List<Finding> find(Subject subject) {
@@ -22,7 +19,9 @@ final class Additions {
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
     for (Run run :
-        Run.of(subject.target(), i -> extra[i] >= LEAST && !moved.contains(i) && !slight.is(i))) {
+        Run.of(
+            subject.target(),
+            i -> extra[i] >= Omissions.LEAST && !moved.contains(i) && !slight.is(i))) {
       findings.add(
           new Finding(
               Code.ADDITION,

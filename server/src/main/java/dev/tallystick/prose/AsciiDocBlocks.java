@@ -84,7 +84,7 @@ final class AsciiDocBlocks {
     }
     Span extent = new Span(start, end);
     if (kind != Block.Kind.VERBATIM) {
-      add(AsciiDocInlines.block(kind, level, extent, file, lines));
+      add(MarkedLines.block(kind, level, extent, file, lines, AsciiDocMarks::of));
     } else if (!comment) {
       add(new Block(kind, 0, extent, List.of()));
     }
@@ -97,7 +97,7 @@ final class AsciiDocBlocks {
   }
 
   void addMacro(Span line, List<Span> prose) {
-    add(AsciiDocInlines.block(Block.Kind.PARAGRAPH, 0, line, file, prose));
+    add(MarkedLines.block(Block.Kind.PARAGRAPH, 0, line, file, prose, AsciiDocMarks::of));
   }
 
   /** Adds a block, unless it has no prose to have. */

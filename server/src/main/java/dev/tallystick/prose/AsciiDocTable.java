@@ -149,7 +149,7 @@ final class AsciiDocTable {
       blocks.add(
           style == 'l'
               ? new Block(Block.Kind.VERBATIM, 0, extent, List.of())
-              : AsciiDocInlines.block(Block.Kind.CELL, 0, extent, file, cell));
+              : MarkedLines.block(Block.Kind.CELL, 0, extent, file, cell, AsciiDocMarks::of));
       cell.clear();
     }
   }
