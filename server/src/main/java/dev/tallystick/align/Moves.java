@@ -54,6 +54,8 @@ final class Moves {
     for (Match match : chain) {
       Move swap = match.confidence() >= 0.5 ? swap(evidence, match) : null;
       if (swap != null && !sourceTaken[swap.source()] && !targetTaken[swap.target()]) {
+        sourceTaken[swap.source()] = true;
+        targetTaken[swap.target()] = true;
         moves.add(swap);
       }
     }

@@ -10,7 +10,7 @@ import java.util.stream.Collectors;
 final class Additions {
   private Additions() {}
 
-  static List<Finding> find(Subject subject) {
+  static List<Finding> find(Subject subject, Vigilance vigilance) {
     double[] extra = subject.alignment().targetNull();
     Set<Integer> moved =
         subject.alignment().moves().stream().map(Move::target).collect(Collectors.toSet());
@@ -21,7 +21,7 @@ final class Additions {
     for (Run run :
         Run.of(
             subject.target(),
-            i -> extra[i] >= Omissions.LEAST && !moved.contains(i) && !slight.is(i))) {
+            i -> extra[i] >= vigilance.least() && !moved.contains(i) && !slight.is(i))) {
       findings.add(
           new Finding(
               Code.ADDITION,

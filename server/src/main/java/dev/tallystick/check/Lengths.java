@@ -18,10 +18,10 @@ final class Lengths {
   /** No verdict on a shorter source: too much varies there (characters). */
   private static final int SHORTEST = 40;
 
-  /** Robust deviations below the usual ratio before it is worth a word. */
-  private static final double SHORT = 5;
-
-  /** The same above it: translators explain more often than they drop a clause. */
+  /**
+   * Robust deviations above the usual ratio before it is worth a word. More than below it:
+   * translators explain more often than they drop a clause.
+   */
   private static final double LONG = 9;
 
   /** So many deviations around the median are called usual. */
@@ -32,18 +32,20 @@ final class Lengths {
 
   private final Subject subject;
   private final Pending pending;
+  private final Vigilance vigilance;
   private final Alignment alignment;
   private double median;
   private double scale;
 
-  private Lengths(Subject subject, Pending pending) {
+  private Lengths(Subject subject, Pending pending, Vigilance vigilance) {
     this.subject = subject;
     this.pending = pending;
+    this.vigilance = vigilance;
     this.alignment = subject.alignment();
   }
 
-  static List<Finding> find(Subject subject, Pending pending) {
-    return new Lengths(subject, pending).find();
+  static List<Finding> find(Subject subject, Pending pending, Vigilance vigilance) {
+    return new Lengths(subject, pending, vigilance).find();
   }
 
   private List<Finding> find() {
@@ -63,7 +65,7 @@ final class Lengths {
     List<Finding> findings = new ArrayList<>();
     for (Match match : judged) {
       double z = (logRatio(match) - median) / spread(match) / scale;
-      boolean implausible = z <= -SHORT && !isUnfinished(match) || z >= LONG;
+      boolean implausible = z <= -vigilance.shortfall() && !isUnfinished(match) || z >= LONG;
       if (implausible && sourceLength(match) >= SHORTEST) {
         findings.add(finding(match));
       }

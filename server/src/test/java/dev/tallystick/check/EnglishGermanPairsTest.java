@@ -215,6 +215,15 @@ class EnglishGermanPairsTest {
   }
 
   @Test
+  void twoSentencesThatChangedPlacesAreOneFindingOfOrder() {
+    check(
+        """
+        ¶ Emmerik oils the 12 cogs. / The 30 sacks of the harvest are weighed on a scale of 1911 that stands beside the door.
+        | Die 30 Säcke der Ernte werden auf einer Waage von 1911 gewogen, die neben der Tür steht. / Emmerik ölt die 12 Zähne. !order
+        """);
+  }
+
+  @Test
   void aParagraphPartedInTwoIsSilent() {
     check(
         """
