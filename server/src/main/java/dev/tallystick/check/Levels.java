@@ -3,6 +3,7 @@ package dev.tallystick.check;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /**
  * Which findings are told, and how loudly. Never as an error: that is the reviser's verdict.
@@ -40,10 +41,13 @@ public record Levels(Map<Code, Optional<Severity>> changed, Vigilance vigilance)
 
   /** The findings that are said, each at its level, in the order given. */
   public List<Finding> apply(List<Finding> findings) {
-    return changed.isEmpty()
-        ? findings
-        : findings.stream()
-            .flatMap(finding -> of(finding.code()).map(finding::at).stream())
-            .toList();
+    return changed.isEmpty() ? findings : findings.stream().flatMap(this::apply).toList();
+  }
+
+  /** A finding of a code that nothing is set for stays as it is. */
+  private Stream<Finding> apply(Finding finding) {
+    return changed.containsKey(finding.code())
+        ? of(finding.code()).map(finding::at).stream()
+        : Stream.of(finding);
   }
 }

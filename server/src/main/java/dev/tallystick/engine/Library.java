@@ -5,7 +5,6 @@ import dev.tallystick.check.OnSide;
 import dev.tallystick.check.Vigilance;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.pairing.Language;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -249,7 +248,7 @@ final class Library {
   Optional<Sheet> sheet(FilePair pair, OnSide side) {
     Path file = pair.file(side);
     Language otherwise = side == OnSide.SOURCE ? assumed : Language.UNKNOWN;
-    Srx rules = project(file).map(FolderProject::rules).map(FolderRules::srx).orElse(Srx.NONE);
+    TextRules rules = project(file).map(FolderProject::texts).orElse(TextRules.USUAL);
     return shelf.sheet(file, new Tongue(pair.language(side), otherwise), rules);
   }
 

@@ -6,7 +6,6 @@ import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Segmenter;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.util.LinkedHashSet;
@@ -40,17 +39,17 @@ public record Reading(
 
   /** Reads a file in a language, a BCP 47 tag. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
-    return of(text, format, Tongue.of(new Language(language)), Srx.NONE, cancellation);
+    return of(text, format, Tongue.of(new Language(language)), TextRules.USUAL, cancellation);
   }
 
-  /** Reads a file by the rules for sentence borders that its project has. */
+  /** Reads a file as its project wants it. */
   public static Reading of(
-      Text text, Format format, Tongue tongue, Srx rules, Cancellation cancellation) {
+      Text text, Format format, Tongue tongue, TextRules rules, Cancellation cancellation) {
     String language = tongue.in(text, format).tag();
     Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
-        Segmenter.of(language, rules)
-            .segments(text, format.blocks(text), endless::add, cancellation);
+        Segmenter.of(language, rules.borders())
+            .segments(text, format.blocks(text, rules.frontMatter()), endless::add, cancellation);
     List<Unit> units = segments.stream().map(segment -> Units.unit(text, segment)).toList();
     return new Reading(text, format, language, segments, units, List.copyOf(endless));
   }

@@ -1,7 +1,6 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.prose.Format;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Text;
 
 /**
@@ -12,16 +11,16 @@ final class Sheet {
   private final Text text;
   private final Format format;
   private final Tongue tongue;
-  private final Srx rules;
+  private final TextRules rules;
   private Reading reading;
   private volatile boolean outdated;
 
   /**
    * A text in a language.
    *
-   * @param rules for its sentence borders
+   * @param rules by which it is read
    */
-  Sheet(Text text, Format format, Tongue tongue, Srx rules) {
+  Sheet(Text text, Format format, Tongue tongue, TextRules rules) {
     this.text = text;
     this.format = format;
     this.tongue = tongue;
@@ -33,8 +32,8 @@ final class Sheet {
   }
 
   /** Whether this is still the sheet of a text that has come anew. */
-  boolean shows(Text current, Format inFormat, Srx byRules) {
-    return format == inFormat && rules == byRules && text.equals(current);
+  boolean shows(Text current, Format inFormat, TextRules byRules) {
+    return format == inFormat && rules.equals(byRules) && text.equals(current);
   }
 
   /** The text has moved on: whoever still works on this sheet may stop. */

@@ -108,7 +108,8 @@ final class Units {
       case ITEM -> block.level() > 1 ? 8 : 7;
       case CELL -> 9;
       case QUOTATION -> 10;
-      case NOTE -> 11;
+      // One stands at the start of a file, the other never does: nobody takes one for the other.
+      case NOTE, METADATA -> 11;
     };
   }
 }

@@ -84,7 +84,7 @@ final class AsciiDocBlocks {
     }
     Span extent = new Span(start, end);
     if (kind != Block.Kind.VERBATIM) {
-      add(MarkedLines.block(kind, level, extent, file, lines, AsciiDocMarks::of));
+      blocks.addAll(AsciiDocInlines.blocks(kind, level, extent, file, lines));
     } else if (!comment) {
       add(new Block(kind, 0, extent, List.of()));
     }
@@ -97,7 +97,7 @@ final class AsciiDocBlocks {
   }
 
   void addMacro(Span line, List<Span> prose) {
-    add(MarkedLines.block(Block.Kind.PARAGRAPH, 0, line, file, prose, AsciiDocMarks::of));
+    blocks.addAll(AsciiDocInlines.blocks(Block.Kind.PARAGRAPH, 0, line, file, prose));
   }
 
   /** Adds a block, unless it has no prose to have. */

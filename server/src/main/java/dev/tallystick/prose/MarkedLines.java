@@ -28,6 +28,23 @@ final class MarkedLines {
    */
   static Block block(
       Block.Kind kind, int level, Span extent, String file, List<Span> lines, Marker marker) {
+    return block(kind, level, extent, file, lines, marker, List.of());
+  }
+
+  /**
+   * The same.
+   *
+   * @param apart stretches of the joined lines that are blocks of their own, in order; the marker
+   *     may put them in. A line break in one is no white space of this block
+   */
+  static Block block(
+      Block.Kind kind,
+      int level,
+      Span extent,
+      String file,
+      List<Span> lines,
+      Marker marker,
+      List<Span> apart) {
     StringBuilder joined = new StringBuilder();
     for (Span line : lines) {
       joined.append(file, line.start(), line.end()).append('\n');
@@ -36,8 +53,13 @@ final class MarkedLines {
     boolean[] marks = marker.marks(joined.toString(), inlines);
     Pieces pieces = new Pieces(file);
     int before = 0;
+    int next = 0;
     for (Span line : lines) {
-      if (pieces.end() > 0) {
+      while (next < apart.size() && apart.get(next).end() < before) {
+        next++;
+      }
+      boolean inside = next < apart.size() && apart.get(next).start() < before;
+      if (pieces.end() > 0 && !inside) {
         pieces.addLineBreak(pieces.end(), line.start());
       }
       for (int at = line.start(); at < line.end(); at++) {
@@ -47,27 +69,53 @@ final class MarkedLines {
       }
       before += line.length() + 1;
     }
-    return new Block(kind, level, extent, pieces.spans()).with(inFile(inlines, lines));
+    Places places = new Places(lines);
+    List<Inline> inFile =
+        inlines.stream()
+            .map(inline -> new Inline(inline.kind(), places.inFile(inline.span())))
+            .toList();
+    return new Block(kind, level, extent, pieces.spans()).with(inFile);
   }
 
-  /** The inlines with the places that they have in the file, in order. */
-  private static List<Inline> inFile(List<Inline> joined, List<Span> lines) {
-    int[] before = new int[lines.size()];
-    for (int i = 1; i < before.length; i++) {
-      before[i] = before[i - 1] + lines.get(i - 1).length() + 1;
-    }
-    List<Inline> inFile = new ArrayList<>();
-    for (Inline inline : joined) {
-      int start = offset(inline.span().start(), before, lines);
-      int end = offset(inline.span().end() - 1, before, lines) + 1;
-      inFile.add(new Inline(inline.kind(), new Span(start, end)));
-    }
-    return inFile;
-  }
+  /** Where in the file stands what stands in lines put together. */
+  static final class Places {
+    private final List<Span> lines;
+    private final int[] before;
 
-  private static int offset(int inJoined, int[] before, List<Span> lines) {
-    int found = Arrays.binarySearch(before, inJoined);
-    int line = found >= 0 ? found : -found - 2;
-    return lines.get(line).start() + inJoined - before[line];
+    Places(List<Span> lines) {
+      this.lines = lines;
+      this.before = new int[lines.size()];
+      for (int i = 1; i < before.length; i++) {
+        before[i] = before[i - 1] + lines.get(i - 1).length() + 1;
+      }
+    }
+
+    /** From the first to the last character of a stretch that is not empty. */
+    Span inFile(Span joined) {
+      return new Span(offset(joined.start()), offset(joined.end() - 1) + 1);
+    }
+
+    /** The parts of a stretch, one a line; those without a character are left out. */
+    List<Span> lines(Span joined) {
+      List<Span> parts = new ArrayList<>();
+      for (int i = line(joined.start()); i < before.length && before[i] < joined.end(); i++) {
+        int from = Math.max(joined.start() - before[i], 0);
+        int to = Math.min(joined.end() - before[i], lines.get(i).length());
+        if (from < to) {
+          parts.add(new Span(lines.get(i).start() + from, lines.get(i).start() + to));
+        }
+      }
+      return parts;
+    }
+
+    private int offset(int inJoined) {
+      int line = line(inJoined);
+      return lines.get(line).start() + inJoined - before[line];
+    }
+
+    private int line(int inJoined) {
+      int found = Arrays.binarySearch(before, inJoined);
+      return found >= 0 ? found : -found - 2;
+    }
   }
 }

@@ -218,8 +218,8 @@ class EnglishGermanPairsTest {
   void twoSentencesThatChangedPlacesAreOneFindingOfOrder() {
     check(
         """
-        ¶ Emmerik oils the 12 cogs. / The 30 sacks of the harvest are weighed on a scale of 1911 that stands beside the door.
-        | Die 30 Säcke der Ernte werden auf einer Waage von 1911 gewogen, die neben der Tür steht. / Emmerik ölt die 12 Zähne. !order
+        ¶ Emmerik ferries Lowther and Pennant at 8.15. / Odile ferries Quillby, Marchbanks, Tollander, Okafor, Gantry and Crumlin at 10.45 from Harrow.
+        | Odile fährt Quillby, Marchbanks, Tollander, Okafor, Gantry und Crumlin um 10.45 ab Harrow. / Emmerik fährt Lowther und Pennant um 8.15. !order
         """);
   }
 
