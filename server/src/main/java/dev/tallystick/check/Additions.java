@@ -14,19 +14,21 @@ import java.util.stream.Collectors;
  */
 final class Additions {
   private final Subject subject;
+  private final Vigilance vigilance;
   private final double[] extra;
   private final Set<Integer> moved;
   private final Slight slight;
 
-  private Additions(Subject subject) {
+  private Additions(Subject subject, Vigilance vigilance) {
     this.subject = subject;
+    this.vigilance = vigilance;
     this.extra = subject.alignment().targetNull();
     this.moved = subject.alignment().moves().stream().map(Move::target).collect(Collectors.toSet());
     this.slight = new Slight(subject, OnSide.TARGET);
   }
 
-  static List<Finding> find(Subject subject) {
-    Additions additions = new Additions(subject);
+  static List<Finding> find(Subject subject, Vigilance vigilance) {
+    Additions additions = new Additions(subject, vigilance);
     Neighbours neighbours = new Neighbours(subject, OnSide.TARGET);
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
@@ -45,7 +47,7 @@ final class Additions {
     return Run.of(
         subject.target(),
         i ->
-            extra[i] >= Omissions.LEAST
+            extra[i] >= vigilance.least()
                 && !moved.contains(i)
                 && !slight.is(i)
                 && isFootnote(i) == footnotes);

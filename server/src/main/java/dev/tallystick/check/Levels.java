@@ -6,11 +6,13 @@ import java.util.Optional;
 import java.util.stream.Stream;
 
 /**
- * How loudly the findings of a project are said. Never as an error: that is the reviser's verdict.
+ * Which findings are told, and how loudly. Never as an error: that is the reviser's verdict.
  *
- * @param changed the codes whose level is another than usual; empty for one that is off
+ * @param changed the codes whose level is another than usual; empty for one that is off. A fact of
+ *     the project
+ * @param vigilance how sure a finding must be. The taste of the user
  */
-public record Levels(Map<Code, Optional<Severity>> changed) {
+public record Levels(Map<Code, Optional<Severity>> changed, Vigilance vigilance) {
   /** Each code at its own level. */
   public static final Levels USUAL = new Levels(Map.of());
 
@@ -20,6 +22,16 @@ public record Levels(Map<Code, Optional<Severity>> changed) {
   /** Takes a copy. */
   public Levels {
     changed = Map.copyOf(changed);
+  }
+
+  /** Those of a project, for a user who has said nothing. */
+  public Levels(Map<Code, Optional<Severity>> changed) {
+    this(changed, Vigilance.BALANCED);
+  }
+
+  /** The same for a user of this taste. */
+  public Levels at(Vigilance taste) {
+    return taste == vigilance ? this : new Levels(changed, taste);
   }
 
   /** How loudly findings of this code are said; empty if they are not. */

@@ -2,6 +2,7 @@ package dev.tallystick.engine;
 
 import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
+import dev.tallystick.check.Vigilance;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.text.Problem;
@@ -28,6 +29,7 @@ final class Library {
   private final Watch watch;
   private final boolean editorWatches;
   private Language assumed = Language.UNKNOWN;
+  private Vigilance vigilance = Vigilance.BALANCED;
 
   Library(Shelf shelf, Workers workers, Watch watch, boolean editorWatches) {
     this.shelf = shelf;
@@ -64,6 +66,7 @@ final class Library {
     assumed = settings.sourceLanguage().orElse(Language.UNKNOWN);
     workspace.rules(settings.rules());
     workspace.scope(settings.folders());
+    vigilance = settings.vigilance();
   }
 
   /**
@@ -178,7 +181,7 @@ final class Library {
 
   /** How loudly findings in a pair are said. */
   Levels levels(FilePair pair) {
-    return workspace.levels(pair);
+    return workspace.levels(pair).at(vigilance);
   }
 
   /** What the user has to be asked about the open files, and has not been. */

@@ -40,7 +40,7 @@ final class Units {
   private static Unit sentence(Segment segment) {
     String prose = segment.prose();
     return new Unit(
-        segment.length(),
+        segment.weight(),
         prose.codePointCount(0, prose.length()),
         letters(prose),
         segment.opens(),

@@ -22,27 +22,27 @@ class ShortfallPairsTest {
             ¶ ## What to carry
             | ## Was mitzunehmen ist
             ¶ Take your coat and nothing else; the ledgers stay where they are, in cabinet 12.
-            | - !omission
+            | - ~
             The cat of the bindery has her own basket, which hangs beside the clock.
-            | - !...
+            | - ~
             ¶ Do not run on the stairs, and do not go back for the 2 canaries of the accountant.
-            | Nehmen Sie den Mantel und sonst nichts; die Bücher bleiben, wo sie sind, in Schrank 12.
+            | Nehmen Sie den Mantel und sonst nichts; die Bücher bleiben, wo sie sind, in Schrank 12. ~
             ¶ They are fireproof, he says, but we have never had the heart to find out.
-            | - !omission
+            | - ~
             ¶ The lift stops at floor 2 as soon as the bell rings, and its doors stay open.
-            | - !...
+            | - ~
             Whoever is inside walks down by the iron steps on the yard side of the building.
-            | - !...
+            | - ~
             ¶ The hoses are older than the house, but they are dried and rolled every week.
-            | - !...
+            | - ~
             Only the people with a blue badge may open the hydrants, and only in pairs.
-            | - !...
+            | - ~
             ¶ Buckets of sand stand under each window, and they are not meant for cigarettes.
-            | - !...
+            | - ~
             If one of them is empty, tell the caretaker, who keeps 9 sacks in the cellar.
-            | - !...
+            | - ~
             ¶ Last spring the rain came through the roof and did more harm than any fire.
-            | Die Katze der Buchbinderei hat einen eigenen Korb, der neben der Uhr hängt. !...
+            | Die Katze der Buchbinderei hat einen eigenen Korb, der neben der Uhr hängt. ~
             ¶ ## Afterwards
             | ## Danach
             ¶ When the porter has counted 46 heads, he blows the whistle twice.
