@@ -16,9 +16,12 @@ import java.util.Set;
 final class Blocks {
   private static final String DELIMITERS = "[ \\t|:>-]*-[ \\t|:-]*";
 
+  /** What front matter ends with. */
+  private static final String FENCE = "(?:---|\\.\\.\\.|\\+\\+\\+)[ \\t]*";
+
   /** Formats in which a blank line parts paragraphs. */
   private static final Set<Format> MARKUP =
-      EnumSet.of(Format.MARKDOWN, Format.ASCIIDOC, Format.RST, Format.LATEX);
+      EnumSet.of(Format.MARKDOWN, Format.MDX, Format.ASCIIDOC, Format.RST, Format.LATEX);
 
   private final Reading source;
   private final Reading target;
@@ -73,7 +76,7 @@ final class Blocks {
 
   private Edit behind(int segment, List<Chunk> chunks) {
     Text text = target.text();
-    int line = Chunk.lastLine(target, segment);
+    int line = behindFrontMatter(segment);
     line += isHead(segment) ? 1 : 0;
     StringBuilder lines = new StringBuilder();
     Block before = block(target, segment);
@@ -91,6 +94,17 @@ final class Blocks {
     }
     int place = text.lineEnd(line);
     return new Edit(new Span(place, place), lines.toString());
+  }
+
+  /** The last line of a target segment's block; behind a value of front matter, its last one. */
+  private int behindFrontMatter(int segment) {
+    int line = Chunk.lastLine(target, segment);
+    if (block(target, segment).kind() == Block.Kind.METADATA) {
+      while (line + 1 < target.text().lines() && !words(line).matches(FENCE)) {
+        line++;
+      }
+    }
+    return line;
   }
 
   private Edit beforeAll(List<Chunk> chunks) {

@@ -7,6 +7,7 @@ import dev.tallystick.segment.Segment;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.List;
+import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
 
@@ -33,6 +34,14 @@ record Copy(Reading source, Format format) {
   /** Where they stand in prose of LaTeX, they had a backslash; formulas have others. */
   private static final Pattern LATEX_MARKS = Pattern.compile("[%&#]");
 
+  /** The end of an element that lies in a sentence; all others end around it. */
+  private static final Pattern INLINE_END =
+      Pattern.compile(
+          "</(?:a|abbr|b|bdi|cite|code|del|dfn|em|i|ins|kbd|mark|q|s|small|span|strong|sub|sup|u"
+              + "|var)>");
+
+  private static final Pattern TAG = Pattern.compile("</?[A-Za-z][^<>]*>");
+
   private static final Pattern FIRST_MARK = Pattern.compile("^(?:([#+=-])|(\\d{1,9})([.)]))");
 
   /** The sentence with this index. */
@@ -42,10 +51,12 @@ record Copy(Reading source, Format format) {
     Stream<String> raw =
         Stream.of(withMarks(index), segment.span())
             .map(span -> oneLine(segment.block(), span.of(source.text().string())));
-    return Stream.concat(raw, Stream.of(prose))
+    String plain = TAG.matcher(oneLine(segment.block(), segment.span().of(text()))).replaceAll("");
+    Stream<String> bare = Stream.of(format == Format.HTML ? plain : prose, prose);
+    return Stream.concat(raw, bare)
         .filter(copy -> reads(copy, prose))
         .findFirst()
-        .orElseGet(() -> escaped(prose));
+        .orElseGet(() -> format == Format.HTML ? plain : escaped(prose));
   }
 
   private static String oneLine(Block block, String raw) {
@@ -59,7 +70,17 @@ record Copy(Reading source, Format format) {
     return !blocks.isEmpty()
         && blocks.stream().skip(1).allMatch(block -> block.kind() == Block.Kind.NOTE)
         && dense(blocks.get(0).prose(copy)).equals(dense(prose))
-        && (format != Format.LATEX || isBalanced(copy));
+        && (format != Format.LATEX || isBalanced(copy))
+        && (format != Format.HTML || hasWholeTags(copy));
+  }
+
+  /** Whether each tag of a copy that opens something is closed in it. */
+  private static boolean hasWholeTags(String copy) {
+    return Format.HTML.marks(new Text(copy)).equals(Format.HTML.marks(new Text("")));
+  }
+
+  private String text() {
+    return source.text().string();
   }
 
   /** Whether each brace has its counterpart; those with a backslash are characters. */
@@ -81,7 +102,11 @@ record Copy(Reading source, Format format) {
     if (format == Format.LATEX) {
       return LATEX_MARKS.matcher(prose).replaceAll("\\\\$0");
     }
-    return format == Format.MARKDOWN ? escapedInMarkdown(prose) : prose;
+    return switch (format) {
+      case MARKDOWN -> escapedInMarkdown(prose);
+      case MDX -> escapedInMarkdown(prose).replaceAll("[{}]", "\\\\$0");
+      default -> prose;
+    };
   }
 
   private static String escapedInMarkdown(String prose) {
@@ -121,11 +146,37 @@ record Copy(Reading source, Format format) {
         lastOfBlock ? segment.block().extent().end() : segments.get(index + 1).span().start();
     int at = segment.span().end();
     String text = reading.text().string();
+    boolean tags = reading.format() == Format.HTML || reading.format() == Format.MDX;
     while (at < bound && !isSpace(text.charAt(at))) {
-      at++;
+      if (tags && text.charAt(at) == '<') {
+        Matcher inline = INLINE_END.matcher(text).region(at, bound);
+        if (!inline.lookingAt()) {
+          break;
+        }
+        at = inline.end();
+      } else {
+        int note = noteEnd(segments, index, at);
+        at = note > at ? note : at + 1;
+      }
     }
     // Right up to the next sentence: who knows to which of the two the marks belong.
     return at == bound && !lastOfBlock ? segment.span().end() : at;
+  }
+
+  /** Offset behind the note that begins at an offset of a segment's block; the offset if none. */
+  private static int noteEnd(List<Segment> segments, int index, int at) {
+    Block block = segments.get(index).block();
+    for (int i = index + 1; i < segments.size(); i++) {
+      Block next = segments.get(i).block();
+      boolean note = next.kind() == Block.Kind.NOTE;
+      if (!note && !next.equals(block)) {
+        return at;
+      }
+      if (note && next.extent().start() == at) {
+        return next.extent().end();
+      }
+    }
+    return at;
   }
 
   private static boolean isSpace(char c) {

@@ -3,6 +3,8 @@ package dev.tallystick.aid;
 import dev.tallystick.engine.Reading;
 import dev.tallystick.prose.Block;
 import dev.tallystick.segment.Segment;
+import dev.tallystick.text.Span;
+import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -13,6 +15,8 @@ import java.util.List;
  * @param segments their indices, sorted
  */
 record Group(Reading source, List<Integer> segments) {
+  private static final String TIMES = "-->";
+
   /** Parts wanted sentences by their blocks. */
   static List<Group> of(Reading source, List<Integer> segments) {
     List<Group> groups = new ArrayList<>();
@@ -63,6 +67,44 @@ record Group(Reading source, List<Integer> segments) {
     return segments.size() == last() - first() + 1
         && (first() == 0 || !together(source, first() - 1, first()))
         && (last() + 1 == source.segments().size() || !together(source, last(), last() + 1));
+  }
+
+  /** Whether the block lies inside of the one before it. */
+  boolean isInside() {
+    int before = first() - 1;
+    while (before >= 0 && hasInBlock(before)) {
+      before--;
+    }
+    Span extent = block().extent();
+    return kind() == Block.Kind.NOTE
+        && before >= 0
+        && source.segments().get(before).block().extent().end() >= extent.end();
+  }
+
+  /** Whether its lines are those of cues, from their times to the blank line behind them. */
+  boolean hasWholeCues() {
+    Text text = source.text();
+    int from = line(source, block());
+    int to = Chunk.lastLine(source, last());
+    boolean times = line(text, from).contains(TIMES) || line(text, from + 1).contains(TIMES);
+    return isWhole() && times && line(text, from - 1).isBlank() && line(text, to + 1).isBlank();
+  }
+
+  /** Whether it stands, without a cue's border, behind the sentence before it. */
+  boolean isInCueBefore() {
+    if (first() == 0) {
+      return false;
+    }
+    int from = source.segments().get(first() - 1).span().end();
+    int to = source.segments().get(last()).span().end();
+    String text = source.text().string().substring(Math.min(from, to), to);
+    return !text.contains(TIMES) && !text.strip().replaceAll("\\r\\n?", "\n").contains("\n\n");
+  }
+
+  private static String line(Text text, int number) {
+    return number < 0 || number >= text.lines()
+        ? ""
+        : text.string().substring(text.lineStart(number), text.lineEnd(number));
   }
 
   /** Whether a segment of the source stands in the block of the first sentence. */

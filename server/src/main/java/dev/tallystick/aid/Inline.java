@@ -115,7 +115,8 @@ final class Inline {
     String before = text.substring(0, place);
     String behind = text.substring(place);
     String left = point.behind() && !joins(before, words) ? " " : "";
-    boolean touches = !behind.isEmpty() && !Character.isWhitespace(behind.charAt(0));
+    boolean closes = behind.startsWith("</"); // the element that the words go into
+    boolean touches = !behind.isEmpty() && !Character.isWhitespace(behind.charAt(0)) && !closes;
     boolean cell = point.behind() && behind.startsWith("|");
     String right = touches && (cell || !joins(words, behind)) ? " " : "";
     return left + words + right;

@@ -20,12 +20,16 @@ import java.util.TreeMap;
  * right beside it: behind what stands for the sentence before, else before what stands for the
  * sentence behind. Where the translation has put blocks together it goes between them. All others
  * become blocks of their own, with the marks and blank lines of the source. A cell of a row that
- * has a counterpart cannot be put in, nor can the head of a table, nor a note without its sentence.
+ * has a counterpart cannot be put in, nor can the head of a table, a note without its sentence, a
+ * value of front matter, or a part of a cue. Of what would break the translation nothing is put in.
  */
 public final class Stub {
   private final Reading source;
   private final Reading target;
   private final Places places;
+
+  /** The source's segments that are put in, as far as known. */
+  private final List<Integer> put = new ArrayList<>();
 
   private Stub(PairResult result) {
     this.source = result.source();
@@ -41,7 +45,9 @@ public final class Stub {
    * @return none if they cannot be put in
    */
   public static List<LineEdit> edits(PairResult result, Format format, List<Integer> segments) {
-    return LineEdit.of(result.target().text(), new Stub(result).all(result, format, segments));
+    Stub stub = new Stub(result);
+    List<LineEdit> edits = LineEdit.of(result.target().text(), stub.all(result, format, segments));
+    return new Trial(result, format).holds(edits, stub.put) ? edits : List.of();
   }
 
   private List<Edit> all(PairResult result, Format format, List<Integer> segments) {
@@ -51,13 +57,18 @@ public final class Stub {
     Map<Inline.Point, List<Integer>> inline = new LinkedHashMap<>();
     Map<Integer, List<Group>> blocks = new TreeMap<>();
     for (Group group : Group.of(source, segments)) {
-      if (group.kind() == Block.Kind.NOTE) {
-        continue; // it comes along with the sentence that it stands in
+      if (!canCome(group, format)) {
+        continue;
       }
       Optional<Inline.Point> point = point(group);
+      boolean comes =
+          point.isPresent() || group.kind() != Block.Kind.CELL || isBodyRow(group, between);
+      if (comes) {
+        put.addAll(group.segments());
+      }
       if (point.isPresent()) {
         inline.computeIfAbsent(point.get(), key -> new ArrayList<>()).addAll(group.segments());
-      } else if (group.kind() != Block.Kind.CELL || isBodyRow(group, between)) {
+      } else if (comes) {
         blocks.computeIfAbsent(places.before(group.first()), key -> new ArrayList<>()).add(group);
       }
     }
@@ -65,6 +76,21 @@ public final class Stub {
     inline.forEach((point, sentences) -> edits.add(inBlocks.edit(point, sentences)));
     blocks.forEach((segment, groups) -> edits.add(between.edit(segment, groups)));
     return edits;
+  }
+
+  /**
+   * Whether sentences can be taken along: not out of front matter, nor a note without the sentence
+   * that it stands in, nor of subtitles anything but whole cues, and what goes on in a cue that is
+   * there.
+   */
+  private boolean canCome(Group group, Format format) {
+    if (group.kind() == Block.Kind.METADATA || group.isInside()) {
+      return false;
+    }
+    if (!format.hasCues() || point(group).isEmpty() && group.hasWholeCues()) {
+      return true;
+    }
+    return group.isInCueBefore() && places.inPlace(group.first() - 1);
   }
 
   private boolean isBodyRow(Group group, Blocks between) {

@@ -15,8 +15,9 @@ import java.util.List;
  */
 final class Evidence implements Scorer {
   /**
-   * Degrees of freedom for the lengths of links of several sentences. Lighter tails than for 1-1: a
-   * merge that is far too short is the very picture of a dropped sentence.
+   * Degrees of freedom for the lengths of links of several source sentences. Lighter tails than for
+   * 1-1: a merge that is far too short is the very picture of a dropped sentence. One sentence that
+   * was parted into several often grew on the way.
    */
   private static final double MERGED_FREEDOM = 30;
 
@@ -209,8 +210,7 @@ final class Evidence implements Scorer {
   private double length(int t, int tEnd, int s, int sEnd) {
     int l1 = source.length(s, sEnd);
     int l2 = target.length(t, tEnd);
-    boolean merges = tEnd - t > 1 || sEnd - s > 1;
-    double given = (merges ? mergedLengths : lengths).logDensity(l1, l2);
+    double given = (sEnd - s > 1 ? mergedLengths : lengths).logDensity(l1, l2);
     double parting = (tEnd - t - 1) * LengthTable.log(l2);
     return given - parting - background.logDensity(t, tEnd);
   }

@@ -69,7 +69,7 @@ final class Trace {
       int down = table.down[shape];
       int to = column + table.right[shape];
       if (table.filling.onward(row, down, to, link) == best) {
-        doubtful = Way.isTrouble(down, table.right[shape]);
+        doubtful = link < 0 || Way.isTrouble(down, table.right[shape]);
         column = to;
         return down;
       }

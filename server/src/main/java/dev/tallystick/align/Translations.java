@@ -11,7 +11,7 @@ final class Translations {
   /** So many words of prior belief stand beside what is counted for each given word. */
   static final double PRIOR = 2;
 
-  private static final int STEPS = 3;
+  private static final int STEPS = 4;
 
   /** How much of the prior goes to words alike: with digits, the same word, alike enough, else. */
   private static final double NUMBER = 0.9;

@@ -5,7 +5,8 @@ import java.util.Arrays;
 /**
  * What the aligner knows of one sentence, or of one verbatim block.
  *
- * @param length how long the sentence reads, in characters; what is copied in it counts for little
+ * @param length how much the sentence says, in letters of an alphabet; what is copied in it counts
+ *     for little
  * @param codePoints its characters as Unicode has them, all of them: what the published model takes
  * @param letters how many of these are letters or digits
  * @param opens whether it is the first of its block

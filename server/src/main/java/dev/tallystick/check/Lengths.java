@@ -18,8 +18,11 @@ final class Lengths {
   /** No verdict on a shorter source: too much varies there (characters). */
   private static final int SHORTEST = 40;
 
-  /** Robust deviations from the usual ratio before it is worth a word. */
-  private static final double FARTHEST = 6;
+  /**
+   * Robust deviations above the usual ratio before it is worth a word. More than below it:
+   * translators explain more often than they drop a clause.
+   */
+  private static final double LONG = 9;
 
   /** So many deviations around the median are called usual. */
   private static final double USUAL = 2;
@@ -28,24 +31,28 @@ final class Lengths {
   private static final int PRIOR = 20;
 
   private final Subject subject;
+  private final Pending pending;
+  private final Vigilance vigilance;
   private final Alignment alignment;
   private double median;
   private double scale;
 
-  private Lengths(Subject subject) {
+  private Lengths(Subject subject, Pending pending, Vigilance vigilance) {
     this.subject = subject;
+    this.pending = pending;
+    this.vigilance = vigilance;
     this.alignment = subject.alignment();
   }
 
-  static List<Finding> find(Subject subject) {
-    return new Lengths(subject).find();
+  static List<Finding> find(Subject subject, Pending pending, Vigilance vigilance) {
+    return new Lengths(subject, pending, vigilance).find();
   }
 
   private List<Finding> find() {
     List<Match> judged =
         alignment.matches().stream()
             .filter(match -> match.twoSided() && match.confidence() > 0.5)
-            .filter(match -> characters(subject.source(), match.sourceFrom(), match.sourceTo()) > 0)
+            .filter(match -> weight(subject.source(), match.sourceFrom(), match.sourceTo()) > 0)
             .filter(match -> !isCopy(match))
             .toList();
     median = median(judged.stream().mapToDouble(this::logRatio).toArray());
@@ -58,7 +65,8 @@ final class Lengths {
     List<Finding> findings = new ArrayList<>();
     for (Match match : judged) {
       double z = (logRatio(match) - median) / spread(match) / scale;
-      if (Math.abs(z) >= FARTHEST && sourceLength(match) >= SHORTEST) {
+      boolean implausible = z <= -vigilance.shortfall() && !isUnfinished(match) || z >= LONG;
+      if (implausible && sourceLength(match) >= SHORTEST) {
         findings.add(finding(match));
       }
     }
@@ -66,11 +74,12 @@ final class Lengths {
   }
 
   private Finding finding(Match match) {
-    int l1 = sourceLength(match);
-    int l2 = targetLength(match);
+    int l1 = characters(subject.source(), match.sourceFrom(), match.sourceTo());
+    int l2 = characters(subject.target(), match.targetFrom(), match.targetTo());
+    double usual = sourceLength(match) * Math.exp(median) * l2 / Math.max(1, targetLength(match));
     double slack = USUAL * spread(match) * scale;
-    int low = (int) Math.round(l1 * Math.exp(median - slack));
-    int high = (int) Math.round(l1 * Math.exp(median + slack));
+    int low = (int) Math.round(usual * Math.exp(-slack));
+    int high = (int) Math.round(usual * Math.exp(slack));
     String message = new Wording(subject.targetLanguage()).length(l1, l2, low, high);
     return new Finding(
         Code.LENGTH,
@@ -80,6 +89,11 @@ final class Lengths {
         match.confidence(),
         message,
         "");
+  }
+
+  /** Whether somebody is still at it: the sentence behind it waits for its translation. */
+  private boolean isUnfinished(Match match) {
+    return match.sourceTo() < subject.source().size() && pending.source(match.sourceTo());
   }
 
   private boolean isCopy(Match match) {
@@ -103,19 +117,19 @@ final class Lengths {
   }
 
   private int sourceLength(Match match) {
-    return characters(subject.source(), match.sourceFrom(), match.sourceTo());
+    return weight(subject.source(), match.sourceFrom(), match.sourceTo());
   }
 
   private int targetLength(Match match) {
-    return characters(subject.target(), match.targetFrom(), match.targetTo());
+    return weight(subject.target(), match.targetFrom(), match.targetTo());
+  }
+
+  private static int weight(List<Segment> segments, int from, int to) {
+    return segments.subList(from, to).stream().mapToInt(Segment::weight).sum();
   }
 
   private static int characters(List<Segment> segments, int from, int to) {
-    int sum = 0;
-    for (Segment segment : segments.subList(from, to)) {
-      sum += segment.length();
-    }
-    return sum;
+    return segments.subList(from, to).stream().mapToInt(Segment::length).sum();
   }
 
   private static Span span(List<Segment> segments, int from, int to) {

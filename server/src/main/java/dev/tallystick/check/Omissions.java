@@ -9,12 +9,12 @@ import java.util.stream.Collectors;
 
 /** Source sentences that nothing stands for; a run of them is one finding. */
 final class Omissions {
-  /** Published from this posterior on: of so many, this share at least is right. */
+  /** From this posterior on a sentence counts as missing, whatever is told. */
   static final double LEAST = 0.5;
 
   private Omissions() {}
 
-  static List<Finding> find(Subject subject, Pending pending) {
+  static List<Finding> find(Subject subject, Pending pending, Vigilance vigilance) {
     double[] missing = subject.alignment().sourceNull();
     Set<Integer> moved =
         subject.alignment().moves().stream().map(Move::source).collect(Collectors.toSet());
@@ -26,7 +26,10 @@ final class Omissions {
         Run.of(
             subject.source(),
             i ->
-                missing[i] >= LEAST && !moved.contains(i) && !pending.source(i) && !slight.is(i))) {
+                missing[i] >= vigilance.least()
+                    && !moved.contains(i)
+                    && !pending.source(i)
+                    && !slight.is(i))) {
       Span span = run.span(subject.source());
       int sentences = run.sentences(subject.source());
       String message =

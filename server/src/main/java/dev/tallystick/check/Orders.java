@@ -1,7 +1,9 @@
 package dev.tallystick.check;
 
+import dev.tallystick.align.Match;
 import dev.tallystick.align.Move;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -15,7 +17,7 @@ final class Orders {
     for (Move move : subject.alignment().moves()) {
       sourceOf.put(move.target(), move.source());
     }
-    double[] extra = subject.alignment().targetNull();
+    double[] likely = likely(subject);
     Wording wording = new Wording(subject.targetLanguage());
     List<Finding> findings = new ArrayList<>();
     for (Run run : Run.of(subject.target(), sourceOf::containsKey)) {
@@ -28,10 +30,21 @@ final class Orders {
               OnSide.TARGET,
               run.span(subject.target()),
               source.span(subject.source()),
-              Confidence.of(extra, run),
+              Confidence.of(likely, run),
               wording.order(run.sentences(subject.target())),
               ""));
     }
     return findings;
+  }
+
+  /** That of having no counterpart in its place; of a sentence that has one, that of the match. */
+  private static double[] likely(Subject subject) {
+    double[] likely = subject.alignment().targetNull().clone();
+    for (Match match : subject.alignment().matches()) {
+      if (match.twoSided()) {
+        Arrays.fill(likely, match.targetFrom(), match.targetTo(), match.confidence());
+      }
+    }
+    return likely;
   }
 }

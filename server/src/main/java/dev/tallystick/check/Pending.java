@@ -15,6 +15,9 @@ public final class Pending {
   /** A longer missing run is no slip. */
   private static final int LONGEST_SLIP = 8;
 
+  /** A match less probable than this does not end a run of missing sentences in their midst. */
+  private static final double DOUBTFUL = 0.8;
+
   private final boolean[] source;
 
   private Pending(boolean[] source) {
@@ -45,9 +48,14 @@ public final class Pending {
     boolean[] open = new boolean[subject.source().size()];
     Arrays.fill(open, true);
     int[] copyOf = Untranslated.copies(subject.source(), subject.target(), subject.alignment());
-    for (Match match : subject.alignment().matches()) {
-      if (match.twoSided()) {
-        Arrays.fill(open, match.sourceFrom(), match.sourceTo(), false);
+    double[] missing = subject.alignment().sourceNull();
+    List<Match> matches = subject.alignment().matches();
+    for (int i = 0; i < matches.size(); i++) {
+      Match match = matches.get(i);
+      if (match.twoSided() && !isStray(matches, i)) {
+        for (int source = match.sourceFrom(); source < match.sourceTo(); source++) {
+          open[source] = missing[source] >= Omissions.LEAST;
+        }
         for (int t = match.targetFrom(); t < match.targetTo(); t++) {
           if (copyOf[t] >= 0) {
             open[copyOf[t]] = true;
@@ -56,6 +64,15 @@ public final class Pending {
       }
     }
     return open;
+  }
+
+  /** Whether a match is doubtful and the sentences on both sides of it are missing. */
+  private static boolean isStray(List<Match> matches, int index) {
+    return matches.get(index).confidence() < DOUBTFUL
+        && index > 0
+        && index + 1 < matches.size()
+        && matches.get(index - 1).targets() == 0
+        && matches.get(index + 1).targets() == 0;
   }
 
   private static boolean waits(List<Segment> source, Run run) {

@@ -54,6 +54,10 @@ final class Wording {
         : "Nothing in the source stands for these " + sentences + " sentences.";
   }
 
+  String addedNote(int sentences) {
+    return addition(sentences) + " A note of the translator's?";
+  }
+
   String order(int sentences) {
     return sentences == 1
         ? "This sentence stands at another place in the source."

@@ -1,6 +1,5 @@
 package dev.tallystick.cli;
 
-import dev.tallystick.check.Levels;
 import dev.tallystick.engine.Disk;
 import dev.tallystick.engine.Folder;
 import dev.tallystick.engine.Intake;
@@ -33,7 +32,7 @@ final class Folders {
   private final Console console;
   private final Rules options;
   private final List<Path> all = new ArrayList<>();
-  private final Map<Pair, Levels> levels = new HashMap<>();
+  private final Map<Pair, Project> projects = new HashMap<>();
   private final Map<Pair, NamedRules> rules = new HashMap<>();
   private Pairs pairs = Pairs.NONE;
   private boolean complete = true;
@@ -60,9 +59,9 @@ final class Folders {
     return pairs;
   }
 
-  /** How loudly findings are said in the pairs of a project. */
-  Map<Pair, Levels> levels() {
-    return levels;
+  /** The projects of the pairs that are in one. */
+  Map<Pair, Project> projects() {
+    return projects;
   }
 
   /** The rules for sentence borders in the pairs of a project. */
@@ -92,20 +91,20 @@ final class Folders {
   }
 
   private void pair(List<Path> folders) {
-    Map<Path, List<Path>> projects = new LinkedHashMap<>();
+    Map<Path, List<Path>> inProjects = new LinkedHashMap<>();
     List<Path> named =
         all.stream().filter(file -> Names.isRules(String.valueOf(file.getFileName()))).toList();
     all.removeAll(named);
     for (Path folder : folders) {
       if (all.removeIf(folder.resolve(ProjectFile.NAME)::equals)) {
-        projects.put(folder, new ArrayList<>());
+        inProjects.put(folder, new ArrayList<>());
       }
     }
     List<Path> others = new ArrayList<>();
     for (Path file : all) {
-      innermost(file, projects.keySet()).map(projects::get).orElse(others).add(file);
+      innermost(file, inProjects.keySet()).map(inProjects::get).orElse(others).add(file);
     }
-    projects.forEach((folder, files) -> pairProject(folder, files, named));
+    inProjects.forEach((folder, files) -> pairProject(folder, files, named));
     Listing names = Listing.of(others, Path::normalize);
     pairs = pairs.and(Pairing.pairs(names.names(), options));
   }
@@ -135,7 +134,7 @@ final class Folders {
     Pairs found =
         Pairing.pairs(names.names(), project.rules(Rules.NONE).under(options))
             .renamed(name -> Listing.name(names.file(name).normalize()));
-    found.pairs().forEach(pair -> levels.put(pair, project.levels()));
+    found.pairs().forEach(pair -> projects.put(pair, project));
     found.pairs().forEach(pair -> rules.put(pair, borders));
     pairs = pairs.and(found);
   }

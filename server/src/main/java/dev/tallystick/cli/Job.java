@@ -1,12 +1,12 @@
 package dev.tallystick.cli;
 
 import dev.tallystick.align.Aligner;
-import dev.tallystick.check.Levels;
 import dev.tallystick.engine.Disk;
 import dev.tallystick.engine.Intake;
 import dev.tallystick.engine.Listing;
 import dev.tallystick.engine.PairResult;
 import dev.tallystick.engine.Reading;
+import dev.tallystick.engine.TextRules;
 import dev.tallystick.engine.Tongue;
 import dev.tallystick.engine.Unreadable;
 import dev.tallystick.pairing.Language;
@@ -14,6 +14,7 @@ import dev.tallystick.pairing.Pair;
 import dev.tallystick.pairing.Pairing;
 import dev.tallystick.pairing.Pairs;
 import dev.tallystick.pairing.Rules;
+import dev.tallystick.project.Project;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.text.Decoded;
 import java.nio.file.Files;
@@ -30,7 +31,7 @@ final class Job {
   private final Console console;
   private final Pairs pairs;
   private final Listing files;
-  private final Map<Pair, Levels> levels;
+  private final Map<Pair, Project> projects;
   private final Map<Pair, NamedRules> rules;
   private String lastSource = "";
   private Reading lastReading;
@@ -40,12 +41,12 @@ final class Job {
       Console console,
       Pairs pairs,
       Listing files,
-      Map<Pair, Levels> levels,
+      Map<Pair, Project> projects,
       Map<Pair, NamedRules> rules) {
     this.console = console;
     this.pairs = pairs;
     this.files = files;
-    this.levels = levels;
+    this.projects = projects;
     this.rules = rules;
   }
 
@@ -81,7 +82,7 @@ final class Job {
    */
   static Job ofFolders(Console console, List<Path> folders, Rules options) {
     Folders found = Folders.of(console, folders, options);
-    Job job = new Job(console, found.pairs(), found.files(), found.levels(), found.rules());
+    Job job = new Job(console, found.pairs(), found.files(), found.projects(), found.rules());
     job.complete = found.complete();
     return job;
   }
@@ -99,9 +100,9 @@ final class Job {
   PairResult result(Pair pair, Aligner aligner, boolean draft) {
     try {
       Reading source = source(pair);
-      Reading target = read(pair.target(), pair.targetLanguage(), rules(pair));
+      Reading target = read(pair, pair.target(), pair.targetLanguage());
       return PairResult.of(source, target, aligner, draft, Cancellation.NONE)
-          .at(levels.getOrDefault(pair, Levels.USUAL));
+          .at(project(pair).levels());
     } catch (Unreadable e) {
       complete = false;
       console.err().println(e.getMessage());
@@ -113,7 +114,7 @@ final class Job {
   private Reading source(Pair pair) throws Unreadable {
     String key = pair.source() + " " + pair.sourceLanguage().tag();
     if (!key.equals(lastSource)) {
-      lastReading = read(pair.source(), pair.sourceLanguage(), rules(pair));
+      lastReading = read(pair, pair.source(), pair.sourceLanguage());
       lastSource = key;
     }
     return lastReading;
@@ -123,17 +124,19 @@ final class Job {
     return rules.getOrDefault(pair, NamedRules.NONE);
   }
 
-  private Reading read(String file, Language language, NamedRules borders) throws Unreadable {
+  private Project project(Pair pair) {
+    return projects.getOrDefault(pair, Project.NONE);
+  }
+
+  private Reading read(Pair pair, String file, Language language) throws Unreadable {
+    NamedRules borders = rules(pair);
+    TextRules texts = new TextRules(borders.srx(), project(pair).frontMatter());
     Path path = files.file(file);
     Decoded decoded = Intake.load(Disk.REAL, path);
     complete &= !Malformed.tell(console, file, decoded);
     Reading read =
         Reading.of(
-            decoded.text(),
-            Intake.format(path),
-            Tongue.of(language),
-            borders.srx(),
-            Cancellation.NONE);
+            decoded.text(), Intake.format(path), Tongue.of(language), texts, Cancellation.NONE);
     borders.tell(console, read.endless());
     complete &= read.endless().isEmpty();
     return read;

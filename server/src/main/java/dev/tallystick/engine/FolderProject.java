@@ -66,6 +66,11 @@ final class FolderProject {
     return read.project();
   }
 
+  /** How its texts are read. */
+  TextRules texts() {
+    return new TextRules(rules.srx(), read.project().frontMatter());
+  }
+
   /** The rules for sentence borders. */
   FolderRules rules() {
     return rules;

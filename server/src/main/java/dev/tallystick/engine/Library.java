@@ -2,9 +2,9 @@ package dev.tallystick.engine;
 
 import dev.tallystick.check.Levels;
 import dev.tallystick.check.OnSide;
+import dev.tallystick.check.Vigilance;
 import dev.tallystick.pairing.Ambiguity;
 import dev.tallystick.pairing.Language;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -29,6 +29,7 @@ final class Library {
   private final Watch watch;
   private final boolean editorWatches;
   private Language assumed = Language.UNKNOWN;
+  private Vigilance vigilance = Vigilance.BALANCED;
 
   Library(Shelf shelf, Workers workers, Watch watch, boolean editorWatches) {
     this.shelf = shelf;
@@ -65,6 +66,7 @@ final class Library {
     assumed = settings.sourceLanguage().orElse(Language.UNKNOWN);
     workspace.rules(settings.rules());
     workspace.scope(settings.folders());
+    vigilance = settings.vigilance();
   }
 
   /**
@@ -179,7 +181,7 @@ final class Library {
 
   /** How loudly findings in a pair are said. */
   Levels levels(FilePair pair) {
-    return workspace.levels(pair);
+    return workspace.levels(pair).at(vigilance);
   }
 
   /** What the user has to be asked about the open files, and has not been. */
@@ -246,7 +248,7 @@ final class Library {
   Optional<Sheet> sheet(FilePair pair, OnSide side) {
     Path file = pair.file(side);
     Language otherwise = side == OnSide.SOURCE ? assumed : Language.UNKNOWN;
-    Srx rules = project(file).map(FolderProject::rules).map(FolderRules::srx).orElse(Srx.NONE);
+    TextRules rules = project(file).map(FolderProject::texts).orElse(TextRules.USUAL);
     return shelf.sheet(file, new Tongue(pair.language(side), otherwise), rules);
   }
 

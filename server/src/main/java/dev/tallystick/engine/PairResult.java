@@ -10,6 +10,7 @@ import dev.tallystick.check.OnSide;
 import dev.tallystick.check.Pending;
 import dev.tallystick.check.Progress;
 import dev.tallystick.check.Subject;
+import dev.tallystick.check.Vigilance;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.run.Cancellation;
 import java.util.List;
@@ -65,14 +66,14 @@ public record PairResult(
     Subject subject =
         new Subject(source.segments(), target.segments(), target.language(), alignment, draft);
     Pending pending = Pending.of(subject);
-    List<Finding> findings = Checks.findings(subject, pending);
+    List<Finding> findings = Checks.findings(subject, pending, Vigilance.BALANCED);
     Progress progress = Progress.of(subject);
     return new PairResult(source, target, alignment, findings, pending, progress, judgement);
   }
 
-  /** The same with the findings that a project wants to hear of, as loudly as it wants. */
+  /** The same with the findings that project and user want to hear of, as loudly as wanted. */
   public PairResult at(Levels levels) {
-    List<Finding> told = levels.apply(findings);
+    List<Finding> told = levels.apply(sureBy(levels.vigilance()));
     return new PairResult(source, target, alignment, told, pending, progress, judgement);
   }
 
@@ -84,6 +85,15 @@ public record PairResult(
   /** The same, where no later states will be judged by it. */
   PairResult last() {
     return new PairResult(source, target, alignment, findings, pending, progress, Optional.empty());
+  }
+
+  private List<Finding> sureBy(Vigilance vigilance) {
+    if (vigilance == Vigilance.BALANCED) {
+      return findings;
+    }
+    Subject subject =
+        new Subject(source.segments(), target.segments(), target.language(), alignment, false);
+    return Checks.findings(subject, pending, vigilance);
   }
 
   /** One of the two texts, read. */

@@ -7,7 +7,6 @@ import dev.tallystick.run.Cancellation;
 import dev.tallystick.segment.KnownSentences;
 import dev.tallystick.segment.Segment;
 import dev.tallystick.segment.Segmenter;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.util.LinkedHashSet;
@@ -42,12 +41,12 @@ public record Reading(
   /** Reads a file in a language, a BCP 47 tag. */
   public static Reading of(Text text, Format format, String language, Cancellation cancellation) {
     Tongue tongue = Tongue.of(new Language(language));
-    return of(text, format, tongue, Srx.NONE, Earlier.nothing(), cancellation);
+    return of(text, format, tongue, TextRules.USUAL, Earlier.nothing(), cancellation);
   }
 
-  /** Reads a file by the rules for sentence borders that its project has. */
+  /** Reads a file as its project wants it. */
   public static Reading of(
-      Text text, Format format, Tongue tongue, Srx rules, Cancellation cancellation) {
+      Text text, Format format, Tongue tongue, TextRules rules, Cancellation cancellation) {
     return of(text, format, tongue, rules, Earlier.nothing(), cancellation);
   }
 
@@ -78,14 +77,19 @@ public record Reading(
       Text text,
       Format format,
       Tongue tongue,
-      Srx rules,
+      TextRules rules,
       Earlier earlier,
       Cancellation cancellation) {
     String language = tongue.in(text, format).tag();
     Set<Problem> endless = new LinkedHashSet<>();
     List<Segment> segments =
-        Segmenter.of(language, rules)
-            .segments(text, format.blocks(text), endless::add, earlier.sentences(), cancellation);
+        Segmenter.of(language, rules.borders())
+            .segments(
+                text,
+                format.blocks(text, rules.frontMatter()),
+                endless::add,
+                earlier.sentences(),
+                cancellation);
     List<Unit> units =
         segments.stream().map(segment -> earlier.units().unit(text, segment)).toList();
     return new Reading(text, format, language, segments, units, List.copyOf(endless));

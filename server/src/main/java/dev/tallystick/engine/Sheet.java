@@ -1,7 +1,6 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.prose.Format;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Text;
 
 /**
@@ -12,7 +11,7 @@ final class Sheet {
   private final Text text;
   private final Format format;
   private final Tongue tongue;
-  private final Srx rules;
+  private final TextRules rules;
 
   /** What is known of an earlier state of the file; of this one, once it is read. */
   private volatile Reading.Earlier earlier = Reading.Earlier.nothing();
@@ -23,9 +22,9 @@ final class Sheet {
   /**
    * A text in a language.
    *
-   * @param rules for its sentence borders
+   * @param rules by which it is read
    */
-  Sheet(Text text, Format format, Tongue tongue, Srx rules) {
+  Sheet(Text text, Format format, Tongue tongue, TextRules rules) {
     this.text = text;
     this.format = format;
     this.tongue = tongue;
@@ -33,9 +32,9 @@ final class Sheet {
   }
 
   /** The file stands like this now; what is known of it makes reading that quicker. */
-  Sheet next(Text now, Format inFormat, Srx byRules) {
+  Sheet next(Text now, Format inFormat, TextRules byRules) {
     Sheet next = new Sheet(now, inFormat, tongue, byRules);
-    if (format == inFormat && rules == byRules) {
+    if (format == inFormat && rules.equals(byRules)) {
       next.earlier = earlier.again();
     }
     return next;
@@ -46,8 +45,8 @@ final class Sheet {
   }
 
   /** Whether this is still the sheet of a text that has come anew. */
-  boolean shows(Text current, Format inFormat, Srx byRules) {
-    return format == inFormat && rules == byRules && text.equals(current);
+  boolean shows(Text current, Format inFormat, TextRules byRules) {
+    return format == inFormat && rules.equals(byRules) && text.equals(current);
   }
 
   /** The text has moved on: whoever still works on this sheet may stop. */

@@ -1,7 +1,6 @@
 package dev.tallystick.engine;
 
 import dev.tallystick.prose.Format;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
@@ -69,7 +68,7 @@ final class Shelf {
    * The sheet of the current text; the same one as long as the text stays the same. A file that is
    * taken for two languages, in a pair made by hand and in another, has one for each.
    */
-  Optional<Sheet> sheet(Path file, Tongue tongue, Srx rules) {
+  Optional<Sheet> sheet(Path file, Tongue tongue, TextRules rules) {
     Optional<Text> text = text(file);
     Format format = format(file);
     Map<Tongue, Sheet> known = sheets.computeIfAbsent(file, path -> new LinkedHashMap<>());
@@ -80,7 +79,7 @@ final class Shelf {
   }
 
   /** Tells whoever works on a sheet to stop if the text has moved on; whether it has. */
-  private static boolean outdate(Sheet sheet, Optional<Text> text, Format format, Srx rules) {
+  private static boolean outdate(Sheet sheet, Optional<Text> text, Format format, TextRules rules) {
     boolean current = text.isPresent() && sheet.shows(text.get(), format, rules);
     if (!current) {
       sheet.outdate();

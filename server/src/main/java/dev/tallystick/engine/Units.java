@@ -87,7 +87,7 @@ final class Units {
   private static Unit sentence(Segment segment) {
     String prose = segment.prose();
     return new Unit(
-        segment.length(),
+        segment.weight(),
         prose.codePointCount(0, prose.length()),
         letters(prose),
         segment.opens(),
@@ -155,7 +155,8 @@ final class Units {
       case ITEM -> block.level() > 1 ? 8 : 7;
       case CELL -> 9;
       case QUOTATION -> 10;
-      case NOTE -> 11;
+      // One stands at the start of a file, the other never does: nobody takes one for the other.
+      case NOTE, METADATA -> 11;
     };
   }
 }

@@ -4,6 +4,7 @@ import com.google.gson.Gson;
 import com.google.gson.JsonElement;
 import com.google.gson.JsonObject;
 import com.google.gson.JsonPrimitive;
+import dev.tallystick.check.Vigilance;
 import dev.tallystick.engine.Settings;
 import dev.tallystick.pairing.Language;
 import java.util.ArrayList;
@@ -18,12 +19,13 @@ final class SettingsReader {
   private static final String REST = "restMillis";
   private static final String SCOPE = "scope";
   private static final String SOURCE_LANGUAGE = "sourceLanguage";
+  private static final String VIGILANCE = "vigilance";
   private static final String LENS = "lens";
   private static final String INLAY = "inlay";
   private static final String PROGRESS = "progress";
 
   /** What a user can set; the rest is between client and server. */
-  static final List<String> KEYS = List.of(REST, SOURCE_LANGUAGE, SCOPE, LENS, INLAY);
+  static final List<String> KEYS = List.of(REST, SOURCE_LANGUAGE, SCOPE, VIGILANCE, LENS, INLAY);
 
   private static final long LONGEST_REST = 600_000;
 
@@ -70,7 +72,8 @@ final class SettingsReader {
         new Settings(
             rest(object.get(REST)),
             language(object.get(SOURCE_LANGUAGE)),
-            folders(object.get(SCOPE)));
+            folders(object.get(SCOPE)),
+            vigilance(object.get(VIGILANCE)));
     boolean lens = yes(LENS, object.get(LENS));
     boolean inlay = yes(INLAY, object.get(INLAY));
     yes(PROGRESS, object.get(PROGRESS)); // read at the start, told here if it is wrong
@@ -119,6 +122,20 @@ final class SettingsReader {
               + " pairs of the folder). Until then it counts as open.");
     }
     return word.equals("folder");
+  }
+
+  private Vigilance vigilance(JsonElement value) {
+    if (value == null) {
+      return Vigilance.BALANCED;
+    }
+    String word = value instanceof JsonPrimitive one && one.isString() ? one.getAsString() : "";
+    Optional<Vigilance> vigilance = Vigilance.of(word);
+    if (vigilance.isEmpty()) {
+      problems.add(
+          "The setting tallystick.vigilance must be quiet, balanced or thorough. Until then it"
+              + " counts as balanced.");
+    }
+    return vigilance.orElse(Vigilance.BALANCED);
   }
 
   private Optional<Language> language(JsonElement value) {

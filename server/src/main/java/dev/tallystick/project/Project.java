@@ -5,6 +5,7 @@ import dev.tallystick.pairing.Glob;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.PairRule;
 import dev.tallystick.pairing.Rules;
+import dev.tallystick.prose.FrontMatterKeys;
 import java.util.List;
 import java.util.Optional;
 
@@ -16,16 +17,24 @@ import java.util.Optional;
  * @param levels how loudly each kind of finding is said
  * @param ignored the files that do not count
  * @param segmentation the file with rules for sentence borders, if one is named
+ * @param frontMatter the keys of front matter whose values are prose
  */
 public record Project(
     Optional<Language> sourceLanguage,
     List<PairRule> pairs,
     Levels levels,
     List<Glob> ignored,
-    Optional<String> segmentation) {
+    Optional<String> segmentation,
+    FrontMatterKeys frontMatter) {
   /** Nothing is set. */
   public static final Project NONE =
-      new Project(Optional.empty(), List.of(), Levels.USUAL, List.of(), Optional.empty());
+      new Project(
+          Optional.empty(),
+          List.of(),
+          Levels.USUAL,
+          List.of(),
+          Optional.empty(),
+          FrontMatterKeys.USUAL);
 
   /** Takes copies. */
   public Project {

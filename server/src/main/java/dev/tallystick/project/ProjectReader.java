@@ -5,6 +5,7 @@ import dev.tallystick.check.Levels;
 import dev.tallystick.check.Severity;
 import dev.tallystick.pairing.Glob;
 import dev.tallystick.pairing.Language;
+import dev.tallystick.prose.FrontMatterKeys;
 import dev.tallystick.text.Span;
 import java.io.IOException;
 import java.util.ArrayList;
@@ -29,6 +30,7 @@ final class ProjectReader {
   private final List<Glob> ignored = new ArrayList<>();
   private Optional<Language> sourceLanguage = Optional.empty();
   private Optional<Tokens.Word> segmentation = Optional.empty();
+  private Optional<List<String>> frontMatter = Optional.empty();
 
   ProjectReader(Values values) {
     this.values = values;
@@ -43,6 +45,7 @@ final class ProjectReader {
     keys.put("pairs", name -> values.elements(name, "A pair", pairs::read));
     keys.put("checks", name -> values.members(name, checks()));
     keys.put("segmentation", this::readSegmentation);
+    keys.put("frontMatter", this::readFrontMatter);
     keys.put("ignore", name -> values.elements(name, "A name to ignore", this::readIgnored));
     return keys;
   }
@@ -63,7 +66,8 @@ final class ProjectReader {
         pairs.rules(sourceLanguage.isPresent() || !whole),
         new Levels(levels),
         ignored,
-        segmentation.map(Tokens.Word::value));
+        segmentation.map(Tokens.Word::value),
+        frontMatter.map(FrontMatterKeys::of).orElse(FrontMatterKeys.USUAL));
   }
 
   /** Where the file with rules for sentence borders is named. */
@@ -76,6 +80,16 @@ final class ProjectReader {
     Optional<String> fault = word.flatMap(file -> Names.faultOfRules(file.value()));
     fault.ifPresent(message -> values.problem(word.get().span(), message));
     segmentation = fault.isPresent() ? Optional.empty() : word;
+  }
+
+  private void readFrontMatter(String name) throws IOException {
+    List<String> keys = new ArrayList<>();
+    boolean list =
+        values.elements(
+            name,
+            "A key of front matter",
+            element -> values.string(element).map(Tokens.Word::value).ifPresent(keys::add));
+    frontMatter = list ? Optional.of(keys) : Optional.empty();
   }
 
   private Map<String, Values.Value> checks() {

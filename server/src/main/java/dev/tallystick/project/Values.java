@@ -72,17 +72,18 @@ final class Values {
         .collect(Collectors.joining(", "));
   }
 
-  /** Reads a list, each element in the same way. */
-  void elements(String name, String element, Value value) throws IOException {
+  /** Reads a list, each element in the same way; whether it is one. */
+  boolean elements(String name, String element, Value value) throws IOException {
     if (json.peek() != JsonToken.BEGIN_ARRAY) {
       problem(json.skip(), name + " must be a list between [ and ].");
-      return;
+      return false;
     }
     json.open();
     while (json.more()) {
       value.read(element);
     }
     json.close();
+    return true;
   }
 
   /** Reads a string; empty if it is none. */

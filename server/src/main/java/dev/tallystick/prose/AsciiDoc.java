@@ -2,6 +2,7 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
+import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -17,6 +18,10 @@ final class AsciiDoc {
 
   private final Text text;
   private final String file;
+
+  /** Index of the first line behind the front matter. */
+  private final int first;
+
   private final List<Span> lines;
   private final Map<String, Integer> lastDelimiters = new HashMap<>();
   private final AsciiDocBlocks blocks;
@@ -29,21 +34,24 @@ final class AsciiDoc {
   private int blankLines;
   private int headerLines;
 
-  private AsciiDoc(Text text) {
+  private AsciiDoc(Text text, FrontMatter data) {
     this.text = text;
+    this.first = text.place(data.end()).line();
     this.file = text.string();
     this.lines = TrimmedLines.of(text);
     this.blocks = new AsciiDocBlocks(file);
   }
 
-  static List<Block> blocks(Text text) {
-    AsciiDoc document = new AsciiDoc(text);
+  static List<Block> blocks(Text text, FrontMatterKeys keys) {
+    FrontMatter data = FrontMatter.of(text);
+    AsciiDoc document = new AsciiDoc(text, data);
     document.read();
-    return document.blocks.finished();
+    List<Block> blocks = new ArrayList<>(data.blocks(keys));
+    blocks.addAll(document.blocks.finished());
+    return List.copyOf(blocks);
   }
 
   private void read() {
-    int first = text.place(FrontMatter.end(text)).line();
     for (int i = first; i < lines.size(); i++) {
       if (AsciiDocSyntax.isDelimiter(line(i))) {
         lastDelimiters.put(line(i), i);

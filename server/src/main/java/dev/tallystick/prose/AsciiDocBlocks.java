@@ -84,7 +84,7 @@ final class AsciiDocBlocks {
     }
     Span extent = new Span(start, end);
     if (kind != Block.Kind.VERBATIM) {
-      add(AsciiDocInlines.block(kind, level, extent, file, lines));
+      blocks.addAll(AsciiDocInlines.blocks(kind, level, extent, file, lines));
     } else if (!comment) {
       add(new Block(kind, 0, extent, List.of()));
     }
@@ -97,7 +97,7 @@ final class AsciiDocBlocks {
   }
 
   void addMacro(Span line, List<Span> prose) {
-    add(AsciiDocInlines.block(Block.Kind.PARAGRAPH, 0, line, file, prose));
+    blocks.addAll(AsciiDocInlines.blocks(Block.Kind.PARAGRAPH, 0, line, file, prose));
   }
 
   /** Adds a block, unless it has no prose to have. */

@@ -2,60 +2,47 @@ package dev.tallystick.prose;
 
 import dev.tallystick.text.Span;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 
-/** Picks the prose out of the lines of one block of AsciiDoc, and what is marked in it. */
+/** Makes blocks of the lines of a block of AsciiDoc: one of its own, and one of each footnote. */
 final class AsciiDocInlines {
   private AsciiDocInlines() {}
 
   /**
-   * A block with its prose; it has no pieces if there is none.
+   * A block with its prose, and behind it one for each of its footnotes, which lie in its extent.
+   * Those without prose are left out.
    *
-   * @param lines its stretches of the file, one a line
+   * @param lines the stretches of the file that the block has, one a line
    */
-  static Block block(Block.Kind kind, int level, Span extent, String file, List<Span> lines) {
-    StringBuilder joined = new StringBuilder();
-    for (Span line : lines) {
-      joined.append(file, line.start(), line.end()).append('\n');
+  static List<Block> blocks(
+      Block.Kind kind, int level, Span extent, String file, List<Span> lines) {
+    List<AsciiDocNote> notes = new ArrayList<>();
+    List<Span> apart = new ArrayList<>();
+    MarkedLines.Marker marker =
+        (joined, inlines) -> {
+          boolean[] marks = AsciiDocMarks.of(joined, inlines, notes);
+          notes.forEach(note -> apart.add(note.whole()));
+          return marks;
+        };
+    List<Block> blocks = new ArrayList<>();
+    add(blocks, MarkedLines.block(kind, level, extent, file, lines, marker, apart));
+    MarkedLines.Places places = new MarkedLines.Places(lines);
+    for (AsciiDocNote note : notes) {
+      add(blocks, note(file, places.inFile(note.whole()), places.lines(note.text())));
     }
-    List<Inline> marked = new ArrayList<>();
-    boolean[] marks = AsciiDocMarks.of(joined.toString(), marked);
-    Pieces pieces = new Pieces(file);
-    int before = 0;
-    for (int i = 0; i < lines.size(); i++) {
-      Span line = lines.get(i);
-      if (pieces.end() > 0) {
-        pieces.addLineBreak(pieces.end(), line.start());
-      }
-      for (int at = line.start(); at < line.end(); at++) {
-        if (!marks[before + at - line.start()]) {
-          pieces.add(at, at + 1);
-        }
-      }
-      before += line.length() + 1;
-    }
-    return new Block(kind, level, extent, pieces.spans()).with(inFile(marked, lines));
+    return blocks;
   }
 
-  /** The inlines with the places that they have in the file; their offsets are of joined lines. */
-  private static List<Inline> inFile(List<Inline> joined, List<Span> lines) {
-    int[] before = new int[lines.size()];
-    for (int i = 1; i < before.length; i++) {
-      before[i] = before[i - 1] + lines.get(i - 1).length() + 1;
-    }
-    List<Inline> inFile = new ArrayList<>();
-    for (Inline inline : joined) {
-      int start = offset(inline.span().start(), before, lines);
-      int end = offset(inline.span().end() - 1, before, lines) + 1;
-      inFile.add(new Inline(inline.kind(), new Span(start, end)));
-    }
-    return inFile;
+  /** A note in a note has no place where it could be shown. */
+  private static Block note(String file, Span extent, List<Span> lines) {
+    MarkedLines.Marker marker =
+        (joined, inlines) -> AsciiDocMarks.of(joined, inlines, new ArrayList<>());
+    return MarkedLines.block(Block.Kind.NOTE, 0, extent, file, lines, marker, List.of());
   }
 
-  private static int offset(int inJoined, int[] before, List<Span> lines) {
-    int found = Arrays.binarySearch(before, inJoined);
-    int line = found >= 0 ? found : -found - 2;
-    return lines.get(line).start() + inJoined - before[line];
+  private static void add(List<Block> blocks, Block block) {
+    if (!block.pieces().isEmpty()) {
+      blocks.add(block);
+    }
   }
 }

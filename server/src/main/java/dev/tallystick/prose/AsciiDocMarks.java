@@ -26,10 +26,12 @@ final class AsciiDocMarks {
   private final List<Inline> marked;
   private final AsciiDocBrackets brackets;
   private final AsciiDocQuotes quotes;
+  private final List<AsciiDocNote> notes;
   private int at;
 
-  private AsciiDocMarks(String prose, List<Inline> marked) {
+  private AsciiDocMarks(String prose, List<Inline> marked, List<AsciiDocNote> notes) {
     this.prose = prose;
+    this.notes = notes;
     this.marks = new boolean[prose.length()];
     this.marked = marked;
     this.brackets = new AsciiDocBrackets(prose);
@@ -41,9 +43,10 @@ final class AsciiDocMarks {
    *
    * @param prose its lines, each with an LF
    * @param marked takes what is marked, by offsets into {@code prose}
+   * @param notes takes its footnotes, the same way
    */
-  static boolean[] of(String prose, List<Inline> marked) {
-    AsciiDocMarks read = new AsciiDocMarks(prose, marked);
+  static boolean[] of(String prose, List<Inline> marked, List<AsciiDocNote> notes) {
+    AsciiDocMarks read = new AsciiDocMarks(prose, marked, notes);
     while (read.at < prose.length()) {
       read.step();
     }
@@ -62,7 +65,7 @@ final class AsciiDocMarks {
           default ->
               FORMATS.indexOf(c) >= 0 || c == '^' || c == '~'
                   ? quote()
-                  : startsWord() && (macro() || address());
+                  : startsWord() ? macro() || address() : note();
         };
     if (!taken) {
       at++;
@@ -183,6 +186,11 @@ final class AsciiDocMarks {
     return true;
   }
 
+  /** A footnote, which may touch the word before it. */
+  private boolean note() {
+    return prose.startsWith("footnote", at) && macro();
+  }
+
   private boolean macro() {
     Matcher macro = MACRO.matcher(prose).region(at, prose.length());
     if (!macro.lookingAt()) {
@@ -199,6 +207,9 @@ final class AsciiDocMarks {
       at = target;
       return true;
     }
+    if (name.startsWith("footnote")) {
+      addNote(name, new Span(at, close + 1), open + 1);
+    }
     addMacro(name, close);
     mark(at, target);
     at = target;
@@ -209,6 +220,16 @@ final class AsciiDocMarks {
       readMacro(name, target, new Span(open + 1, close));
     }
     return true;
+  }
+
+  /** Takes in a footnote that has a text; in the old form of the macro a comma stands before it. */
+  private void addNote(String name, Span whole, int from) {
+    int close = whole.end() - 1;
+    int comma = name.endsWith("ref") ? prose.substring(from, close).indexOf(',') : -1;
+    int start = name.endsWith("ref") ? (comma < 0 ? close : from + comma + 1) : from;
+    if (!prose.substring(start, close).isBlank()) {
+      notes.add(new AsciiDocNote(whole, new Span(start, close)));
+    }
   }
 
   private void addMacro(String name, int close) {

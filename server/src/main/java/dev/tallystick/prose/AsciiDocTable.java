@@ -146,10 +146,11 @@ final class AsciiDocTable {
   private void close() {
     if (!cell.isEmpty()) {
       Span extent = cell.get(0).cover(cell.get(cell.size() - 1));
-      blocks.add(
-          style == 'l'
-              ? new Block(Block.Kind.VERBATIM, 0, extent, List.of())
-              : AsciiDocInlines.block(Block.Kind.CELL, 0, extent, file, cell));
+      if (style == 'l') {
+        blocks.add(new Block(Block.Kind.VERBATIM, 0, extent, List.of()));
+      } else {
+        blocks.addAll(AsciiDocInlines.blocks(Block.Kind.CELL, 0, extent, file, cell));
+      }
       cell.clear();
     }
   }

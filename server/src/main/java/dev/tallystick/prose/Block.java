@@ -7,7 +7,7 @@ import java.util.List;
 import java.util.Optional;
 
 /**
- * A unit of layout that no sentence crosses.
+ * A unit of layout that no sentence crosses. No two have prose in common.
  *
  * @param kind what it is
  * @param level depth: 1 to 6 for a heading, the nesting from 1 for a list item or a quotation, 0
@@ -36,6 +36,8 @@ public record Block(
     QUOTATION,
     /** A footnote or the like: it may stand inside the block before it, between its pieces. */
     NOTE,
+    /** A value of the front matter. */
+    METADATA,
     /** Code and the like, copied as it stands: a landmark without prose. */
     VERBATIM
   }

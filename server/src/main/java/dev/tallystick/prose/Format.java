@@ -4,6 +4,7 @@ import dev.tallystick.text.Text;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 
@@ -11,8 +12,10 @@ import java.util.stream.Collectors;
 public enum Format {
   /** Text without markup. */
   PLAIN(List.of("plaintext", "text"), "txt", "text"),
-  /** CommonMark with tables. */
+  /** CommonMark with tables, footnotes and what writers of documentation add. */
   MARKDOWN(List.of("markdown"), "md", "markdown", "mkd"),
+  /** Markdown with tags and expressions of JavaScript. */
+  MDX(List.of("mdx"), "mdx"),
   /** Subtitles as SubRip writes them. */
   SUBRIP(List.of("srt", "subrip"), "srt"),
   /** Subtitles as WebVTT has them. */
@@ -69,7 +72,7 @@ public enum Format {
    */
   public Optional<String> language(Text text) {
     return switch (this) {
-      case PLAIN, MARKDOWN -> StatedLanguage.inFrontMatter(text);
+      case PLAIN, MARKDOWN, MDX -> StatedLanguage.inFrontMatter(text);
       case ASCIIDOC -> StatedLanguage.inFrontMatter(text).or(() -> StatedLanguage.inAsciiDoc(text));
       case HTML -> StatedLanguage.inHtml(text);
       case XML -> StatedLanguage.inXml(text);
@@ -83,20 +86,43 @@ public enum Format {
    * @param text the file, possibly with a byte-order mark, which is no prose
    */
   public List<Block> blocks(Text text) {
-    return Placeholders.mark(text.string(), marked(text));
+    return blocks(text, FrontMatterKeys.USUAL);
+  }
+
+  /**
+   * The same.
+   *
+   * @param keys whose values are prose, if the file has front matter
+   */
+  public List<Block> blocks(Text text, FrontMatterKeys keys) {
+    return Placeholders.mark(text.string(), marked(text, keys));
   }
 
   /** The blocks with what the format itself marks in them. */
-  private List<Block> marked(Text text) {
+  private List<Block> marked(Text text, FrontMatterKeys keys) {
     return switch (this) {
       case PLAIN -> PlainText.blocks(text);
-      case MARKDOWN -> Markdown.blocks(text);
+      case MARKDOWN -> Markdown.blocks(text, keys);
+      case MDX -> Markdown.ofMdx(text, keys);
       case SUBRIP, WEBVTT -> Subtitles.blocks(text);
       case HTML -> Html.blocks(text);
       case XML -> Xml.blocks(text);
-      case ASCIIDOC -> AsciiDoc.blocks(text);
+      case ASCIIDOC -> AsciiDoc.blocks(text, keys);
       case LATEX -> Latex.blocks(text);
       case RST -> Rst.blocks(text);
     };
+  }
+
+  /**
+   * How whole the marks of a file are: equal before and after a change that breaks none. Formats
+   * whose marks cannot be left open have none.
+   */
+  public Map<String, Integer> marks(Text text) {
+    return this == HTML ? HtmlMarks.of(text) : Map.of();
+  }
+
+  /** Whether it is a format of subtitles, whose text has no place outside of a cue. */
+  public boolean hasCues() {
+    return this == SUBRIP || this == WEBVTT;
   }
 }

@@ -64,12 +64,9 @@ final class Inlines {
       addCode(node);
     } else if (node instanceof SoftLineBreak || node instanceof HardLineBreak) {
       pieces.addLineBreak(origin.of(inputBefore(node)), limit);
-    } else if (node instanceof HtmlInline html) {
-      addTag(html);
+    } else if (node instanceof HtmlInline || node instanceof Passed) {
+      addMark(node);
     } else if (node instanceof Link) {
-      if (isFootnoteReference(node)) {
-        return false;
-      }
       mark(Inline.Kind.LINK, node);
     } else if (node instanceof Emphasis) {
       mark(Inline.Kind.EMPHASIS, node);
@@ -97,9 +94,21 @@ final class Inlines {
     return origin.of(Nodes.end(node) - 1) + 1;
   }
 
+  /** Takes in a tag, or what a generator of sites puts something in place of. */
+  private void addMark(Node node) {
+    if (node.getSourceSpans().isEmpty()) {
+      return;
+    }
+    String literal = file.substring(start(node), end(node));
+    if (literal.startsWith("<")) {
+      addTag(node, literal);
+    } else if (literal.length() > 1 && "#.:/".indexOf(literal.charAt(1)) < 0) {
+      mark(Inline.Kind.PLACEHOLDER, node);
+    }
+  }
+
   /** Pairs up the tags of HTML: an element begins and ends with a node of its own each. */
-  private void addTag(HtmlInline html) {
-    String literal = html.getLiteral();
+  private void addTag(Node html, String literal) {
     boolean closes = literal.startsWith("</");
     int from = closes ? 2 : 1;
     int to = from;
@@ -108,7 +117,7 @@ final class Inlines {
     }
     String tag = literal.substring(from, to).toLowerCase(Locale.ROOT);
     Inline.Kind kind = HtmlTags.inline(tag);
-    if (kind == null || html.getSourceSpans().isEmpty()) {
+    if (kind == null) {
       return;
     }
     if (!closes) {
@@ -159,17 +168,6 @@ final class Inlines {
       at++;
     }
     return at > label && at < end && charAt(at) == ']' ? at + 1 : 0;
-  }
-
-  private boolean isFootnoteReference(Node link) {
-    if (link.getSourceSpans().size() != 1) {
-      return false;
-    }
-    SourceSpan span = link.getSourceSpans().get(0);
-    int label = span.getInputIndex() + 2;
-    return charAt(label - 2) == '['
-        && charAt(label - 1) == '^'
-        && referenceEnd(label, Nodes.end(span)) == Nodes.end(span);
   }
 
   /** Adds what is between the backticks; a line break inside is prose like any other. */

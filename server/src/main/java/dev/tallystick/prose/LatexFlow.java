@@ -24,6 +24,7 @@ final class LatexFlow {
   /** A block in the making. */
   private static final class Part {
     private final Pieces pieces;
+    private final List<Inline> inlines = new ArrayList<>();
     private Block.Kind kind;
     private int level;
     private int start = NONE;
@@ -95,7 +96,21 @@ final class LatexFlow {
   /** Formulas and code: alone they are copied. */
   void copied(int from, int to) {
     add(from, to);
+    if (from < to) {
+      addCode(new Span(from, to));
+    }
     part.hasCopied = true;
+  }
+
+  /** The parts of a formula come one by one. */
+  private void addCode(Span span) {
+    int last = part.inlines.size() - 1;
+    Span before = last < 0 ? null : part.inlines.get(last).span();
+    if (before != null && file.substring(before.end(), span.start()).isBlank()) {
+      part.inlines.set(last, new Inline(Inline.Kind.CODE, before.cover(span)));
+    } else {
+      part.inlines.add(new Inline(Inline.Kind.CODE, span));
+    }
   }
 
   private void add(int from, int to) {
@@ -162,7 +177,7 @@ final class LatexFlow {
     if (part.hasWords) {
       Block block =
           new Block(part.kind, part.level, new Span(part.start, part.end), part.pieces.spans());
-      (note ? notes : blocks).add(block);
+      (note ? notes : blocks).add(block.with(part.inlines));
     } else if (part.hasCopied && !note) {
       blocks.add(new Block(Block.Kind.VERBATIM, 0, new Span(part.start, part.end), List.of()));
     }

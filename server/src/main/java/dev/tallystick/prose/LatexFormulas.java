@@ -64,7 +64,9 @@ final class LatexFormulas {
     for (int i = open; i <= (stops ? last : close); i++) {
       LatexToken token = tokens.get(i);
       if (!token.is(Kind.BLANK) && !token.is(Kind.COMMENT)) {
-        flow.copied(token.start(), token.end());
+        boolean stop = stops && i == last;
+        flow.copied(token.start(), stop ? token.end() - 1 : token.end());
+        flow.sign(stop ? token.end() - 1 : token.end(), token.end());
       }
     }
     flow.mark(tokens.get(open).start(), tokens.get(close).end());
@@ -77,7 +79,7 @@ final class LatexFormulas {
     int last = last(open, close);
     char mark = lastCharacter(last);
     if (last > open && (Characters.isStop(mark) || ENDS.indexOf(mark) >= 0)) {
-      flow.copied(tokens.get(last).end() - 1, tokens.get(last).end());
+      flow.sign(tokens.get(last).end() - 1, tokens.get(last).end());
     }
     LatexToken end = tokens.get(close);
     flow.mark(first.start(), end.end());

@@ -8,18 +8,22 @@ import java.util.regex.Pattern;
 
 /**
  * One line of a plain text. Offsets are UTF-16 offsets into the file, widths are columns of a
- * terminal.
+ * terminal, counted from behind the marks of a quotation.
  *
- * @param start offset of its first character that is not white space
+ * @param mark offset of its first character that is not white space
+ * @param quotes how many marks of a quotation open it, as in a letter that answers another one
+ * @param start offset of its first character behind those marks that is not white space
  * @param text offset of its prose, behind the list marker if it has one
  * @param end offset behind its last character that is not white space
  * @param indent columns before {@code start}
- * @param width columns from its beginning to {@code end}
+ * @param width columns to {@code end}
  * @param number number of its list marker; 0 for a bullet, -1 if it opens no list item
  * @param isProse whether it has a letter or a digit
  * @param capitals whether it has letters in upper case and none in lower case
  */
 record Line(
+    int mark,
+    int quotes,
     int start,
     int text,
     int end,
@@ -58,6 +62,11 @@ record Line(
     return !isProse && !isBlank();
   }
 
+  /** Whether the line is the one that the writer's name and address stand below in a letter. */
+  boolean opensSignature(String file) {
+    return quotes == 0 && indent == 0 && end - start == 2 && file.startsWith("--", start);
+  }
+
   /** Whether the line ends as a sentence does. */
   boolean stops(String file) {
     if (Characters.isCornerBracket(file.charAt(end - 1))) {
@@ -87,20 +96,43 @@ record Line(
     return columns;
   }
 
+  /** Whether a line is in the same quotation. */
+  boolean isBeside(Line other) {
+    return quotes == other.quotes;
+  }
+
   private static Line scan(String file, int begin, int end) {
     int last = end;
     while (last > begin && Characters.isSpace(file.charAt(last - 1))) {
       last--;
     }
-    int column = 0;
-    int start = begin;
-    while (start < last && Characters.isSpace(file.charAt(start))) {
-      column = Characters.columnAfter(column, file.charAt(start++));
+    int mark = -1;
+    int depth = 0;
+    int behind = begin;
+    for (int at = begin; at < last && isQuoteMark(file.charAt(at)); at++) {
+      if (file.charAt(at) == '>') {
+        mark = depth++ == 0 ? at : mark;
+        behind = at + 1;
+      }
     }
-    return classify(file, start, last, column);
+    boolean blank = depth > 0 && behind < last && file.charAt(behind) == ' ';
+    return scan(file, blank ? behind + 1 : behind, last, mark, depth);
   }
 
-  private static Line classify(String file, int start, int end, int indent) {
+  private static boolean isQuoteMark(char c) {
+    return c == '>' || Characters.isBlank(c);
+  }
+
+  private static Line scan(String file, int begin, int end, int mark, int quotes) {
+    int column = 0;
+    int start = begin;
+    while (start < end && Characters.isSpace(file.charAt(start))) {
+      column = Characters.columnAfter(column, file.charAt(start++));
+    }
+    return classify(file, start, end, column, quotes == 0 ? start : mark, quotes);
+  }
+
+  private static Line classify(String file, int start, int end, int indent, int mark, int quotes) {
     int width = indent;
     boolean prose = false;
     int upper = 0;
@@ -123,8 +155,8 @@ record Line(
     boolean item = prose && marker.lookingAt();
     int text = item ? marker.end() : start;
     boolean capitals = upper > 1 && !lower;
-    return new Line(
-        start, text, end, indent, width, item ? number(marker) : NO_ITEM, prose, capitals);
+    int number = item ? number(marker) : NO_ITEM;
+    return new Line(mark, quotes, start, text, end, indent, width, number, prose, capitals);
   }
 
   private static int number(Matcher marker) {
@@ -156,6 +188,6 @@ record Line(
   }
 
   private Line withoutMarker() {
-    return new Line(start, start, end, indent, width, NO_ITEM, isProse, capitals);
+    return new Line(mark, quotes, start, start, end, indent, width, NO_ITEM, isProse, capitals);
   }
 }

@@ -3,35 +3,25 @@ package dev.tallystick.prose;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import org.commonmark.ext.gfm.tables.TableRow;
-import org.commonmark.ext.gfm.tables.TablesExtension;
 import org.commonmark.node.BlockQuote;
 import org.commonmark.node.FencedCodeBlock;
 import org.commonmark.node.Heading;
 import org.commonmark.node.HtmlBlock;
 import org.commonmark.node.IndentedCodeBlock;
-import org.commonmark.node.LinkReferenceDefinition;
 import org.commonmark.node.ListItem;
 import org.commonmark.node.Node;
 import org.commonmark.node.Paragraph;
 import org.commonmark.node.SourceSpan;
-import org.commonmark.parser.IncludeSourceSpans;
 import org.commonmark.parser.Parser;
 
-/** CommonMark with tables; footnotes, task lists and front matter are known by their marks. */
+/**
+ * CommonMark with tables, footnotes, task lists, front matter, and the admonitions and shortcodes
+ * of those who write documentation; also MDX.
+ */
 final class Markdown {
-  /** Deeper nesting than any writer uses is read as text, lest it costs time or stack. */
-  private static final int DEEPEST = 100;
-
-  private static final Parser PARSER =
-      Parser.builder()
-          .extensions(List.of(TablesExtension.create()))
-          .includeSourceSpans(IncludeSourceSpans.BLOCKS_AND_INLINES)
-          .maxOpenBlockParsers(DEEPEST)
-          .maxInlineNesting(DEEPEST)
-          .build();
-
   private final String file;
   private final int base;
   private final List<Block> blocks = new ArrayList<>();
@@ -42,14 +32,37 @@ final class Markdown {
     this.base = base;
   }
 
-  static List<Block> blocks(Text text) {
-    Markdown markdown = new Markdown(text.string(), FrontMatter.end(text));
-    Node document = PARSER.parse(markdown.file.substring(markdown.base));
+  static List<Block> blocks(Text text, FrontMatterKeys keys) {
+    FrontMatter data = FrontMatter.of(text);
+    Markdown markdown = new Markdown(text.string(), data.end());
+    markdown.blocks.addAll(data.blocks(keys));
+    markdown.read(MarkdownSyntax.MARKDOWN, markdown.file.substring(data.end()));
+    return Inline.spread(markdown.blocks, markdown.inlines);
+  }
+
+  /** The same for MDX, where imports and exports are verbatim. */
+  static List<Block> ofMdx(Text text, FrontMatterKeys keys) {
+    FrontMatter data = FrontMatter.of(text);
+    Markdown markdown = new Markdown(text.string(), data.end());
+    markdown.blocks.addAll(data.blocks(keys));
+    StringBuilder input = new StringBuilder(markdown.file);
+    for (Span script : MdxScripts.of(text, data.end())) {
+      markdown.blocks.add(new Block(Block.Kind.VERBATIM, 0, script, List.of()));
+      for (int at = script.start(); at < script.end(); at++) {
+        input.setCharAt(at, Characters.isLineEnd(input.charAt(at)) ? input.charAt(at) : ' ');
+      }
+    }
+    markdown.read(MarkdownSyntax.MDX, input.substring(data.end()));
+    markdown.blocks.sort(Comparator.comparing(Block::extent));
+    return Inline.spread(markdown.blocks, markdown.inlines);
+  }
+
+  private void read(Parser parser, String input) {
+    Node document = parser.parse(input);
     Node node = document.getFirstChild();
     while (node != null) {
-      node = Nodes.next(node, markdown.enter(node), document);
+      node = Nodes.next(node, enter(node), document);
     }
-    return Inline.spread(markdown.blocks, markdown.inlines);
   }
 
   /** Reads a node; whether its children are to be read as well. */
@@ -60,8 +73,8 @@ final class Markdown {
       addParagraph(node, prose(node));
     } else if (node instanceof TableRow) {
       addCells(node);
-    } else if (node instanceof LinkReferenceDefinition definition) {
-      addFootnote(definition);
+    } else if (node instanceof MarkedLine.Titled) {
+      addProse(Block.Kind.PARAGRAPH, 0, extent(node), prose(node));
     } else if (node instanceof HtmlBlock html) {
       addHtml(html);
     } else if (node instanceof FencedCodeBlock || node instanceof IndentedCodeBlock) {
@@ -82,27 +95,19 @@ final class Markdown {
     return Inlines.of(file, node, this::offset, extent(node).end(), inlines).spans();
   }
 
-  /** A paragraph; footnotes that follow each other without a blank line are one each. */
+  /** A paragraph; in a box for tasks, or below the mark of an alert, that is no prose. */
   private void addParagraph(Node node, List<Span> pieces) {
-    boolean task = node.getParent() instanceof ListItem && node.getPrevious() == null;
-    for (ParagraphMarks.Part part : ParagraphMarks.parts(file, lines(node), pieces, task)) {
+    ParagraphMarks.Mark mark =
+        node.getPrevious() != null
+            ? ParagraphMarks.Mark.NONE
+            : node.getParent() instanceof ListItem
+                ? ParagraphMarks.Mark.TASK
+                : node.getParent() instanceof BlockQuote
+                    ? ParagraphMarks.Mark.ALERT
+                    : ParagraphMarks.Mark.NONE;
+    for (ParagraphMarks.Part part : ParagraphMarks.parts(file, lines(node), pieces, mark)) {
       Span extent = new Span(firstMark(part.extent().start()), part.extent().end());
       addProse(kind(node), level(node), extent, part.pieces());
-    }
-  }
-
-  /** A footnote of one word looks like the target of a link to the parser. */
-  private void addFootnote(LinkReferenceDefinition definition) {
-    if (definition.getLabel().startsWith("^")) {
-      List<Span> lines = lines(definition);
-      Pieces pieces = new Pieces(file);
-      for (Span line : lines) {
-        if (pieces.end() > 0) {
-          pieces.addLineBreak(pieces.end(), line.start());
-        }
-        pieces.add(line.start(), line.end());
-      }
-      addParagraph(definition, pieces.spans());
     }
   }
 
@@ -147,9 +152,13 @@ final class Markdown {
   }
 
   private static Block.Kind kind(Node paragraph) {
-    return paragraph.getParent() instanceof ListItem
+    Node parent = paragraph.getParent();
+    if (parent instanceof FootnoteParser.Footnote) {
+      return Block.Kind.NOTE;
+    }
+    return parent instanceof ListItem
         ? Block.Kind.ITEM
-        : paragraph.getParent() instanceof BlockQuote ? Block.Kind.QUOTATION : Block.Kind.PARAGRAPH;
+        : parent instanceof BlockQuote ? Block.Kind.QUOTATION : Block.Kind.PARAGRAPH;
   }
 
   /** How many containers of the same kind as its own a paragraph is in. */

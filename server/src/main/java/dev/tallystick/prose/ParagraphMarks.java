@@ -6,11 +6,8 @@ import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
-/** Marks at the start of a paragraph's lines that the Markdown parser takes for text. */
+/** Marks at the start of a paragraph that the Markdown parser takes for text. */
 final class ParagraphMarks {
-  private static final Pattern FOOTNOTE = Pattern.compile("\\[\\^[^\\[\\]\\s]+]:[ \\t]*");
-  private static final Pattern TASK = Pattern.compile("\\[[ xX]][ \\t]+");
-
   private final String file;
   private final List<Span> pieces;
   private int next;
@@ -20,28 +17,44 @@ final class ParagraphMarks {
     this.pieces = pieces;
   }
 
+  /** What a paragraph may open with. */
+  enum Mark {
+    /** Nothing. */
+    NONE("(?!)"),
+    /** The box of a task. */
+    TASK("\\[[ xX]][ \\t]+"),
+    /** The kind of an alert as GitHub has them; some readers let a title follow. */
+    ALERT("\\[![A-Za-z][\\w-]*+][-+]?[ \\t]*");
+
+    private final Pattern pattern;
+
+    Mark(String pattern) {
+      this.pattern = Pattern.compile(pattern);
+    }
+  }
+
   /** A stretch of a paragraph that stands for itself, with its prose. */
   record Part(Span extent, List<Span> pieces) {}
 
   /**
-   * Parts a paragraph before each line that opens a footnote, and takes the marks out of the prose.
+   * Takes the mark out of the prose of a paragraph, and parts it behind the line of an alert.
    *
    * @param lines the paragraph's lines, container marks left out
-   * @param task whether it may open with the box of a task
    */
-  static List<Part> parts(String file, List<Span> lines, List<Span> pieces, boolean task) {
+  static List<Part> parts(String file, List<Span> lines, List<Span> pieces, Mark mark) {
+    Span first = lines.get(0);
+    Span all = new Span(first.start(), lines.get(lines.size() - 1).end());
+    Matcher matcher = mark.pattern.matcher(file).region(first.start(), first.end());
+    boolean found = matcher.lookingAt();
     ParagraphMarks marks = new ParagraphMarks(file, pieces);
-    List<Part> parts = new ArrayList<>();
-    int first = 0;
-    for (int i = 1; i <= lines.size(); i++) {
-      if (i == lines.size() || marks.end(lines.get(i), FOOTNOTE) > 0) {
-        int box = task && first == 0 ? marks.end(lines.get(0), TASK) : 0;
-        int mark = Math.max(marks.end(lines.get(first), FOOTNOTE), box);
-        Span extent = new Span(lines.get(first).start(), lines.get(i - 1).end());
-        parts.add(new Part(extent, marks.take(Math.max(mark, extent.start()), extent.end())));
-        first = i;
-      }
+    if (!found || mark == Mark.TASK || lines.size() == 1) {
+      int from = found ? matcher.end() : first.start();
+      return List.of(new Part(all, marks.take(from, all.end())));
     }
+    List<Part> parts = new ArrayList<>();
+    parts.add(new Part(first, marks.take(matcher.end(), first.end())));
+    Span rest = new Span(lines.get(1).start(), all.end());
+    parts.add(new Part(rest, marks.take(rest.start(), rest.end())));
     return parts;
   }
 
@@ -57,14 +70,5 @@ final class ParagraphMarks {
       next++;
     }
     return taken.spans();
-  }
-
-  /** Offset behind the mark that opens a line; 0 if none does. */
-  private int end(Span line, Pattern mark) {
-    if (line.isEmpty() || file.charAt(line.start()) != '[') {
-      return 0; // nearly every line
-    }
-    Matcher matcher = mark.matcher(file).region(line.start(), line.end());
-    return matcher.lookingAt() ? matcher.end() : 0;
   }
 }

@@ -28,35 +28,17 @@ final class Placeholders {
   private static final String REFERENCE =
       "&(?:#\\d{1,7}+|#[xX][\\da-fA-F]{1,6}+|[A-Za-z][\\w.-]{1,40}+);";
 
-  /** No blank, no quotation mark, and no letter of a script that writes none between words. */
-  private static final String IN_ADDRESS =
-      "[\\p{L}\\p{N}\\p{M}._~:/?#@!$&'()*+,;=%\\[\\]|{}\\-"
-          + "&&[^\\p{IsHan}\\p{IsHiragana}\\p{IsKatakana}\\p{IsThai}\\p{IsLao}\\p{IsKhmer}"
-          + "\\p{IsMyanmar}]]";
-
   /** Patterns take time to make, and most texts need none. */
   private static final class Value {
     static final Pattern PATTERN =
         Pattern.compile(BRACES + "|" + PERCENT + "|" + NUMBERED + "|" + REFERENCE);
   }
 
-  private static final class Address {
-    static final Pattern PATTERN =
-        Pattern.compile(
-            "(?<![\\w.+-])(?:(?:https?|ftps?|file|git|ssh|ircs?)://"
-                + IN_ADDRESS
-                + "++|(?:mailto:)?+[\\w.+-]{1,64}+@[\\p{L}\\d-]{1,63}+"
-                + "(?:\\.[\\p{L}\\d-]{1,63}+)++)");
-  }
-
-  /** Marks that rather close the sentence around an address than belong to it. */
-  private static final String TRAILING = ".,:;!?'";
-
   private Placeholders() {}
 
   /** The blocks with what is copied in their prose, but for what is marked as copied anyhow. */
   static List<Block> mark(String file, List<Block> blocks) {
-    if (!mayHaveValues(file) && !mayHaveAddresses(file)) {
+    if (!mayHaveValues(file) && !Addresses.mayBeIn(file)) {
       return blocks;
     }
     List<Block> marked = new ArrayList<>(blocks.size());
@@ -67,27 +49,20 @@ final class Placeholders {
   }
 
   private static Block mark(Block block, String prose) {
-    boolean addresses = mayHaveAddresses(prose);
-    boolean values = mayHaveValues(prose);
-    if (!addresses && !values) {
+    List<Span> addresses = Addresses.in(prose);
+    if (addresses.isEmpty() && !mayHaveValues(prose)) {
       return block;
     }
     List<Inline> found = new ArrayList<>();
     Offsets offsets = new Offsets(block.pieces());
+    Matcher value = Value.PATTERN.matcher(prose).useTransparentBounds(true);
     int end = 0;
-    if (addresses) {
-      Matcher address = Address.PATTERN.matcher(prose);
-      while (address.find()) {
-        if (values) {
-          addValues(found, offsets, prose, end, address.start());
-        }
-        end = addressEnd(prose, address.start(), address.end());
-        found.add(new Inline(Inline.Kind.ADDRESS, offsets.inFile(new Span(address.start(), end))));
-      }
+    for (Span address : addresses) {
+      addValues(found, offsets, value, prose, new Span(end, address.start()));
+      found.add(new Inline(Inline.Kind.ADDRESS, offsets.inFile(address)));
+      end = address.end();
     }
-    if (values) {
-      addValues(found, offsets, prose, end, prose.length());
-    }
+    addValues(found, offsets, value, prose, new Span(end, prose.length()));
     return found.isEmpty() ? block : block.with(outside(block.inlines(), found));
   }
 
@@ -98,16 +73,19 @@ final class Placeholders {
         || text.indexOf('&') >= 0;
   }
 
-  private static boolean mayHaveAddresses(String text) {
-    return text.indexOf('@') >= 0 || text.contains("://");
-  }
-
   private static void addValues(
-      List<Inline> found, Offsets offsets, String prose, int from, int to) {
-    Matcher value = Value.PATTERN.matcher(prose).region(from, to);
-    while (value.find()) {
-      Span span = offsets.inFile(new Span(value.start(), value.end()));
-      found.add(new Inline(kind(value.group()), span));
+      List<Inline> found, Offsets offsets, Matcher value, String prose, Span within) {
+    int at = within.start();
+    while (at < within.end()) {
+      char c = prose.charAt(at);
+      boolean sign = c == '{' || c == '%' || c == '<' || c == '&' || c == '$';
+      if (sign && value.region(at, within.end()).lookingAt()) {
+        Span span = offsets.inFile(new Span(at, value.end()));
+        found.add(new Inline(kind(value.group()), span));
+        at = value.end();
+      } else {
+        at++;
+      }
     }
   }
 
@@ -117,29 +95,6 @@ final class Placeholders {
             && (value.startsWith("&#")
                 || Entities.isNamedEntity(value.substring(1, value.length() - 1)));
     return known ? Inline.Kind.REFERENCE : Inline.Kind.PLACEHOLDER;
-  }
-
-  /** Without the marks behind it, and without a bracket that was opened before it. */
-  private static int addressEnd(String prose, int start, int end) {
-    int depth = 0;
-    for (int i = start; i < end; i++) {
-      depth += bracket(prose.charAt(i));
-    }
-    int to = end;
-    while (TRAILING.indexOf(prose.charAt(to - 1)) >= 0
-        || depth < 0 && bracket(prose.charAt(to - 1)) < 0) {
-      depth -= bracket(prose.charAt(to - 1));
-      to--;
-    }
-    return to;
-  }
-
-  private static int bracket(char c) {
-    return switch (c) {
-      case '(', '[', '{' -> 1;
-      case ')', ']', '}' -> -1;
-      default -> 0;
-    };
   }
 
   /** Those that do not lie in one that is copied already. Both lists are in order. */

@@ -16,7 +16,7 @@ final class PlainGroup {
   /**
    * Reads lines as one group.
    *
-   * @param lines all with prose, at least one
+   * @param lines all with prose and in the same quotation, at least one
    * @param wrapping how these lines were broken
    */
   PlainGroup(String file, List<Line> lines, Wrapping wrapping) {
@@ -40,7 +40,7 @@ final class PlainGroup {
 
   private PlainBlock start(int i) {
     Line line = lines.get(i);
-    PlainBlock block = new PlainBlock(file, kind(i), level(i), line.start());
+    PlainBlock block = new PlainBlock(file, kind(i), level(i), line.mark());
     block.append(line.text(), line.end());
     return block;
   }
@@ -49,6 +49,9 @@ final class PlainGroup {
     if (lines.get(i).isItem()) {
       return Block.Kind.ITEM;
     }
+    if (lines.get(i).quotes() > 0) {
+      return Block.Kind.QUOTATION;
+    }
     return i == 0 && isCapitalHeading() ? Block.Kind.HEADING : Block.Kind.PARAGRAPH;
   }
 
@@ -56,6 +59,7 @@ final class PlainGroup {
     return switch (kind(i)) {
       case ITEM -> itemLevel(lines.get(i).indent());
       case HEADING -> 1;
+      case QUOTATION -> lines.get(i).quotes();
       default -> 0;
     };
   }

@@ -59,9 +59,10 @@ final class RstBlocks {
   }
 
   private void add(Block.Kind kind, int level, List<Span> lines, Span extent) {
-    List<Span> pieces = MarkedLines.prose(file, lines, RstMarks::of);
-    if (!pieces.isEmpty()) {
-      blocks.add(new Block(kind, level, fromMark(extent), pieces));
+    Block block = MarkedLines.block(kind, level, extent, file, lines, RstMarks::of);
+    if (!block.pieces().isEmpty()) {
+      Span whole = fromMark(extent);
+      blocks.add(new Block(kind, level, whole, block.pieces()).with(block.inlines()));
     }
   }
 

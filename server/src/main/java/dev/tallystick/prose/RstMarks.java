@@ -1,5 +1,6 @@
 package dev.tallystick.prose;
 
+import dev.tallystick.text.Span;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
@@ -33,14 +34,16 @@ final class RstMarks {
   private final String prose;
   private final boolean[] marks;
   private final boolean[] escaped;
+  private final List<Inline> inlines;
   private final Map<String, Integer> found = new HashMap<>();
   private int at;
 
   /** Behind a mark that has just closed: there another one may begin. */
   private int fresh;
 
-  private RstMarks(String prose) {
+  private RstMarks(String prose, List<Inline> inlines) {
     this.prose = prose;
+    this.inlines = inlines;
     this.marks = new boolean[prose.length()];
     this.escaped = new boolean[prose.length() + 1];
     for (int i = 0; i < prose.length(); i++) {
@@ -48,9 +51,9 @@ final class RstMarks {
     }
   }
 
-  /** Which characters of a block are marks; its lines end in LF. */
-  static boolean[] of(String prose) {
-    RstMarks read = new RstMarks(prose);
+  /** Which characters of a block are marks, and what is marked; its lines end in LF. */
+  static boolean[] of(String prose, List<Inline> inlines) {
+    RstMarks read = new RstMarks(prose, inlines);
     while (read.at < prose.length()) {
       read.step();
     }
@@ -88,7 +91,8 @@ final class RstMarks {
       return true;
     }
     unescape(at, close);
-    return enclose(at, close, mark.length());
+    boolean strong = mark.length() > 1;
+    return enclose(at, close, mark, strong ? Inline.Kind.STRONG : Inline.Kind.EMPHASIS);
   }
 
   private boolean literal() {
@@ -97,7 +101,7 @@ final class RstMarks {
       at += 2;
       return true;
     }
-    return enclose(at, close, 2);
+    return enclose(at, close, "``", Inline.Kind.CODE);
   }
 
   /** Text in backquotes: a reference if an underscore follows, else as its role says. */
@@ -114,8 +118,10 @@ final class RstMarks {
     boolean roleBehind = role.isEmpty() && !refers && suffix > close + 1;
     mark(start, tick + 1);
     mark(close, suffix);
-    RstRole.of(refers ? "ref" : roleBehind ? prose.substring(close + 2, suffix - 1) : role, refers)
-        .mark(prose, marks, tick + 1, close);
+    String name = refers ? "ref" : roleBehind ? prose.substring(close + 2, suffix - 1) : role;
+    RstRole shown = RstRole.of(name, refers);
+    shown.mark(prose, marks, tick + 1, close);
+    add(shown.kind(), start, suffix);
     return closed(suffix);
   }
 
@@ -141,6 +147,7 @@ final class RstMarks {
       behind++;
     }
     mark(close, behind);
+    add(Inline.Kind.PLACEHOLDER, at, behind);
     return closed(behind);
   }
 
@@ -177,13 +184,20 @@ final class RstMarks {
     }
     if (behind > end && ends(behind)) {
       mark(end, behind);
+      add(Inline.Kind.LINK, at, behind);
       return closed(behind);
     }
     at = behind;
     return true;
   }
 
-  private boolean enclose(int open, int close, int length) {
+  private void add(Inline.Kind kind, int from, int to) {
+    inlines.add(new Inline(kind, new Span(from, to)));
+  }
+
+  private boolean enclose(int open, int close, String mark, Inline.Kind kind) {
+    int length = mark.length();
+    add(kind, open, close + length);
     mark(open, open + length);
     mark(close, close + length);
     return closed(close + length);

@@ -19,10 +19,49 @@ record RstRole(String name, boolean phrase) {
   private static final Set<String> LITERAL =
       Set.of("", "code", "kbd", "math", "samp", "literal", "raw", "sub", "sup", "subscript");
 
+  /** Roles whose text is copied: code, keys, and the names that programs have for things. */
+  private static final Set<String> CODE =
+      Set.of(
+          "code",
+          "literal",
+          "math",
+          "kbd",
+          "samp",
+          "raw",
+          "file",
+          "command",
+          "program",
+          "option",
+          "envvar",
+          "func",
+          "meth",
+          "class",
+          "mod",
+          "attr",
+          "data",
+          "const",
+          "exc",
+          "obj",
+          "regexp",
+          "mimetype",
+          "makevar",
+          "token",
+          "keyword",
+          "pep",
+          "rfc");
+
   static RstRole of(String name, boolean phrase) {
     String own = name.substring(name.lastIndexOf(':') + 1);
     String family = name.startsWith("cite:") ? "cite" : own;
     return new RstRole(family.toLowerCase(Locale.ROOT), phrase);
+  }
+
+  /** What its text is to a reader. */
+  Inline.Kind kind() {
+    if (CODE.contains(name) && !phrase) {
+      return Inline.Kind.CODE;
+    }
+    return phrase || LABELS.contains(name) ? Inline.Kind.LINK : Inline.Kind.EMPHASIS;
   }
 
   /** Marks what of the text between two offsets is not shown: targets and signs for them. */

@@ -44,7 +44,7 @@ final class StatedLanguage {
 
   /** {@code lang} or {@code language} in front matter, as YAML or TOML have it, on its own line. */
   static Optional<String> inFrontMatter(Text text) {
-    int end = Math.min(FrontMatter.end(text), HEAD);
+    int end = Math.min(FrontMatter.of(text).end(), HEAD);
     for (int line = 1; line < text.lines() && text.lineStart(line) < end; line++) {
       String words = line(text, line);
       if (words.startsWith("[")) {
@@ -63,7 +63,7 @@ final class StatedLanguage {
   /** The attribute {@code lang} in the header, which ends with the first blank line behind it. */
   static Optional<String> inAsciiDoc(Text text) {
     boolean begun = false;
-    int first = text.place(FrontMatter.end(text)).line();
+    int first = text.place(FrontMatter.of(text).end()).line();
     for (int line = first; line < text.lines() && text.lineStart(line) < HEAD; line++) {
       String words = line(text, line);
       Matcher matcher = ATTRIBUTE.matcher(words);

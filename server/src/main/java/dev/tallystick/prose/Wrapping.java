@@ -1,5 +1,6 @@
 package dev.tallystick.prose;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 
@@ -15,7 +16,8 @@ record Wrapping(int width, int pairs) {
   private static final int WIDEST = 120;
 
   /** Judges lines from their widths, their last and their first characters. */
-  static Wrapping of(String file, List<Line> lines) {
+  static Wrapping of(String file, List<Line> all) {
+    List<Line> lines = withoutSignatures(file, all);
     int[] widths = new int[lines.size()];
     int pairs = 0;
     for (int i = 0; i + 1 < lines.size(); i++) {
@@ -91,10 +93,24 @@ record Wrapping(int width, int pairs) {
         && tooLong <= prose / 10 + 1;
   }
 
+  /** A name and an address below a letter tell nothing. */
+  private static List<Line> withoutSignatures(String file, List<Line> lines) {
+    List<Line> letter = new ArrayList<>(lines.size());
+    boolean signature = false;
+    for (Line line : lines) {
+      signature = line.opensSignature(file) || signature && !line.isBlank();
+      if (!signature) {
+        letter.add(line);
+      }
+    }
+    return letter;
+  }
+
   private static boolean isPair(List<Line> lines, int i) {
     return i + 1 < lines.size()
         && lines.get(i).isProse()
         && lines.get(i + 1).isProse()
+        && lines.get(i).isBeside(lines.get(i + 1))
         && !lines.get(i + 1).isItem();
   }
 

@@ -4,6 +4,7 @@ import dev.tallystick.prose.MarkupEvents.What;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
 import java.util.ArrayDeque;
+import java.util.ArrayList;
 import java.util.Collections;
 import java.util.Deque;
 import java.util.IdentityHashMap;
@@ -31,6 +32,7 @@ final class Xml implements NodeVisitor {
   private final Its its;
   private final XmlNesting nesting;
   private final MarkupEvents events = new MarkupEvents();
+  private final List<Inline> inlines = new ArrayList<>();
   private final Set<Element> parents = Collections.newSetFromMap(new IdentityHashMap<>());
   private final Deque<XmlPlace> places = new ArrayDeque<>();
 
@@ -52,7 +54,8 @@ final class Xml implements NodeVisitor {
     Xml xml = new Xml(file, vocabulary, document);
     document.traverse(xml);
     Set<String> entities = XmlEntities.of(document, file);
-    return xml.events.blocks(() -> new MarkupFlow(file, xml.parents, entities));
+    List<Block> blocks = xml.events.blocks(() -> new MarkupFlow(file, xml.parents, entities));
+    return Inline.spread(blocks, xml.inlines);
   }
 
   @Override
@@ -113,7 +116,15 @@ final class Xml implements NodeVisitor {
       }
       case ASIDE -> events.add(What.ASIDE, tag.start(), around.context());
       case SPACED, PARTED -> events.add(What.BLANK, tag.start(), around.context());
-      case INLINE -> {}
+      case INLINE -> {
+        MarkupContext context = inside.context();
+        boolean copied = context.code() && !around.context().code();
+        boolean fixed = context.fixed() && !around.context().fixed();
+        if ((copied || fixed) && !tag.isEmpty()) {
+          int end = Math.max(tag.end(), Html.span(element.endSourceRange()).end());
+          inlines.add(new Inline(Inline.Kind.CODE, new Span(tag.start(), end)));
+        }
+      }
     }
     if (!inside.context().fixed() && !tag.isEmpty()) {
       element.attributes().forEach(attribute -> read(attribute, element, inside));

@@ -55,6 +55,14 @@ public record Segment(
     return block.kind() == Block.Kind.VERBATIM;
   }
 
+  /**
+   * How much it says, in letters of an alphabet: its length, where a character of a dense script
+   * counts for several.
+   */
+  public int weight() {
+    return length + Density.surplus(prose);
+  }
+
   /** Its prose with a blank in place of each character of what is copied. */
   public String withoutCopied() {
     char[] left = null;

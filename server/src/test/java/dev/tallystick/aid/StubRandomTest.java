@@ -11,8 +11,8 @@ import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
 import dev.tallystick.text.Span;
 import dev.tallystick.text.Text;
-import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
 import java.util.stream.IntStream;
@@ -53,26 +53,32 @@ class StubRandomTest {
           "\\",
           "`x`");
 
-  /** In XML a line end parts nothing, so that without these a text would be one paragraph. */
-  private static final List<String> TAGS =
-      List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n");
+  /** Without these, texts of such a format would have hardly a sentence that could be put in. */
+  private static final Map<Format, List<String>> MORE =
+      Map.of(
+          Format.SUBRIP,
+          List.of(
+              "\n\n00:01:00,000 --> 00:01:02,000\n", "\n\n7\n00:02:00,000 --> 00:02:02,000\n- "),
+          Format.WEBVTT,
+          List.of("\n\n00:01.000 --> 00:02.000\n", "\n\n00:02.000 --> 00:04.000 line:0\n- "),
+          Format.HTML,
+          List.of("\n<p>The gate is <b>shut</b>.</p>\n", "\n<p>Bring 2 ropes &amp; an oar.</p>\n"),
+          Format.XML,
+          List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n"));
 
-  private static List<String> pieces(Format format) {
-    List<String> pieces = new ArrayList<>(PIECES);
-    pieces.addAll(format == Format.XML ? TAGS : List.of());
-    return pieces;
-  }
-
-  private static String text(Random random, List<String> pieces) {
+  private static String text(Random random, Format format) {
+    List<String> more = MORE.getOrDefault(format, List.of());
     StringBuilder text = new StringBuilder();
     for (int i = random.nextInt(30); i > 0; i--) {
+      boolean own = !more.isEmpty() && random.nextInt(2) == 0;
+      List<String> pieces = own ? more : PIECES;
       text.append(pieces.get(random.nextInt(pieces.size())));
     }
     return text.toString();
   }
 
   private static Reading read(Random random, Format format, String language) {
-    return Reading.of(new Text(text(random, pieces(format))), format, language, Cancellation.NONE);
+    return Reading.of(new Text(text(random, format)), format, language, Cancellation.NONE);
   }
 
   @ParameterizedTest

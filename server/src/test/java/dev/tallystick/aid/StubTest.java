@@ -240,7 +240,7 @@ class StubTest {
     markdown(
         "---\ntitle: x\n---\n\nRow the boat.\n",
         "---\ntitle: x\n---\n",
-        "0-",
+        "0-0 1-",
         "---\ntitle: x\n---\n\nRow the boat.\n");
   }
 

@@ -123,6 +123,27 @@ class AsianAndHebrewPairsTest {
             CHINESE_AFTER);
   }
 
+  /** A character says as much as three letters; what is copied is as long as in the source. */
+  @Test
+  void aSentenceCutShortIsFoundInChinese() {
+    PairCheck.of("en", "zh")
+        .check(
+            CHINESE_BEFORE,
+            """
+            ¶ The candles burn for 4 hours and are changed at midnight by the night watch.
+            | 蜡烛能燃4个小时，由守夜人在午夜更换。
+            Write the name of the maker, Qiu & Daughters, on the rim with a brush, let it dry for an
+            | 用毛笔写上名字 Qiu & Daughters。 !length
+            The workshop of Qiu & Daughters sends new frames by Wenshan Parcel Post.
+            | Qiu & Daughters 的作坊通过 Wenshan Parcel Post 寄来新的框架。
+            """
+                .replace(
+                    "dry for an",
+                    "dry for an hour, and hang the lantern in the yard until the night watch has come"
+                        + " round to see whether the letters can be read from the other side."),
+            CHINESE_AFTER);
+  }
+
   @Test
   void anAddedSentenceIsFoundInChinese() {
     PairCheck.of("en", "zh")

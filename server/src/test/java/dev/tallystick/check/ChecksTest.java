@@ -172,6 +172,49 @@ class ChecksTest {
     assertEquals(OnSide.SOURCE, OnSide.TARGET.other());
   }
 
+  @Test
+  void theMoreVigilantHearsOfMore() {
+    Subject subject = missing(SECTIONS, false, 4, 5); // with a posterior of 0.8
+    assertEquals(0, told(subject, Vigilance.QUIET));
+    assertEquals(1, told(subject, Vigilance.BALANCED));
+    double[] doubt = new double[subject.source().size()];
+    doubt[2] = 0.3;
+    List<Match> matches = new ArrayList<>();
+    for (int i = 0; i < doubt.length; i++) {
+      matches.add(new Match(i, i + 1, i, i + 1, 1 - doubt[i]));
+    }
+    Alignment doubtful =
+        new Alignment(matches, doubt, new double[doubt.length], List.of(), LENGTHS);
+    Subject whole = new Subject(subject.source(), subject.source(), "de", doubtful, false);
+    assertEquals(0, told(whole, Vigilance.BALANCED));
+    assertEquals(1, told(whole, Vigilance.THOROUGH));
+    assertEquals(Optional.of(Vigilance.QUIET), Vigilance.of("quiet"));
+    assertEquals(Optional.empty(), Vigilance.of("deaf"));
+  }
+
+  private static int told(Subject subject, Vigilance vigilance) {
+    return Checks.findings(subject, Pending.of(subject), vigilance).size();
+  }
+
+  @Test
+  void theSentenceBeforePendingTextIsNotTooShortYet() {
+    String stop = " and again".repeat(12) + ".";
+    String whole = "He knocks" + stop + " He rings" + stop + " He calls" + stop;
+    List<Segment> source = segments(whole + " He sings" + stop + " She waits" + stop);
+    List<Segment> target = segments(whole.replace("He", "Er") + " Er singt und.");
+    List<Match> matches = new ArrayList<>();
+    for (int i = 0; i < 4; i++) {
+      matches.add(new Match(i, i + 1, i, i + 1, 1));
+    }
+    matches.add(new Match(4, 5, 4, 4, 1));
+    double[] last = {0, 0, 0, 0, 1};
+    Alignment alignment = new Alignment(matches, last, new double[4], List.of(), LENGTHS);
+    assertEquals(List.of(), Checks.findings(new Subject(source, target, "de", alignment, true)));
+    List<Finding> finished = Checks.findings(new Subject(source, target, "de", alignment, false));
+    assertEquals(
+        List.of(Code.OMISSION, Code.LENGTH), finished.stream().map(Finding::code).toList());
+  }
+
   /** A text of short sentences, which may stay as they are, against itself with some left out. */
   private static Subject missing(String text, boolean draft, int from, int to) {
     List<Segment> source = segments(text);

@@ -215,6 +215,15 @@ class EnglishGermanPairsTest {
   }
 
   @Test
+  void twoSentencesThatChangedPlacesAreOneFindingOfOrder() {
+    check(
+        """
+        ¶ Emmerik ferries Lowther and Pennant at 8.15. / Odile ferries Quillby, Marchbanks, Tollander, Okafor, Gantry and Crumlin at 10.45 from Harrow.
+        | Odile fährt Quillby, Marchbanks, Tollander, Okafor, Gantry und Crumlin um 10.45 ab Harrow. / Emmerik fährt Lowther und Pennant um 8.15. !order
+        """);
+  }
+
+  @Test
   void aParagraphPartedInTwoIsSilent() {
     check(
         """

@@ -25,6 +25,15 @@ class LevelsTest {
   }
 
   @Test
+  void aFindingThatIsMoreQuietThanItsCodeStaysSo() {
+    List<Finding> note = List.of(finding(Code.ADDITION).at(Severity.HINT));
+    Levels other = new Levels(Map.of(Code.LENGTH, Optional.empty()));
+    assertEquals("addition hint, ", print(other.apply(note)));
+    Levels same = new Levels(Map.of(Code.ADDITION, Optional.of(Severity.WARNING)));
+    assertEquals("addition warning, ", print(same.apply(note)));
+  }
+
+  @Test
   void withoutAProjectEachCodeHasItsOwnLevel() {
     assertSame(FINDINGS, Levels.USUAL.apply(FINDINGS));
     assertEquals("omission warning, length information, order information, ", print(FINDINGS));

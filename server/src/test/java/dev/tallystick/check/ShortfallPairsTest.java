@@ -9,8 +9,8 @@ class ShortfallPairsTest {
     PairCheck.of("en", "de")
         .draft(
             """
-            # today: the two sentences before the hole are taken for two of it; they should keep their
-            # counterparts, and the nine of the hole be pending
+            # today: the two sentences before the hole are taken for the first and the last of it; they
+            # should keep their counterparts, and the nine of the hole be pending
             ¶ # Fire drill in the paper store
             | # Brandübung im Papierlager
             ¶ The alarm in hall 3 is tested on the first Monday of the month, at 10.15 sharp.
@@ -22,27 +22,27 @@ class ShortfallPairsTest {
             ¶ ## What to carry
             | ## Was mitzunehmen ist
             ¶ Take your coat and nothing else; the ledgers stay where they are, in cabinet 12.
-            | - !omission
+            | - ~
             The cat of the bindery has her own basket, which hangs beside the clock.
-            | - !...
+            | - ~
             ¶ Do not run on the stairs, and do not go back for the 2 canaries of the accountant.
-            | Nehmen Sie den Mantel und sonst nichts; die Bücher bleiben, wo sie sind, in Schrank 12.
+            | Nehmen Sie den Mantel und sonst nichts; die Bücher bleiben, wo sie sind, in Schrank 12. ~
             ¶ They are fireproof, he says, but we have never had the heart to find out.
-            | - !omission
+            | - ~
             ¶ The lift stops at floor 2 as soon as the bell rings, and its doors stay open.
-            | - !...
+            | - ~
             Whoever is inside walks down by the iron steps on the yard side of the building.
-            | - !...
+            | - ~
             ¶ The hoses are older than the house, but they are dried and rolled every week.
-            | - !...
+            | - ~
             Only the people with a blue badge may open the hydrants, and only in pairs.
-            | - !...
+            | - ~
             ¶ Buckets of sand stand under each window, and they are not meant for cigarettes.
-            | - !...
+            | - ~
             If one of them is empty, tell the caretaker, who keeps 9 sacks in the cellar.
-            | - !...
+            | - ~
             ¶ Last spring the rain came through the roof and did more harm than any fire.
-            | Die Katze der Buchbinderei hat einen eigenen Korb, der neben der Uhr hängt. !...
+            | Die Katze der Buchbinderei hat einen eigenen Korb, der neben der Uhr hängt. ~
             ¶ ## Afterwards
             | ## Danach
             ¶ When the porter has counted 46 heads, he blows the whistle twice.

@@ -9,7 +9,6 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import dev.tallystick.pairing.Language;
 import dev.tallystick.prose.Format;
 import dev.tallystick.run.Cancellation;
-import dev.tallystick.segment.Srx;
 import dev.tallystick.text.Text;
 import java.nio.file.Path;
 import java.util.Optional;
@@ -24,7 +23,8 @@ class PairStateTest {
   private final Sheet source = sheet("The bell rings.", "en");
 
   private static Sheet sheet(String text, String language) {
-    return new Sheet(new Text(text), Format.MARKDOWN, Tongue.of(new Language(language)), Srx.NONE);
+    Tongue tongue = Tongue.of(new Language(language));
+    return new Sheet(new Text(text), Format.MARKDOWN, tongue, TextRules.USUAL);
   }
 
   private Task take(Sheet target) {

@@ -16,6 +16,7 @@ import org.eclipse.lsp4j.WorkspaceFolder;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /** What the user sets, and what the user is asked. */
@@ -208,6 +209,28 @@ class SettingsSessionTest {
         talk.pass(700);
         assertEquals(List.of("omission", "omission"), talk.codes(work.en()));
       }
+    }
+  }
+
+  /** Found by trying each sentence: one that is missed when quiet, one that only the last finds. */
+  @ParameterizedTest
+  @CsvSource({"Der Wärter am Tor fegt, 0, 1, 1", "Klemmt die Kette, 0, 0, 1"})
+  void whoIsMoreVigilantHearsOfMore(String missing, int quiet, int balanced, int thorough) {
+    Work work = new Work(folder);
+    work.write("en/ferry.md", Ferry.EN);
+    try (Talk talk = Talk.in(folder)) {
+      talk.open(work.de(), Ferry.DE.replace(Ferry.line(Ferry.DE, missing) + "\n", "\n"));
+      talk.settle();
+      assertEquals(balanced, talk.codes(work.en()).size());
+      push(talk, Map.of("vigilance", "quiet"));
+      assertEquals(quiet, talk.codes(work.en()).size());
+      push(talk, Map.of("vigilance", "thorough"));
+      assertEquals(thorough, talk.codes(work.en()).size());
+
+      push(talk, Map.of("vigilance", "paranoid"));
+      assertEquals(balanced, talk.codes(work.en()).size());
+      assertEquals(1, talk.said.size());
+      assertTrue(talk.said.get(0).contains("quiet, balanced or thorough"), talk.said.get(0));
     }
   }
 

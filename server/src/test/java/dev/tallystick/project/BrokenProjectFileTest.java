@@ -136,7 +136,7 @@ class BrokenProjectFileTest {
     check(
         """
         { "x": 007 }
-          ^^^ "x" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
+          ^^^ "x" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, frontMatter, ignore.
                ^^^ This cannot stand here. Perhaps a comma, a colon or a bracket is missing before it. What stands behind this place does not count.
         =>
         """);

@@ -68,8 +68,8 @@ class ProjectFileTest {
     check(
         """
         { "colour": { "red": [1, 2] }, "ignore": ["a"], "Pairs": [],
-          ^^^^^^^^ "colour" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
-                                                        ^^^^^^^ "Pairs" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
+          ^^^^^^^^ "colour" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, frontMatter, ignore.
+                                                        ^^^^^^^ "Pairs" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, frontMatter, ignore.
           "pairs": [{ "source": "a.md", "target": "b.md", "lang": "de" }],
                                                           ^^^^^^ "lang" means nothing here. Allowed are: source, target, sourceLanguage, targetLanguage.
           "checks": { "omision": "off", "order": "off" } }
@@ -86,7 +86,7 @@ class ProjectFileTest {
     check(
         """
         { "a key that somebody has written in a whole sentence": 1 }
-          ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ "a key that somebody has written in a who..." means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
+          ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ "a key that somebody has written in a who..." means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, frontMatter, ignore.
         =>
         """);
   }
@@ -280,7 +280,7 @@ class ProjectFileTest {
         """
         { "ignore": ["🔔/\\u00e4", 7, "b\\"c"], "🔔": 1 }
                                   ^ A name to ignore must be a text between quotation marks.
-                                              ^^^^ "🔔" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, ignore.
+                                              ^^^^ "🔔" means nothing here. Allowed are: sourceLanguage, pairs, checks, segmentation, frontMatter, ignore.
         =>
         ignore 🔔/ä
         ignore b"c
@@ -301,6 +301,29 @@ class ProjectFileTest {
     assertEquals("fr", Project.NONE.rules(user).sourceLanguage().orElseThrow().tag());
     Project project = ProjectFile.of(new Text("{\"sourceLanguage\": \"de\"}")).project();
     assertEquals("de", project.rules(user).sourceLanguage().orElseThrow().tag());
+  }
+
+  @Test
+  void keysOfFrontMatter() {
+    ProjectTable.check(
+        """
+        { "frontMatter": ["title", "teaser", 3, "title"] }
+                                             ^ A key of front matter must be a text between quotation marks.
+        =>
+        front matter [teaser, title]
+        """);
+    ProjectTable.check(
+        """
+        { "frontMatter": [] }
+        =>
+        front matter []
+        """);
+    ProjectTable.check(
+        """
+        { "frontMatter": "title" }
+                         ^^^^^^^ "frontMatter" must be a list between [ and ].
+        =>
+        """);
   }
 
   @Test

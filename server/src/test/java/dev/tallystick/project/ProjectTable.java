@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import dev.tallystick.pairing.Language;
 import dev.tallystick.pairing.PairRule;
+import dev.tallystick.prose.FrontMatterKeys;
 import dev.tallystick.text.Place;
 import dev.tallystick.text.Problem;
 import dev.tallystick.text.Span;
@@ -11,6 +12,7 @@ import dev.tallystick.text.Text;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.TreeSet;
 import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
@@ -96,6 +98,9 @@ final class ProjectTable {
                 lines.add("check " + code.word() + " " + level.map(l -> l.word()).orElse("off")));
     lines.subList(lines.size() - project.levels().changed().size(), lines.size()).sort(null);
     project.segmentation().ifPresent(file -> lines.add("segmentation " + file));
+    if (!project.frontMatter().equals(FrontMatterKeys.USUAL)) {
+      lines.add("front matter " + new TreeSet<>(project.frontMatter().names()));
+    }
     project.ignored().forEach(glob -> lines.add("ignore " + glob));
     return lines.stream().map(line -> line + "\n").collect(Collectors.joining());
   }

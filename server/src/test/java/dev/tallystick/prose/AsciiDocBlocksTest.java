@@ -205,6 +205,31 @@ class AsciiDocBlocksTest {
     }
   }
 
+  @Test
+  void footnotesComeBehindTheBlockThatTheyStandIn() {
+    String file = "== Oilfootnote:[Of whales.]\n\nA footnote:[One.] B.\nC.footnote:[Two\nlines.]\n";
+    Extraction.assertBlocks(
+        Format.ASCIIDOC,
+        file,
+        """
+        HEADING 2: Oil
+        NOTE: Of whales.
+        PARAGRAPH: A  B.⏎C.
+        NOTE: One.
+        NOTE: Two⏎lines.
+        """);
+    Extraction.assertExtents(
+        Format.ASCIIDOC,
+        file,
+        """
+        == Oilfootnote:[Of whales.]
+        footnote:[Of whales.]
+        A footnote:[One.] B.⏎C.footnote:[Two⏎lines.]
+        footnote:[One.]
+        footnote:[Two⏎lines.]
+        """);
+  }
+
   private static void blocks(String source, String expected) {
     Extraction.assertBlocks(Format.ASCIIDOC, source, expected);
   }

@@ -64,11 +64,21 @@ class AsciiDocInlineMaskTest {
   }
 
   @Test
-  void footnotesAreLeftOut() {
+  void footnotes() {
     mask(
         """
         The tide footnote:[It *comes* twice, see https://a.example[this].] turned.footnote:x[]
-        The tide ························································· turned.············
+        The tide ··········It ·comes· twice, see ··················this·.· turned.············
+        One footnote:b[goes
+        One ···········goes
+        on, footnote:[no] and] on footnoteref:[c, Old] and footnoteref:[b].
+        on, ············· and· on ··············· Old· and ···············.
+        |===
+        ····
+        | Oil footnote:[of *whales*] | Wick
+        ··Oil ··········of ·whales·····Wick
+        |===
+        ····
         """);
   }
 

@@ -75,6 +75,55 @@ class InlinesTest {
   }
 
   @Test
+  void restructuredText() {
+    assertInlines(
+        Format.RST,
+        """
+        Press ``?`` or :kbd:`F1`, *not* **both**,
+        see :ref:`the locks <locks>`, `the map`_ and |keeper|.
+        """,
+        """
+        CODE ``?``
+        CODE :kbd:`F1`
+        EMPHASIS *not*
+        STRONG **both**
+        LINK :ref:`the locks <locks>`
+        LINK `the map`_
+        PLACEHOLDER |keeper|
+        """);
+  }
+
+  @Test
+  void latex() {
+    assertInlines(
+        Format.LATEX,
+        """
+        Press \\verb|?| where $a. > b$ and then $c > d.$
+        """,
+        """
+        CODE ?
+        CODE $a. > b$
+        CODE $c > d
+        """);
+  }
+
+  @Test
+  void xml() {
+    assertInlines(
+        Format.XML,
+        """
+        <article xmlns="http://docbook.org/ns/docbook"><title>Locks</title>
+        <para>Press <keycap>?</keycap> or call <code>open?</code> for
+        <phrase translate="no">Lock &amp; Co.</phrase>.</para></article>
+        """,
+        """
+        CODE <keycap>?</keycap>
+        CODE <code>open?</code>
+        CODE <phrase translate="no">Lock &amp; Co.</phrase>
+        """);
+  }
+
+  @Test
   void htmlElementsThatReachOverBlocksBelongToTheFirst() {
     assertInlines(
         Format.HTML, "<b><p>One.</p><p>Two.</p></b>", "STRONG <b><p>One.</p><p>Two.</p></b>\n");

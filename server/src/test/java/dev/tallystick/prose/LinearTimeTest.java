@@ -38,10 +38,25 @@ class LinearTimeTest {
         "a\\\n",
         "a  \n",
         "&",
-        "[[]]()"
+        "[[]]()",
+        "[^a]: ",
+        "[^a]: b\n\n    ",
+        ":::a\n",
+        ":::",
+        "!!! a\n",
+        "!!! a \"\n    ",
+        "=== \"",
+        "> [!A]\n",
+        "{{<",
+        "{{% {{<",
+        "{%",
+        "{#a",
+        "{{< a >}}\n",
+        "{#a} "
       })
   void markdownEnds(String fragment) {
     assertEnds(Format.MARKDOWN, fragment);
+    assertEnds(Format.MDX, fragment);
   }
 
   @ParameterizedTest
@@ -58,6 +73,8 @@ class LinearTimeTest {
         "漢",
         "A B\n===\n",
         "\t",
+        ">",
+        "> a\n",
         "{",
         "{{ ",
         "{a}",
@@ -234,6 +251,9 @@ class LinearTimeTest {
         "image:a[b=",
         "footnote:[",
         "footnote:[] ",
+        "footnote:[a]\n",
+        "footnoteref:[a,b] ",
+        "footnote:[a\n",
         "* ",
         "* a\n",
         "* a\n+\n",

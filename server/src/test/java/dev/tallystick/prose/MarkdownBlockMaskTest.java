@@ -164,7 +164,7 @@ class MarkdownBlockMaskTest {
         # about
         ·······
         title: The ferry
-        ················
+        ·······The ferry
         tags: [a]
         ·········
         ---
@@ -183,7 +183,7 @@ class MarkdownBlockMaskTest {
         +++
         ···
         title = "The ferry"
-        ···················
+        ·········The ferry·
         +++
         ···
         Prose.

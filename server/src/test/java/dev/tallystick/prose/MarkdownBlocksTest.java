@@ -163,10 +163,10 @@ class MarkdownBlocksTest {
         "here"
         """,
         """
-        PARAGRAPH: Word
-        PARAGRAPH: Two words⏎go on
-        PARAGRAPH: Three more words
-        QUOTATION 1: Quoted⏎"here"
+        NOTE: Word
+        NOTE: Two words⏎go on
+        NOTE: Three more words
+        NOTE: Quoted⏎"here"
         """);
   }
 

@@ -45,6 +45,54 @@ class PlainTextBlocksTest {
   }
 
   @Test
+  void whatALetterQuotesIsJoinedByItsMarks() {
+    blocks(
+        """
+        The harbour master answered at once and asked for the log of the whole
+        winter, with the hours of fog.
+        On Monday Mira wrote:
+        > The lamp went out twice in the night from Sunday to Monday, and both
+        > times I had to climb up there and light it again by hand. It was not
+        > the oil.
+        >> Was it the oil? The last barrel that came from Velm had water in it,
+        >> or so says the keeper of the other tower.
+        >
+        > Bring:
+        > - rope
+        > - a new wick of the kind that we had before the storm, the broad one
+        >   with the red thread
+        I shall come on Friday with the noon boat, if there is one, and look at
+        the burner myself.
+        --\s
+        Tomas Orr
+        Harbour office
+        """,
+        """
+        PARAGRAPH: The harbour master answered at once and asked for the log of the whole⏎winter,\
+         with the hours of fog.
+        PARAGRAPH: On Monday Mira wrote:
+        QUOTATION 1: The lamp went out twice in the night from Sunday to Monday, and both⏎times I\
+         had to climb up there and light it again by hand. It was not⏎the oil.
+        QUOTATION 2: Was it the oil? The last barrel that came from Velm had water in it,⏎or so\
+         says the keeper of the other tower.
+        QUOTATION 1: Bring:
+        ITEM 1: rope
+        ITEM 1: a new wick of the kind that we had before the storm, the broad one⏎with the red\
+         thread
+        PARAGRAPH: I shall come on Friday with the noon boat, if there is one, and look at⏎the\
+         burner myself.
+        PARAGRAPH: Tomas Orr
+        PARAGRAPH: Harbour office
+        """);
+  }
+
+  @Test
+  void theMarksOfAQuotationAreInItsBlock() {
+    Extraction.assertExtents(
+        Format.PLAIN, "He wrote:\n > > Fog.\n>- rope\n", "He wrote:\n> > Fog.\n>- rope\n");
+  }
+
+  @Test
   void shortLinesAreABlockEach() {
     blocks(
         "Cast off\nHoist the sail\nTurn back\n",

@@ -54,6 +54,33 @@ class PlainTextMaskTest {
   }
 
   @Test
+  void marksOfQuotationsAreNotProse() {
+    mask(
+        """
+        On Monday Mira wrote:
+        On Monday Mira wrote:
+        > The lamp is out. >Now< it is dark.
+        ··The lamp is out. >Now< it is dark.
+        >The oil too.
+        ·The oil too.
+        >
+        ·
+        >> Who has the key?
+        ···Who has the key?
+        > > - rope
+        ······rope
+         >   an indent
+        ·····an indent
+        a > b
+        a > b
+        --\s
+        ···
+        Tomas
+        Tomas
+        """);
+  }
+
+  @Test
   void aNumberAloneIsProse() {
     mask(
         """

@@ -73,7 +73,8 @@ class NearStopsTest {
     return borders;
   }
 
-  private static List<Integer> near(BreakIterator iterator, String prose) {
+  /** The borders that the iterator finds in what is left of a text. */
+  static List<Integer> near(BreakIterator iterator, String prose) {
     NearStops near = new NearStops(prose);
     List<Integer> borders = new ArrayList<>();
     iterator.setText(near.string());

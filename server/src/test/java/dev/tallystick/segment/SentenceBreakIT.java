@@ -1,4 +1,4 @@
-package dev.tallystick.opendata;
+package dev.tallystick.segment;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -14,11 +14,14 @@ import org.junit.jupiter.api.Test;
 
 /**
  * Unicode's own test of sentence borders (UAX #29), as Debian packs it, on the iterator that the
- * segmenter starts from; the segmenter's repairs and trimming are not part of the rules.
+ * segmenter starts from, and on the part of a text that the segmenter shows to it; the segmenter's
+ * repairs and trimming are not part of the rules.
  */
 class SentenceBreakIT {
   private static final Path FILE = Path.of("/usr/share/unicode/auxiliary/SentenceBreakTest.txt");
   private static final int LEAST_CASES = 500;
+  private static final int LEAST_WITHOUT_LINE_ENDS = 300;
+  private static final String LINE_ENDS = "\n\r\u0085\u2028\u2029";
 
   private final BreakIterator sentences = BreakIterator.getSentenceInstance(ULocale.ROOT);
 
@@ -38,6 +41,20 @@ class SentenceBreakIT {
     }
     assertTrue(cases.size() >= LEAST_CASES, "only " + cases.size() + " cases");
     assertEquals(List.of(), differing);
+  }
+
+  /** A block has no line ends: they are blanks by then. */
+  @Test
+  void bordersNearStopsAreThoseOfTheStandard() {
+    int tried = 0;
+    for (Case one : cases(Repository.read(FILE).lines().toList())) {
+      if (one.text().chars().noneMatch(c -> LINE_ENDS.indexOf(c) >= 0)) {
+        List<Integer> inside = one.borders().subList(1, one.borders().size() - 1);
+        assertEquals(inside, NearStopsTest.near(sentences, one.text()), one.source());
+        tried++;
+      }
+    }
+    assertTrue(tried >= LEAST_WITHOUT_LINE_ENDS, "only " + tried + " cases");
   }
 
   private List<Integer> borders(String text) {
