@@ -10,6 +10,7 @@ import java.util.List;
  * @param fit the parameters
  * @param background how long the sentences of the translation are
  * @param lexicon what its words stand for
+ * @param rarity how rare the words are that stood in both texts
  * @param lengths the lengths of single sentences that stand for each other
  * @param merged those of several
  * @param sources how many units the source had
@@ -19,6 +20,7 @@ record Calibration(
     Fit fit,
     Background background,
     Lexicon lexicon,
+    Rarity rarity,
     LengthTable lengths,
     LengthTable merged,
     int sources,
@@ -60,14 +62,16 @@ record Calibration(
     }
     return timed && fit.clock() == null
         ? learnt(sides.untimed(), cancellation) // they misled: as if there were none
-        : new Learnt(of(fit, known.background(), lexicon, sides), chain);
+        : new Learnt(of(fit, known.background(), lexicon, shared.rarity(), sides), chain);
   }
 
-  private static Calibration of(Fit fit, Background background, Lexicon lexicon, Sides sides) {
+  private static Calibration of(
+      Fit fit, Background background, Lexicon lexicon, Rarity rarity, Sides sides) {
     return new Calibration(
         fit,
         background,
         lexicon,
+        rarity,
         new LengthTable(fit.lengths()),
         Evidence.merged(fit.lengths()),
         sides.source().size(),

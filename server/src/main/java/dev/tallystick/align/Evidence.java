@@ -54,7 +54,7 @@ final class Evidence implements Scorer {
   private final Side source;
   private final Side target;
   private final Background background;
-  private final LinkWords shared;
+  private final UnitWords shared;
   private final LinkWords words;
   private final Fit fit;
   private final LengthTable lengths;
@@ -97,7 +97,10 @@ final class Evidence implements Scorer {
   /** By what two texts have taught, or an earlier state of them. */
   static Evidence calibrated(Sides sides, Calibration calibration, LinkWords words) {
     Background background = calibration.background().of(sides.target());
-    Texts texts = new Texts(sides, background, new LateWords(sides), words);
+    Unit[] source = sides.source().units;
+    Unit[] target = sides.target().units;
+    UnitWords shared = (s, t) -> calibration.rarity().alike(source[s], target[t]);
+    Texts texts = new Texts(sides, background, shared, words);
     return new Evidence(
         texts, calibration.fit(), calibration.lengths(), calibration.merged(), Shape.ADAPTIVE);
   }
@@ -108,7 +111,7 @@ final class Evidence implements Scorer {
   }
 
   /** What stays the same while the parameters of a pair are fitted. */
-  record Texts(Sides sides, Background background, LinkWords shared, LinkWords words) {
+  record Texts(Sides sides, Background background, UnitWords shared, LinkWords words) {
     static Texts of(Sides sides) {
       return of(sides, new SharedWords(sides.source(), sides.target()));
     }

@@ -18,10 +18,10 @@ final class SharedWords implements LinkWords {
   /** Words count less than their likelihood ratio says, since they are not independent. */
   private static final double WEIGHT = 0.5;
 
-  private static final double FLOOR = 0.1;
+  static final double FLOOR = 0.1;
 
   /** A word that makes up more than one in so many says nothing about place. */
-  private static final double RARE = 60;
+  static final double RARE = 60;
 
   /** Words trusted less are no anchors. */
   private static final double TRUSTED = 0.5;
@@ -77,6 +77,11 @@ final class SharedWords implements LinkWords {
     placeGiven();
     this.plain = plain();
     this.near = new Near[made.length];
+  }
+
+  /** How rare the words are that stand in both texts. */
+  Rarity rarity() {
+    return new Rarity(vocabulary, rarity);
   }
 
   /** The words that stand once in either text, in the order of the made one. */

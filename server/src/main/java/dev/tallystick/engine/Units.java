@@ -68,7 +68,7 @@ final class Units {
             verbatim ? -1 : kind(segment.block()),
             verbatim ? Closing.OPEN : segment.closing(),
             segment.shown());
-    Unit known = before.get(content);
+    Unit known = now.containsKey(content) ? now.get(content) : before.get(content);
     Unit unit = known == null ? made(text, segment) : known;
     now.put(content, unit);
     return unit;

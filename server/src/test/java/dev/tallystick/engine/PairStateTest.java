@@ -81,4 +81,26 @@ class PairStateTest {
     assertTrue(task.cancelled());
     assertThrows(Cancellation.Cancelled.class, target::reading);
   }
+
+  @Test
+  void whatWasJudgedByEarlierTextsIsLearntFromAtRest() {
+    Task first = take(sheet("Die Glocke läutet.", "de"));
+    pair.finish(first, result(first));
+    assertEquals(Optional.empty(), pair.rest());
+
+    Sheet edited = sheet("Die Glocke läutet jetzt.", "de");
+    Task typed = pair.take(Optional.of(source), Optional.of(edited), true, true).orElseThrow();
+    assertTrue(typed.known().isPresent());
+    assertEquals(Optional.empty(), pair.rest());
+    pair.finish(typed, result(typed));
+    assertTrue(pair.settled());
+
+    Task learning = pair.rest().orElseThrow();
+    assertEquals(Optional.empty(), learning.known());
+    assertEquals(Optional.empty(), pair.rest());
+    assertTrue(pair.settled());
+    pair.finish(learning, result(learning));
+    assertEquals(Optional.empty(), pair.rest());
+    assertFalse(pair.known().orElseThrow().result().provisional());
+  }
 }
