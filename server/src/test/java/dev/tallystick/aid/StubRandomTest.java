@@ -63,7 +63,9 @@ class StubRandomTest {
           Format.HTML,
           List.of("\n<p>The gate is <b>shut</b>.</p>\n", "\n<p>Bring 2 ropes &amp; an oar.</p>\n"),
           Format.XML,
-          List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n"));
+          List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n"),
+          Format.LATEX,
+          List.of("\\section{Ropes}\n\n", "Coil 3 \\emph{dry} ropes.\n\n", "Mind the step.\n\n"));
 
   private static String text(Random random, Format format) {
     List<String> more = MORE.getOrDefault(format, List.of());
