@@ -43,16 +43,12 @@ final class Reach {
     boolean blank = false;
     for (int i = from; i < to; i++) {
       char c = all[i];
-      if (c > ' ' && c < 0x7F) {
-        count++;
-        blank = false;
-      } else if (standsAlone(c)) {
-        boolean another = Blank.is(c);
-        count += blank && another ? 0 : 1;
-        blank = another;
-      } else {
+      if (c >= 0x7F && !standsAlone(c)) {
         return clusters(new String(all, from, to - from));
       }
+      boolean another = c <= ' ' || c >= 0x7F && Blank.is(c);
+      count += blank & another ? 0 : 1;
+      blank = another;
     }
     return count;
   }
