@@ -94,7 +94,7 @@ class StubRandomTest {
       Places places = new Places(pair);
       List<Integer> missing =
           IntStream.range(0, pair.source().segments().size())
-              .filter(i -> !places.matched(i) && random.nextInt(4) > 0)
+              .filter(i -> !places.matched(i) && random.nextInt(8) > 0)
               .boxed()
               .toList();
       List<LineEdit> edits = Stub.edits(pair, format, missing);
