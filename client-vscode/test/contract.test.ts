@@ -38,6 +38,7 @@ test("the server is told of texts, of new texts and of the settings of the proje
     { scheme: "untitled", language: "html" },
     { scheme: "untitled", language: "latex" },
     { scheme: "untitled", language: "markdown" },
+    { scheme: "untitled", language: "mdx" },
     { scheme: "untitled", language: "plaintex" },
     { scheme: "untitled", language: "plaintext" },
     { scheme: "untitled", language: "restructuredtext" },

@@ -29,6 +29,9 @@ final class Evidence implements Scorer {
   /** A link over the border of a block (nats). */
   private static final double BORDER_CROSSED = -2;
 
+  /** If it joins a heading with text, say, this as well (nats). */
+  private static final double KINDS_JOINED = -2;
+
   /** A link whose sides do not both open a block, or both go on with one (nats). */
   private static final double OPENING_DIFFERS = -1;
 
@@ -200,10 +203,19 @@ final class Evidence implements Scorer {
       worth +=
           clock.ends(Timeline.end(source.units[sEnd - 1]), Timeline.end(target.units[tEnd - 1]));
     }
-    if (source.crossesBlocks(s, sEnd)) {
-      worth += BORDER_CROSSED;
+    return worth + crossing(source, s, sEnd) + crossing(target, t, tEnd);
+  }
+
+  private static double crossing(Side side, int from, int to) {
+    if (!side.crossesBlocks(from, to)) {
+      return 0;
     }
-    return target.crossesBlocks(t, tEnd) ? worth + BORDER_CROSSED : worth;
+    for (int i = from + 1; i < to; i++) {
+      if (side.units[i].kind() != side.units[from].kind()) {
+        return BORDER_CROSSED + KINDS_JOINED;
+      }
+    }
+    return BORDER_CROSSED;
   }
 
   /**

@@ -64,7 +64,9 @@ class StubRandomTest {
           Format.HTML,
           List.of("\n<p>The gate is <b>shut</b>.</p>\n", "\n<p>Bring 2 ropes &amp; an oar.</p>\n"),
           Format.XML,
-          List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n"));
+          List.of("<section>\n", "<para>", "</para>\n", "<para>Mind the <b>step</b>.</para>\n"),
+          Format.LATEX,
+          List.of("\\section{Ropes}\n\n", "Coil 3 \\emph{dry} ropes.\n\n", "Mind the step.\n\n"));
 
   private static String text(Random random, Format format) {
     List<String> more = MORE.getOrDefault(format, List.of());
@@ -97,7 +99,7 @@ class StubRandomTest {
       Places places = new Places(pair);
       List<Integer> missing =
           IntStream.range(0, pair.source().segments().size())
-              .filter(i -> !places.matched(i) && random.nextInt(4) > 0)
+              .filter(i -> !places.matched(i) && random.nextInt(8) > 0)
               .boxed()
               .toList();
       List<LineEdit> edits = Stub.edits(pair, format, missing);
