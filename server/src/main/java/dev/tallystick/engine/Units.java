@@ -111,10 +111,25 @@ final class Units {
     if (trust >= NUMBER || !Character.isLetter(word.codePointAt(0)) || trust == DENSE) {
       return new Unit.Word(key(word), trust);
     }
-    int letters = word.codePointCount(0, word.length());
-    String stem = letters <= STEM ? word : word.substring(0, word.offsetByCodePoints(0, STEM));
-    long root = letters < ROOT ? 0 : key(word.substring(0, word.offsetByCodePoints(0, ROOT)));
-    return new Unit.Word(key(word), key(stem), root, trust);
+    long stem = key(word.substring(0, behind(word, STEM)));
+    boolean longEnough = behind(word, ROOT - 1) < word.length();
+    long root = longEnough ? key(word.substring(0, behind(word, ROOT))) : 0;
+    return new Unit.Word(key(word), stem, root, trust);
+  }
+
+  /** Offset behind so many letters of a word and the marks on the last. */
+  private static int behind(String word, int letters) {
+    int count = 0;
+    int at = 0;
+    while (at < word.length()) {
+      int c = word.codePointAt(at);
+      count += Character.isLetterOrDigit(c) ? 1 : 0;
+      if (count > letters) {
+        return at;
+      }
+      at += Character.charCount(c);
+    }
+    return at;
   }
 
   private static int letters(String prose) {

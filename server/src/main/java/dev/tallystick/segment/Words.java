@@ -80,6 +80,10 @@ public final class Words {
     if (c < 0x80) {
       return c >= 'a' && c <= 'z' || c >= 'A' && c <= 'Z' || c >= '0' && c <= '9';
     }
-    return Character.isLetterOrDigit(c) || Character.getType(c) == Character.NON_SPACING_MARK;
+    if (Character.isLetterOrDigit(c)) {
+      return true;
+    }
+    int type = Character.getType(c); // the vowels of many scripts are marks
+    return type == Character.NON_SPACING_MARK || type == Character.COMBINING_SPACING_MARK;
   }
 }

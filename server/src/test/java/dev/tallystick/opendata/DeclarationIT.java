@@ -30,7 +30,7 @@ class DeclarationIT {
   private final Declaration english = Declaration.of("eng", "en", Set.of());
 
   /**
-   * Measured: 0.994 over all languages; 0.933 in the script that comes off worst, Malayalam. One
+   * Measured: 0.997 over all languages; 0.933 in the script that comes off worst, Malayalam. One
    * article of 30 that begins wrongly costs 0.03. The floors let a script that only one language
    * here writes lose one more, and one language in two lose one.
    */
@@ -43,14 +43,16 @@ class DeclarationIT {
 
   /**
    * A link with the beginning of an article that the translation lacks counts as wrong. Measured:
-   * 0.865 over all, 0.586 in the script that comes off worst, that of the Maldives: 62 sentences
-   * with hardly a word in common, a third of them split or merged, leave much to chance.
+   * 0.935 over all, 0.48 in the script that comes off worst, Malayalam, and 0.59 in Hausa: 66
+   * sentences with hardly a word in common leave much to chance, and words that few sentences teach
+   * may teach the wrong way through them. Without words that are learnt it was 0.865 over all, and
+   * 0.59 in the script that came off worst.
    */
   @Test
   void articlesThatTheTranslationLacksMisleadFewOthers() {
     Scores scores = scores(GAPS);
     scores.print("4 articles left out");
-    scores.assertAtLeast(0.84, 0.5);
+    scores.assertAtLeast(0.92, 0.45);
   }
 
   /** The measure itself: right throughout, and wrong throughout. */

@@ -106,7 +106,7 @@ class PublishedDeclarationIT {
   }
 
   private static int[] sentences(List<Unit> units) {
-    return units.stream().mapToInt(Unit::length).toArray();
+    return units.stream().mapToInt(Unit::codePoints).toArray();
   }
 
   /** Lengths of paragraphs, a blank between sentences. */
@@ -115,9 +115,9 @@ class PublishedDeclarationIT {
     for (Unit unit : units) {
       int last = lengths.size() - 1;
       if (unit.opens()) {
-        lengths.add(unit.length());
+        lengths.add(unit.codePoints());
       } else {
-        lengths.set(last, lengths.get(last) + 1 + unit.length());
+        lengths.set(last, lengths.get(last) + 1 + unit.codePoints());
       }
     }
     return lengths.stream().mapToInt(Integer::intValue).toArray();
