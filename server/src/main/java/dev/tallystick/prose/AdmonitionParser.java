@@ -2,11 +2,8 @@ package dev.tallystick.prose;
 
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import org.commonmark.node.Block;
 import org.commonmark.node.CustomBlock;
-import org.commonmark.parser.block.AbstractBlockParser;
 import org.commonmark.parser.block.AbstractBlockParserFactory;
-import org.commonmark.parser.block.BlockContinue;
 import org.commonmark.parser.block.BlockParserFactory;
 import org.commonmark.parser.block.BlockStart;
 import org.commonmark.parser.block.MatchedBlockParser;
@@ -16,14 +13,15 @@ import org.commonmark.parser.block.ParserState;
  * An admonition with a title between quotation marks and an indented body, as Python-Markdown has
  * them; also one that folds, and a tab.
  */
-final class AdmonitionParser extends AbstractBlockParser {
+final class AdmonitionParser extends IndentedParser {
   private static final Pattern NOTE =
       Pattern.compile(
           "(?:!!!|\\?\\?\\?\\+?)[ \\t]++[\\w-][\\w \\t-]*+(?:\"(.*)\"[ \\t]*+)?"
               + "|===[!+]?[ \\t]++\"(.*)\"[ \\t]*+");
-  private static final int INDENT = 4;
 
-  private final Admonition admonition = new Admonition();
+  private AdmonitionParser() {
+    super(new Admonition());
+  }
 
   /** The title and the body. */
   static final class Admonition extends CustomBlock {}
@@ -45,30 +43,5 @@ final class AdmonitionParser extends AbstractBlockParser {
                 .atIndex(from);
       }
     };
-  }
-
-  @Override
-  public Block getBlock() {
-    return admonition;
-  }
-
-  @Override
-  public boolean isContainer() {
-    return true;
-  }
-
-  @Override
-  public boolean canContain(Block child) {
-    return true;
-  }
-
-  @Override
-  public BlockContinue tryContinue(ParserState state) {
-    if (state.isBlank()) {
-      return BlockContinue.atIndex(state.getNextNonSpaceIndex());
-    }
-    return state.getIndent() >= INDENT
-        ? BlockContinue.atColumn(state.getColumn() + INDENT)
-        : BlockContinue.none();
   }
 }

@@ -2,22 +2,20 @@ package dev.tallystick.prose;
 
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import org.commonmark.node.Block;
 import org.commonmark.node.CustomBlock;
-import org.commonmark.parser.block.AbstractBlockParser;
 import org.commonmark.parser.block.AbstractBlockParserFactory;
-import org.commonmark.parser.block.BlockContinue;
 import org.commonmark.parser.block.BlockParserFactory;
 import org.commonmark.parser.block.BlockStart;
 import org.commonmark.parser.block.MatchedBlockParser;
 import org.commonmark.parser.block.ParserState;
 
 /** The text of a footnote as GitHub has them: behind its label, further paragraphs indented. */
-final class FootnoteParser extends AbstractBlockParser {
+final class FootnoteParser extends IndentedParser {
   private static final Pattern LABEL = Pattern.compile("\\[\\^[^\\[\\]\\s]++]:[ \\t]*+");
-  private static final int INDENT = 4;
 
-  private final Footnote footnote = new Footnote();
+  private FootnoteParser() {
+    super(new Footnote());
+  }
 
   /** What stands below the label. */
   static final class Footnote extends CustomBlock {}
@@ -33,30 +31,5 @@ final class FootnoteParser extends AbstractBlockParser {
             : BlockStart.none();
       }
     };
-  }
-
-  @Override
-  public Block getBlock() {
-    return footnote;
-  }
-
-  @Override
-  public boolean isContainer() {
-    return true;
-  }
-
-  @Override
-  public boolean canContain(Block child) {
-    return true;
-  }
-
-  @Override
-  public BlockContinue tryContinue(ParserState state) {
-    if (state.isBlank()) {
-      return BlockContinue.atIndex(state.getNextNonSpaceIndex());
-    }
-    return state.getIndent() >= INDENT
-        ? BlockContinue.atColumn(state.getColumn() + INDENT)
-        : BlockContinue.none();
   }
 }
